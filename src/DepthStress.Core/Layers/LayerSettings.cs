@@ -1,0 +1,10 @@
+using DepthStress.Core.Diagnostics;
+
+namespace DepthStress.Core.Layers;
+
+/// <summary>How the profile is cut into layers: one per zone, split where it would be thicker than allowed.</summary>
+public sealed record LayerSettings
+{
+    /// <summary>The greatest true vertical thickness of a layer, m; not set means whole zones.</summary>
+    public Setting<double> MaxThickness { get; init; }
+}

@@ -1,0 +1,53 @@
+using static DepthStress.Core.Quantities.Dimension;
+
+namespace DepthStress.Core.Logs;
+
+/// <summary>
+/// The role table. Mnemonics are those in common use in the trade; credible medians are wide (common practice) and serve
+/// only to catch a unit that cannot be right.
+/// </summary>
+public static class CurveRoles
+{
+    /// <summary>Every role, in the order results list them.</summary>
+    public static IReadOnlyList<CurveRole> All { get; } =
+    [
+        new("compressional", "compressional slowness or velocity", Property.Vp, [Slowness, Velocity], 1400, 7500,
+            "DTC", "DTCO", "DT", "AC", "DTP", "DT4P", "DTL", "VP"),
+        new("shear", "shear slowness or velocity", Property.Vs, [Slowness, Velocity], 150, 4500,
+            "DTS", "DTSM", "DTSH", "DT4S", "DTXX", "VS"),
+        new("density", "bulk density", Property.Density, [Density], 1300, 3300,
+            "RHOB", "RHOZ", "DEN", "ZDEN", "ROBB", "RHO"),
+        new("gamma_ray", "gamma ray", Property.GammaRay, [GammaRay], 5, 600,
+            "GR", "SGR", "CGR", "GRC", "GAM", "ECGR"),
+        new("caliper", "hole diameter", Property.Caliper, [Length], 0.05, 1.5,
+            "CALI", "CAL", "HCAL", "CALX", "C1"),
+        new("bit_size", "bit diameter", Property.BitSize, [Length], 0.05, 1.5,
+            "BS", "BIT", "BITSIZE"),
+        new("density_correction", "density correction", Property.DensityCorrection, [Density], -500, 500,
+            "DRHO", "HDRA", "ZCOR", "DCOR"),
+        new("neutron", "neutron porosity", Property.NeutronPorosity, [Fraction], -0.15, 0.8,
+            "NPHI", "TNPH", "NPOR", "CNC", "NEU"),
+        new("photoelectric", "photoelectric factor", Property.Photoelectric, [Photoelectric], 0.5, 10,
+            "PEF", "PE", "PEFZ", "PDPE"),
+        new("deep_resistivity", "deep resistivity", Property.DeepResistivity, [Resistivity], 0.02, 20000,
+            "RDEP", "RT", "ILD", "LLD", "RD", "RESD", "AT90"),
+        new("temperature", "formation temperature", Property.Temperature, [Temperature], 250, 600,
+            "TEMP", "BHT", "FTEMP"),
+        new("porosity", "porosity", Property.Porosity, [Fraction], 0, 0.7,
+            "PHIT", "PHIE", "PHI", "POR"),
+        new("shale_volume", "shale volume", Property.ShaleVolume, [Fraction], 0, 1,
+            "VSH", "VSHALE", "VCL"),
+        new("facies", "facies code", Property.Facies, [None], double.NegativeInfinity, double.PositiveInfinity,
+            "FACIES", "LITHO", "LITHOLOGY"),
+    ];
+
+    /// <summary>Column names for measured depth (common practice).</summary>
+    public static IReadOnlyList<string> DepthMnemonics { get; } =
+        ["DEPT", "DEPTH", "MD", "DEPTH_MD", "MEASURED_DEPTH", "TDEP", "DEPT_MD"];
+
+    /// <summary>Finds a role by its name in the well file, or null.</summary>
+    public static CurveRole? Find(string id) => All.FirstOrDefault(r => r.Id == id);
+
+    /// <summary>Finds a role by a property, or null when the property is never read from a file.</summary>
+    public static CurveRole? Of(Property property) => All.FirstOrDefault(r => r.Property == property);
+}

@@ -1,0 +1,107 @@
+namespace DepthStress.Core.Logs;
+
+/// <summary>Everything the program knows per sample, as read or as computed; the index of <see cref="PropertyTable"/>.</summary>
+public enum Property
+{
+    /// <summary>Depth along the hole below the datum, m.</summary>
+    MeasuredDepth,
+
+    /// <summary>Vertical depth below the datum, m.</summary>
+    TrueVerticalDepth,
+
+    /// <summary>Angle between the hole and the vertical, rad.</summary>
+    Inclination,
+
+    /// <summary>Compressional velocity, m/s.</summary>
+    Vp,
+
+    /// <summary>Shear velocity, m/s.</summary>
+    Vs,
+
+    /// <summary>Bulk density, kg/m3.</summary>
+    Density,
+
+    /// <summary>Natural gamma radiation, gAPI.</summary>
+    GammaRay,
+
+    /// <summary>Hole diameter, m.</summary>
+    Caliper,
+
+    /// <summary>Bit diameter, m.</summary>
+    BitSize,
+
+    /// <summary>Density correction, kg/m3.</summary>
+    DensityCorrection,
+
+    /// <summary>Neutron porosity, v/v.</summary>
+    NeutronPorosity,
+
+    /// <summary>Photoelectric factor, b/e.</summary>
+    Photoelectric,
+
+    /// <summary>Deep resistivity, ohm.m.</summary>
+    DeepResistivity,
+
+    /// <summary>Formation temperature, K.</summary>
+    Temperature,
+
+    /// <summary>Facies code, a number without a unit.</summary>
+    Facies,
+
+    /// <summary>Gamma-ray index: 0 at the clean line, 1 at the shale line.</summary>
+    GammaRayIndex,
+
+    /// <summary>Shale volume, v/v.</summary>
+    ShaleVolume,
+
+    /// <summary>Porosity, v/v.</summary>
+    Porosity,
+
+    /// <summary>Dynamic Young's modulus, Pa.</summary>
+    YoungsDynamic,
+
+    /// <summary>Dynamic Poisson's ratio.</summary>
+    PoissonDynamic,
+
+    /// <summary>Static Young's modulus, Pa.</summary>
+    YoungsStatic,
+
+    /// <summary>Static Poisson's ratio.</summary>
+    PoissonStatic,
+
+    /// <summary>Biot's coefficient.</summary>
+    Biot,
+
+    /// <summary>Unconfined compressive strength, Pa.</summary>
+    Ucs,
+
+    /// <summary>Angle of internal friction, rad.</summary>
+    FrictionAngle,
+
+    /// <summary>Tensile strength, Pa.</summary>
+    TensileStrength,
+
+    /// <summary>Vertical total stress, Pa.</summary>
+    VerticalStress,
+
+    /// <summary>Pore pressure, Pa.</summary>
+    PorePressure,
+
+    /// <summary>Least horizontal total stress, Pa.</summary>
+    MinHorizontalStress,
+
+    /// <summary>Greatest horizontal total stress, Pa.</summary>
+    MaxHorizontalStress,
+
+    /// <summary>Compressional slowness, s/m; derived from <see cref="Vp"/>.</summary>
+    CompressionalSlowness,
+
+    /// <summary>Shear slowness, s/m; derived from <see cref="Vs"/>.</summary>
+    ShearSlowness,
+
+    /// <summary>Parameter: density of the rock's matrix, kg/m3.</summary>
+    MatrixDensity,
+
+    /// <summary>Parameter: density of the fluid in the pores the density tool sees, kg/m3.</summary>
+    PoreFluidDensity,
+}

@@ -1,0 +1,96 @@
+using DepthStress.Core.Conditioning;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Lithology;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Rock;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>
+/// The ordered stages from logs to stresses: depth, impossible samples, shale and lithology, rock, overburden, pore
+/// pressure, horizontal stress. One code path for every kind of run.
+/// </summary>
+public static class Chain
+{
+    /// <summary>Runs every stage.</summary>
+    /// <param name="setup">The well's setup, already checked.</param>
+    /// <param name="logs">The logs in SI.</param>
+    /// <param name="diagnostics">Gets what makes the input unusable.</param>
+    /// <returns>The model, or null when the input cannot be used; the reason is then among the diagnostics.</returns>
+    public static EarthModel? Run(WellSetup setup, LogTable logs, DiagnosticBag diagnostics)
+    {
+        ArgumentNullException.ThrowIfNull(setup);
+        ArgumentNullException.ThrowIfNull(logs);
+        ArgumentNullException.ThrowIfNull(diagnostics);
+        var findings = new List<Finding>();
+        var uses = new List<LawUse>();
+
+        (logs, var removals) = ImpossibleSamples.Remove(logs);
+        foreach (var removal in removals)
+        {
+            if (Finding.About(Severity.Warning, $"{removal.Reason}: taken out", logs.Depths, removal.Samples) is { } finding) findings.Add(finding);
+        }
+
+        var table = Adopt(logs);
+        var usable = DepthStage.Apply(setup, table, findings);
+        var zones = new short[logs.Count];
+        var lithologies = new short[logs.Count];
+        ZoneIndex.Fill(setup, logs.Depths, zones);
+        Array.Fill(lithologies, LithologyIndex.None);
+        var runs = SettingsRun.Resolve(setup, zones, lithologies);
+        ShaleStage.Apply(table, runs, uses, findings);
+        if (setup.Lithologies.Count > 0)
+        {
+            LithologyIndex.Fill([.. setup.Lithologies.Select(l => l.Rule)], table, lithologies);
+            runs = SettingsRun.Resolve(setup, zones, lithologies);
+        }
+
+        if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings) is not { } densityOrigins) return null;
+        PressureStage.PorePressure(setup, table, runs);
+        RockStage(table, runs, uses);
+        StressStage.Apply(table, runs);
+
+        var model = new EarthModel
+        {
+            Setup = setup,
+            Logs = logs,
+            Values = table,
+            Usable = usable,
+            Zones = zones,
+            Lithologies = lithologies,
+            Runs = runs,
+            DensityOrigins = densityOrigins,
+            StressBasis = StressStage.Basis(logs, densityOrigins, table),
+            LawUses = uses,
+            Findings = findings,
+        };
+        return model with { Findings = FindingRules.Sort(findings.Concat(FindingRules.All.SelectMany(rule => rule(model)))) };
+    }
+
+    private static PropertyTable Adopt(LogTable logs)
+    {
+        var table = new PropertyTable(logs.Count);
+        table.Adopt(Property.MeasuredDepth, logs.Depths);
+        foreach (var curve in logs.Curves)
+        {
+            // Stages write shale volume and porosity; the logged values stay whole in the log table.
+            var written = curve.Role.Property is Property.ShaleVolume or Property.Porosity;
+            table.Adopt(curve.Role.Property, written ? (double[])curve.Values.Clone() : curve.Values);
+        }
+
+        return table;
+    }
+
+    private static void RockStage(PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses)
+    {
+        if (table.Has(Property.Vp) && table.Has(Property.Vs))
+        {
+            DynamicModuli.Fill(
+                table.Read(Property.Vp), table.Read(Property.Vs), table.Read(Property.Density),
+                table.Write(Property.YoungsDynamic), table.Write(Property.PoissonDynamic));
+        }
+
+        LawColumns.Derive(table, runs);
+        foreach (var slot in LawSlots.Rock) LawStage.Apply(slot, table, runs, uses);
+    }
+}

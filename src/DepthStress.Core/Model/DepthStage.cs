@@ -1,0 +1,44 @@
+using DepthStress.Core.Depth;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Turns measured depths into vertical ones and decides which samples enter the vertical integrals.</summary>
+internal static class DepthStage
+{
+    private static readonly double SteepestUsable = Units.Degree.ToSi(80);
+
+    /// <summary>Fills the depth columns and gives the usable samples.</summary>
+    public static bool[] Apply(WellSetup setup, PropertyTable table, List<Finding> findings)
+    {
+        var md = table.Read(Property.MeasuredDepth);
+        var tvd = table.Write(Property.TrueVerticalDepth);
+        var inclination = table.Write(Property.Inclination);
+        setup.Trajectory.Fill(md, tvd, inclination);
+
+        var usable = new bool[table.Count];
+        VerticalProgress.Mask(tvd, inclination, SteepestUsable, usable);
+        var left = new bool[table.Count];
+        var above = new bool[table.Count];
+        var beyond = new bool[table.Count];
+        for (var i = 0; i < usable.Length; i++)
+        {
+            left[i] = !usable[i];
+            above[i] = tvd[i] < setup.Frame.SolidTopTvd;
+            usable[i] &= !above[i];
+            beyond[i] = md[i] > setup.Trajectory.LastStation;
+        }
+
+        Add(findings, Severity.Warning, $"hole steeper than 80 deg or turning upwards: left out of the overburden, trends and layers", md, left);
+        Add(findings, Severity.Note, $"logs above the ground or mudline: left out", md, above);
+        Add(findings, Severity.Warning, $"logs below the last survey station at {Quantity.Length(setup.Trajectory.LastStation)} measured depth: the hole is taken to go straight on", md, beyond);
+        return usable;
+    }
+
+    private static void Add(List<Finding> findings, Severity severity, FormattableString text, ReadOnlySpan<double> md, bool[] marks)
+    {
+        if (Finding.About(severity, text, md, marks) is { } finding) findings.Add(finding);
+    }
+}

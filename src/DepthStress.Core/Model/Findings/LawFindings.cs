@@ -1,0 +1,39 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Where laws did not serve, or served beyond the range they were fitted in.</summary>
+internal static class LawFindings
+{
+    /// <summary>Looks at how each law served, all zones together.</summary>
+    public static IEnumerable<Finding> Of(EarthModel model)
+    {
+        foreach (var uses in model.LawUses.GroupBy(u => (u.Slot, u.Law)))
+        {
+            var (slot, law) = uses.Key;
+            var total = uses.Aggregate(default(LawOutcome), (sum, use) => sum + use.Outcome);
+            if (total.OutsideDomain > 0)
+            {
+                yield return new Finding(
+                    Severity.Warning, $"{slot.Key}: {law.Id} has no meaning for these samples, the result is missing", total.OutsideDomain, []);
+            }
+
+            if (total.OutsideRange > 0)
+            {
+                yield return new Finding(
+                    Severity.Note, $"{slot.Key}: {law.Id} was used beyond the range it was fitted in", total.OutsideRange, []);
+            }
+
+            foreach (var input in law.Inputs)
+            {
+                if (LawColumns.Parameter(input.Property, model.Runs[0].Settings) is not null || model.Values.Has(input.Property)) continue;
+                yield return Finding.General(
+                    Severity.Warning, $"{slot.Key}: {law.Id} needs {Name(input.Property)}, which is not there; the result is missing");
+            }
+        }
+    }
+
+    private static string Name(Property property) => CurveRoles.Of(property)?.Title ?? property.ToString();
+}

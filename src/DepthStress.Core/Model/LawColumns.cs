@@ -1,0 +1,50 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Logs;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Brings the columns and parameters that a law needs.</summary>
+internal static class LawColumns
+{
+    private static readonly double[] Missing = [double.NaN];
+
+    /// <summary>The inputs of a law for one run of samples.</summary>
+    public static LawInputs For(Law law, PropertyTable table, SettingsRun run)
+    {
+        var inputs = default(LawInputs);
+        foreach (var input in law.Inputs) inputs.Add(Column(input.Property, table, run));
+        return inputs;
+    }
+
+    /// <summary>Makes the slowness columns that a law of these runs asks for.</summary>
+    public static void Derive(PropertyTable table, IReadOnlyList<SettingsRun> runs)
+    {
+        var wanted = runs.Select(r => r.Settings).Distinct()
+            .SelectMany(s => LawSlots.All.Select(slot => slot.Choice(s)).Where(c => c.IsSet))
+            .SelectMany(c => c.Value.Inputs).Select(i => i.Property).ToHashSet();
+        Invert(table, Property.Vp, Property.CompressionalSlowness, wanted);
+        Invert(table, Property.Vs, Property.ShearSlowness, wanted);
+    }
+
+    /// <summary>The settings that stand for a parameter, or null when the property is a column.</summary>
+    public static double? Parameter(Property property, StageSettings settings) => property switch
+    {
+        Property.MatrixDensity => settings.Porosity.MatrixDensity is { IsSet: true } s ? s.Value : double.NaN,
+        Property.PoreFluidDensity => settings.Porosity.FluidDensity is { IsSet: true } s ? s.Value : double.NaN,
+        _ => null,
+    };
+
+    private static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
+    {
+        if (Parameter(property, run.Settings) is { } value) return new double[] { value };
+        return table.Has(property) ? table.Read(property).Slice(run.Start, run.Length) : Missing;
+    }
+
+    private static void Invert(PropertyTable table, Property velocity, Property slowness, HashSet<Property> wanted)
+    {
+        if (!wanted.Contains(slowness) || !table.Has(velocity)) return;
+        var from = table.Read(velocity);
+        var to = table.Write(slowness);
+        for (var i = 0; i < to.Length; i++) to[i] = 1 / from[i];
+    }
+}

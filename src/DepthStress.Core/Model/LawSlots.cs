@@ -1,0 +1,34 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>A place in the settings where a law is chosen.</summary>
+/// <param name="Property">What the law gives.</param>
+/// <param name="Key">The key in the well file.</param>
+/// <param name="Required">True when the stress profile cannot do without it.</param>
+/// <param name="Choice">Reads the choice from the settings.</param>
+public sealed record LawSlot(Property Property, string Key, bool Required, Func<StageSettings, Setting<Law>> Choice);
+
+/// <summary>Every place where a law is chosen, in the order in which the chain applies them.</summary>
+public static class LawSlots
+{
+    /// <summary>Shale volume, which the lithology rules need before everything else.</summary>
+    public static LawSlot ShaleVolume { get; } = new(Property.ShaleVolume, "[shale] volume", false, s => s.Shale.Volume);
+
+    /// <summary>The rock properties.</summary>
+    public static IReadOnlyList<LawSlot> Rock { get; } =
+    [
+        new(Property.Porosity, "[porosity] porosity", false, s => s.Porosity.Porosity),
+        new(Property.YoungsStatic, "[moduli] static_youngs", true, s => s.Moduli.StaticYoungs),
+        new(Property.PoissonStatic, "[moduli] static_poisson", true, s => s.Moduli.StaticPoisson),
+        new(Property.Ucs, "[strength] ucs", false, s => s.Strength.Ucs),
+        new(Property.FrictionAngle, "[strength] friction_angle", false, s => s.Strength.FrictionAngle),
+        new(Property.TensileStrength, "[strength] tensile_strength", false, s => s.Strength.TensileStrength),
+        new(Property.Biot, "[biot] coefficient", true, s => s.Biot.Coefficient),
+    ];
+
+    /// <summary>All of them.</summary>
+    public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, .. Rock];
+}

@@ -1,0 +1,28 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Lithology;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Rock;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>The method catalogue: every published relation the program knows, once, put together from the stages' own entries.</summary>
+public static class MethodCatalogue
+{
+    /// <summary>Every entry, grouped by what it gives.</summary>
+    public static IReadOnlyList<Law> All { get; } =
+    [
+        .. ShaleMethods.All,
+        .. PorosityMethods.All,
+        .. StaticYoungsMethods.All,
+        .. StaticPoissonMethods.All,
+        .. StrengthMethods.All,
+        .. FrictionMethods.All,
+        .. BiotMethods.All,
+    ];
+
+    /// <summary>The entry of an id, or null.</summary>
+    public static Law? Find(string id) => All.FirstOrDefault(l => l.Id == id);
+
+    /// <summary>The entries that give a property.</summary>
+    public static IEnumerable<Law> For(Property property) => All.Where(l => l.Predicts == property);
+}

@@ -1,0 +1,88 @@
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Overburden and pore pressure.</summary>
+internal static class PressureStage
+{
+    /// <summary>Fills vertical stress and the density it used; gives the density's origins, or null when there is none.</summary>
+    /// <param name="setup">The setup.</param>
+    /// <param name="density">The density log, or null.</param>
+    /// <param name="table">The columns.</param>
+    /// <param name="usable">Samples that enter the integral.</param>
+    /// <param name="diagnostics">Gets errors that name unfilled intervals.</param>
+    /// <param name="findings">Gets what rests on assumptions.</param>
+    public static OriginTrack? Overburden(
+        WellSetup setup, Curve? density, PropertyTable table, bool[] usable, DiagnosticBag diagnostics, List<Finding> findings)
+    {
+        var settings = setup.Overburden;
+        var tvd = table.Read(Property.TrueVerticalDepth);
+        var problems = new List<FormattableString>();
+        if (density is null || DensityProfile.Prepare(density, tvd, usable, settings, problems) is not { } profile)
+        {
+            diagnostics.Error(SourcePosition.None, "no bulk density at any depth, expected a density curve: the overburden needs it");
+            return null;
+        }
+
+        var frame = setup.Frame;
+        var firstDepth = tvd[profile.First];
+        if (firstDepth > frame.SolidTopTvd && !settings.AboveLog.IsSet)
+        {
+            problems.Add($"density is not logged from {Quantity.Length(frame.SolidTopTvd)} (ground or mudline) to {Quantity.Length(firstDepth)} true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density");
+        }
+
+        foreach (var problem in problems) diagnostics.Error(settings.Gaps.Source.Position, UnitSystem.Metric.Show(problem));
+        if (problems.Count > 0) return null;
+
+        table.Adopt(Property.Density, profile.Values);
+        var mean = settings.AboveLog.IsSet ? settings.AboveLog.Value : profile.Values[profile.First];
+        var carry = Pressure.Overburden.Start(
+            frame.WaterDepth ?? 0, settings.WaterDensity.Value, frame.SolidTopTvd, mean, firstDepth, profile.Values[profile.First]);
+        if (firstDepth > frame.SolidTopTvd)
+        {
+            findings.Add(Finding.General(
+                Severity.Note,
+                $"the vertical stress of {Quantity.Pressure(carry.Stress)} at {Quantity.Length(firstDepth)} true vertical depth rests on an assumed mean density of {new Quantity(mean, Dimension.Density)} above the log"));
+        }
+
+        Pressure.Overburden.Scan(tvd, Used(profile, usable), table.Write(Property.VerticalStress), ref carry);
+        return profile.Origins;
+    }
+
+    /// <summary>Fills pore pressure, run by run.</summary>
+    public static void PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs)
+    {
+        var lines = new Dictionary<PorePressureSettings, PressureLine>();
+        var tvd = table.Read(Property.TrueVerticalDepth);
+        var pressure = table.Write(Property.PorePressure);
+        foreach (var run in runs)
+        {
+            var settings = run.Settings.PorePressure;
+            if (!settings.Method.IsSet) continue;
+            if (!lines.TryGetValue(settings, out var line))
+            {
+                line = PressureLine.Prepare(
+                    settings, setup.Frame, setup.Overburden.WaterDensity.Value, (depth, kind) => ZoneIndex.ToVertical(setup, depth, kind));
+                lines.Add(settings, line);
+            }
+
+            line.Fill(tvd.Slice(run.Start, run.Length), pressure.Slice(run.Start, run.Length));
+        }
+    }
+
+    /// <summary>The profile's density, missing where a sample stays out of the integral.</summary>
+    private static double[] Used(DensityProfile profile, bool[] usable)
+    {
+        if (Array.TrueForAll(usable, u => u)) return profile.Values;
+        var used = (double[])profile.Values.Clone();
+        for (var i = 0; i < used.Length; i++)
+        {
+            if (!usable[i]) used[i] = double.NaN;
+        }
+
+        return used;
+    }
+}

@@ -1,0 +1,47 @@
+using DepthStress.Core.Lithology;
+using DepthStress.Core.Pressure;
+using DepthStress.Core.Rock;
+using DepthStress.Core.Stress;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Everything that a zone or a lithology rule may decide for its samples.</summary>
+public sealed record StageSettings
+{
+    /// <summary>Shale volume.</summary>
+    public ShaleSettings Shale { get; init; } = new();
+
+    /// <summary>Porosity.</summary>
+    public PorositySettings Porosity { get; init; } = new();
+
+    /// <summary>Static elastic constants.</summary>
+    public ModuliSettings Moduli { get; init; } = new();
+
+    /// <summary>Strength.</summary>
+    public StrengthSettings Strength { get; init; } = new();
+
+    /// <summary>Biot's coefficient.</summary>
+    public BiotSettings Biot { get; init; } = new();
+
+    /// <summary>Pore pressure.</summary>
+    public PorePressureSettings PorePressure { get; init; } = new();
+
+    /// <summary>Horizontal stresses.</summary>
+    public HorizontalStressSettings HorizontalStress { get; init; } = new();
+
+    /// <summary>These settings where they were decided, else those below them.</summary>
+    public StageSettings Over(StageSettings below)
+    {
+        ArgumentNullException.ThrowIfNull(below);
+        return new StageSettings
+        {
+            Shale = Shale.Over(below.Shale),
+            Porosity = Porosity.Over(below.Porosity),
+            Moduli = Moduli.Over(below.Moduli),
+            Strength = Strength.Over(below.Strength),
+            Biot = Biot.Over(below.Biot),
+            PorePressure = PorePressure.Over(below.PorePressure),
+            HorizontalStress = HorizontalStress.Over(below.HorizontalStress),
+        };
+    }
+}

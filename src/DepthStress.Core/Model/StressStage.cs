@@ -1,0 +1,57 @@
+using DepthStress.Core.Logs;
+using DepthStress.Core.Stress;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Horizontal stresses and what they rest on.</summary>
+internal static class StressStage
+{
+    /// <summary>The log curves that a horizontal stress rests on.</summary>
+    private static readonly Property[] StressCurves = [Property.Vp, Property.Vs, Property.Density];
+
+    /// <summary>Fills the horizontal stresses, run by run; SHmax stays missing where no strain constrains it.</summary>
+    public static void Apply(PropertyTable table, IReadOnlyList<SettingsRun> runs)
+    {
+        var shmin = table.Write(Property.MinHorizontalStress);
+        var shmax = table.Write(Property.MaxHorizontalStress);
+        if (!table.Has(Property.YoungsStatic) || !table.Has(Property.PoissonStatic) || !table.Has(Property.Biot)) return;
+        foreach (var run in runs)
+        {
+            var (settings, start, n) = (run.Settings.HorizontalStress, run.Start, run.Length);
+            var strained = settings.StrainAlongShmin.IsSet && settings.StrainAlongShmax.IsSet;
+            StrainModel.Fill(
+                table.Read(Property.YoungsStatic).Slice(start, n),
+                table.Read(Property.PoissonStatic).Slice(start, n),
+                table.Read(Property.Biot).Slice(start, n),
+                table.Read(Property.VerticalStress).Slice(start, n),
+                table.Read(Property.PorePressure).Slice(start, n),
+                strained ? settings.StrainAlongShmin.Value : 0,
+                strained ? settings.StrainAlongShmax.Value : 0,
+                shmin.Slice(start, n),
+                shmax.Slice(start, n));
+            if (!strained) shmax.Slice(start, n).Fill(double.NaN);
+        }
+    }
+
+    /// <summary>The weakest origin of the curves each sample's stresses rest on; density alone where only Sv is there.</summary>
+    public static SampleOrigin[] Basis(LogTable logs, OriginTrack density, PropertyTable table)
+    {
+        var basis = new SampleOrigin[table.Count];
+        density.Weaken(basis);
+        var vertical = (SampleOrigin[])basis.Clone();
+        foreach (var property in StressCurves)
+        {
+            if (property != Property.Density) logs[property]?.Origins.Weaken(basis);
+        }
+
+        var sv = table.Read(Property.VerticalStress);
+        var shmin = table.Read(Property.MinHorizontalStress);
+        for (var i = 0; i < basis.Length; i++)
+        {
+            if (double.IsNaN(sv[i])) basis[i] = SampleOrigin.None;
+            else if (double.IsNaN(shmin[i])) basis[i] = vertical[i];
+        }
+
+        return basis;
+    }
+}

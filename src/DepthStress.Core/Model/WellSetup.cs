@@ -1,0 +1,36 @@
+using DepthStress.Core.Depth;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Pressure;
+
+namespace DepthStress.Core.Model;
+
+/// <summary>Everything the chain needs to know beside the logs, validated and in SI.</summary>
+public sealed record WellSetup
+{
+    /// <summary>The well file, for messages about what it lacks.</summary>
+    public SourcePosition Position { get; init; }
+
+    /// <summary>The well's name.</summary>
+    public required string Name { get; init; }
+
+    /// <summary>Where the surfaces lie.</summary>
+    public required DepthFrame Frame { get; init; }
+
+    /// <summary>The path of the hole.</summary>
+    public required Trajectory Trajectory { get; init; }
+
+    /// <summary>The zones from top to bottom; may be empty.</summary>
+    public IReadOnlyList<Zone> Zones { get; init; } = [];
+
+    /// <summary>The lithology rules; the first that holds decides.</summary>
+    public IReadOnlyList<LithologyChoice> Lithologies { get; init; } = [];
+
+    /// <summary>The well's settings, which zones and lithology rules may override.</summary>
+    public StageSettings Settings { get; init; } = new();
+
+    /// <summary>How the vertical stress is had where density is not logged.</summary>
+    public OverburdenSettings Overburden { get; init; } = new();
+
+    /// <summary>True when the user accepts methods whose coefficients were recalled, not read.</summary>
+    public bool AcceptUnverified { get; init; }
+}

@@ -1,0 +1,32 @@
+using DepthStress.Core.Diagnostics;
+
+namespace DepthStress.Core.Stress;
+
+/// <summary>The choices for the horizontal stresses.</summary>
+public sealed record HorizontalStressSettings
+{
+    /// <summary>Tectonic strain along the least horizontal stress, compression positive; not set means none and no SHmax.</summary>
+    public Setting<double> StrainAlongShmin { get; init; }
+
+    /// <summary>Tectonic strain along the greatest horizontal stress, compression positive.</summary>
+    public Setting<double> StrainAlongShmax { get; init; }
+
+    /// <summary>Azimuth of the greatest horizontal stress from north, rad.</summary>
+    public Setting<double> ShmaxAzimuth { get; init; }
+
+    /// <summary>Coefficient of friction of existing faults for the frictional limit; the default is common practice.</summary>
+    public Setting<double> FrictionCoefficient { get; init; } = Setting.Default(0.6);
+
+    /// <summary>These settings where they were decided, else those below them.</summary>
+    public HorizontalStressSettings Over(HorizontalStressSettings below)
+    {
+        ArgumentNullException.ThrowIfNull(below);
+        return new HorizontalStressSettings
+        {
+            StrainAlongShmin = StrainAlongShmin.Over(below.StrainAlongShmin),
+            StrainAlongShmax = StrainAlongShmax.Over(below.StrainAlongShmax),
+            ShmaxAzimuth = ShmaxAzimuth.Over(below.ShmaxAzimuth),
+            FrictionCoefficient = FrictionCoefficient.Over(below.FrictionCoefficient),
+        };
+    }
+}
