@@ -95,7 +95,8 @@ public class TrajectoryProperties
             var found = path.MeasuredDepthAt(tvd);
             Assert.True(found <= md + 1e-6); // where the hole is nearly level, rounding of depth weighs more along it
             Assert.Equal(tvd, path.At(found).TrueVerticalDepth, Rounding);
-            for (var k = 0; k < 200; k++) Assert.True(path.At(found * k / 200).TrueVerticalDepth < tvd + Rounding);
+            var start = Math.Min(found, 0) - 10; // a hole that climbs past the datum is at depths above it
+            for (var k = 0; k < 200; k++) Assert.True(path.At(start + ((found - start) * k / 200)).TrueVerticalDepth < tvd + Rounding);
         });
 
     /// <summary>A measured depth between the datum and 100 m below the last station.</summary>

@@ -74,6 +74,17 @@ public class TrajectoryReferenceTests
         Assert.Equal(636.619772, end.North, 5e-7);
     }
 
+    // Geometry: an arc of length L from vertical over the angle b ends L sin(b) / b down. Both sides of where the ratio factor
+    // turns into its series.
+    [Theory]
+    [InlineData(9.9e-5)]
+    [InlineData(1.01e-4)]
+    public void Gentle_arcs_keep_their_small_loss_of_depth(double dogleg)
+    {
+        var end = Path(new(0, 0, 0), new(1000, dogleg, 0)).At(1000);
+        Assert.Equal(1000 * Math.Sin(dogleg) / dogleg, end.TrueVerticalDepth, 1e-11); // the loss is 1.6e-6; rounding at 1000 m
+    }
+
     // Geometry: a level quarter circle from north to east.
     [Fact]
     public void A_level_turn_stays_level()
