@@ -5,7 +5,8 @@ public static class NearestName
 {
     /// <summary>
     /// Returns the candidate with the fewest single-letter edits, or null when none is within a third of the
-    /// typed name's length (at least two edits are always allowed). Case is ignored; ties go to the first candidate.
+    /// typed name's length (at least two edits are always allowed). A name with nothing in common with the typed
+    /// one is never near. Case is ignored; ties go to the first candidate.
     /// </summary>
     public static string? Find(string typed, IEnumerable<string> candidates)
     {
@@ -17,7 +18,7 @@ public static class NearestName
         foreach (var candidate in candidates)
         {
             var distance = Distance(typed, candidate, best);
-            if (distance >= best) continue;
+            if (distance >= Math.Min(best, Math.Max(typed.Length, candidate.Length))) continue;
             best = distance;
             nearest = candidate;
         }

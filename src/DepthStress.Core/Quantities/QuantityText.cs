@@ -24,35 +24,41 @@ public static class QuantityText
         var trimmed = text.Trim();
         var length = NumberLength(trimmed);
         var symbol = trimmed[length..].Trim();
+        var fitting = Units.Symbols(dimensions);
         if (length == 0 || !TryNumber(trimmed.AsSpan(0, length), out var value))
         {
-            problem = $"found \"{text}\", expected a number and a unit ({Units.Symbols(dimensions)})";
+            problem = $"found \"{text}\", expected a number{(fitting.Length == 0 ? "" : $" and a unit ({fitting})")}";
             return false;
         }
 
         if (symbol.StartsWith(','))
         {
-            problem = $"found a decimal comma in \"{text}\", expected a decimal point";
+            problem = $"found a comma in the number of \"{text}\", expected a decimal point and no group separators";
             return false;
         }
 
         if (symbol.Length == 0 && !dimensions.Contains(Dimension.None))
         {
-            problem = $"found \"{text}\" without a unit, expected one of {Units.Symbols(dimensions)}";
+            problem = $"found \"{text}\" without a unit, expected one of {fitting}";
             return false;
         }
 
-        if (Units.Find(symbol, dimensions) is { } fitting)
+        if (Units.Find(symbol, dimensions) is { } found)
         {
-            unit = fitting;
-            si = unit.ToSi(value);
-            problem = null;
+            var converted = found.ToSi(value);
+            if (!double.IsFinite(converted))
+            {
+                problem = $"found \"{text}\", expected a smaller number";
+                return false;
+            }
+
+            (si, unit, problem) = (converted, found, null);
             return true;
         }
 
         problem = Units.Find(symbol) is { } other
-            ? $"found \"{text}\", a {Name(other.Dimension)}; expected a {Names(dimensions)} in one of {Units.Symbols(dimensions)}"
-            : $"found the unknown unit \"{symbol}\" in \"{text}\", expected one of {Units.Symbols(dimensions)}";
+            ? $"found \"{text}\", {Article(Name(other.Dimension))}; expected {Article(Names(dimensions))}{(fitting.Length == 0 ? "" : $" in one of {fitting}")}"
+            : $"found the unknown unit \"{symbol}\" in \"{text}\", expected {(fitting.Length == 0 ? "no unit" : $"one of {fitting}")}";
         return false;
     }
 
@@ -81,6 +87,8 @@ public static class QuantityText
         Dimension.TemperatureGradient => "temperature gradient",
         _ => dimension.ToString().ToLowerInvariant(),
     };
+
+    private static string Article(string name) => name[0] is 'a' or 'e' or 'i' or 'o' ? $"an {name}" : $"a {name}";
 
     private static string Names(ReadOnlySpan<Dimension> dimensions)
     {

@@ -97,7 +97,7 @@ public static class Units
     public static readonly Unit BarPerMetre = new("bar/m", Dimension.PressureGradient, 1e5, "bar_m");
 
     /// <summary>Gamma-ray unit of the American Petroleum Institute.</summary>
-    public static readonly Unit GammaApi = new("gAPI", Dimension.GammaRay, 1, "gapi", 0, "api", "gapi", "gr api");
+    public static readonly Unit GammaApi = new("gAPI", Dimension.GammaRay, 1, "gapi", 0, "api", "gr api");
 
     /// <summary>Barn per electron.</summary>
     public static readonly Unit BarnPerElectron = new("b/e", Dimension.Photoelectric, 1, "b_e", 0, "barn/e", "b/elec");
@@ -139,7 +139,7 @@ public static class Units
     public static readonly Unit Radian = new("rad", Dimension.Angle, 1, "rad", 0, "radian", "radians");
 
     /// <summary>Millidarcy.</summary>
-    public static readonly Unit Millidarcy = new("mD", Dimension.Permeability, Constants.Millidarcy, "md", 0, "md");
+    public static readonly Unit Millidarcy = new("mD", Dimension.Permeability, Constants.Millidarcy, "md");
 
     /// <summary>Megapascal root metre.</summary>
     public static readonly Unit MegapascalRootMetre = new("MPa.m0.5", Dimension.Toughness, 1e6, "mpa_m05");
