@@ -1,0 +1,66 @@
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Core.Logs;
+
+/// <summary>Names and dimensions of the properties that laws connect.</summary>
+public static class PropertyNames
+{
+    /// <summary>
+    /// The properties in the order in which the chain knows them: a law may start from any that comes before its result.
+    /// </summary>
+    private static readonly (Property Property, string Name, string Title, Dimension Dimension)[] Known =
+    [
+        (Property.Vp, "vp", "compressional velocity", Quantities.Dimension.Velocity),
+        (Property.Vs, "vs", "shear velocity", Quantities.Dimension.Velocity),
+        (Property.Density, "density", "bulk density", Quantities.Dimension.Density),
+        (Property.GammaRay, "gamma_ray", "gamma ray", Quantities.Dimension.GammaRay),
+        (Property.NeutronPorosity, "neutron", "neutron porosity", Quantities.Dimension.Fraction),
+        (Property.DeepResistivity, "deep_resistivity", "deep resistivity", Quantities.Dimension.Resistivity),
+        (Property.CompressionalSlowness, "compressional_slowness", "compressional slowness", Quantities.Dimension.Slowness),
+        (Property.ShearSlowness, "shear_slowness", "shear slowness", Quantities.Dimension.Slowness),
+        (Property.GammaRayIndex, "gamma_ray_index", "gamma-ray index", Quantities.Dimension.Fraction),
+        (Property.ShaleVolume, "shale_volume", "shale volume", Quantities.Dimension.Fraction),
+        (Property.MatrixDensity, "matrix_density", "matrix density", Quantities.Dimension.Density),
+        (Property.PoreFluidDensity, "fluid_density", "pore fluid density", Quantities.Dimension.Density),
+        (Property.Porosity, "porosity", "porosity", Quantities.Dimension.Fraction),
+        (Property.YoungsDynamic, "youngs_dynamic", "dynamic Young's modulus", Quantities.Dimension.Pressure),
+        (Property.PoissonDynamic, "poisson_dynamic", "dynamic Poisson's ratio", Quantities.Dimension.None),
+        (Property.YoungsStatic, "youngs_static", "static Young's modulus", Quantities.Dimension.Pressure),
+        (Property.PoissonStatic, "poisson_static", "static Poisson's ratio", Quantities.Dimension.None),
+        (Property.Ucs, "ucs", "unconfined compressive strength", Quantities.Dimension.Pressure),
+        (Property.FrictionAngle, "friction_angle", "angle of internal friction", Quantities.Dimension.Angle),
+        (Property.TensileStrength, "tensile_strength", "tensile strength", Quantities.Dimension.Pressure),
+        (Property.Biot, "biot", "Biot's coefficient", Quantities.Dimension.None),
+    ];
+
+    /// <summary>The property's name in well files.</summary>
+    public static string Name(Property property) => Of(property).Name;
+
+    /// <summary>The property in plain words.</summary>
+    public static string Title(Property property) => Of(property).Title;
+
+    /// <summary>What the property measures.</summary>
+    public static Dimension Dimension(Property property) => Of(property).Dimension;
+
+    /// <summary>The properties that the chain knows before it computes this one.</summary>
+    public static IEnumerable<Property> LawInputsBefore(Property property) =>
+        Known.TakeWhile(k => k.Property != property).Select(k => k.Property);
+
+    /// <summary>What a user's own law for the property starts from when the well file does not say.</summary>
+    public static Property UsualInput(Property property) => property switch
+    {
+        Property.YoungsStatic => Property.YoungsDynamic,
+        Property.PoissonStatic => Property.PoissonDynamic,
+        Property.TensileStrength => Property.Ucs,
+        Property.Ucs => Property.YoungsStatic,
+        Property.ShaleVolume => Property.GammaRayIndex,
+        Property.Porosity => Property.NeutronPorosity,
+        Property.Biot => Property.Porosity,
+        _ => Property.Vp,
+    };
+
+    private static (Property Property, string Name, string Title, Dimension Dimension) Of(Property property) =>
+        Array.Find(Known, k => k.Property == property) is { Name: not null } known
+            ? known
+            : throw new ArgumentOutOfRangeException(nameof(property), property, "No law gives or takes it.");
+}

@@ -1,0 +1,192 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Depth;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Files.Setup;
+
+/// <summary>Declares every key of the well file, once; what a section does with the declaration is its own matter.</summary>
+internal static class Bindings
+{
+    private static readonly Interval FractionRange = new(0, 1);
+
+    private static readonly (string, DepthKind)[] DepthKinds =
+        [("md", DepthKind.Measured), ("tvd", DepthKind.TrueVertical), ("tvdss", DepthKind.TrueVerticalSubsea)];
+
+    private static readonly (string, DatumKind)[] Datums =
+        [("rotary table", DatumKind.RotaryTable), ("ground", DatumKind.Ground), ("sea level", DatumKind.SeaLevel)];
+
+    private static readonly (string, DepthReference)[] References =
+    [
+        ("rotary table", DepthReference.Datum), ("ground", DepthReference.Ground),
+        ("sea surface", DepthReference.SeaSurface), ("mudline", DepthReference.Mudline),
+    ];
+
+    private static readonly (string, NorthReference)[] Norths =
+        [("true", NorthReference.True), ("grid", NorthReference.Grid), ("magnetic", NorthReference.Magnetic)];
+
+    private static readonly (string, UnitSystem)[] UnitSystems = [("metric", UnitSystem.Metric), ("field", UnitSystem.Field)];
+
+    private static readonly (string, PorePressureMethod)[] PressureMethods =
+    [
+        ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
+    ];
+
+    private static readonly (string, DensityFill)[] GapFills =
+        [("none", new(DensityFillKind.None)), ("linear", new(DensityFillKind.Linear)), ("hold", new(DensityFillKind.Hold))];
+
+    private static readonly (string, DensityFill)[] BelowFills = [("none", new(DensityFillKind.None)), ("hold", new(DensityFillKind.Hold))];
+
+    /// <summary>The whole file.</summary>
+    public static WellFileSections All(ISection s, WellFileSections w)
+    {
+        var bound = w with
+        {
+            AcceptUnverified = s.Flag("accept_unverified", w.AcceptUnverified, "true allows methods whose coefficients were recalled, not read in their source"),
+            Well = s.Table("well", w.Well, Well, "the well and its reference levels"),
+            Logs = s.Table("logs", w.Logs, Logs, "the log files and what their columns are"),
+            Survey = s.Table("survey", w.Survey, Survey, "the path of the hole"),
+            Zones = s.Tables("zones", w.Zones, Zone, new(), "named intervals, from top to bottom; any settings section may be overridden inside a zone"),
+            Lithologies = s.Tables("lithology", w.Lithologies, Lithology, new(), "rules that choose settings by rock inside zones; the first that holds decides"),
+            Settings = StageBindings.All(s, w.Settings),
+            Overburden = s.Table("overburden", w.Overburden, Overburden, "vertical stress where density is not logged"),
+            Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
+            Output = s.Table("output", w.Output, Output, "how results are written"),
+        };
+        foreach (var key in (ReadOnlySpan<string>)["conditioning", "anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
+        return bound;
+    }
+
+    private static WellSection Well(ISection s, WellSection w) => w with
+    {
+        Name = s.Text("name", w.Name, "the well's name"),
+        Datum = s.Choice("datum", w.Datum, Datums, "what measured depth counts from"),
+        DatumElevation = s.Quantity("datum_elevation", w.DatumElevation, Sign.Any, Dimension.Length, "elevation of the datum above mean sea level"),
+        GroundElevation = s.Quantity("ground_elevation", w.GroundElevation, Sign.Any, Dimension.Length, "onshore: elevation of the ground above mean sea level"),
+        WaterDepth = s.Quantity("water_depth", w.WaterDepth, Sign.NotNegative, Dimension.Length, "offshore: depth of the sea"),
+        WaterTableDepth = s.Quantity("water_table_depth", w.WaterTableDepth, Sign.NotNegative, Dimension.Length, "onshore: depth of the water table below the ground"),
+    };
+
+    private static LogsSection Logs(ISection s, LogsSection l) => s.Table(
+        "curves",
+        l with { Files = s.Texts("files", l.Files, "the log files (CSV or LAS 2.0), relative to the well file") },
+        Curves,
+        "the column of each role; roles not named here are found by the usual mnemonics");
+
+    private static LogsSection Curves(ISection s, LogsSection l)
+    {
+        var depth = s.Tables("depth", l.Depth is null ? [] : [l.Depth], Source, new CurveSource(), "measured depth", "column");
+        return l with
+        {
+            Depth = depth.Count > 0 ? depth[0] : null,
+            Curves =
+            [
+                .. CurveRoles.All
+                    .Select(role => new CurveChoice(role.Id, s.Tables(
+                        role.Id, l.Curves.FirstOrDefault(c => c.Role == role.Id)?.Sources ?? [], Source, new CurveSource(), role.Title, "column")))
+                    .Where(choice => choice.Sources.Count > 0),
+            ],
+        };
+    }
+
+    private static CurveSource Source(ISection s, CurveSource c) => c with
+    {
+        Column = s.Text("column", c.Column, "name of the column"),
+        File = s.Text("file", c.File, "the file, when several have the column"),
+        Unit = s.Text("unit", c.Unit, "the unit, when the file states none or a wrong one"),
+        Missing = s.Numbers("missing", c.Missing, "further values that mean missing"),
+        Base = s.Quantity("base", c.Base, Sign.Any, Dimension.Length, "measured depth down to which this column is used"),
+        Position = s.Position,
+    };
+
+    private static SurveySection Survey(ISection s, SurveySection v) => v with
+    {
+        File = s.Text("file", v.File, "survey as CSV with measured depth, inclination and azimuth, relative to the well file"),
+        Vertical = s.Flag("vertical", v.Vertical, "true when the hole is vertical"),
+        North = s.Choice("north", v.North, Norths, "what azimuths count from"),
+    };
+
+    private static ZoneSection Zone(ISection s, ZoneSection z)
+    {
+        var name = s.Text("name", z.Name, "the zone's name");
+        var own = s.OwnedBy(SettingKind.Zone, name.Value ?? "");
+        return z with
+        {
+            Name = name,
+            Top = s.Quantity("top", z.Top, Sign.Any, Dimension.Length, "depth of the top"),
+            Base = s.Quantity("base", z.Base, Sign.Any, Dimension.Length, "depth of the base, when the next top does not end the zone"),
+            DepthKind = s.Choice("depth_kind", z.DepthKind, DepthKinds, "the kind of top and base: measured, true vertical, or true vertical below sea level"),
+            Overrides = StageBindings.All(own, z.Overrides),
+            Position = s.Position,
+        };
+    }
+
+    private static LithologySection Lithology(ISection s, LithologySection l)
+    {
+        var name = s.Text("name", l.Name, "the lithology's name");
+        var own = s.OwnedBy(SettingKind.Lithology, name.Value ?? "");
+        return l with
+        {
+            Name = name,
+            ShaleVolumeMin = s.Number("shale_volume_min", l.ShaleVolumeMin, FractionRange, "least shale volume"),
+            ShaleVolumeMax = s.Number("shale_volume_max", l.ShaleVolumeMax, FractionRange, "greatest shale volume"),
+            DensityMin = s.Quantity("density_min", l.DensityMin, Sign.Positive, Dimension.Density, "least bulk density"),
+            DensityMax = s.Quantity("density_max", l.DensityMax, Sign.Positive, Dimension.Density, "greatest bulk density"),
+            PhotoelectricMin = s.Quantity("photoelectric_min", l.PhotoelectricMin, Sign.NotNegative, Dimension.Photoelectric, "least photoelectric factor"),
+            PhotoelectricMax = s.Quantity("photoelectric_max", l.PhotoelectricMax, Sign.NotNegative, Dimension.Photoelectric, "greatest photoelectric factor"),
+            Facies = s.Numbers("facies", l.Facies, "values of the facies curve"),
+            Overrides = StageBindings.All(own, l.Overrides),
+            Position = s.Position,
+        };
+    }
+
+    private static OverburdenSettings Overburden(ISection s, OverburdenSettings o) => o with
+    {
+        AboveLog = s.Quantity("above_log", o.AboveLog, Sign.Positive, Dimension.Density, "mean density from the ground or mudline to the first logged density"),
+        Gaps = s.ChoiceOrQuantity("gaps", o.Gaps, GapFills, Dimension.Density, Stated, Density, "what bridges gaps in the density log"),
+        BelowLog = s.ChoiceOrQuantity("below_log", o.BelowLog, BelowFills, Dimension.Density, Stated, Density, "what continues density below its last value"),
+        WaterDensity = s.FluidDensity("water_density", o.WaterDensity, "density of sea water"),
+    };
+
+    private static LayerSettings Layers(ISection s, LayerSettings l) => l with
+    {
+        MaxThickness = s.Quantity("max_thickness", l.MaxThickness, Sign.Positive, Dimension.Length, "greatest true vertical thickness of a layer"),
+    };
+
+    private static OutputSection Output(ISection s, OutputSection o) => o with
+    {
+        Units = s.Choice("units", o.Units, UnitSystems, "the units of the results"),
+    };
+
+    /// <summary>The [pore_pressure] section.</summary>
+    public static PorePressureSettings PorePressure(ISection s, PorePressureSettings p)
+    {
+        var points = s.Tables(
+            "points", p.Points.IsSet ? p.Points.Value : [], Point, new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
+        return p with
+        {
+            Method = s.Choice("method", p.Method, PressureMethods, "how pore pressure is had"),
+            FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic: density of the pore fluid"),
+            Gradient = s.FluidDensity("gradient", p.Gradient, "gradient: pressure per depth, or the density of such a fluid"),
+            Reference = s.Choice("reference", p.Reference, References, "gradient: what depth counts from"),
+            Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, new SettingSource(SettingKind.WellFile, s.Position)) : p.Points,
+            DepthKind = s.Choice("depth_kind", p.DepthKind, DepthKinds, "table: the kind of depth of its points"),
+        };
+    }
+
+    private static PressurePoint Point(ISection s, PressurePoint p)
+    {
+        var depth = s.Quantity("depth", Known(p.Depth), Sign.Any, Dimension.Length, "depth of the point");
+        var pressure = s.Quantity("pressure", Known(p.Pressure), Sign.NotNegative, Dimension.Pressure, "pore pressure there");
+        return new PressurePoint(depth.IsSet ? depth.Value : double.NaN, pressure.IsSet ? pressure.Value : double.NaN);
+    }
+
+    private static Setting<double> Known(double value) => double.IsNaN(value) ? default : Setting.Default(value);
+
+    private static DensityFill Stated(double density) => new(DensityFillKind.Stated, density);
+
+    private static double? Density(DensityFill fill) => fill.Kind == DensityFillKind.Stated ? fill.Density : null;
+}

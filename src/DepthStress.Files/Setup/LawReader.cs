@@ -1,0 +1,129 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Files.Setup;
+
+/// <summary>
+/// Reads the choice of a law: a catalogue id, a constant, or a table with the user's own coefficients
+/// (<c>{ law = "linear", factor, offset, input }</c> or <c>{ law = "power", factor, exponent, input, input_unit, unit }</c>).
+/// </summary>
+internal static class LawReader
+{
+    private static readonly (string Word, string Value)[] Shapes = [("linear", "linear"), ("power", "power")];
+
+    /// <summary>Reads one choice; null when it is wrong, with the reason reported.</summary>
+    public static Law? Read(TomlNode node, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        switch (node)
+        {
+            case TomlText text when Words.StartsNumber(text.Value):
+                return Constant(text, key, predicts, diagnostics);
+            case TomlText text:
+                return FromCatalogue(text, key, predicts, diagnostics);
+            case TomlNumber number when PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction:
+                return Constant(number, key, predicts, Units.Of(PropertyNames.Dimension(predicts)).First(), number.Value, diagnostics);
+            case TomlTable table:
+                var section = new ReadingSection(table, key, diagnostics);
+                var law = UserGiven(section, key, predicts, diagnostics);
+                section.ReportUnknown();
+                return law;
+            default:
+                diagnostics.Error(node.Position, $"found {node.Kind}, expected {key} = a method id, {ConstantWords(predicts)} or a table with law = \"linear\" or \"power\"");
+                return null;
+        }
+    }
+
+    private static Law? FromCatalogue(TomlText text, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        var ids = MethodCatalogue.For(predicts).Select(l => l.Id).ToList();
+        if (MethodCatalogue.Find(text.Value) is { } law)
+        {
+            if (law.Predicts == predicts) return law;
+            diagnostics.Error(text.Position, $"found \"{law.Id}\", which gives {PropertyNames.Title(law.Predicts)}; expected {key} = a method for {PropertyNames.Title(predicts)}: {string.Join(", ", ids)}");
+            return null;
+        }
+
+        diagnostics.Error(text.Position, $"found the unknown method \"{text.Value}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
+        return null;
+    }
+
+    private static Law? Constant(TomlText text, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        var dimension = PropertyNames.Dimension(predicts);
+        if (!QuantityText.TryParse(text.Value, [dimension], out var si, out var unit, out var problem))
+        {
+            diagnostics.Error(text.Position, $"{key}: {problem}");
+            return null;
+        }
+
+        return Constant(text, key, predicts, unit, unit.FromSi(si), diagnostics);
+    }
+
+    private static Law? Constant(TomlNode node, string key, Property predicts, Unit unit, double value, DiagnosticBag diagnostics)
+    {
+        var law = UserLaw.Constant(predicts, unit, value);
+        if (law.ResultDomain.Contains(value)) return law;
+        diagnostics.Error(node.Position, $"found {node.Kind}, expected {key} {Words.Within(law.ResultDomain)}");
+        return null;
+    }
+
+    private static Law? UserGiven(ReadingSection section, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        var shape = section.Choice("law", default, Shapes, "shape of the relation");
+        var factor = section.Number("factor", default, Interval.All, "the factor");
+        var exponent = section.Number("exponent", default, Interval.All, "the exponent of a power law");
+        var offset = section.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds");
+        var input = section.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), "the property it starts from");
+        var inputUnit = Unit(section, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
+        var unit = Unit(section, "unit", PropertyNames.Dimension(predicts), diagnostics);
+        if (!shape.IsSet || !factor.IsSet)
+        {
+            diagnostics.Error(section.Position, $"{key}: expected law = \"linear\" or \"power\", and factor");
+            return null;
+        }
+
+        if (shape.Value == "linear")
+        {
+            if (PropertyNames.Dimension(input.Value) != PropertyNames.Dimension(predicts))
+            {
+                diagnostics.Error(section.Position, $"{key}: a linear law needs an input of the same kind of quantity; use law = \"power\" with input_unit and unit");
+                return null;
+            }
+
+            var si = Units.Of(PropertyNames.Dimension(predicts)).First();
+            var shown = unit ?? si;
+            return UserLaw.Linear(predicts, shown, Input(input.Value, shown), factor.Value, offset.IsSet ? shown.FromSi(offset.Value) : 0);
+        }
+
+        if (!exponent.IsSet || unit is null || inputUnit is null)
+        {
+            diagnostics.Error(section.Position, $"{key}: a power law needs exponent, unit and input_unit, since its factor depends on them");
+            return null;
+        }
+
+        return UserLaw.Power(predicts, unit, Input(input.Value, inputUnit), factor.Value, exponent.Value);
+    }
+
+    private static LawInput Input(Property property, Unit unit) => new(PropertyNames.Name(property), property, unit);
+
+    private static Unit? Unit(ReadingSection section, string key, Dimension dimension, DiagnosticBag diagnostics)
+    {
+        var text = section.Text(key, default, "a unit");
+        if (!text.IsSet) return null;
+        if (Units.Find(text.Value, dimension) is { } unit) return unit;
+        diagnostics.Error(text.Source.Position, $"found the unit \"{text.Value}\", expected {key} = one of {Units.Symbols(dimension)}");
+        return null;
+    }
+
+    /// <summary>What a law may start from: everything the chain knows before the property.</summary>
+    private static List<(string, Property)> Inputs(Property predicts) =>
+        [.. PropertyNames.LawInputsBefore(predicts).Select(p => (PropertyNames.Name(p), p))];
+
+    private static string ConstantWords(Property predicts) =>
+        PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction
+            ? "a number"
+            : $"a quantity with a unit ({Units.Symbols(PropertyNames.Dimension(predicts))})";
+}

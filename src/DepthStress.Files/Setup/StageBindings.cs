@@ -1,0 +1,65 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Lithology;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+using DepthStress.Core.Rock;
+using DepthStress.Core.Stress;
+
+namespace DepthStress.Files.Setup;
+
+/// <summary>Declares the keys of the sections that a zone or a lithology rule may override.</summary>
+internal static class StageBindings
+{
+    /// <summary>All of them.</summary>
+    public static StageSettings All(ISection s, StageSettings c) => c with
+    {
+        Shale = s.Table("shale", c.Shale, Shale, "shale volume from gamma ray"),
+        Porosity = s.Table("porosity", c.Porosity, Porosity, "porosity"),
+        Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),
+        Strength = s.Table("strength", c.Strength, Strength, "rock strength"),
+        Biot = s.Table("biot", c.Biot, Biot, "Biot's coefficient"),
+        PorePressure = s.Table("pore_pressure", c.PorePressure, Bindings.PorePressure, "pore pressure"),
+        HorizontalStress = s.Table("horizontal_stress", c.HorizontalStress, HorizontalStress, "horizontal stresses"),
+    };
+
+    private static ShaleSettings Shale(ISection s, ShaleSettings c) => c with
+    {
+        Volume = s.Law("volume", c.Volume, Property.ShaleVolume, "relation between gamma-ray index and shale volume"),
+        Clean = s.Quantity("clean", c.Clean, Sign.NotNegative, Dimension.GammaRay, "gamma ray of clean rock"),
+        Shale = s.Quantity("shale", c.Shale, Sign.NotNegative, Dimension.GammaRay, "gamma ray of shale"),
+    };
+
+    private static PorositySettings Porosity(ISection s, PorositySettings c) => c with
+    {
+        Porosity = s.Law("porosity", c.Porosity, Property.Porosity, "relation that gives porosity"),
+        MatrixDensity = s.Quantity("matrix_density", c.MatrixDensity, Sign.Positive, Dimension.Density, "density of the matrix"),
+        FluidDensity = s.FluidDensity("fluid_density", c.FluidDensity, "density of the fluid the density tool sees"),
+    };
+
+    private static ModuliSettings Moduli(ISection s, ModuliSettings c) => c with
+    {
+        StaticYoungs = s.Law("static_youngs", c.StaticYoungs, Property.YoungsStatic, "relation that gives static Young's modulus"),
+        StaticPoisson = s.Law("static_poisson", c.StaticPoisson, Property.PoissonStatic, "choice that gives static Poisson's ratio"),
+    };
+
+    private static StrengthSettings Strength(ISection s, StrengthSettings c) => c with
+    {
+        Ucs = s.Law("ucs", c.Ucs, Property.Ucs, "relation that gives unconfined compressive strength"),
+        FrictionAngle = s.Law("friction_angle", c.FrictionAngle, Property.FrictionAngle, "relation that gives the angle of internal friction"),
+        TensileStrength = s.Law("tensile_strength", c.TensileStrength, Property.TensileStrength, "relation that gives tensile strength"),
+    };
+
+    private static BiotSettings Biot(ISection s, BiotSettings c) => c with
+    {
+        Coefficient = s.Law("coefficient", c.Coefficient, Property.Biot, "Biot's coefficient, a number or a relation"),
+    };
+
+    private static HorizontalStressSettings HorizontalStress(ISection s, HorizontalStressSettings c) => c with
+    {
+        StrainAlongShmin = s.Quantity("strain_along_shmin", c.StrainAlongShmin, Sign.Any, Dimension.Strain, "tectonic strain along Shmin, compression positive"),
+        StrainAlongShmax = s.Quantity("strain_along_shmax", c.StrainAlongShmax, Sign.Any, Dimension.Strain, "tectonic strain along SHmax, compression positive"),
+        ShmaxAzimuth = s.Quantity("shmax_azimuth", c.ShmaxAzimuth, Sign.Any, Dimension.Angle, "azimuth of SHmax from north"),
+        FrictionCoefficient = s.Number("friction_coefficient", c.FrictionCoefficient, new Interval(0, 2), "friction of existing faults, for the frictional limit"),
+    };
+}
