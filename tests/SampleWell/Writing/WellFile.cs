@@ -1,0 +1,166 @@
+using SampleWell.Hidden;
+using SampleWell.Logging;
+using static SampleWell.Writing.FixedText;
+
+namespace SampleWell.Writing;
+
+/// <summary>Writes the well file of a sample well as its user would: with first guesses, not with the hidden truth.</summary>
+internal static class WellFile
+{
+    /// <summary>Writes the file.</summary>
+    public static void Write(string path, Truth truth, LogRun upper, LogRun lower)
+    {
+        var plan = truth.Plan;
+        using var text = new FixedText(path);
+        text.Add($"""
+            # Quillback 4, Sorrel basin. The well, the basin and every number are invented; see DEVELOPERS.md.
+            # Depths are below the rotary table unless a line says otherwise.
+
+            [well]
+            name = "Quillback 4"
+            datum = "rotary table"
+            datum_elevation = "{Quantity(plan.DatumElevation, 1, "m")}"          # above sea level
+            ground_elevation = "{Quantity(plan.GroundElevation, 1, "m")}"
+            water_table_depth = "{Quantity(plan.WaterTable, 0, "m")}"          # below ground
+
+            [logs]
+            files = ["{upper.File}", "{lower.File}"]
+
+            # Two runs, joined in the dapple shale where both read well: the 12 1/4 in hole above, the 8 1/2 in hole below.
+            [logs.curves]
+
+            """);
+        foreach (var curve in Curve.All)
+            text.Add($"{curve.Role} = [{{ column = \"{curve.Name}\", file = \"{upper.File}\", base = \"{Quantity(plan.Splice, 0, "m")}\" }}, {{ column = \"{curve.Name}\", file = \"{lower.File}\" }}]\n");
+        text.Add("""
+
+            [survey]
+            file = "quillback-4-survey.csv"
+            north = "grid"                       # azimuths in the survey are from grid north
+
+            # Formation tops, picked on the logs.
+
+            """);
+        foreach (var formation in plan.Formations)
+            text.Add(Zone(formation));
+        text.Add(Choices);
+        text.Add(PressureTable(truth));
+        text.Add(Guesses);
+    }
+
+    private static string Zone(Formation formation) =>
+        $"""
+        [[zones]]
+        name = "{formation.Name}"
+        top = "{Quantity(formation.Top, 1, "m")}"
+        depth_kind = "md"
+        {Overrides(formation.Kind)}
+
+        """;
+
+    private static string Overrides(RockKind kind) => kind switch
+    {
+        RockKind.Shale => """
+            [zones.moduli]
+            static_youngs = "lacy-1997-shale"
+
+            """,
+        RockKind.Sand => """
+            [zones.moduli]
+            static_youngs = "lacy-1997-sandstone"
+            [zones.strength]
+            ucs = "mcnally-1987-sandstone"
+            [zones.biot]
+            coefficient = 0.80
+
+            """,
+        RockKind.Marl => """
+            [zones.porosity]
+            matrix_density = "2.69 g/cm3"        # lime mud and clay
+            [zones.strength]
+            ucs = { law = "linear", input = "youngs_static", factor = 0.0020, offset = "24 MPa" }
+            [zones.biot]
+            coefficient = 0.72
+
+            """,
+        _ => """
+            [zones.porosity]
+            matrix_density = "2.71 g/cm3"        # calcite
+            [zones.strength]
+            ucs = { law = "linear", input = "youngs_static", factor = 0.0020, offset = "24 MPa" }   # fitted to crushed plugs
+            [zones.biot]
+            coefficient = 0.60
+
+            """,
+    };
+
+    private const string Choices = """
+        # What holds wherever a zone above does not say otherwise.
+
+        [shale]
+        volume = "linear-gamma-ray"          # straight between the cleanest sand and limestone and the purest shale seen
+        clean = "28 gAPI"
+        shale = "128 gAPI"
+
+        [porosity]
+        porosity = "density-porosity"
+        matrix_density = "2.66 g/cm3"
+        fluid_density = "1.03 g/cm3"
+
+        [moduli]
+        static_youngs = "lacy-1997-combined"
+        static_poisson = "dynamic"           # taken equal to the dynamic one: the plugs do not contradict it
+
+        [strength]
+        ucs = "horsrud-2001-shale"
+        friction_angle = "lal-1999-shale-friction"
+        tensile_strength = { law = "linear", input = "ucs", factor = 0.1, offset = "0 MPa" }   # common practice
+
+        [biot]
+        coefficient = 0.85
+
+        [overburden]
+        above_log = "2.10 g/cm3"             # mean from the ground to the first density; drill cuttings and a nearby seismic line
+        gaps = "linear"                      # short density gaps, at most about 4 m, are bridged by a straight line
+
+        # Hydrostatic (1.03 g/cm3) from the water table to the dapple shale, then above it: measured in the sands and limestones,
+        # drawn through the shales from gas shows and the mud weight.
+
+        """;
+
+    private static string PressureTable(Truth truth)
+    {
+        var plan = truth.Plan;
+        double Depth(int formation, double below) => Math.Round(plan.Path.Tvd(plan.Formations[formation].Top) + below);
+        var shale = Depth(3, 0);
+        var half = Math.Round((shale + Depth(4, 0)) / 2);
+        double[] depths = [shale, Math.Round((shale + half) / 2), half, Math.Round((half + Depth(4, 0)) / 2), Depth(4, 0), Depth(5, 0), Depth(5, 75), Depth(5, 150), 3200];
+        var points = depths.Select(tvd => (tvd, Physics.ColumnMpa(plan.FluidDensity, tvd - plan.WaterTvd) + ExcessPressure.At(plan, tvd)));
+        var rows = string.Concat(points.Select(point =>
+            $"    {{ depth = \"{Quantity(point.tvd, 0, "m")}\", pressure = \"{Quantity(point.Item2, 1, "MPa")}\" }},\n"));
+        return $$"""
+            [pore_pressure]
+            method = "table"
+            depth_kind = "tvd"                   # below the rotary table, so the water table (18 m below ground) is at {{Quantity(plan.WaterTvd, 1, "m")}}
+            points = [
+                { depth = "{{Quantity(plan.WaterTvd, 1, "m")}}", pressure = "0 MPa" },
+            {{rows}}]
+
+
+            """;
+    }
+
+    private const string Guesses = """
+        [horizontal_stress]
+        strain_along_shmin = "150 microstrain"   # first guesses from the neighbouring basin, compression positive; not calibrated
+        strain_along_shmax = "400 microstrain"
+        shmax_azimuth = "60 deg"             # from breakouts in the vertical part of the hole
+        friction_coefficient = 0.6
+
+        [layers]
+        max_thickness = "150 m"
+
+        # The tests made in the well are in quillback-4-observations.csv, the laboratory table of the plugs in quillback-4-core.csv.
+
+        """;
+}
