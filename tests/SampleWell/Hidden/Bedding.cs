@@ -13,13 +13,15 @@ internal sealed class Bedding
         for (var f = 0; f < plan.Formations.Count; f++)
             LayBeds(plan, grid, f, shale, porosity);
         var slow = Noise.Curve(new Draws(plan.Seed, "slow"), shale.Length, grid.Step, 45, 0.035);
-        var within = Noise.Curve(new Draws(plan.Seed, "within"), shale.Length, grid.Step, 0.9, 0.022);
-        var pores = Noise.Curve(new Draws(plan.Seed, "pores"), shale.Length, grid.Step, 1.1, 0.005);
+        var cycles = Noise.Curve(new Draws(plan.Seed, "cycles"), shale.Length, grid.Step, 5, 0.035);
+        var within = Noise.Curve(new Draws(plan.Seed, "within"), shale.Length, grid.Step, 0.8, 0.035);
+        var pores = Noise.Curve(new Draws(plan.Seed, "pores"), shale.Length, grid.Step, 1.1, 0.007);
+        var mudPores = Noise.Curve(new Draws(plan.Seed, "mud pores"), shale.Length, grid.Step, 9, 0.010);
         for (var i = 0; i < shale.Length; i++)
         {
-            shale[i] = Math.Clamp(shale[i] + slow[i] + within[i], 0.01, 0.99);
+            shale[i] = Math.Clamp(shale[i] + slow[i] + cycles[i] + within[i], 0.01, 0.99);
             var clean = Math.Max(0.008, porosity[i] + pores[i]);
-            var mud = MudPorosity(plan.Path.Tvd(grid.Md[i]), excess[i]) + 0.7 * pores[i];
+            var mud = MudPorosity(plan.Path.Tvd(grid.Md[i]), excess[i]) + mudPores[i] + 0.6 * pores[i];
             porosity[i] = (1 - shale[i]) * clean + shale[i] * mud;
         }
 
@@ -34,7 +36,7 @@ internal sealed class Bedding
     public double[] Porosity { get; }
 
     /// <summary>Mud compacts with depth; pressure above hydrostatic keeps some of its pores open.</summary>
-    private static double MudPorosity(double tvd, double excessMpa) => 0.36 * Math.Exp(-tvd / 2600) + 0.0022 * excessMpa;
+    private static double MudPorosity(double tvd, double excessMpa) => 0.385 * Math.Exp(-tvd / 2450) + 0.0022 * excessMpa;
 
     private static void LayBeds(WellPlan plan, FineGrid grid, int index, double[] shale, double[] porosity)
     {
@@ -49,7 +51,7 @@ internal sealed class Bedding
             var mean = odd ? formation.OddShale : formation.Shale + formation.ShaleTrend * ((grid.Md[i] - top) / (bottom - top) - 0.5);
             var level = mean + formation.ShaleSpread * draws.Normal();
             var pores = formation.Porosity + formation.PorositySpread * draws.Normal();
-            var lean = formation.ShaleSpread * draws.Between(-1, 1);    // a bed grows shalier or sandier towards its base
+            var lean = formation.ShaleSpread * draws.Between(-2.5, 2.5);    // a bed grows shalier or sandier towards its base
             for (var start = i; i < grid.Md.Length && grid.Md[i] < bottom + grid.Step && (i - start) * grid.Step < thickness; i++)
             {
                 shale[i] = level + lean * ((i - start) * grid.Step / thickness - 0.5);

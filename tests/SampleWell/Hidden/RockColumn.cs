@@ -25,9 +25,9 @@ public sealed class RockColumn
             var porosity = Porosity[i];
             var solid = 1 / (quartz / 5.70 + clay / 3.55 + calcite / 6.35);
             Vp[i] = 1000 * ((1 - porosity) * (1 - porosity) * solid + porosity * 1.6) * (1 + hard[i]);
-            var ratio = 1.545 * quartz + 1.90 * clay + 1.86 * calcite + (0.45 + 0.5 * ShaleVolume[i]) * porosity;
+            var ratio = 1.545 * quartz + 1.90 * clay + 1.86 * calcite + (0.45 + 0.75 * ShaleVolume[i]) * porosity;
             Vs[i] = Vp[i] / (ratio + shear[i]);
-            Density[i] = (1 - porosity) * (2650 * quartz + 2690 * clay + 2710 * calcite) + porosity * plan.FluidDensity;
+            Density[i] = (1 - porosity) * (2650 * quartz + 2770 * clay + 2710 * calcite) + porosity * plan.FluidDensity;
         }
     }
 

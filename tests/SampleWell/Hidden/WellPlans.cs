@@ -8,12 +8,12 @@ public static class WellPlans
 
     private static Formation[] Column =>
     [
-        new("apricot shale", RockKind.Shale, 900, 0.86, 0.07, 0, 3.2, 0.14, 0.52, 0.215, 0.012, 0.05, 0.90),
+        new("apricot shale", RockKind.Shale, 900, 0.86, 0.07, 0, 3.2, 0.14, 0.52, 0.215, 0.012, 0.05, 0.88),
         new("bracken sand", RockKind.Sand, 1042.5, 0.17, 0.08, 0.10, 2.2, 0.13, 0.72, 0.225, 0.016, 0.04, 0.80),
         new("cinder marl", RockKind.Marl, 1386, 0.44, 0.10, 0.05, 3.5, 0.12, 0.16, 0.120, 0.018, 0.85, 0.72),
-        new("dapple shale", RockKind.Shale, 1731.5, 0.84, 0.08, 0.04, 3.6, 0.12, 0.50, 0.165, 0.012, 0.12, 0.85),
+        new("dapple shale", RockKind.Shale, 1731.5, 0.84, 0.08, 0.04, 3.6, 0.12, 0.54, 0.165, 0.012, 0.12, 0.85),
         new("elm limestone", RockKind.Limestone, 2268, 0.10, 0.05, -0.03, 2.8, 0.10, 0.50, 0.072, 0.034, 0.95, 0.60),
-        new("fern shale", RockKind.Shale, 2704.5, 0.85, 0.08, 0.03, 3.4, 0.13, 0.48, 0.120, 0.012, 0.10, 0.82),
+        new("fern shale", RockKind.Shale, 2704.5, 0.85, 0.08, 0.03, 3.4, 0.13, 0.56, 0.120, 0.012, 0.10, 0.82),
     ];
 
     /// <summary>Another well of the same basin: tops, rock, pressures and strains are drawn from the seed.</summary>

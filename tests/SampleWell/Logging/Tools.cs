@@ -25,7 +25,7 @@ internal static class Tools
         var correction = Unrest("DRHO", 0.8, 0.007);
         var neutron = Unrest("NPHI", 0.4, 0.006);
         var photo = Unrest("PEF", 0.35, 0.07);
-        var resistivity = Unrest("RD", 0.8, 0.03);
+        var resistivity = Unrest("RD", 6, 0.11);
         var hole = Hole(truth, Unrest("CALI", 2.5, 1), Unrest("wall", 0.5, 0.05), first, bit);
         for (var i = 0; i <= last - first; i++)
         {
@@ -39,7 +39,7 @@ internal static class Tools
             curves["DRHO"][i] = 0.006 + correction[i];
             curves["NPHI"][i] = Math.Max(0.002, sample.Neutron + neutron[i]);
             curves["PEF"][i] = sample.Photoelectric + photo[i];
-            curves["RD"][i] = sample.Resistivity * (1 + resistivity[i]);
+            curves["RD"][i] = sample.Resistivity * Math.Exp(resistivity[i]);
         }
 
         return new LogRun(file, first, curves);

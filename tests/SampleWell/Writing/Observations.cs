@@ -6,7 +6,7 @@ namespace SampleWell.Writing;
 /// <summary>Makes the tests that the well has seen: the truth of each interval with the error of its kind of test.</summary>
 internal sealed class Observations(Truth truth, TestIntervals intervals)
 {
-    private const double MudAbove = 1090;
+    private const double MudAbove = 1060;
     private const double MudBelow = 1250;
     private readonly Draws draws = new(truth.Plan.Seed, "tests");
     private readonly List<Observation> rows = [];
@@ -52,6 +52,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
 
     private void LeakOff(double top, string date, string note)
     {
+        intervals.Reserve(top, top + 4);
         var value = Mean(truth.Shmin, top, top + 4) * draws.Between(1.02, 1.06);
         var mud = top < truth.Plan.Splice ? MudAbove : MudBelow;
         var surface = value - Physics.ColumnMpa(mud, truth.Plan.Path.Tvd(top + 2));

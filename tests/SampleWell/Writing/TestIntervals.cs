@@ -8,6 +8,9 @@ internal sealed class TestIntervals(Truth truth, IReadOnlyList<DamageRecord> dam
 {
     private readonly List<(double Top, double Base)> used = [];
 
+    /// <summary>Keeps an interval for a test whose place is given.</summary>
+    public void Reserve(double top, double bottom) => used.Add((top, bottom));
+
     /// <summary>
     /// The interval of a formation that stands at a given rank (0 lowest, 1 highest) of a property among all its intervals of that
     /// length, away from spoiled logs and earlier tests.
@@ -51,7 +54,7 @@ internal sealed class TestIntervals(Truth truth, IReadOnlyList<DamageRecord> dam
 
     private (double Top, double Base) Take(double start, double length)
     {
-        used.Add((start, start + length));
+        Reserve(start, start + length);
         return (start, start + length);
     }
 
