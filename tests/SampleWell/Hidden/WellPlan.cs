@@ -43,7 +43,7 @@ public sealed record WellPlan
     public double ShmaxAzimuth { get; init; } = 62;
 
     /// <summary>Thomsen's epsilon, gamma and delta of pure shale; all zero makes every rock isotropic.</summary>
-    public (double Epsilon, double Gamma, double Delta) Anisotropy { get; init; } = (0.12, 0.16, 0.04);
+    public (double Epsilon, double Gamma, double Delta) Anisotropy { get; init; } = (0.08, 0.11, 0.02);
 
     /// <summary>Measured depth of the splice between the two runs.</summary>
     public double Splice => 2101;

@@ -34,7 +34,7 @@ public static class WellPlans
 
     private static Formation Vary(Formation formation, int index, Draws draws) => formation with
     {
-        Top = index == 0 ? formation.Top : formation.Top + 0.5 * draws.Whole(-50, 50) * (index == 1 ? 0.4 : 1),
+        Top = index == 0 ? formation.Top : Math.Round(formation.Top + 0.5 * draws.Whole(-50, 50) * (index == 1 ? 0.4 : 1), 1),
         Shale = formation.Shale + draws.Between(-0.03, 0.03),
         Porosity = formation.Porosity * draws.Between(0.93, 1.07),
         Biot = formation.Biot + draws.Between(-0.03, 0.03),

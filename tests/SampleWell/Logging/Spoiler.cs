@@ -15,7 +15,7 @@ internal sealed class Spoiler(LogRun run, Draws draws)
     /// <summary>The random stream of the damage.</summary>
     public Draws Draws => draws;
 
-    /// <summary>Finds a free stretch of <paramref name="length"/> samples between two indices where all conditions hold; -1 if there is none.</summary>
+    /// <summary>Finds a free stretch of <paramref name="length"/> samples between two indices that suits; -1 if there is none.</summary>
     public int Find(IReadOnlyList<string> curves, int length, int from, int to, Func<int, bool>? suits = null)
     {
         for (var attempt = 0; attempt < 400; attempt++)

@@ -3,7 +3,7 @@ using static SampleWell.Writing.FixedText;
 
 namespace SampleWell.Writing;
 
-/// <summary>Writes the laboratory table of the core plugs: triaxial tests near the stress in place, and strength where a twin plug was crushed.</summary>
+/// <summary>Writes the laboratory table of the core plugs: triaxial tests near the stress in place, and some crushed.</summary>
 internal static class CoreCsv
 {
     /// <summary>Formation, place of the core in it (0 top, 1 base) and count of plugs, 1.5 m apart.</summary>

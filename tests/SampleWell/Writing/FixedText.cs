@@ -55,8 +55,11 @@ internal sealed class FixedText : IDisposable
     }
 
     /// <summary>A quantity as text: number, blank, unit.</summary>
-    public static string Quantity(double value, int decimals, string unit) =>
-        string.Create(CultureInfo.InvariantCulture, $"{Math.Round(value, decimals).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture)} {unit}").TrimEnd();
+    public static string Quantity(double value, int decimals, string unit)
+    {
+        var number = value.ToString(string.Create(CultureInfo.InvariantCulture, $"F{decimals}"), CultureInfo.InvariantCulture);
+        return unit.Length == 0 ? number : number + " " + unit;
+    }
 
     private static double Power(int decimals)
     {

@@ -32,8 +32,12 @@ internal static class LasFile
         Line(text, "UWI.", "NONE", "UNIQUE WELL ID");
         text.Add("~CURVE INFORMATION\n#MNEM.UNIT        API CODE                   : DESCRIPTION\n");
         Line(text, "DEPT.M", "", "1  MEASURED DEPTH BELOW ROTARY TABLE");
-        for (var k = 0; k < Curve.All.Count; k++)
-            Line(text, $"{Curve.All[k].Name}.{Curve.All[k].Unit.ToUpperInvariant()}", "", string.Create(CultureInfo.InvariantCulture, $"{k + 2}  {Curve.All[k].Description}"));
+        foreach (var (k, curve) in Curve.All.Index())
+        {
+            var description = string.Create(CultureInfo.InvariantCulture, $"{k + 2}  {curve.Description}");
+            Line(text, $"{curve.Name}.{curve.Unit.ToUpperInvariant()}", "", description);
+        }
+
         text.Add("~PARAMETER INFORMATION\n#MNEM.UNIT        VALUE                      : DESCRIPTION\n");
         Line(text, "EREF.M", Number(plan.DatumElevation, 1), "ELEVATION OF DEPTH REFERENCE (ROTARY TABLE)");
         Line(text, "EGL.M", Number(plan.GroundElevation, 1), "ELEVATION OF GROUND LEVEL");

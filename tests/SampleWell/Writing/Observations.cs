@@ -94,7 +94,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
     {
         var wall = new HoleWall(truth, MudAbove);
         foreach (var (top, bottom) in intervals.Within(
-            truth.Grid.Md[0] + 6, truth.Plan.Path.KickOff, 2, 3, (a, b) => wall.BreakoutWidth(a, b) is > 22 and < 95))
+            truth.Grid.Md[0] + 6, truth.Plan.Path.KickOff, 1, 3, (a, b) => wall.BreakoutWidth(a, b) is > 18 and < 100))
         {
             var value = wall.BreakoutWidth(top, bottom) + 4 * draws.Normal();
             rows.Add(new(top, bottom, "md", "breakout-width", Quantity(value, 0, "deg"), "", Quantity(MudAbove / 1000, 2, "g/cm3"), "6 deg", "",

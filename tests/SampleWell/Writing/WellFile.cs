@@ -13,7 +13,7 @@ internal static class WellFile
         var plan = truth.Plan;
         using var text = new FixedText(path);
         text.Add($"""
-            # Quillback 4, Sorrel basin. The well, the basin and every number are invented; see DEVELOPERS.md.
+            # Quillback 4, Sorrel basin. The well, the basin and every number are invented.
             # Depths are below the rotary table unless a line says otherwise.
 
             [well]
@@ -26,12 +26,13 @@ internal static class WellFile
             [logs]
             files = ["{upper.File}", "{lower.File}"]
 
-            # Two runs, joined in the dapple shale where both read well: the 12 1/4 in hole above, the 8 1/2 in hole below.
+            # Two runs, joined in the dapple shale where both read well. The 12 1/4 in hole ends at 2105 m: from the splice down to there the
+            # caliper of the second run sees the old, larger hole.
             [logs.curves]
 
             """);
         foreach (var curve in Curve.All)
-            text.Add($"{curve.Role} = [{{ column = \"{curve.Name}\", file = \"{upper.File}\", base = \"{Quantity(plan.Splice, 0, "m")}\" }}, {{ column = \"{curve.Name}\", file = \"{lower.File}\" }}]\n");
+            text.Add(Spliced(curve, upper.File, lower.File, Quantity(plan.Splice, 0, "m")));
         text.Add("""
 
             [survey]
@@ -42,57 +43,16 @@ internal static class WellFile
 
             """);
         foreach (var formation in plan.Formations)
-            text.Add(Zone(formation));
+            text.Add(WellFileZones.Zone(formation));
         text.Add(Choices);
         text.Add(PressureTable(truth));
         text.Add(Guesses);
     }
 
-    private static string Zone(Formation formation) =>
-        $"""
-        [[zones]]
-        name = "{formation.Name}"
-        top = "{Quantity(formation.Top, 1, "m")}"
-        depth_kind = "md"
-        {Overrides(formation.Kind)}
+    private static string Spliced(Curve curve, string upper, string lower, string splice) => $$"""
+        {{curve.Role}} = [{ column = "{{curve.Name}}", file = "{{upper}}", base = "{{splice}}" }, { column = "{{curve.Name}}", file = "{{lower}}" }]
 
         """;
-
-    private static string Overrides(RockKind kind) => kind switch
-    {
-        RockKind.Shale => """
-            [zones.moduli]
-            static_youngs = "lacy-1997-shale"
-
-            """,
-        RockKind.Sand => """
-            [zones.moduli]
-            static_youngs = "lacy-1997-sandstone"
-            [zones.strength]
-            ucs = "mcnally-1987-sandstone"
-            [zones.biot]
-            coefficient = 0.80
-
-            """,
-        RockKind.Marl => """
-            [zones.porosity]
-            matrix_density = "2.69 g/cm3"        # lime mud and clay
-            [zones.strength]
-            ucs = { law = "linear", input = "youngs_static", factor = 0.0020, offset = "24 MPa" }
-            [zones.biot]
-            coefficient = 0.72
-
-            """,
-        _ => """
-            [zones.porosity]
-            matrix_density = "2.71 g/cm3"        # calcite
-            [zones.strength]
-            ucs = { law = "linear", input = "youngs_static", factor = 0.0020, offset = "24 MPa" }   # fitted to crushed plugs
-            [zones.biot]
-            coefficient = 0.60
-
-            """,
-    };
 
     private const string Choices = """
         # What holds wherever a zone above does not say otherwise.
@@ -134,7 +94,8 @@ internal static class WellFile
         double Depth(int formation, double below) => Math.Round(plan.Path.Tvd(plan.Formations[formation].Top) + below);
         var shale = Depth(3, 0);
         var half = Math.Round((shale + Depth(4, 0)) / 2);
-        double[] depths = [shale, Math.Round((shale + half) / 2), half, Math.Round((half + Depth(4, 0)) / 2), Depth(4, 0), Depth(5, 0), Depth(5, 75), Depth(5, 150), 3200];
+        double[] depths = [
+            shale, Math.Round((shale + half) / 2), half, Math.Round((half + Depth(4, 0)) / 2), Depth(4, 0), Depth(5, 0), Depth(5, 75), Depth(5, 150), 3200];
         var points = depths.Select(tvd => (tvd, Physics.ColumnMpa(plan.FluidDensity, tvd - plan.WaterTvd) + ExcessPressure.At(plan, tvd)));
         var rows = string.Concat(points.Select(point =>
             $"    {{ depth = \"{Quantity(point.tvd, 0, "m")}\", pressure = \"{Quantity(point.Item2, 1, "MPa")}\" }},\n"));
