@@ -1,0 +1,68 @@
+using System.Globalization;
+using DepthStress.Core.Diagnostics;
+
+namespace DepthStress.Files.Reading;
+
+/// <summary>What a file says of a column before its values.</summary>
+internal sealed record ColumnHeader(string Name, string? Unit, string Description, SourcePosition Position)
+{
+    /// <summary>Usual names of measured depth in their order of preference (common practice).</summary>
+    private static readonly string[] DepthNames =
+        ["DEPT", "DEPTH", "MD", "MEASURED_DEPTH", "DEPTH_MD", "TDEP", "MD_DEPTH", "MEASDEPTH", "MEASUREDDEPTH"];
+
+    /// <summary>Names blank columns UNKNOWN and numbers equal names (without regard to case) <c>:1</c>, <c>:2</c>, each with a note.</summary>
+    public static void MakeUnique(List<ColumnHeader> headers, DiagnosticBag diagnostics)
+    {
+        for (var i = 0; i < headers.Count; i++)
+        {
+            if (headers[i].Name.Length > 0) continue;
+            headers[i] = headers[i] with { Name = "UNKNOWN" };
+            diagnostics.Note(headers[i].Position, "found a column without a name, called it UNKNOWN");
+        }
+
+        var taken = headers.Select(h => h.Name).ToHashSet(StringComparer.OrdinalIgnoreCase);
+        if (taken.Count == headers.Count) return;
+        var uses = headers.GroupBy(h => h.Name, StringComparer.OrdinalIgnoreCase)
+            .Where(g => g.Count() > 1).ToDictionary(g => g.Key, _ => 0, StringComparer.OrdinalIgnoreCase);
+        for (var i = 0; i < headers.Count; i++)
+        {
+            var name = headers[i].Name;
+            if (!uses.TryGetValue(name, out var number)) continue;
+            string unique;
+            do unique = string.Create(CultureInfo.InvariantCulture, $"{name}:{++number}");
+            while (!taken.Add(unique));
+            uses[name] = number;
+            headers[i] = headers[i] with { Name = unique };
+            diagnostics.Note(headers[i].Position, $"found the name \"{name}\" more than once, called this column \"{unique}\"");
+        }
+    }
+
+    /// <summary>Finds a column by the name the user gave; -1 and an error when there is none.</summary>
+    public static int FindNamed(List<ColumnHeader> headers, string name, LogSource source)
+    {
+        var index = headers.FindIndex(h => h.Name == name);
+        if (index < 0) index = headers.FindIndex(h => h.Name.Equals(name, StringComparison.OrdinalIgnoreCase));
+        if (index < 0)
+        {
+            source.Diagnostics.Error(
+                source.At(), $"found no column \"{name}\", expected it as depth{NearestName.Hint(name, headers.Select(h => h.Name))}");
+        }
+
+        return index;
+    }
+
+    /// <summary>Finds the depth column by the usual names; -1 and a warning when there is none.</summary>
+    public static int FindDepth(List<ColumnHeader> headers, LogSource source)
+    {
+        foreach (var name in DepthNames)
+        {
+            var index = headers.FindIndex(h => h.Name.Replace(' ', '_').Equals(name, StringComparison.OrdinalIgnoreCase));
+            if (index < 0) continue;
+            return index;
+        }
+
+        source.Diagnostics.Warning(
+            source.At(), $"found no depth column, expected one named {string.Join(", ", DepthNames[..^1])} or {DepthNames[^1]}");
+        return -1;
+    }
+}

@@ -1,0 +1,174 @@
+using System.Text;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Files.Reading;
+
+/// <summary>Reads the sections of a LAS file up to its data.</summary>
+internal sealed class LasHeaderReader(LogSource source, LineReader lines)
+{
+    private readonly LasHeader _header = new();
+    private readonly HashSet<char> _sections = [];
+    private readonly HashSet<string> _seen = [];
+    private char _section;
+    private bool _bad, _latin, _strayReported;
+
+    /// <summary>Reads up to and with the title of the data section; null when the file cannot be used.</summary>
+    public LasHeader? Read()
+    {
+        while (!_bad && _section != 'A' && lines.TryRead(out var bytes))
+        {
+            var text = TextCleaner.Decode(bytes, ref _latin);
+            var trimmed = text.AsSpan().Trim();
+            if (trimmed.IsEmpty || trimmed[0] == '#') continue;
+            if (trimmed[0] == '~') OpenSection(TextCleaner.Clean(text));
+            else ReadLine(text);
+        }
+
+        if (lines.TooLong)
+        {
+            source.LineTooLong(lines.Line + 1);
+            return null;
+        }
+
+        if (_bad) return null;
+        Close();
+        return _bad ? null : _header;
+    }
+
+    private void OpenSection(string title)
+    {
+        _section = title.Length > 1 ? char.ToUpperInvariant(title[1]) : ' ';
+        if (!"VWCPOA".Contains(_section, StringComparison.Ordinal))
+        {
+            source.Diagnostics.Note(source.At(lines.Line, 1), $"section \"{Cut(title)}\" is not read");
+        }
+        else if (!_sections.Add(_section))
+        {
+            Error(1, $"found a second ~{_section} section, expected one");
+        }
+    }
+
+    private void ReadLine(string text)
+    {
+        switch (_section)
+        {
+            case 'V' or 'W' or 'C':
+                if (!LasHeaderLine.TryParse(text, out var parts))
+                {
+                    Warn($"found \"{Cut(text)}\" without a dot, expected MNEM.UNIT DATA : DESCRIPTION; the line is left out");
+                    return;
+                }
+
+                if (!parts.HasColon) Warn($"found \"{Cut(text)}\" without a colon, expected MNEM.UNIT DATA : DESCRIPTION");
+                if (_section == 'V') ReadVersion(parts);
+                else if (_section == 'W') ReadWell(parts);
+                else AddCurve(parts, text);
+                break;
+            case '\0' when !_strayReported:
+                _strayReported = true;
+                source.Diagnostics.Error(source.At(lines.Line, 1), $"found \"{Cut(text)}\" before the first section, expected a line that starts with ~");
+                break;
+            default:
+                break;
+        }
+    }
+
+    private void ReadVersion(LasHeaderLine parts)
+    {
+        var name = parts.Mnemonic.ToUpperInvariant();
+        switch (name)
+        {
+            case "VERS":
+                ReadVersionNumber(parts.Data);
+                break;
+            case "WRAP" when parts.Data.Equals("YES", StringComparison.OrdinalIgnoreCase):
+                Error(0, "found WRAP YES, expected WRAP NO (wrapped files are not read yet)");
+                break;
+            case "WRAP" when !parts.Data.Equals("NO", StringComparison.OrdinalIgnoreCase):
+                Error(0, $"found WRAP \"{Cut(parts.Data)}\", expected NO");
+                break;
+            case "DLM" when parts.Data.ToUpperInvariant() is not ("" or "SPACE" or "TAB"):
+                Error(0, $"found DLM {Cut(parts.Data)}, expected SPACE or TAB (other delimiters are not read yet)");
+                break;
+            default:
+                break;
+        }
+
+        _seen.Add(name);
+    }
+
+    private void ReadVersionNumber(string text)
+    {
+        if (!QuantityText.TryNumber(text, out var version))
+        {
+            Warn($"found the version \"{Cut(text)}\", read as LAS 2.0");
+        }
+        else if (version >= 3)
+        {
+            Error(0, $"found LAS {Cut(text)}, expected LAS 2.0 (LAS 3.0 is not read yet)");
+        }
+        else
+        {
+            _header.Version = version;
+            if (version != 2) source.Diagnostics.Note(source.At(lines.Line), $"found LAS {Cut(text)}, read by the rules of LAS 2.0");
+        }
+    }
+
+    private void ReadWell(LasHeaderLine parts)
+    {
+        var name = parts.Mnemonic.ToUpperInvariant();
+        _seen.Add(name);
+        if (name == "WELL")
+        {
+            // Before version 2 the value stood behind the colon.
+            var well = _header.Version < 2 ? parts.Description : parts.Data;
+            _header.Well = well.Length > 0 ? well : null;
+        }
+
+        if (name is not ("STRT" or "STOP" or "STEP" or "NULL") || parts.Data.Length == 0) return;
+        if (!QuantityText.TryNumber(parts.Data, out var value))
+        {
+            Warn($"found {name} \"{Cut(parts.Data)}\", expected a number");
+            return;
+        }
+
+        var place = (value, source.At(lines.Line));
+        if (name == "NULL") _header.Null = value;
+        else if (name == "STRT") _header.Start = place;
+        else if (name == "STOP") _header.Stop = place;
+        else _header.Step = place;
+    }
+
+    private void AddCurve(LasHeaderLine parts, string text)
+    {
+        var column = text.Length - text.AsSpan().TrimStart().Length + 1;
+        var unit = parts.Unit.Length > 0 ? parts.Unit : null;
+        _header.Curves.Add(new ColumnHeader(parts.Mnemonic, unit, parts.Description, source.At(lines.Line, column)));
+    }
+
+    private void Close()
+    {
+        if (!_seen.Contains("VERS")) source.Diagnostics.Warning(source.At(), "found no VERS line, expected LAS 2.0; read as LAS 2.0");
+        if (!_seen.Contains("WRAP")) source.Diagnostics.Warning(source.At(), "found no WRAP line, expected WRAP NO; read as not wrapped");
+        if (_header.Null is null && !_seen.Contains("NULL"))
+        {
+            source.Diagnostics.Note(source.At(), "found no NULL line; -999.25, -999 and -9999 are read as missing");
+        }
+
+        if (_header.Curves.Count == 0) Error(-1, "found no curves, expected a ~C section that lists them");
+        if (!_sections.Contains('A')) Error(-1, "found no ~A section, expected the data in it");
+        if (_latin) source.Diagnostics.Note(source.At(), "found bytes that are not UTF-8, read them as Latin-1");
+        _bad |= _strayReported;
+        ColumnHeader.MakeUnique(_header.Curves, source.Diagnostics);
+    }
+
+    private void Error(int column, string text)
+    {
+        _bad = true;
+        source.Diagnostics.Error(column < 0 ? source.At() : source.At(lines.Line, column), text);
+    }
+
+    private void Warn(string text) => source.Diagnostics.Warning(source.At(lines.Line), text);
+
+    private static string Cut(string text) => TextCleaner.Quote(Encoding.UTF8.GetBytes(text));
+}
