@@ -2,10 +2,14 @@ using System.Security.Cryptography;
 
 namespace DepthStress.Files.Reading;
 
-/// <summary>Passes on what is read from a stream and hashes it on the way, so that the hash is that of the very bytes that were read.</summary>
+/// <summary>
+/// Passes on what is read from a stream and hashes it on the way, so that the hash is that of the very bytes that were
+/// read. A copy of each block is hashed beside the work on the block itself.
+/// </summary>
 internal sealed class HashingStream(Stream inner) : Stream
 {
-    private readonly IncrementalHash _hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);
+    private byte[] _block = [];
+    private Task<IncrementalHash> _hashing = Task.Run(() => IncrementalHash.CreateHash(HashAlgorithmName.SHA256));
 
     /// <summary>Number of bytes read so far.</summary>
     public long BytesRead { get; private set; }
@@ -20,14 +24,22 @@ internal sealed class HashingStream(Stream inner) : Stream
 
     public override long Position { get => BytesRead; set => throw new NotSupportedException(); }
 
-    /// <summary>SHA-256 of the bytes read since the last call, as lower-case hexadecimal digits.</summary>
-    public string TakeHash() => Convert.ToHexStringLower(_hash.GetHashAndReset());
+    /// <summary>SHA-256 of the bytes read so far, as lower-case hexadecimal digits.</summary>
+    public string Sha256() => Convert.ToHexStringLower(_hashing.GetAwaiter().GetResult().GetCurrentHash());
 
     public override int Read(Span<byte> buffer)
     {
         var n = inner.Read(buffer);
-        _hash.AppendData(buffer[..n]);
+        if (n == 0) return 0;
         BytesRead += n;
+        var hash = _hashing.GetAwaiter().GetResult();
+        if (_block.Length < n) _block = new byte[buffer.Length];
+        buffer[..n].CopyTo(_block);
+        _hashing = Task.Run(() =>
+        {
+            hash.AppendData(_block, 0, n);
+            return hash;
+        });
         return n;
     }
 
@@ -45,7 +57,7 @@ internal sealed class HashingStream(Stream inner) : Stream
 
     protected override void Dispose(bool disposing)
     {
-        if (disposing) _hash.Dispose();
+        if (disposing) _hashing.GetAwaiter().GetResult().Dispose();
         base.Dispose(disposing);
     }
 }

@@ -148,6 +148,8 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
 
     private void Close()
     {
+        _bad |= _strayReported;
+        if (_bad && _sections.Count == 0) return;
         if (!_seen.Contains("VERS")) source.Diagnostics.Warning(source.At(), "found no VERS line, expected LAS 2.0; read as LAS 2.0");
         if (!_seen.Contains("WRAP")) source.Diagnostics.Warning(source.At(), "found no WRAP line, expected WRAP NO; read as not wrapped");
         if (_header.Null is null && !_seen.Contains("NULL"))
@@ -158,7 +160,6 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
         if (_header.Curves.Count == 0) Error(-1, "found no curves, expected a ~C section that lists them");
         if (!_sections.Contains('A')) Error(-1, "found no ~A section, expected the data in it");
         if (_latin) source.Diagnostics.Note(source.At(), "found bytes that are not UTF-8, read them as Latin-1");
-        _bad |= _strayReported;
         ColumnHeader.MakeUnique(_header.Curves, source.Diagnostics);
     }
 

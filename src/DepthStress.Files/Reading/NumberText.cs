@@ -26,19 +26,20 @@ internal static class NumberText
         var negative = text.Length > 0 && text[0] == (byte)'-';
         if (negative || (text.Length > 0 && text[0] == (byte)'+')) i++;
         ulong mantissa = 0;
-        int start = i, point = -1;
-        for (; i < text.Length; i++)
+        var start = i;
+        for (; i < text.Length && (uint)(text[i] - '0') is var digit and <= 9; i++) mantissa = (mantissa * 10) + digit;
+        var digits = i - start;
+        var power = 0;
+        if (i < text.Length && text[i] == (byte)'.')
         {
-            var digit = (uint)(text[i] - '0');
-            if (digit <= 9) mantissa = (mantissa * 10) + digit;
-            else if (text[i] == (byte)'.' && point < 0) point = i;
-            else break;
+            var point = i++;
+            for (; i < text.Length && (uint)(text[i] - '0') is var digit and <= 9; i++) mantissa = (mantissa * 10) + digit;
+            power = point + 1 - i;
+            digits -= power;
         }
 
-        var digits = i - start - (point >= 0 ? 1 : 0);
         value = double.NaN;
         if (digits == 0) return 0;
-        var power = point >= 0 ? point + 1 - i : 0;
         if (i < text.Length && (text[i] | 0x20) == 'e') i = ReadExponent(text, i, ref power);
         if (digits <= MostDigits && mantissa <= ExactInteger && Math.Abs(power) < PowersOfTen.Length)
         {

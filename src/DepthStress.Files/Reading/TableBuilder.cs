@@ -117,11 +117,12 @@ internal sealed class TableBuilder
         }
 
         return new LogFile(
-            _source.Name, format, wellName, _null, columns, _depth, _rows, _source.Stream.BytesRead, _source.Stream.TakeHash());
+            _source.Name, format, wellName, _null, columns, _depth, _rows, _source.Stream.BytesRead, _source.Stream.Sha256());
     }
 
     private bool IsMissing(double value, int column) =>
-        double.IsNaN(value) || value is -999.25 or -999 or -9999 || value == _columnNull[column] || value == _columnCode[column];
+        (!(value > -999) && (double.IsNaN(value) || value is -999.25 or -999 or -9999))
+        || value == _columnNull[column] || value == _columnCode[column];
 
     private void Grow(int line)
     {
