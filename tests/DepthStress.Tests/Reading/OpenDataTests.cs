@@ -22,7 +22,7 @@ public class OpenDataTests
         ["encodings_utf8wbom.las"] = $"(45): error: {Descending}",
         ["excess_curves.las"] = "(27): error: found 4 values, expected 6 (one for each column)",
         ["header_only.las"] = ": error: found no ~A section, expected the data in it",
-        ["index_null.las"] = "3 x 4",
+        ["index_null.las"] = ": 3 x 4",
         ["missing_a_section.las"] = ": error: found no data rows, expected at least one",
         ["missing_null.las"] = $"(44): error: {Descending}",
         ["missing_vers.las"] = $"(44): error: {Descending}",
@@ -44,7 +44,7 @@ public class OpenDataTests
         ["null_policy_runon.las"] = "(33): error: found 6 values, expected 7 (one for each column)",
         ["sample_2.0-small-neg-values.las"] = $"(46): error: {Descending}",
         ["sample_2.0.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_based.las"] = "6 x 3",
+        ["sample_2.0_based.las"] = ": 6 x 3",
         ["sample_2.0_empty_other_section.las"] = $"(44): error: {Descending}",
         ["sample_2.0_inf_api_leading_zero.las"] = $"(46): error: {Descending}",
         ["sample_2.0_inf_uwi.las"] = $"(46): error: {Descending}",
@@ -68,7 +68,7 @@ public class OpenDataTests
         var folder = Path.Combine(OpenDataFactAttribute.Folder, "las-samples");
         var found = Directory.GetFiles(folder).Select(Path.GetFileName).Where(f => f!.EndsWith(".las", StringComparison.Ordinal) || f.EndsWith(".csv", StringComparison.Ordinal));
         Assert.Equal(Samples.Keys.Order(StringComparer.Ordinal), found.Order(StringComparer.Ordinal));
-        Assert.Equal(Samples.Select(s => s.Key + s.Value), Samples.Keys.Select(f => f + Outcome(folder, f)));
+        Assert.Equal(Samples.Select(s => s.Key + s.Value), Samples.Keys.Select(f => Outcome(folder, f)));
     }
 
     [OpenDataFact]
@@ -105,9 +105,9 @@ public class OpenDataTests
     private static string Outcome(string folder, string name)
     {
         var bag = new DiagnosticBag();
-        var file = LogFileReader.Read(Path.Combine(folder, name), "", new LogReadOptions(), bag);
+        var file = LogFileReader.Read(Path.Combine(folder, name), name, new LogReadOptions(), bag);
         return file is not null
-            ? string.Create(CultureInfo.InvariantCulture, $"{file.Rows} x {file.Columns.Count}")
+            ? string.Create(CultureInfo.InvariantCulture, $"{name}: {file.Rows} x {file.Columns.Count}")
             : bag.Items.First(d => d.Severity == Severity.Error).ToString();
     }
 }
