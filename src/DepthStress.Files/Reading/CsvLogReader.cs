@@ -21,10 +21,10 @@ internal static class CsvLogReader
         {
             return Read(source, csv, malformed);
         }
-        catch (CsvFormatException)
+        catch (CsvFormatException tooLong)
         {
-            // The only exception these options leave.
-            source.LineTooLong((int)csv.LineNumber + 1);
+            // A record beyond the limit: the only exception these options leave.
+            source.LineTooLong((int)tooLong.LineNumber);
             return null;
         }
     }
@@ -80,7 +80,7 @@ internal static class CsvLogReader
             if (NumberText.TryParse(csv.GetSpan(c), out row[c])) continue;
             good = false;
             depthIsBad |= c == depth;
-            table.BadCell(line, ColumnOf(csv, c), c, csv.GetSpan(c));
+            if (table.Tally.Admit(RowProblem.Cell, source.At(line))) table.BadCell(line, ColumnOf(csv, c), c, csv.GetSpan(c));
         }
 
         if (good) table.AddRow(line);

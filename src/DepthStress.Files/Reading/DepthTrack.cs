@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Runtime.CompilerServices;
 
 namespace DepthStress.Files.Reading;
 
@@ -21,6 +22,7 @@ internal sealed class DepthTrack(LogSource source, ProblemTally tally)
     public double MaxStep { get; private set; }
 
     /// <summary>Takes the depth of the next row; NaN is missing.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public void Add(double depth, int line)
     {
         _rows++;

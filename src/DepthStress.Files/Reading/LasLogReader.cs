@@ -1,5 +1,6 @@
 using System.Runtime.CompilerServices;
 using System.Text;
+using DepthStress.Core.Diagnostics;
 
 namespace DepthStress.Files.Reading;
 
@@ -26,9 +27,15 @@ internal static class LasLogReader
             bad.Clear();
             var found = ReadRow(line, table.Row, bad);
             if (found == 0) continue;
+            if (line.TrimStart(" \t"u8)[0] == (byte)'~')
+            {
+                source.Diagnostics.Error(source.At(lines.Line), "found a section after ~A, expected the data to come last");
+                return null;
+            }
+
             if (found != table.Row.Length) table.WrongCount(lines.Line, found);
             else if (bad.Count == 0) table.AddRow(lines.Line);
-            else ReportCells(line, lines.Line, bad, table, depth);
+            else ReportCells(line, source.At(lines.Line), bad, table, depth);
         }
 
         if (lines.TooLong)
@@ -67,16 +74,17 @@ internal static class LasLogReader
     }
 
     private static void ReportCells(
-        ReadOnlySpan<byte> line, int number, List<(int Index, int Start, int Length)> bad, TableBuilder table, int depth)
+        ReadOnlySpan<byte> line, SourcePosition position, List<(int Index, int Start, int Length)> bad, TableBuilder table, int depth)
     {
         var depthIsBad = false;
         foreach (var (index, start, length) in bad)
         {
             depthIsBad |= index == depth;
-            table.BadCell(number, Encoding.UTF8.GetCharCount(line[..start]) + 1, index, line.Slice(start, length));
+            if (!table.Tally.Admit(RowProblem.Cell, position)) continue;
+            table.BadCell(position.Line, Encoding.UTF8.GetCharCount(line[..start]) + 1, index, line.Slice(start, length));
         }
 
-        table.SkipRow(number, depthIsBad);
+        table.SkipRow(position.Line, depthIsBad);
     }
 
     private static bool IsBlank(byte b) => b is (byte)' ' or (byte)'\t';

@@ -55,6 +55,7 @@ internal static class NumberText
     }
 
     /// <summary>Reads a whole cell; empty and NaN give NaN. False where it is anything else than one finite number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static bool TryParse(ReadOnlySpan<byte> cell, out double value)
     {
         if (cell.Length > 0 && (cell[0] <= ' ' || cell[^1] <= ' ')) cell = cell.Trim(" \t"u8);

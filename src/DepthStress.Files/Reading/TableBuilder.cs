@@ -76,11 +76,10 @@ internal sealed class TableBuilder
         else Depth.Add(IsMissing(Row[_depth], _depth) ? double.NaN : Row[_depth], line);
     }
 
-    /// <summary>Reports a cell that is no number.</summary>
+    /// <summary>Reports a cell that is no number and that the tally admits.</summary>
     public void BadCell(int line, int column, int index, ReadOnlySpan<byte> text)
     {
         var position = _source.At(line, column);
-        if (!Tally.Admit(RowProblem.Cell, position)) return;
         var quoted = TextCleaner.Quote(text);
         _source.Diagnostics.Error(position, NumberText.HasDecimalComma(text)
             ? $"column \"{_headers[index].Name}\": found the decimal comma in \"{quoted}\", expected a decimal point"
@@ -120,6 +119,7 @@ internal sealed class TableBuilder
             _source.Name, format, wellName, _null, columns, _depth, _rows, _source.Stream.BytesRead, _source.Stream.Sha256());
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private bool IsMissing(double value, int column) =>
         (!(value > -999) && (double.IsNaN(value) || value is -999.25 or -999 or -9999))
         || value == _columnNull[column] || value == _columnCode[column];

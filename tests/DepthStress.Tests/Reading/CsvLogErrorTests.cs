@@ -62,7 +62,7 @@ public class CsvLogErrorTests
         var errors = LogReading.Csv(text.ToString()).Errors;
         Assert.Equal(42, errors.Length);
         Assert.Equal("a.csv(2,3): error: column \"GR\": found \"x\", expected a number", errors[0]);
-        Assert.Equal("a.csv(42,4): error: and 10 more cells that are not numbers, from here on", errors[40]);
+        Assert.Equal("a.csv(42): error: and 10 more cells that are not numbers, from here on", errors[40]);
         Assert.Equal("a.csv(43): error: and 10 more rows with a wrong number of values, from here on", errors[41]);
     }
 
@@ -100,7 +100,15 @@ public class CsvLogErrorTests
             "a.csv: error: found no column \"TVDX\", expected it as depth; did you mean \"TVD\"?");
 
     [Fact]
+    public void Many_bad_cells_in_a_long_row_are_counted_without_ado()
+    {
+        var names = string.Concat(Enumerable.Range(0, 100_000).Select(i => FormattableString.Invariant($",C{i}")));
+        var errors = LogReading.Csv($"DEPT{names}\n1{string.Concat(Enumerable.Repeat(",x", 100_000))}\n").Errors;
+        Assert.Equal("a.csv(2): error: and 99980 more cells that are not numbers, from here on", errors[^1]);
+    }
+
+    [Fact]
     public void A_line_beyond_the_limit_is_refused() =>
-        LogReading.Csv($"DEPT,GR\n1,2\n3,{new string('1', 3 << 20)}\n").IsRefusedWith(
-            "a.csv(3): error: found a line of more than 1 MiB, expected a line for each depth");
+        LogReading.Csv($"DEPT,GR\n1,2\n\n3,{new string('1', 3 << 20)}\n").IsRefusedWith(
+            "a.csv(4): error: found a line of more than 1 MiB, expected a line for each depth");
 }

@@ -66,6 +66,10 @@ public class LasLogErrorTests
         "a.las(9,1): error: found a second ~C section, expected one");
 
     [Fact]
+    public void A_section_after_the_data_is_an_error() => Read("1 2\n ~Other\n").IsRefusedWith(
+        "a.las(11): error: found a section after ~A, expected the data to come last");
+
+    [Fact]
     public void Text_before_the_first_section_is_an_error() => LogReading.Las("100.0 2.5\n101.0 2.6\n").IsRefusedWith(
         "a.las(1,1): error: found \"100.0 2.5\" before the first section, expected a line that starts with ~");
 

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
 using DepthStress.Core.Diagnostics;
@@ -122,6 +123,25 @@ public sealed class LogFileReaderTests : IDisposable
         LogReading.Las($"{LogReading.LasHead}~C\nDEPT.m:\n~A{empty}x{empty}")
             .IsRefusedWith("a.las(1000008,1): error: column \"DEPT\": found \"x\", expected a number");
         LogReading.Csv(empty).IsRefusedWith("a.csv: error: found no header row, expected the names of the columns");
+    }
+
+    [Fact]
+    public void The_culture_of_the_machine_does_not_matter()
+    {
+        var before = CultureInfo.CurrentCulture;
+        var comma = (CultureInfo)CultureInfo.InvariantCulture.Clone();
+        (comma.NumberFormat.NumberDecimalSeparator, comma.NumberFormat.NegativeSign) = (",", "~");
+        try
+        {
+            CultureInfo.CurrentCulture = comma;
+            Assert.Equal([-1.5, 2.25], LogReading.Csv("DEPT,GR\n1.5,-1.5\n2.5,22500000000000000000000000e-25\n").Clean().Columns[1].Values);
+            LogReading.Csv("DEPT,GR\n1.5,1\n-1.5,1\n").IsRefusedWith(
+                "a.csv(3): error: depth decreases, expected increasing (from 1.5 to -1.5)");
+        }
+        finally
+        {
+            CultureInfo.CurrentCulture = before;
+        }
     }
 
     [Fact]
