@@ -56,6 +56,19 @@ public class CsvLogReaderTests
         Assert.Equal(1, column.Missing);
     }
 
+    // The neighbours of 2^64 and 2^53, where an integer of 64 or 53 bits gives out.
+    [Theory]
+    [InlineData("18446744073709551617", 18446744073709551616.0)]
+    [InlineData("1844674407370955161.7", 1844674407370955264.0)]
+    [InlineData("0.000000000000000000000000018446744073709551617", 1.8446744073709552e-26)]
+    [InlineData("9007199254740993", 9007199254740992.0)]
+    [InlineData("9007199254740995", 9007199254740996.0)]
+    [InlineData("-.5", -0.5)]
+    [InlineData("+5.", 5.0)]
+    [InlineData("4.9e-324", 5e-324)]
+    public void Numbers_with_many_digits_or_odd_forms_are_rounded_correctly(string cell, double expected) =>
+        Assert.Equal(expected, LogReading.Csv($"DEPT,GR\n1,{cell}\n").Clean().Columns[1].Values[0]);
+
     [Theory]
     [InlineData("-999.3")]
     [InlineData("-99.925")]

@@ -45,6 +45,14 @@ public class LasLogErrorTests
     public void Text_in_the_data_is_told_with_line_and_column(string cell) => Read($"1 2\n 2  {cell}\n").IsRefusedWith(
         $"a.las(11,5): error: column \"GR\": found \"{cell}\", expected a number");
 
+    [Theory]
+    [InlineData("\n")]
+    [InlineData("\r\n")]
+    [InlineData("\r")]
+    public void Line_numbers_are_exact_for_any_line_end(string end) =>
+        LogReading.Las($"{LogReading.LasHead}{Curves}\n~A\n1 2\n2 x\n".Replace("\n", end, StringComparison.Ordinal)).IsRefusedWith(
+            "a.las(12,3): error: column \"GR\": found \"x\", expected a number");
+
     [Fact]
     public void A_decimal_comma_is_told_as_such() => Read("1 123,45\n").IsRefusedWith(
         "a.las(10,3): error: column \"GR\": found the decimal comma in \"123,45\", expected a decimal point");
