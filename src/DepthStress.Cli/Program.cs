@@ -1,1 +1,3 @@
-Console.WriteLine("depthstress");
+using DepthStress.Cli;
+
+return await Application.RunAsync(args, Terminal.OfProcess(), CancellationToken.None);

@@ -43,7 +43,7 @@ public static class CurveRoles
 
     /// <summary>Column names for measured depth (common practice).</summary>
     public static IReadOnlyList<string> DepthMnemonics { get; } =
-        ["DEPT", "DEPTH", "MD", "DEPTH_MD", "MEASURED_DEPTH", "TDEP", "DEPT_MD"];
+        ["DEPT", "DEPTH", "MD", "MEASURED_DEPTH", "DEPTH_MD", "TDEP", "MD_DEPTH", "MEASDEPTH", "MEASUREDDEPTH"];
 
     /// <summary>Finds a role by its name in the well file, or null.</summary>
     public static CurveRole? Find(string id) => All.FirstOrDefault(r => r.Id == id);

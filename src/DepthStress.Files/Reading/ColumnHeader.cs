@@ -6,10 +6,6 @@ namespace DepthStress.Files.Reading;
 /// <summary>What a file says of a column before its values.</summary>
 internal sealed record ColumnHeader(string Name, string? Unit, string Description, SourcePosition Position)
 {
-    /// <summary>Usual names of measured depth in their order of preference (common practice).</summary>
-    private static readonly string[] DepthNames =
-        ["DEPT", "DEPTH", "MD", "MEASURED_DEPTH", "DEPTH_MD", "TDEP", "MD_DEPTH", "MEASDEPTH", "MEASUREDDEPTH"];
-
     /// <summary>Names blank columns UNKNOWN and numbers equal names (without regard to case) <c>:1</c>, <c>:2</c>, each with a note.</summary>
     public static void MakeUnique(List<ColumnHeader> headers, DiagnosticBag diagnostics)
     {
@@ -51,18 +47,19 @@ internal sealed record ColumnHeader(string Name, string? Unit, string Descriptio
         return index;
     }
 
-    /// <summary>Finds the depth column by the usual names; -1 and a warning when there is none.</summary>
+    /// <summary>Finds the depth column by the usual names; -1 and an error when there is none.</summary>
     public static int FindDepth(List<ColumnHeader> headers, LogSource source)
     {
-        foreach (var name in DepthNames)
+        var names = source.Options.DepthNames;
+        foreach (var name in names)
         {
             var index = headers.FindIndex(h => h.Name.Replace(' ', '_').Equals(name, StringComparison.OrdinalIgnoreCase));
             if (index < 0) continue;
             return index;
         }
 
-        source.Diagnostics.Warning(
-            source.At(), $"found no depth column, expected one named {string.Join(", ", DepthNames[..^1])} or {DepthNames[^1]}");
+        source.Diagnostics.Error(
+            source.At(1), $"found no depth column, expected one named {string.Join(", ", names.SkipLast(1))} or {names[^1]}");
         return -1;
     }
 }

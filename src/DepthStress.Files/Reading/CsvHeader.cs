@@ -17,7 +17,7 @@ internal static class CsvHeader
         {
             var cell = csv.GetSpan(c);
             if (!cell.IsEmpty && NumberText.TryParse(cell, out _)) numbers++;
-            var (name, unit) = SplitUnit(TextCleaner.Clean(TextCleaner.Decode(cell, ref latin)));
+            var (name, unit) = SplitUnit(TextCleaner.Clean(TextCleaner.Decode(cell, ref latin)), source.Options.UnitSuffixes);
             headers.Add(new ColumnHeader(name, unit, "", source.At(line, column)));
         }
 
@@ -44,7 +44,7 @@ internal static class CsvHeader
     /// </summary>
     public static bool TakeUnitRow(CsvReader csv, List<ColumnHeader> headers, int depthColumn, LogSource source)
     {
-        if (depthColumn < 0 || csv.FieldCount != headers.Count) return false;
+        if (csv.FieldCount != headers.Count) return false;
         var units = new string[headers.Count];
         var latin = false;
         for (var c = 0; c < units.Length; c++)
@@ -76,8 +76,10 @@ internal static class CsvHeader
     public static int RawLength(CsvReader csv, int index) => Encoding.UTF8.GetCharCount(csv.GetRawSpan(index));
 
     // A number in brackets is an index and belongs to the name.
-    private static (string Name, string? Unit) SplitUnit(string text)
+    private static (string Name, string? Unit) SplitUnit(string text, bool suffixes)
     {
+        if (suffixes && Units.All.FirstOrDefault(u => u.Suffix.Length > 0 && text.EndsWith("_" + u.Suffix, StringComparison.OrdinalIgnoreCase)) is { } suffixed)
+            return (text[..^(suffixed.Suffix.Length + 1)], suffixed.Symbol);
         var open = text.Length > 0 && text[^1] is ']' or ')' ? text.LastIndexOf(text[^1] == ']' ? '[' : '(') : -1;
         if (open <= 0) return (text, null);
         var unit = text[(open + 1)..^1].Trim();

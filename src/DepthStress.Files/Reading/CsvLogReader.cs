@@ -47,7 +47,7 @@ internal static class CsvLogReader
         var depth = source.Options.DepthColumn is { } named
             ? ColumnHeader.FindNamed(headers, named, source)
             : ColumnHeader.FindDepth(headers, source);
-        if (depth < 0 && source.Options.DepthColumn is not null) return null;
+        if (depth < 0) return null;
         var more = csv.Read();
         if (more && malformed.Count == 0 && CsvHeader.TakeUnitRow(csv, headers, depth, source)) more = csv.Read();
         var table = new TableBuilder(source, headers, depth, nullValue: null);

@@ -6,7 +6,7 @@ namespace DepthStress.Files.Reading;
 /// <param name="WellName">The well's name in the file (LAS only), or null.</param>
 /// <param name="NullValue">The missing-value code the file states (LAS only), or null.</param>
 /// <param name="Columns">The columns in the order of the file.</param>
-/// <param name="DepthColumn">Index of the depth column, whose values strictly increase and are never missing; -1 where none is known.</param>
+/// <param name="DepthColumn">Index of the depth column, whose values strictly increase and are never missing.</param>
 /// <param name="Rows">Number of rows.</param>
 /// <param name="Bytes">Size of the file in bytes.</param>
 /// <param name="Sha256">SHA-256 of the very bytes that were read, 64 lower-case hexadecimal digits.</param>

@@ -1,3 +1,5 @@
+using DepthStress.Core.Logs;
+
 namespace DepthStress.Files.Reading;
 
 /// <summary>What the well file says about reading a log file.</summary>
@@ -11,7 +13,13 @@ public sealed record LogReadOptions
 
     /// <summary>
     /// Name of the depth column, without regard to case; null takes the first curve of a LAS file, and in a CSV file the
-    /// column whose name is a usual one for measured depth.
+    /// column that has one of <see cref="DepthNames"/>.
     /// </summary>
     public string? DepthColumn { get; init; }
+
+    /// <summary>Names of a depth column in a CSV file, in the order of preference, without regard to case.</summary>
+    public IReadOnlyList<string> DepthNames { get; init; } = CurveRoles.DepthMnemonics;
+
+    /// <summary>True when a CSV column's name may end in its unit, as in <c>md_m</c> or <c>inclination_deg</c>.</summary>
+    public bool UnitSuffixes { get; init; }
 }

@@ -35,7 +35,7 @@ internal sealed class TableBuilder
         }
 
         // A positive NULL may well be a depth; a negative one is none.
-        if (depthColumn >= 0 && nullValue >= 0) _columnNull[depthColumn] = double.NaN;
+        if (nullValue >= 0) _columnNull[depthColumn] = double.NaN;
     }
 
     /// <summary>The numbers of the row being read, NaN where the cell is empty; <see cref="AddRow"/> takes them.</summary>
@@ -64,14 +64,13 @@ internal sealed class TableBuilder
             _values[c][_rows] = value;
         }
 
-        if (_depth >= 0) Depth.Add(_values[_depth][_rows], line);
+        Depth.Add(_values[_depth][_rows], line);
         _rows++;
     }
 
     /// <summary>Leaves out a row with unreadable cells (already reported); its depth still counts.</summary>
     public void SkipRow(int line, bool depthIsBad)
     {
-        if (_depth < 0) return;
         if (depthIsBad) Depth.Skip();
         else Depth.Add(IsMissing(Row[_depth], _depth) ? double.NaN : Row[_depth], line);
     }

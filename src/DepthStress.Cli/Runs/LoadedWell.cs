@@ -1,0 +1,30 @@
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Model;
+using DepthStress.Files.Ingest;
+using DepthStress.Files.Setup;
+
+namespace DepthStress.Cli.Runs;
+
+/// <summary>A well that was read and computed, before anything is written.</summary>
+/// <param name="File">The well file.</param>
+/// <param name="Logs">The logs.</param>
+/// <param name="Model">The model.</param>
+internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel Model)
+{
+    /// <summary>Reads and computes a well; null when its input cannot be used.</summary>
+    /// <param name="path">Full path of the well file.</param>
+    /// <param name="diagnostics">Gets every message.</param>
+    /// <param name="stage">Told the name of each stage as it begins.</param>
+    /// <param name="cancellation">Stops between stages.</param>
+    public static LoadedWell? Load(string path, DiagnosticBag diagnostics, Action<string> stage, CancellationToken cancellation)
+    {
+        stage("reading the well file");
+        if (WellFileReader.Read(path, diagnostics) is not { } file) return null;
+        cancellation.ThrowIfCancellationRequested();
+        stage("reading the logs");
+        if (LogIngest.Read(file, diagnostics) is not { } logs) return null;
+        cancellation.ThrowIfCancellationRequested();
+        stage("computing");
+        return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model) : null;
+    }
+}

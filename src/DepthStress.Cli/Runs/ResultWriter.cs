@@ -1,0 +1,46 @@
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
+using DepthStress.Files.Writing;
+using DepthStress.Report;
+
+namespace DepthStress.Cli.Runs;
+
+/// <summary>Writes every result of a well into one folder, whole or not at all.</summary>
+internal static class ResultWriter
+{
+    /// <summary>The folder beside the well file.</summary>
+    public static string DefaultFolder(string wellFile) =>
+        Path.Combine(Path.GetDirectoryName(wellFile)!, Path.GetFileNameWithoutExtension(wellFile) + "-results");
+
+    /// <summary>Writes the results; on any failure or interruption the earlier ones stay as they were.</summary>
+    public static void Write(LoadedWell well, DiagnosticBag diagnostics, string folder, Action<string> stage, CancellationToken cancellation)
+    {
+        var (file, logs, model) = well;
+        var units = file.Sections.Output.Units.Value;
+        var layers = LayerBuilder.Build(model, file.Sections.Layers);
+        var pictures = new PictureOptions(units);
+        (string Name, Action<Stream> Write)[] results =
+        [
+            ("depth.csv", s => DepthCsv.Write(model, units, s)),
+            ("results.las", s => ResultsLas.Write(model, units, s)),
+            ("layers.csv", s => LayersCsv.Write(layers, units, s)),
+            ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
+            ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
+            ("stress.svg", s => StressPicture.Write(model, pictures, s)),
+            ("README.txt", s => ResultGuide.Write(file.Setup, units, s)),
+            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
+        ];
+
+        using var target = ResultFolder.Begin(folder);
+        foreach (var (name, write) in results)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            stage($"writing {name}");
+            using var stream = target.Create(name);
+            write(stream);
+        }
+
+        cancellation.ThrowIfCancellationRequested();
+        target.Commit();
+    }
+}

@@ -1,0 +1,158 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Depth;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Lithology;
+using DepthStress.Core.Model;
+using DepthStress.Core.Pressure;
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Files.Setup;
+
+/// <summary>Puts the bound sections together into the chain's setup, and reports what is missing or contradicts itself.</summary>
+internal static class SetupAssembly
+{
+    /// <summary>Assembles the setup; null when reference levels or the survey cannot be used.</summary>
+    public static WellSetup? Assemble(WellFileSections sections, string name, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
+    {
+        var file = new SourcePosition(name);
+        var well = sections.Well;
+        if (!well.Name.IsSet) diagnostics.Error(file, "[well] name is not set");
+        if (!sections.Logs.Files.IsSet || sections.Logs.Files.Value.Count == 0)
+            diagnostics.Error(file, "[logs] files is not set; expected the names of the log files");
+
+        var frame = Frame(well, file, diagnostics);
+        var trajectory = Trajectory(sections.Survey, file, folder, inputs, diagnostics);
+        CheckPoints(sections, diagnostics);
+        var zones = Zones(sections.Zones, diagnostics);
+        var lithologies = Lithologies(sections.Lithologies, diagnostics);
+        if (frame is null || trajectory is null) return null;
+        return new WellSetup
+        {
+            Position = file,
+            Name = well.Name.Value ?? "",
+            Frame = frame,
+            Trajectory = trajectory,
+            Zones = zones,
+            Lithologies = lithologies,
+            Settings = sections.Settings,
+            Overburden = sections.Overburden,
+            AcceptUnverified = sections.AcceptUnverified.Value,
+        };
+    }
+
+    private static DepthFrame? Frame(WellSection well, SourcePosition file, DiagnosticBag diagnostics)
+    {
+        if (!well.Datum.IsSet) diagnostics.Error(file, "[well] datum is not set; expected \"rotary table\", \"ground\" or \"sea level\"");
+        var elevation = well.DatumElevation;
+        if (!elevation.IsSet && well.Datum.IsSet)
+        {
+            elevation = well.Datum.Value switch
+            {
+                DatumKind.SeaLevel => Setting.Default(0.0),
+                DatumKind.Ground => well.GroundElevation,
+                _ => elevation,
+            };
+        }
+
+        if (!elevation.IsSet) diagnostics.Error(file, "[well] datum_elevation is not set; expected the datum's height above mean sea level");
+        if (well.GroundElevation.IsSet && well.WaterDepth.IsSet)
+        {
+            diagnostics.Error(
+                well.WaterDepth.Source.Position, "found both ground_elevation and water_depth; expected the first onshore, the second offshore");
+            return null;
+        }
+
+        if (!well.GroundElevation.IsSet && !well.WaterDepth.IsSet)
+            diagnostics.Error(file, "[well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them");
+        if (!well.Datum.IsSet || !elevation.IsSet || well.GroundElevation.IsSet == well.WaterDepth.IsSet) return null;
+        if (well.GroundElevation.IsSet && !well.WaterTableDepth.IsSet)
+            diagnostics.Note(file, "[well] water_table_depth is not set: the water table is taken at the ground");
+
+        var frame = new DepthFrame(
+            well.Datum.Value, elevation.Value, Value(well.GroundElevation), Value(well.WaterDepth), Value(well.WaterTableDepth));
+        var problems = DepthFrame.Validate(frame);
+        foreach (var problem in problems) diagnostics.Error(well.DatumElevation.IsSet ? well.DatumElevation.Source.Position : file, $"[well]: {problem}");
+        return problems.Count == 0 ? frame : null;
+    }
+
+    private static Trajectory? Trajectory(SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
+    {
+        if (survey.File.IsSet && survey.Vertical is { IsSet: true, Value: true })
+        {
+            diagnostics.Error(survey.Vertical.Source.Position, "found both a survey file and vertical = true, expected one of them");
+            return null;
+        }
+
+        if (survey.File.IsSet)
+        {
+            if (!survey.North.IsSet)
+                diagnostics.Error(file, "[survey] north is not set; expected \"true\", \"grid\" or \"magnetic\", what the survey's azimuths count from");
+            return SurveyFile.Read(Path.GetFullPath(survey.File.Value, folder), survey.File.Value, inputs, diagnostics);
+        }
+
+        if (survey.Vertical is { IsSet: true, Value: true }) return Core.Depth.Trajectory.Vertical;
+        diagnostics.Error(file, "[survey] is not set; expected file = \"...\" or vertical = true");
+        return null;
+    }
+
+    private static List<Zone> Zones(IReadOnlyList<ZoneSection> sections, DiagnosticBag diagnostics)
+    {
+        var zones = new List<Zone>();
+        foreach (var zone in sections)
+        {
+            if (!zone.Name.IsSet) diagnostics.Error(zone.Position, "[[zones]] name is not set");
+            if (!zone.Top.IsSet) diagnostics.Error(zone.Position, "[[zones]] top is not set");
+            if (!zone.DepthKind.IsSet) diagnostics.Error(zone.Position, "[[zones]] depth_kind is not set; expected \"md\", \"tvd\" or \"tvdss\"");
+            if (!zone.Name.IsSet || !zone.Top.IsSet || !zone.DepthKind.IsSet) continue;
+            zones.Add(new Zone(zone.Name.Value, zone.Top.Value, Value(zone.Base), zone.DepthKind.Value, zone.Overrides, zone.Position));
+        }
+
+        return zones;
+    }
+
+    private static List<LithologyChoice> Lithologies(IReadOnlyList<LithologySection> sections, DiagnosticBag diagnostics)
+    {
+        var choices = new List<LithologyChoice>();
+        foreach (var section in sections)
+        {
+            if (!section.Name.IsSet) diagnostics.Error(section.Position, "[[lithology]] name is not set");
+            var rule = new LithologyRule(
+                section.Name.Value ?? "",
+                Range(section.ShaleVolumeMin, section.ShaleVolumeMax),
+                Range(section.DensityMin, section.DensityMax),
+                Range(section.PhotoelectricMin, section.PhotoelectricMax),
+                section.Facies.IsSet ? section.Facies.Value : [],
+                section.Position);
+            if (rule is { ShaleVolume: null, Density: null, Photoelectric: null, Facies.Count: 0 })
+                diagnostics.Error(section.Position, "[[lithology]] has no rule; expected a cut-off such as shale_volume_max, or facies");
+            choices.Add(new LithologyChoice(rule, section.Overrides));
+        }
+
+        return choices;
+    }
+
+    private static void CheckPoints(WellFileSections sections, DiagnosticBag diagnostics)
+    {
+        foreach (var points in sections.Zones.Select(z => z.Overrides).Concat(sections.Lithologies.Select(l => l.Overrides))
+            .Append(sections.Settings).Select(s => s.PorePressure.Points).Where(p => p.IsSet))
+        {
+            PressurePoint? above = null;
+            foreach (var point in points.Value)
+            {
+                if (double.IsNaN(point.Depth) || double.IsNaN(point.Pressure))
+                    diagnostics.Error(points.Source.Position, "[pore_pressure] points: expected each point with depth and pressure");
+                else if (above is { } a && point.Depth <= a.Depth)
+                    diagnostics.Error(points.Source.Position, UnitSystem.Metric.Show($"[pore_pressure] points: found {Quantity.Length(point.Depth)} below {Quantity.Length(a.Depth)}, expected increasing depths"));
+                above = point;
+            }
+
+            if (points.Value.Count < 2) diagnostics.Error(points.Source.Position, "[pore_pressure] points: found one point, expected two or more");
+        }
+    }
+
+    private static Interval? Range(Setting<double> low, Setting<double> high) => !low.IsSet && !high.IsSet
+        ? null
+        : new Interval(low.IsSet ? low.Value : double.NegativeInfinity, high.IsSet ? high.Value : double.PositiveInfinity);
+
+    private static double? Value(Setting<double> setting) => setting.IsSet ? setting.Value : null;
+}

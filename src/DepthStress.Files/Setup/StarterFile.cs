@@ -1,0 +1,150 @@
+using System.Globalization;
+using System.Text;
+using DepthStress.Core.Logs;
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+using DepthStress.Files.Ingest;
+using DepthStress.Files.Reading;
+using MathNet.Numerics.Statistics;
+
+namespace DepthStress.Files.Setup;
+
+/// <summary>Writes a starter well file for a log file: what was recognised, and every choice with a comment.</summary>
+public static class StarterFile
+{
+    /// <summary>The starter well file as text; what only the user can know is left as a comment marked <c>&lt;-</c>.</summary>
+    public static string For(LogFile log)
+    {
+        ArgumentNullException.ThrowIfNull(log);
+        var text = new StringBuilder();
+        text.Append(CultureInfo.InvariantCulture, $"""
+            # Starter well file for {log.Name}. Fill in the lines marked <-, look at every other choice, then run: depthstress check
+            # Quantities carry their unit. Methods: depthstress methods. All keys: depthstress schema.
+
+            [well]
+            name = {Quoted(log.WellName is { Length: > 0 } name ? name : Path.GetFileNameWithoutExtension(log.Name))}
+            datum = "rotary table"                # what measured depth counts from: rotary table, ground or sea level
+            # datum_elevation = "25 m"            # <- height of the datum above mean sea level
+            # water_depth = "100 m"               # <- offshore: depth of the sea
+            # ground_elevation = "20 m"           # <- onshore, instead: height of the ground above mean sea level
+            # water_table_depth = "5 m"           # onshore: depth of the water table below the ground
+
+            [logs]
+            files = [{Quoted(log.Name)}]
+
+            [logs.curves]
+
+            """);
+        AppendCurves(text, log);
+        text.Append("""
+
+            [survey]
+            vertical = true                       # <- confirm, or instead: file = "survey.csv" and north = "true", "grid" or "magnetic"
+
+            # [[zones]]                           # named intervals; any section below may be overridden inside one, as [zones.moduli]
+            # name = "upper sand"
+            # top = "1234 m"
+            # depth_kind = "md"                   # md, tvd or tvdss
+
+            """);
+        AppendShale(text, log);
+        text.Append("""
+
+            [porosity]
+            porosity = "density-porosity"
+            matrix_density = "2.65 g/cm3"         # quartz 2.65, calcite 2.71, dolomite 2.87
+            fluid_density = "1.03 g/cm3"          # of the fluid the density tool sees
+
+            [moduli]
+            static_youngs = "lacy-1997-combined"  # or another method, or { law = "linear", factor = 0.7 }
+            static_poisson = "equal-to-dynamic"   # moves Shmin more than most choices: a number such as 0.25 is possible too
+
+            [strength]
+            ucs = "horsrud-2001-shale"            # made for shale; give sands and limestones their own in their zones
+            friction_angle = "lal-1999-shale-friction"
+            tensile_strength = { law = "linear", input = "ucs", factor = 0.1 }   # a tenth of UCS (common practice)
+
+            [biot]
+            coefficient = 1.0                     # the upper bound; stiff rock has less
+
+            [overburden]
+            # above_log = "2.0 g/cm3"             # <- mean density from the ground or mudline to the first logged density
+            gaps = "none"                         # gaps in density are an error; "linear" bridges them
+            below_log = "hold"                    # below the last density its value is held
+
+            [pore_pressure]
+            # method = "hydrostatic"              # <- hydrostatic, gradient (with gradient, reference) or table (with points, depth_kind)
+            fluid_density = "1.03 g/cm3"
+
+            [horizontal_stress]
+            # strain_along_shmin = "0 microstrain"     # tectonic strains, compression positive; without them SHmax stays empty
+            # strain_along_shmax = "200 microstrain"
+            friction_coefficient = 0.6
+
+            [layers]
+            max_thickness = "100 m"
+
+            [output]
+            units = "metric"                      # or "field"
+
+            """);
+        return text.ToString();
+    }
+
+    private static void AppendCurves(StringBuilder text, LogFile log)
+    {
+        var depth = log.Columns[log.DepthColumn];
+        if (Units.Find(depth.Unit ?? "", Dimension.Length) is null)
+            text.AppendLine(CultureInfo.InvariantCulture, $"depth = {{ column = {Quoted(depth.Name)}, unit = \"m\" }}   # <- the file states {Stated(depth)}: confirm");
+        foreach (var role in CurveRoles.All)
+        {
+            var candidates = RoleAssignment.Candidates(role, [log]);
+            if (candidates.Count == 0) continue;
+            var column = candidates[0].Column;
+            var known = role.Dimensions is [Dimension.None] || Units.Find(column.Unit ?? "", role.Dimensions) is not null;
+            var rivals = candidates.Count == 1 ? "" : $"; also there: {string.Join(", ", candidates.Skip(1).Select(c => c.Column.Name))}";
+            var value = known
+                ? Quoted(column.Name)
+                : $"{{ column = {Quoted(column.Name)}, unit = {Quoted(Units.Of(role.Dimensions[0]).First().Symbol)} }}";
+            var doubt = known ? "" : "<- confirm the unit; ";
+            text.AppendLine(CultureInfo.InvariantCulture, $"{role.Id + " = " + value,-38}# {doubt}{role.Title}, {Stated(column)}, {Present(log, column)}{rivals}");
+        }
+    }
+
+    private static void AppendShale(StringBuilder text, LogFile log)
+    {
+        var role = CurveRoles.Of(Property.GammaRay)!;
+        var gamma = RoleAssignment.Candidates(role, [log]) is [var first, ..] ? Array.FindAll(first.Column.Values, double.IsFinite) : [];
+        if (gamma.Length < 100)
+        {
+            text.AppendLine(CultureInfo.InvariantCulture, $"# [shale]                             # needs a gamma ray: volume = \"linear-gamma-ray\", clean = \"25 gAPI\", shale = \"130 gAPI\"");
+            return;
+        }
+
+        Array.Sort(gamma);
+        var (clean, shale) = (Math.Round(SortedArrayStatistics.Percentile(gamma, 5)), Math.Round(SortedArrayStatistics.Percentile(gamma, 95)));
+        text.AppendLine(CultureInfo.InvariantCulture, $"""
+            [shale]
+            volume = "linear-gamma-ray"           # or {string.Join(", ", MethodCatalogue.For(Property.ShaleVolume).Select(l => l.Id).Where(i => i != "linear-gamma-ray"))}
+            {$"clean = \"{clean} gAPI\"",-38}# the log's 5th percentile, a starting point
+            {$"shale = \"{shale} gAPI\"",-38}# the log's 95th percentile, a starting point
+            """);
+    }
+
+    private static string Stated(LogColumn column) => column.Unit is { Length: > 0 } unit ? Plain(unit) : "no unit";
+
+    private static string Present(LogFile log, LogColumn column)
+    {
+        var first = Array.FindIndex(column.Values, double.IsFinite);
+        if (first < 0) return "no values";
+        var last = Array.FindLastIndex(column.Values, double.IsFinite);
+        var depth = log.Columns[log.DepthColumn];
+        return string.Create(CultureInfo.InvariantCulture, $"{depth.Values[first]:F1} to {depth.Values[last]:F1} {Plain(depth.Unit ?? "")}").TrimEnd();
+    }
+
+    private static string Plain(string text) => new([.. text.Where(c => !char.IsControl(c))]);
+
+    /// <summary>A text as a TOML basic string.</summary>
+    private static string Quoted(string text) =>
+        "\"" + Plain(text).Replace("\\", "\\\\", StringComparison.Ordinal).Replace("\"", "\\\"", StringComparison.Ordinal) + "\"";
+}

@@ -1,0 +1,113 @@
+using System.Reflection;
+using System.Text.Encodings.Web;
+using System.Text.Json;
+using System.Text.Json.Nodes;
+using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Model;
+using DepthStress.Files.Ingest;
+using DepthStress.Files.Setup;
+
+namespace DepthStress.Files.Writing;
+
+/// <summary>
+/// Writes <c>run.json</c>: program version, inputs with SHA-256, the resolved setup with who decided each value, every
+/// message and finding, and the methods used with their sources. No clock, machine name or absolute path.
+/// </summary>
+public static class RunJson
+{
+    private static readonly JsonSerializerOptions Indented = new()
+    {
+        WriteIndented = true,
+        NewLine = "\n",
+        Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
+    };
+
+    /// <summary>The program's version.</summary>
+    public static string Version { get; } =
+        typeof(RunJson).Assembly.GetCustomAttribute<AssemblyInformationalVersionAttribute>()?.InformationalVersion ?? "";
+
+    /// <summary>Writes the record of a run.</summary>
+    public static void Write(WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(file);
+        ArgumentNullException.ThrowIfNull(logs);
+        ArgumentNullException.ThrowIfNull(model);
+        ArgumentNullException.ThrowIfNull(diagnostics);
+        var units = file.Sections.Output.Units.Value;
+        var setup = new RecordingSection();
+        Bindings.All(setup, file.Sections);
+        var json = new JsonObject
+        {
+            ["program"] = "DepthStress",
+            ["version"] = Version,
+            ["caution"] = Caution.Text,
+            ["well"] = file.Setup.Name,
+            ["datum"] = Datum(file.Setup),
+            ["inputs"] = Array(file.Inputs.Concat(logs.Files.Select(f => new InputFile(f.Name, f.Sha256))).Select(i => new JsonObject
+            {
+                ["file"] = i.Name,
+                ["sha256"] = i.Sha256,
+            })),
+            ["curves"] = Array(logs.Logs.Curves.Select(Curve)),
+            ["setup"] = setup.Json,
+            ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
+            ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
+            ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(Method)),
+        };
+        using var writer = new Utf8JsonWriter(destination, new JsonWriterOptions { Indented = true, NewLine = "\n", Encoder = Indented.Encoder });
+        json.WriteTo(writer, Indented);
+        writer.Flush();
+        destination.Write("\n"u8);
+    }
+
+    private static JsonObject Datum(WellSetup setup)
+    {
+        var json = new JsonObject { ["datum"] = setup.Frame.Datum.Name() };
+        foreach (var (name, _, metres) in DepthStatement.Surfaces(setup.Frame)) json[name + "_m"] = metres;
+        foreach (var (name, meaning) in DepthStatement.Kinds) json[name] = meaning;
+        return json;
+    }
+
+    private static JsonObject Curve(Core.Logs.Curve curve) => new()
+    {
+        ["role"] = curve.Role.Id,
+        ["source"] = curve.Source,
+        ["origins"] = Array(curve.Origins.Runs
+            .Where(r => r.Origin != Core.Logs.SampleOrigin.None)
+            .GroupBy(r => (r.Origin, r.Step))
+            .Select(g => new JsonObject
+            {
+                ["origin"] = Core.Logs.SampleOrigins.Name(g.Key.Origin),
+                ["step"] = g.Key.Step,
+                ["samples"] = g.Sum(r => r.End - r.Start),
+            })),
+    };
+
+    private static JsonObject Method(IGrouping<(LawSlot Slot, Law Law), LawUse> uses)
+    {
+        var (slot, law) = uses.Key;
+        var total = uses.Aggregate(default(LawOutcome), (sum, use) => sum + use.Outcome);
+        return new JsonObject
+        {
+            ["key"] = slot.Key,
+            ["method"] = law.Id,
+            ["formula"] = law.Text,
+            ["unit"] = law.Unit.Symbol,
+            ["source"] = law.Source,
+            ["standing"] = law.Standing switch
+            {
+                Standing.Confirmed => "coefficients read in the source",
+                Standing.Identity => "identity",
+                Standing.FromMemory => "coefficients recalled, not read",
+                _ => "given by the user",
+            },
+            ["samples"] = total.Evaluated,
+            ["input_missing"] = total.InputMissing,
+            ["outside_domain"] = total.OutsideDomain,
+            ["outside_range"] = total.OutsideRange,
+        };
+    }
+
+    private static JsonArray Array(IEnumerable<JsonNode> items) => new([.. items]);
+}
