@@ -17,7 +17,7 @@ internal static class CheckAction
         if (well is null) return ExitCodes.Input;
 
         var units = well.File.Sections.Output.Units.Value;
-        terminal.Output.WriteLine(FormattableString.Invariant($"Well {well.File.Setup.Name}: {well.Model.Count} samples in {well.Logs.Files.Count} files"));
+        terminal.Output.WriteLine(FormattableString.Invariant($"Well {well.File.Setup.Name}: {well.Model.Count} samples from {string.Join(", ", well.Logs.Files.Select(f => f.Name))}"));
         terminal.Output.WriteLine();
         CoveragePrinter.Print(terminal, well.Logs, units);
         terminal.Output.WriteLine();

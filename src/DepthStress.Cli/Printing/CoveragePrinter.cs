@@ -25,7 +25,7 @@ internal static class CoveragePrinter
             var present = curve.Values.Count(v => !double.IsNaN(v));
             table.AddRow(
                 curve.Role.Id,
-                Markup.Escape(curve.Source),
+                Markup.Escape(Source(ingested, columns)),
                 Markup.Escape(string.Join(", ", columns.Select(c => c.Source is { Unit.IsSet: true } s ? s.Unit.Value : c.Column.Unit ?? "").Distinct())),
                 Depth(ingested, first, length),
                 Depth(ingested, last, length),
@@ -36,6 +36,9 @@ internal static class CoveragePrinter
         var missing = CurveRoles.All.Where(r => ingested.Logs[r.Property] is null).Select(r => r.Id);
         terminal.Output.WriteLine($"no curve for: {string.Join(", ", missing)}");
     }
+
+    private static string Source(IngestedLogs ingested, IReadOnlyList<ColumnChoice> columns) => string.Join(
+        "\n", columns.Select(c => ingested.Files.Count == 1 ? c.Column.Name : $"{c.Column.Name} in {Path.GetFileName(c.File.Name)}"));
 
     private static string Depth(IngestedLogs ingested, int index, Unit unit) =>
         index < 0 ? "" : unit.FromSi(ingested.Logs.Depths[index]).ToString("F2", CultureInfo.InvariantCulture);

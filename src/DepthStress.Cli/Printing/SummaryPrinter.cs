@@ -45,39 +45,37 @@ internal static class SummaryPrinter
         _ => "sea level",
     };
 
+    /// <summary>The columns of the zone table, with the decimals that suit an overview.</summary>
+    private static readonly (string Title, string Column, int Metric, int Field)[] Columns =
+    [
+        ("Sv", "sv", 1, 0), ("Pp", "pp", 1, 0), ("Shmin", "shmin", 1, 0), ("SHmax", "shmax", 1, 0),
+        ("Sv/z", "sv_gradient", 2, 3), ("Pp/z", "pp_gradient", 2, 3), ("Shmin/z", "shmin_gradient", 2, 3),
+        ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu stat", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
+    ];
+
     private static Table Zones(EarthModel model, UnitSystem units)
     {
         var table = new Table().Border(TableBorder.Simple);
-        var stress = units == UnitSystem.Metric ? (Unit: Units.Megapascal, Format: "F1") : (Unit: Units.Psi, Format: "F0");
-        var gradient = units == UnitSystem.Metric ? (Unit: Units.KilopascalPerMetre, Format: "F2") : (Unit: Units.PsiPerFoot, Format: "F3");
-        var modulus = units == UnitSystem.Metric ? (Unit: Units.Gigapascal, Format: "F1") : (Unit: Units.Mpsi, Format: "F2");
-        table.AddColumn("zone");
-        string[] titles =
-        [
-            $"top md\n{units.UnitFor(Dimension.Length).Unit}", $"Sv\n{stress.Unit}", $"Pp\n{stress.Unit}", $"Shmin\n{stress.Unit}", $"SHmax\n{stress.Unit}",
-            $"Sv/z\n{gradient.Unit}", $"Pp/z\n{gradient.Unit}", $"Shmin/z\n{gradient.Unit}", $"E dyn\n{modulus.Unit}", $"E stat\n{modulus.Unit}", "nu stat\n", "biot\n",
-        ];
-        foreach (var title in titles) table.AddColumn(new TableColumn(title).RightAligned());
+        var length = units.UnitFor(Dimension.Length).Unit;
+        table.AddColumn(new TableColumn("zone").NoWrap());
+        table.AddColumn(new TableColumn($"top md\n{length}").RightAligned());
+        table.AddColumn(new TableColumn("cover\n%").RightAligned());
+        foreach (var (title, id, _, _) in Columns) table.AddColumn(new TableColumn($"{title}\n{DepthColumns.Get(id).In(units).Unit}").RightAligned());
 
-        foreach (var zone in LayerBuilder.Build(model, new LayerSettings()).Layers)
+        foreach (var zone in ZoneMeans.Of(model))
         {
-            var z = (0.5 * (zone.TopTvd + zone.BaseTvd)) - model.Setup.Frame.SurfaceTvd;
-            string Stress(Property p) => Show(zone.Profile(p).Mean, stress.Unit, stress.Format);
-            string Gradient(Property p) => Show(zone.Profile(p).Mean / z, gradient.Unit, gradient.Format);
-            table.AddRow(
-                Markup.Escape(zone.Zone.Length > 0 ? zone.Zone : "whole log"),
-                Show(zone.TopMd, units.UnitFor(Dimension.Length).Unit, "F1"),
-                Stress(Property.VerticalStress), Stress(Property.PorePressure), Stress(Property.MinHorizontalStress), Stress(Property.MaxHorizontalStress),
-                Gradient(Property.VerticalStress), Gradient(Property.PorePressure), Gradient(Property.MinHorizontalStress),
-                Show(zone.Mean(Property.YoungsDynamic), modulus.Unit, modulus.Format),
-                Show(zone.Mean(Property.YoungsStatic), modulus.Unit, modulus.Format),
-                Show(zone.Mean(Property.PoissonStatic), Units.One, "F3"),
-                Show(zone.Mean(Property.Biot), Units.One, "F2"));
+            var cells = Columns.Select(c =>
+            {
+                var column = DepthColumns.Get(c.Column);
+                return Show(zone.Mean(column), column.In(units).Unit, units == UnitSystem.Metric ? c.Metric : c.Field);
+            });
+            table.AddRow([
+                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells]);
         }
 
         return table;
     }
 
-    private static string Show(double si, Unit unit, string format) =>
-        double.IsNaN(si) ? "" : unit.FromSi(si).ToString(format, CultureInfo.InvariantCulture);
+    private static string Show(double si, Unit unit, int decimals) =>
+        double.IsNaN(si) ? "" : unit.FromSi(si).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
 }

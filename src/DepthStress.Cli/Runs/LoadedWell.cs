@@ -22,7 +22,8 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
         if (WellFileReader.Read(path, diagnostics) is not { } file) return null;
         cancellation.ThrowIfCancellationRequested();
         stage("reading the logs");
-        if (LogIngest.Read(file, diagnostics) is not { } logs) return null;
+        var logs = LogIngest.Read(file, diagnostics);
+        if (logs is null || diagnostics.HasErrors) return null;
         cancellation.ThrowIfCancellationRequested();
         stage("computing");
         return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model) : null;

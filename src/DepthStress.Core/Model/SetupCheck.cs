@@ -102,8 +102,8 @@ public static class SetupCheck
             case PorePressureMethod.Gradient:
                 if (!pore.Gradient.IsSet) Missing(scope, "[pore_pressure] gradient", "such as \"10.5 kPa/m\"");
                 if (!pore.Reference.IsSet) Missing(scope, "[pore_pressure] reference", "rotary table, ground, sea surface or mudline");
-                else if (!frame.Has(pore.Reference.Value))
-                    scope.Error(pore.Reference.Source.Position, $"a{(frame.IsOffshore ? "n offshore" : "n onshore")} well has no such reference");
+                else if (scope.Setup.FrameKnown && !frame.Has(pore.Reference.Value))
+                    scope.Error(pore.Reference.Source.Position, $"found a reference that an {(frame.IsOffshore ? "offshore" : "onshore")} well does not have, expected {(frame.IsOffshore ? "rotary table, sea surface or mudline" : "rotary table or ground")}");
                 break;
             case PorePressureMethod.Table:
                 if (!pore.Points.IsSet) Missing(scope, "[pore_pressure] points", "a table of depth and pressure");

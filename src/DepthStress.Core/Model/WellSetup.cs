@@ -16,6 +16,9 @@ public sealed record WellSetup
     /// <summary>Where the surfaces lie.</summary>
     public required DepthFrame Frame { get; init; }
 
+    /// <summary>False when the reference levels only stand in for wrong ones, while further problems are looked for.</summary>
+    public bool FrameKnown { get; init; } = true;
+
     /// <summary>The path of the hole.</summary>
     public required Trajectory Trajectory { get; init; }
 

@@ -20,6 +20,14 @@ public static class LogIngest
     {
         ArgumentNullException.ThrowIfNull(well);
         ArgumentNullException.ThrowIfNull(diagnostics);
+        var own = new DiagnosticBag();
+        var logs = well.Sections.Logs.Files.IsSet ? ReadFiles(well, own) : null;
+        foreach (var diagnostic in own.Items) diagnostics.Add(diagnostic);
+        return logs;
+    }
+
+    private static IngestedLogs? ReadFiles(WellFile well, DiagnosticBag diagnostics)
+    {
         var section = well.Sections.Logs;
         var files = new List<LogFile>();
         foreach (var name in section.Files.Value)

@@ -11,8 +11,11 @@ namespace DepthStress.Files.Setup;
 /// <summary>Puts the bound sections together into the chain's setup, and reports what is missing or contradicts itself.</summary>
 internal static class SetupAssembly
 {
-    /// <summary>Assembles the setup; null when reference levels or the survey cannot be used.</summary>
-    public static WellSetup? Assemble(WellFileSections sections, string name, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
+    /// <summary>Stands in for reference levels that cannot be used, so that the other problems can be found in the same run.</summary>
+    private static readonly DepthFrame AnyFrame = new(DatumKind.Ground, 0, 0, null, null);
+
+    /// <summary>Assembles the setup and reports what is wrong with it.</summary>
+    public static WellSetup Assemble(WellFileSections sections, string name, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
     {
         var file = new SourcePosition(name);
         var well = sections.Well;
@@ -25,13 +28,13 @@ internal static class SetupAssembly
         CheckPoints(sections, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, diagnostics);
-        if (frame is null || trajectory is null) return null;
         return new WellSetup
         {
             Position = file,
             Name = well.Name.Value ?? "",
-            Frame = frame,
-            Trajectory = trajectory,
+            Frame = frame ?? AnyFrame,
+            FrameKnown = frame is not null,
+            Trajectory = trajectory ?? Core.Depth.Trajectory.Vertical,
             Zones = zones,
             Lithologies = lithologies,
             Settings = sections.Settings,

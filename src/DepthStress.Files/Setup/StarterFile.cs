@@ -39,12 +39,13 @@ public static class StarterFile
         text.Append("""
 
             [survey]
-            vertical = true                       # <- confirm, or instead: file = "survey.csv" and north = "true", "grid" or "magnetic"
+            vertical = true                       # <- confirm; or instead: file = "survey.csv" and north = "true", "grid" or "magnetic"
 
             # [[zones]]                           # named intervals; any section below may be overridden inside one, as [zones.moduli]
             # name = "upper sand"
             # top = "1234 m"
             # depth_kind = "md"                   # md, tvd or tvdss
+
 
             """);
         AppendShale(text, log);

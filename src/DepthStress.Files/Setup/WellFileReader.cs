@@ -13,7 +13,10 @@ public static class WellFileReader
     /// <summary>Reads a well file and the survey it names.</summary>
     /// <param name="path">The path as the user gave it.</param>
     /// <param name="diagnostics">Gets every problem.</param>
-    /// <returns>The well file, or null when it cannot be used.</returns>
+    /// <returns>
+    /// The well file, or null when its text cannot be read at all. When there are errors among the diagnostics it serves only to
+    /// look for further problems.
+    /// </returns>
     public static WellFile? Read(string path, DiagnosticBag diagnostics)
     {
         ArgumentNullException.ThrowIfNull(path);
@@ -27,8 +30,8 @@ public static class WellFileReader
         var full = Path.GetFullPath(path);
         var inputs = new List<InputFile> { new(name, hash) };
         var setup = SetupAssembly.Assemble(sections, name, Path.GetDirectoryName(full)!, inputs, diagnostics);
-        if (setup is not null) SetupCheck.Report(setup, diagnostics);
-        return setup is null || diagnostics.HasErrors ? null : new WellFile(full, name, sections, setup, inputs);
+        SetupCheck.Report(setup, diagnostics);
+        return new WellFile(full, name, sections, setup, inputs);
     }
 
     private static (string Text, string Hash)? ReadText(string path, string name, DiagnosticBag diagnostics)
