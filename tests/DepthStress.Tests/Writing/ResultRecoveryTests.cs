@@ -91,6 +91,21 @@ public sealed class ResultRecoveryTests : IDisposable
         Assert.False(File.Exists(_paths.Lock));
     }
 
+    /// <summary>Elsewhere than on Linux two renames take its place.</summary>
+    [Fact]
+    public void On_linux_two_folders_change_places_in_one_step()
+    {
+        Leave(_paths.Target, ("x.csv", "old"));
+        Leave(_paths.Incoming, ("x.csv", "new"));
+        Assert.Equal(OperatingSystem.IsLinux(), FolderSwap.TryExchange(_paths.Incoming, _paths.Target));
+        Assert.Equal(OperatingSystem.IsLinux() ? "new" : "old", Text("x.csv"));
+        Assert.True(Directory.Exists(_paths.Incoming));
+    }
+
+    [Fact]
+    public void A_swap_that_is_refused_says_so() =>
+        Assert.False(FolderSwap.TryExchange(_paths.Incoming, _paths.Target));
+
     [Fact]
     public void Two_renames_put_the_new_results_in_place_and_set_the_earlier_ones_aside()
     {
