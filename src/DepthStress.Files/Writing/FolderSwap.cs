@@ -43,7 +43,7 @@ internal static class FolderSwap
     }
 
     /// <summary>Exchanges two names in one step; false where the system or the file system cannot.</summary>
-    private static bool TryExchange(string one, string other)
+    public static bool TryExchange(string one, string other)
     {
         if (!OperatingSystem.IsLinux()) return false;
         try

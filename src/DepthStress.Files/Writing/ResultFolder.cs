@@ -12,6 +12,9 @@ public sealed class ResultFolder : IDisposable
 {
     private const string Writable = "a folder that this program may write";
 
+    /// <summary>What the base library reports for a file another process holds: EAGAIN on Linux and on macOS, and the sharing violation of Windows.</summary>
+    private static readonly int[] HeldElsewhere = [11, 35, unchecked((int)0x80070020)];
+
     private readonly ResultPaths _paths;
     private readonly FileStream _lock;
     private readonly List<FileStream> _files = [];
@@ -107,7 +110,7 @@ public sealed class ResultFolder : IDisposable
         {
             return new FileStream(paths.Lock, FileMode.OpenOrCreate, FileAccess.ReadWrite, FileShare.None, 1, FileOptions.DeleteOnClose);
         }
-        catch (IOException e) when (e.GetType() == typeof(IOException) && File.Exists(paths.Lock))
+        catch (IOException e) when (Array.IndexOf(HeldElsewhere, e.HResult) >= 0)
         {
             throw new ResultFolderException($"found another run writing to \"{paths.Target}\", expected one at a time", e);
         }
