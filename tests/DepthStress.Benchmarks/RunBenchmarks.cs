@@ -5,7 +5,7 @@ namespace DepthStress.Benchmarks;
 
 /// <summary>A whole <c>run</c> in process, results on disk.</summary>
 [MemoryDiagnoser]
-public sealed class RunBenchmarks : IDisposable
+public class RunBenchmarks
 {
     private BenchmarkWell _well = null!;
 
@@ -16,7 +16,7 @@ public sealed class RunBenchmarks : IDisposable
     public void Setup() => _well = new BenchmarkWell(Samples);
 
     [GlobalCleanup]
-    public void Dispose() => _well?.Dispose();
+    public void Cleanup() => _well.Dispose();
 
     [Benchmark]
     public async Task<int> Run()

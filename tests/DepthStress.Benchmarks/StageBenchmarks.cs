@@ -10,7 +10,7 @@ namespace DepthStress.Benchmarks;
 
 /// <summary>Reading, computing and writing one well, each alone.</summary>
 [MemoryDiagnoser]
-public sealed class StageBenchmarks : IDisposable
+public class StageBenchmarks
 {
     private BenchmarkWell _well = null!;
     private WellFile _file = null!;
@@ -30,7 +30,7 @@ public sealed class StageBenchmarks : IDisposable
     }
 
     [GlobalCleanup]
-    public void Dispose() => _well?.Dispose();
+    public void Cleanup() => _well.Dispose();
 
     [Benchmark]
     public IngestedLogs Ingest() => BenchmarkWell.ReadLogs(_file);
