@@ -1,8 +1,8 @@
 namespace DepthStress.Report;
 
 /// <summary>
-/// The colours of the pictures, 0xRRGGBB. Curves that share a track stay apart for readers with protanopia, deuteranopia
-/// and tritanopia: by lightness first, by hue second. A test holds this with the simulation of Vienot, Brettel and Mollon 1999.
+/// The colours of the pictures, 0xRRGGBB. Curves that share a track stay apart for readers with protanopia and deuteranopia,
+/// by lightness first, by hue second. A test holds this with the simulation of Vienot, Brettel and Mollon 1999.
 /// </summary>
 internal static class Palette
 {
@@ -16,7 +16,7 @@ internal static class Palette
 
     public const int Text = 0x1E2A33;
     public const int FaintText = 0x5A666F;
-    public const int Grid = 0xE1E5E6;
+    public const int Grid = 0xD9DEDF;
     public const int DepthGrid = 0xCBD2D4;
     public const int Frame = 0x7B878D;
     public const int ZoneTint = 0xF4F6F1;

@@ -11,7 +11,7 @@ public static class StressPicture
     private const double AxisWidth = 66;
     private const double LegendLine = 14;
     private const double AxisHeight = 34;
-    private const double Gap = 22;
+    private const double Gap = 32;
     private static readonly TextStyle Small = new(8);
     private static readonly TextStyle Title = new(9.5, Palette.Text, true);
 
@@ -31,9 +31,8 @@ public static class StressPicture
     /// <summary>Draws the picture.</summary>
     internal static Sheet Draw(EarthModel model, UnitSystem units)
     {
-        var tvd = DepthColumns.Get("tvd");
         var tvds = new double[model.Count];
-        tvd.Fill(model, 0, units, tvds);
+        DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
         var zones = ZoneSpan.Of(model, tvds);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
         var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
@@ -44,12 +43,12 @@ public static class StressPicture
         var (left, right, names) = (PageFrame.Margin + AxisWidth, sheet.Width - PageFrame.Margin, ZoneStrip.Width(zones));
         var middle = left + ((right - names - left) * 0.58);
         var views = new[] { TrackTable.StressPanels.Stress, TrackTable.StressPanels.Gradient }
-            .Select(d => TrackView.Read(model, d, units, tvd, axis)).ToArray();
+            .Select(d => TrackView.Read(model, d, units, tvds, axis)).ToArray();
 
-        DrawFrame(sheet, model, units, axis, zones, left, right - names, right);
+        DrawFrame(sheet, model, units, axis, zones, left, right - names - 8, right);
         if (views[0] is { } stress)
         {
-            DrawLegend(sheet, model, stress, left, right, legendTop);
+            DrawLegend(sheet, model, units, stress, left, right, legendTop);
             DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle);
         }
 
@@ -65,19 +64,19 @@ public static class StressPicture
         var (frame, unit) = (model.Setup.Frame, units.UnitFor(Dimension.Length).Unit.Symbol);
         PageFrame.DrawTitle(sheet, model.Setup.Name, "stress over depth", PageTexts.Surfaces(frame, units));
         ZoneStrip.DrawBands(sheet, zones, axis, left, right);
-        ZoneStrip.DrawNames(sheet, zones, axis, plotRight, right);
+        ZoneStrip.DrawNames(sheet, zones, axis, plotRight + 8, right);
         DepthScales.DrawOwn(sheet, axis, left, left, plotRight);
         sheet.Write(
             new ScreenPoint(PageFrame.Margin + 8, (axis.ScreenTop + axis.ScreenBase) / 2), $"True vertical depth below {PageTexts.Datum(frame)}, {unit}", Title,
             HorizontalAlignment.Center, true);
     }
 
-    private static void DrawLegend(Sheet sheet, EarthModel model, TrackView stress, double left, double right, double top)
+    private static void DrawLegend(Sheet sheet, EarthModel model, UnitSystem units, TrackView stress, double left, double right, double top)
     {
         var (x, y) = (left, top + (LegendLine / 2));
-        foreach (var curve in stress.Traces.Select(t => t.Curve).Reverse())
+        foreach (var curve in stress.Traces.Select(t => t.Curve).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure))
         {
-            var text = curve.Column == HydrostaticColumns.Pressure ? Hydrostatic(model) : $"{curve.Column.Symbol}, {curve.Column.Title}";
+            var text = curve.Column == HydrostaticColumns.Pressure ? Hydrostatic(model, units) : $"{curve.Column.Symbol}, {curve.Column.Title}";
             var width = 28 + PlainText.Width(text, Small.Size, false);
             if (x > left && x + width > right) (x, y) = (left, y + LegendLine);
             sheet.Line(x, y, x + 22, y, curve.Pen with { Width = curve.Pen.Width + 0.6 });
@@ -86,10 +85,12 @@ public static class StressPicture
         }
     }
 
-    private static string Hydrostatic(EarthModel model)
+    private static string Hydrostatic(EarthModel model, UnitSystem units)
     {
-        var density = UnitSystem.Metric.Show(new Quantity(HydrostaticColumns.Density(model), Dimension.Density));
-        return $"reference: water of {density} below the {(model.Setup.Frame.IsOffshore ? "sea surface" : "water table")}";
+        var (metric, field) = ColumnUnits.MudDensities;
+        var unit = (units == UnitSystem.Metric ? metric : field).Unit;
+        var density = RoundSteps.Show(unit.FromSi(HydrostaticColumns.Density(model)), 0.01);
+        return $"reference: water of {density} {unit.Symbol} below the {(model.Setup.Frame.IsOffshore ? "sea surface" : "water table")}";
     }
 
     private static void DrawPanel(Sheet sheet, TrackView view, string title, UnitSystem units, DepthAxis axis, double left, double right)

@@ -24,8 +24,8 @@ public static class TrackTable
     [
         new("hole", "Hole size",
         [
-            Same(LogColumns.BitSize, "bit size", new(Gold, 1.1, Dashed), new(6, 26)),
-            Same(LogColumns.Caliper, "caliper", new(Ink), new(6, 26)),
+            Same(LogColumns.BitSize, "bit size", new(Gold, 1.1, Dashed), new(6, 16, 5)),
+            Same(LogColumns.Caliper, "caliper", new(Ink), new(6, 16, 5)),
         ]),
         new("gamma_ray", "Gamma ray, shale volume",
         [
@@ -39,26 +39,26 @@ public static class TrackTable
         ]),
         new("density", "Density, neutron",
         [
-            Same(LogColumns.Neutron, "neutron", new(Sky, 0.8, Dashed), new(0.45, -0.15)),
+            Same(LogColumns.Neutron, "neutron", new(Sky, 0.7), new(0.45, -0.15)),
             Same(Column("density"), "bulk density", new(Plum), new(1.95, 2.95), Property.Density),
         ]),
         new("porosity", "Porosity", [Same(Column("porosity"), "porosity", new(Teal), new(0.5, 0, 5))]),
         new("youngs", "Young's modulus",
         [
-            new(Column("youngs_dynamic"), "dynamic", new(Gold), new(0, 100), new(0, 16)),
-            new(Column("youngs_static"), "static", new(Ink), new(0, 100), new(0, 16)),
+            new(Column("youngs_dynamic"), "dynamic", new(Gold), new(0, 80), new(0, 12)),
+            new(Column("youngs_static"), "static", new(Ink), new(0, 80), new(0, 12)),
         ]),
         new("poisson", "Poisson's ratio, Biot",
         [
             Same(Column("poisson_dynamic"), "dynamic", new(Gold), Ratio),
             Same(Column("poisson_static"), "static", new(Ink), Ratio),
-            Same(Column("biot"), "Biot coefficient", new(Teal, 0.8, Dashed), UnitInterval),
+            Same(Column("biot"), "Biot coefficient", new(Teal, 0.7), UnitInterval),
         ]),
         new("strength", "Strength",
         [
-            new(Column("ucs"), "unconfined, UCS", new(Ink), new(0, 200), new(0, 30000)),
-            new(Column("tensile_strength"), "tensile", new(Gold), new(0, 20), new(0, 3000)),
-            Same(Column("friction_angle"), "friction angle", new(Teal, 0.8, Dashed), new(0, 60)),
+            new(Column("ucs"), "unconfined, UCS", new(Ink), new(0, 160), new(0, 24000)),
+            new(Column("tensile_strength"), "tensile", new(Gold), new(0, 16), new(0, 2400)),
+            Same(Column("friction_angle"), "friction angle", new(Teal, 0.7), new(0, 60)),
         ]),
         new("stress", "Pressure and total stress",
         [
@@ -80,13 +80,13 @@ public static class TrackTable
     (
         new("stress", "Total stress and pore pressure",
         [
-            new(HydrostaticColumns.Pressure, "hydrostatic", new(Grey, 1, Dotted), MetricStress, FieldStress),
             .. All.First(t => t.Id == "stress").Curves,
+            new(HydrostaticColumns.Pressure, "hydrostatic", new(Grey, 1.2, Dotted), MetricStress, FieldStress),
         ]),
         new("gradient", "Gradient",
         [
-            Gradient(HydrostaticColumns.Gradient, "hydrostatic", new(Grey, 1, Dotted)),
             .. All.First(t => t.Id == "stress").Curves.Select(c => Gradient(Column(c.Column.Id + "_gradient"), c.Label, c.Pen)),
+            Gradient(HydrostaticColumns.Gradient, "hydrostatic", new(Grey, 1.2, Dotted)),
         ])
     );
 

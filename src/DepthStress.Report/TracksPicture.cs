@@ -28,14 +28,13 @@ public static class TracksPicture
     /// <summary>Draws the picture.</summary>
     internal static Sheet Draw(EarthModel model, UnitSystem units, IReadOnlyList<TrackDefinition> definitions)
     {
-        var (md, tvd) = (DepthColumns.Get("md"), DepthColumns.Get("tvd"));
-        var (mds, tvds) = (Read(model, md, units), Read(model, tvd, units));
+        var (mds, tvds) = (Read(model, "md", units), Read(model, "tvd", units));
         var zones = ZoneSpan.Of(model, mds);
         var (top, bottom) = mds.Length == 0 ? (double.NaN, double.NaN) : (mds[0], mds[^1]);
 
         // The curves decide how tall the heads are, and the heads how tall the plots: curves are thinned for the usual height.
         var draft = new DepthAxis(top, bottom, 0, UsualPlotHeight);
-        var tracks = definitions.Select(d => TrackView.Read(model, d, units, md, draft)).OfType<TrackView>().ToList();
+        var tracks = definitions.Select(d => TrackView.Read(model, d, units, mds, draft)).OfType<TrackView>().ToList();
         var layout = new TracksLayout([.. tracks.Select(t => t.Traces.Count(c => c.Curve.Ribbon is { } p && model.Origins(p) is not null))], ZoneStrip.Width(zones));
         var heads = Math.Max(64, tracks.Select((t, i) => TrackHeader.Height(t, layout.Tracks[i].Right - layout.Tracks[i].Left)).DefaultIfEmpty().Max());
         var foot = PageFrame.Margin + PageFrame.CautionHeight(layout.PageWidth) + 16;
@@ -57,10 +56,10 @@ public static class TracksPicture
             $"found the unknown track \"{id}\", expected one of {string.Join(", ", TrackTable.All.Select(t => t.Id))}", nameof(options)))];
     }
 
-    private static double[] Read(EarthModel model, NumberColumn<EarthModel> column, UnitSystem units)
+    private static double[] Read(EarthModel model, string column, UnitSystem units)
     {
         var values = new double[model.Count];
-        column.Fill(model, 0, units, values);
+        DepthColumns.Get(column).Fill(model, 0, units, values);
         return values;
     }
 

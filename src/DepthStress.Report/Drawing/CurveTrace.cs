@@ -15,26 +15,30 @@ internal sealed record CurveTrace(
     private const int Chunk = 4096;
 
     /// <summary>Reads a curve in one pass over chunks; null when it has no value.</summary>
-    public static CurveTrace? Read(EarthModel model, CurveDefinition curve, UnitSystem units, NumberColumn<EarthModel> depth, DepthAxis axis)
+    /// <param name="model">The model.</param>
+    /// <param name="curve">The curve.</param>
+    /// <param name="units">The picture's units.</param>
+    /// <param name="depths">Depth of each sample, in the picture's unit.</param>
+    /// <param name="axis">The depth axis, which decides what can still be told apart.</param>
+    public static CurveTrace? Read(EarthModel model, CurveDefinition curve, UnitSystem units, double[] depths, DepthAxis axis)
     {
-        var (depths, values) = (new double[Math.Min(Chunk, model.Count)], new double[Math.Min(Chunk, model.Count)]);
+        var values = new double[Math.Min(Chunk, model.Count)];
         var decimator = new Decimator(axis.Top, axis.Pixel);
-        var scale = curve.Scale(units);
+        var (low, high) = (curve.Scale(units).Low, curve.Scale(units).High);
         var (least, greatest, offScale) = (double.NaN, double.NaN, 0);
         for (var start = 0; start < model.Count; start += Chunk)
         {
             var n = Math.Min(Chunk, model.Count - start);
-            depth.Fill(model, start, units, depths.AsSpan(0, n));
             curve.Column.Fill(model, start, units, values.AsSpan(0, n));
             for (var i = 0; i < n; i++)
             {
                 var value = values[i];
-                decimator.Add(depths[i], value);
+                decimator.Add(depths[start + i], value);
                 if (!double.IsFinite(value)) continue;
-                if (value < scale.Low || value > scale.High)
+                if (value < low || value > high)
                 {
                     offScale++;
-                    value = Math.Clamp(value, scale.Low, scale.High);
+                    value = Math.Clamp(value, low, high);
                 }
 
                 if (!(value >= least)) least = value;

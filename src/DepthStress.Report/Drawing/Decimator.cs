@@ -9,6 +9,7 @@ namespace DepthStress.Report.Drawing;
 /// <param name="bin">Height of a bin, in depth.</param>
 internal sealed class Decimator(double top, double bin)
 {
+    private readonly double _perBin = 1 / bin;
     private readonly List<List<LogPoint>> _lines = [];
     private double _current = double.NaN;
     private bool _gap = true;
@@ -25,7 +26,7 @@ internal sealed class Decimator(double top, double bin)
             return;
         }
 
-        var (index, here) = (Math.Floor((depth - top) / bin), (_order, new LogPoint(depth, value)));
+        var (index, here) = (Math.Floor((depth - top) * _perBin), (_order, new LogPoint(depth, value)));
         if (index == _current)
         {
             if (value < _least.Point.Value) _least = here;

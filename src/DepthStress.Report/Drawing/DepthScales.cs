@@ -10,7 +10,7 @@ internal static class DepthScales
     private const double Tick = 4;
     private const double Unlabelled = 70;
     private static readonly TextStyle Head = new(9, Palette.Text, true);
-    private static readonly TextStyle Note = new(7.5, Palette.FaintText);
+    private static readonly TextStyle Note = new(7, Palette.FaintText);
     private static readonly TextStyle Number = new(8);
     private static readonly CurvePen TickPen = new(Palette.Frame, 0.6);
 
@@ -51,37 +51,42 @@ internal static class DepthScales
     public static void DrawOther(Sheet sheet, DepthAxis axis, ReadOnlySpan<double> own, ReadOnlySpan<double> other, double labelRight)
     {
         if (own.IsEmpty) return;
-        var (step, above) = (axis.Step(LabelSpacing), axis.ScreenTop - Unlabelled);
+        var (step, above) = (axis.Step(LabelSpacing), axis.ScreenTop - LabelHeight);
         for (var i = 0; i < own.Length; i++)
         {
+            var previous = Math.Max(0, i - 1);
+            foreach (var round in Passed(other[previous], other[i], step))
+            {
+                var part = i == 0 ? 0 : (round - other[previous]) / (other[i] - other[previous]);
+                Label(axis.ToScreen(own[previous] + ((own[i] - own[previous]) * part)), LabelHeight, RoundSteps.Show(round, step));
+            }
+
             var y = axis.ToScreen(own[i]);
-            if (i > 0 && Passed(other[i - 1], other[i], step) is { } round)
-            {
-                var at = axis.ToScreen(own[i - 1] + ((own[i] - own[i - 1]) * (round - other[i - 1]) / (other[i] - other[i - 1])));
-                if (at - above < LabelHeight) continue;
-                DrawLabel(sheet, axis, at, RoundSteps.Show(round, step), labelRight);
-                above = at;
-            }
-            else if (y - above >= Unlabelled && double.IsFinite(other[i]))
-            {
-                DrawLabel(sheet, axis, y, RoundSteps.Show(other[i], 0.1), labelRight);
-                above = y;
-            }
+            if (y - above >= Unlabelled && double.IsFinite(other[i])) Label(y, Unlabelled, RoundSteps.Show(other[i], Math.Min(step, 0.1)));
+        }
+
+        void Label(double y, double spacing, string text)
+        {
+            if (y - above < spacing) return;
+            DrawLabel(sheet, axis, y, text, labelRight);
+            above = Inside(axis, y);
         }
     }
 
-    /// <summary>The round value that lies between two depths, the deeper one included.</summary>
-    private static double? Passed(double from, double to, double step)
+    /// <summary>The round values from one depth to the next, in the order they are passed.</summary>
+    private static double[] Passed(double from, double to, double step)
     {
         var (low, high) = (Math.Min(from, to), Math.Max(from, to));
-        var round = Math.Floor(high / step) * step;
-        return round > low && high > low ? round : null;
+        if (!double.IsFinite(from) || !double.IsFinite(to) || (from != to && Math.Floor(low / step) == Math.Floor(high / step) && low % step != 0)) return [];
+        var passed = RoundSteps.Between(low, high, step);
+        return [.. from <= to ? passed : passed.Reverse()];
     }
 
     private static void DrawLabel(Sheet sheet, DepthAxis axis, double y, string text, double right)
     {
         sheet.Line(right - Tick, y, right, y, TickPen);
-        var inside = Math.Clamp(y, axis.ScreenTop + (LabelHeight / 2), axis.ScreenBase - (LabelHeight / 2));
-        sheet.Write(new ScreenPoint(right - Tick - 2, inside), text, Number, HorizontalAlignment.Right);
+        sheet.Write(new ScreenPoint(right - Tick - 2, Inside(axis, y)), text, Number, HorizontalAlignment.Right);
     }
+
+    private static double Inside(DepthAxis axis, double y) => Math.Clamp(y, axis.ScreenTop + (LabelHeight / 2), axis.ScreenBase - (LabelHeight / 2));
 }

@@ -10,6 +10,12 @@ internal static class PlainText
     /// <summary>How much wider than Arial the fonts are that a viewer may put in its place.</summary>
     private const double WidestFont = 1.17;
 
+    /// <summary>The same for bold type.</summary>
+    private const double WidestBoldFont = 1.25;
+
+    /// <summary>The measurer gives points, 1/72 inch, for a size in 1/96 inch.</summary>
+    private const double FromPoints = 96.0 / 72;
+
     private static readonly PdfRenderContext Measurer = new(1, 1, OxyColors.Undefined);
     private static readonly Lock Gate = new();
 
@@ -39,7 +45,7 @@ internal static class PlainText
         {
             for (var i = 0; i < span.Length; i++) span[i] = source[i] is >= ' ' and <= '~' ? source[i] : 'W';
         });
-        lock (Gate) return Measurer.MeasureText(latin, "Arial", size, bold ? 700 : 400).Width * WidestFont;
+        lock (Gate) return Measurer.MeasureText(latin, "Arial", size, bold ? 700 : 400).Width * FromPoints * (bold ? WidestBoldFont : WidestFont);
     }
 
     /// <summary>The text, its end replaced by an ellipsis when it is wider than allowed.</summary>

@@ -16,9 +16,9 @@ internal sealed record TrackView(
     TrackDefinition Definition, IReadOnlyList<CurveTrace> Traces, IReadOnlyList<CurveScale> Scales, IReadOnlyList<RibbonView> Ribbons)
 {
     /// <summary>Reads a track; null when none of its curves has a value.</summary>
-    public static TrackView? Read(EarthModel model, TrackDefinition track, UnitSystem units, NumberColumn<EarthModel> depth, DepthAxis axis)
+    public static TrackView? Read(EarthModel model, TrackDefinition track, UnitSystem units, double[] depths, DepthAxis axis)
     {
-        var traces = track.Curves.Select(c => CurveTrace.Read(model, c, units, depth, axis)).OfType<CurveTrace>().ToList();
+        var traces = track.Curves.Select(c => CurveTrace.Read(model, c, units, depths, axis)).OfType<CurveTrace>().ToList();
         return traces.Count == 0 ? null : new TrackView(track, traces, CurveTrace.Scales(traces, units), []);
     }
 

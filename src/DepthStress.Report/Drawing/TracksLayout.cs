@@ -8,7 +8,7 @@ internal sealed record TracksLayout
     public const double DepthWidth = 46;
     private const double Gap = 7;
     private const double RibbonGap = 2;
-    private const double NarrowestTrack = 82;
+    private const double NarrowestTrack = 76;
     private const double WidestTrack = 150;
     private const double NarrowestPage = 520;
 

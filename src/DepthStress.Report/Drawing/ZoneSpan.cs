@@ -12,16 +12,23 @@ internal sealed record ZoneSpan(int Zone, string Name, double Top, double Base)
     /// <summary>The zones of a model in order of depth, depths as given.</summary>
     public static IReadOnlyList<ZoneSpan> Of(EarthModel model, ReadOnlySpan<double> depths)
     {
-        var spans = new SortedDictionary<int, (double Top, double Base)>();
+        var spans = new (double Top, double Base)[model.Setup.Zones.Count];
+        Array.Fill(spans, (double.NaN, double.NaN));
         for (var i = 0; i < model.Count; i++)
         {
             var zone = model.Zones[i];
             if (zone == ZoneIndex.None || !double.IsFinite(depths[i])) continue;
             var end = i + 1 < model.Count && double.IsFinite(depths[i + 1]) ? depths[i + 1] : depths[i];
             var (low, high) = (Math.Min(depths[i], end), Math.Max(depths[i], end));
-            spans[zone] = spans.TryGetValue(zone, out var span) ? (Math.Min(span.Top, low), Math.Max(span.Base, high)) : (low, high);
+            ref var span = ref spans[zone];
+            if (!(low >= span.Top)) span.Top = low;
+            if (!(high <= span.Base)) span.Base = high;
         }
 
-        return [.. spans.Select(s => new ZoneSpan(s.Key, PlainText.Clean(model.ZoneName(s.Key)), s.Value.Top, s.Value.Base)).OrderBy(s => s.Top)];
+        return
+        [
+            .. spans.Select((s, zone) => new ZoneSpan(zone, PlainText.Clean(model.ZoneName(zone)), s.Top, s.Base))
+                .Where(s => double.IsFinite(s.Top)).OrderBy(s => s.Top),
+        ];
     }
 }

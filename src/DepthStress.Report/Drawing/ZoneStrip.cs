@@ -1,3 +1,4 @@
+using System.Globalization;
 using OxyPlot;
 
 namespace DepthStress.Report.Drawing;
@@ -28,7 +29,10 @@ internal static class ZoneStrip
         }
     }
 
-    /// <summary>Draws the strip: a bar of the zones at its right edge, names to the left of it with a leader where they had to move.</summary>
+    /// <summary>
+    /// Draws the strip: a bar of the zones at its right edge, names to the left of it with a leader where they had to move;
+    /// above it how many zones found no room for a name.
+    /// </summary>
     public static void DrawNames(Sheet sheet, IReadOnlyList<ZoneSpan> zones, DepthAxis depth, double left, double right)
     {
         if (zones.Count == 0) return;
@@ -41,7 +45,14 @@ internal static class ZoneStrip
         }
 
         var width = bar - left - (2 * Room);
-        var labels = Named(zones, depth, lineHeight).Select(z => (Zone: z, Lines: PlainText.Wrap(z.Name, NameStyle.Size, false, width, 2))).ToList();
+        var named = Named(zones, depth, lineHeight);
+        if (named.Count < zones.Count)
+        {
+            var rest = string.Create(CultureInfo.InvariantCulture, $"{zones.Count - named.Count} unnamed");
+            sheet.Write(new ScreenPoint(right, depth.ScreenTop - 18), rest, NameStyle, HorizontalAlignment.Right);
+        }
+
+        var labels = named.Select(z => (Zone: z, Lines: PlainText.Wrap(z.Name, NameStyle.Size, false, width, 2))).ToList();
         if (labels.Sum(l => l.Lines.Count) * lineHeight > depth.ScreenBase - depth.ScreenTop)
             labels = [.. labels.Select(l => (l.Zone, (IReadOnlyList<string>)[PlainText.Shorten(l.Zone.Name, NameStyle.Size, false, width)]))];
         double[] wanted = [.. labels.Select(l => depth.ToScreen((l.Zone.Top + l.Zone.Base) / 2))];

@@ -88,8 +88,16 @@ internal static class PictureModels
 
     private static double Wave(double md, double length) => Math.Sin(2 * Math.PI * md / length) * Math.Cos(md / 170);
 
-    /// <summary>A number between -1 and 1 that looks random and is the same for the same sample on every machine.</summary>
-    private static double Noise(int i) => (unchecked((uint)i * 2654435761u) >> 8) / (double)(1 << 23) - 1;
+    /// <summary>A number between -1 and 1 that looks like beds of a few samples and is the same on every machine.</summary>
+    private static double Noise(int i) => (Random(i / 23) + (0.4 * Random(i / 7)) + (0.15 * Random(i))) / 1.55;
+
+    private static double Random(int i) => ((Mixed((uint)i) >> 8) / (double)(1 << 23)) - 1;
+
+    private static uint Mixed(uint i)
+    {
+        i = unchecked((i ^ (i >> 16)) * 0x45D9F3Bu);
+        return unchecked((i ^ (i >> 16)) * 0x45D9F3Bu);
+    }
 
     private static double[] Shape(double[] md, Func<int, double> value) => [.. md.Select((_, i) => value(i))];
 
