@@ -64,7 +64,7 @@ public static class StressPicture
         var (frame, unit) = (model.Setup.Frame, units.UnitFor(Dimension.Length).Unit.Symbol);
         PageFrame.DrawTitle(sheet, model.Setup.Name, "stress over depth", PageTexts.Surfaces(frame, units));
         ZoneStrip.DrawBands(sheet, zones, axis, left, right);
-        ZoneStrip.DrawNames(sheet, zones, axis, plotRight + 8, right);
+        ZoneStrip.DrawNames(sheet, zones, axis, plotRight + 8, right, axis.ScreenBase + 9);
         DepthScales.DrawOwn(sheet, axis, left, left, plotRight);
         sheet.Write(
             new ScreenPoint(PageFrame.Margin + 8, (axis.ScreenTop + axis.ScreenBase) / 2), $"True vertical depth below {PageTexts.Datum(frame)}, {unit}", Title,

@@ -75,7 +75,7 @@ public static class TracksPicture
         DepthScales.DrawOwn(sheet, axis, left + TracksLayout.DepthWidth - 8, layout.ZoneRight, layout.Right);
         DepthScales.DrawOther(sheet, axis, mds, tvds, left + (2 * TracksLayout.DepthWidth) - 8);
         if (zones.Count > 0) sheet.Write(new ScreenPoint(layout.ZoneRight, axis.ScreenTop - 6), "Zone", new TextStyle(9, Palette.Text, true), HorizontalAlignment.Right);
-        ZoneStrip.DrawNames(sheet, zones, axis, layout.ZoneLeft, layout.ZoneRight);
+        ZoneStrip.DrawNames(sheet, zones, axis, layout.ZoneLeft, layout.ZoneRight, axis.ScreenTop - 18);
     }
 
     private static void DrawTrack(Sheet sheet, TrackView track, UnitSystem units, TracksLayout layout, int index, DepthAxis axis)

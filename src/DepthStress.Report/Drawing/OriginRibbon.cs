@@ -13,13 +13,13 @@ internal static class OriginRibbon
     /// <summary>The colour of an origin; the weaker the origin, the more it stands out.</summary>
     public static int Colour(SampleOrigin origin) => origin switch
     {
-        SampleOrigin.Measured => 0x2E4756,
-        SampleOrigin.Spliced => 0x6F93A3,
-        SampleOrigin.Edited => 0xB9D3CF,
-        SampleOrigin.Filled => 0xF2DC8A,
-        SampleOrigin.Predicted => 0xE79A3C,
-        SampleOrigin.Extrapolated => 0xC4557A,
-        SampleOrigin.Assumed => 0x7A1F63,
+        SampleOrigin.Measured => 0x5B8FA8,
+        SampleOrigin.Spliced => 0x94BACB,
+        SampleOrigin.Edited => 0xC6E0D8,
+        SampleOrigin.Filled => 0xF4D35E,
+        SampleOrigin.Predicted => 0xD98324,
+        SampleOrigin.Extrapolated => 0xA23B72,
+        SampleOrigin.Assumed => 0x2E0F26,
         _ => 0xFFFFFF,
     };
 

@@ -31,9 +31,9 @@ internal static class ZoneStrip
 
     /// <summary>
     /// Draws the strip: a bar of the zones at its right edge, names to the left of it with a leader where they had to move;
-    /// above it how many zones found no room for a name.
+    /// at a given height how many zones found no room for a name.
     /// </summary>
-    public static void DrawNames(Sheet sheet, IReadOnlyList<ZoneSpan> zones, DepthAxis depth, double left, double right)
+    public static void DrawNames(Sheet sheet, IReadOnlyList<ZoneSpan> zones, DepthAxis depth, double left, double right, double noteAt)
     {
         if (zones.Count == 0) return;
         var (bar, lineHeight) = (right - BarWidth, NameStyle.Size * 1.2);
@@ -49,7 +49,7 @@ internal static class ZoneStrip
         if (named.Count < zones.Count)
         {
             var rest = string.Create(CultureInfo.InvariantCulture, $"{zones.Count - named.Count} unnamed");
-            sheet.Write(new ScreenPoint(right, depth.ScreenTop - 18), rest, NameStyle, HorizontalAlignment.Right);
+            sheet.Write(new ScreenPoint(right, noteAt), rest, NameStyle, HorizontalAlignment.Right);
         }
 
         var labels = named.Select(z => (Zone: z, Lines: PlainText.Wrap(z.Name, NameStyle.Size, false, width, 2))).ToList();
