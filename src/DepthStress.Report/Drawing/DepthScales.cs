@@ -8,7 +8,7 @@ internal static class DepthScales
     private const double LabelSpacing = 38;
     private const double LabelHeight = 10;
     private const double Tick = 4;
-    private const double Unlabelled = 70;
+    private const double StepsUnlabelled = 2.5;
     private static readonly TextStyle Head = new(9, Palette.Text, true);
     private static readonly TextStyle Note = new(7, Palette.FaintText);
     private static readonly TextStyle Number = new(8);
@@ -52,6 +52,7 @@ internal static class DepthScales
     {
         if (own.IsEmpty) return;
         var (step, above) = (axis.Step(LabelSpacing), axis.ScreenTop - LabelHeight);
+        var unlabelled = StepsUnlabelled * step / axis.Pixel;
         for (var i = 0; i < own.Length; i++)
         {
             var previous = Math.Max(0, i - 1);
@@ -62,7 +63,7 @@ internal static class DepthScales
             }
 
             var y = axis.ToScreen(own[i]);
-            if (y - above >= Unlabelled && double.IsFinite(other[i])) Label(y, Unlabelled, RoundSteps.Show(other[i], Math.Min(step, 0.1)));
+            if (y - above >= unlabelled && double.IsFinite(other[i])) Label(y, unlabelled, RoundSteps.Show(other[i], Math.Min(step, 0.1)));
         }
 
         void Label(double y, double spacing, string text)
