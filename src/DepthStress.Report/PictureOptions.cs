@@ -1,0 +1,8 @@
+using DepthStress.Core.Quantities;
+
+namespace DepthStress.Report;
+
+/// <summary>What a picture shows and in which units.</summary>
+/// <param name="Units">The units of every scale.</param>
+/// <param name="Tracks">Ids of <see cref="TrackTable"/> in the order to draw them; null means every track that has a curve.</param>
+public sealed record PictureOptions(UnitSystem Units, IReadOnlyList<string>? Tracks = null);

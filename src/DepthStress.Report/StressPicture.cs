@@ -1,0 +1,114 @@
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+using DepthStress.Report.Drawing;
+using OxyPlot;
+
+namespace DepthStress.Report;
+
+/// <summary>Stresses and pore pressure, and their gradients, over true vertical depth, as SVG.</summary>
+public static class StressPicture
+{
+    private const double AxisWidth = 66;
+    private const double LegendLine = 14;
+    private const double AxisHeight = 34;
+    private const double Gap = 32;
+    private static readonly TextStyle Small = new(8);
+    private static readonly TextStyle Title = new(9.5, Palette.Text, true);
+
+    /// <summary>Writes the picture: UTF-8, the same bytes for the same model and options.</summary>
+    /// <param name="model">The finished model.</param>
+    /// <param name="options">Units; the choice of tracks does not matter here.</param>
+    /// <param name="destination">Gets the picture; stays open.</param>
+    public static void Write(EarthModel model, PictureOptions options, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(model);
+        ArgumentNullException.ThrowIfNull(options);
+        ArgumentNullException.ThrowIfNull(destination);
+        using var sheet = Draw(model, options.Units);
+        sheet.WriteTo(destination, $"{model.Setup.Name}: stress over depth");
+    }
+
+    /// <summary>Draws the picture.</summary>
+    internal static Sheet Draw(EarthModel model, UnitSystem units)
+    {
+        var tvds = new double[model.Count];
+        DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
+        var zones = ZoneSpan.Of(model, tvds);
+        var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
+        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
+
+        var legendTop = PageFrame.Margin + PageFrame.TitleHeight;
+        var plotTop = legendTop + (2 * LegendLine) + AxisHeight + 6;
+        var axis = new DepthAxis(finite.Min(), finite.Max(), plotTop, PageFrame.LongSide - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 16);
+        var (left, right, names) = (PageFrame.Margin + AxisWidth, sheet.Width - PageFrame.Margin, ZoneStrip.Width(zones));
+        var middle = left + ((right - names - left) * 0.58);
+        var views = new[] { TrackTable.StressPanels.Stress, TrackTable.StressPanels.Gradient }
+            .Select(d => TrackView.Read(model, d, units, tvds, axis)).ToArray();
+
+        DrawFrame(sheet, model, units, axis, zones, left, right - names - 8, right);
+        if (views[0] is { } stress)
+        {
+            DrawLegend(sheet, model, units, stress, left, right, legendTop);
+            DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle);
+        }
+
+        if (views[1] is { } gradient)
+            DrawPanel(sheet, gradient, $"Gradient: value / depth below {(model.Setup.Frame.IsOffshore ? "sea surface" : "ground")}", units, axis, middle + Gap, right - names - 8);
+        PageFrame.DrawCaution(sheet);
+        return sheet;
+    }
+
+    private static void DrawFrame(
+        Sheet sheet, EarthModel model, UnitSystem units, DepthAxis axis, IReadOnlyList<ZoneSpan> zones, double left, double plotRight, double right)
+    {
+        var (frame, unit) = (model.Setup.Frame, units.UnitFor(Dimension.Length).Unit.Symbol);
+        PageFrame.DrawTitle(sheet, model.Setup.Name, "stress over depth", PageTexts.Surfaces(frame, units));
+        ZoneStrip.DrawBands(sheet, zones, axis, left, right);
+        ZoneStrip.DrawNames(sheet, zones, axis, plotRight + 8, right, axis.ScreenBase + 9);
+        DepthScales.DrawOwn(sheet, axis, left, left, plotRight);
+        sheet.Write(
+            new ScreenPoint(PageFrame.Margin + 8, (axis.ScreenTop + axis.ScreenBase) / 2), $"True vertical depth below {PageTexts.Datum(frame)}, {unit}", Title,
+            HorizontalAlignment.Center, true);
+    }
+
+    private static void DrawLegend(Sheet sheet, EarthModel model, UnitSystem units, TrackView stress, double left, double right, double top)
+    {
+        var (x, y) = (left, top + (LegendLine / 2));
+        foreach (var curve in stress.Traces.Select(t => t.Curve).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure))
+        {
+            var text = curve.Column == HydrostaticColumns.Pressure ? Hydrostatic(model, units) : $"{curve.Column.Symbol}, {curve.Column.Title}";
+            var width = 28 + PlainText.Width(text, Small.Size, false);
+            if (x > left && x + width > right) (x, y) = (left, y + LegendLine);
+            sheet.Line(x, y, x + 22, y, curve.Pen with { Width = curve.Pen.Width + 0.6 });
+            sheet.Write(new ScreenPoint(x + 28, y), text, Small);
+            x += width + 16;
+        }
+    }
+
+    private static string Hydrostatic(EarthModel model, UnitSystem units)
+    {
+        var (metric, field) = ColumnUnits.MudDensities;
+        var unit = (units == UnitSystem.Metric ? metric : field).Unit;
+        var density = RoundSteps.Show(unit.FromSi(HydrostaticColumns.Density(model)), 0.01);
+        return $"reference: water of {density} {unit.Symbol} below the {(model.Setup.Frame.IsOffshore ? "sea surface" : "water table")}";
+    }
+
+    private static void DrawPanel(Sheet sheet, TrackView view, string title, UnitSystem units, DepthAxis axis, double left, double right)
+    {
+        var (scale, unit) = (view.Scales[0], view.Traces[0].Curve.Column.In(units).Unit.Symbol);
+        var step = (scale.Right - scale.Left) / scale.Divisions;
+        sheet.Write(new ScreenPoint((left + right) / 2, axis.ScreenTop - 26), $"{title}, {unit}", Title, HorizontalAlignment.Center);
+        for (var i = 0; i <= scale.Divisions; i++)
+        {
+            var x = left + ((right - left) * i / scale.Divisions);
+            sheet.Line(x, axis.ScreenTop, x, axis.ScreenBase, new CurvePen(Palette.Grid, 0.5));
+            sheet.Line(x, axis.ScreenTop - 4, x, axis.ScreenTop, new CurvePen(Palette.Frame, 0.6));
+            sheet.Write(new ScreenPoint(x, axis.ScreenTop - 10), RoundSteps.Show(scale.Left + (i * step), step), Small, HorizontalAlignment.Center);
+        }
+
+        for (var i = 0; i < view.Traces.Count; i++) CurveDrawing.Draw(sheet, new Panel(left, right, scale, axis), view.Traces[i], i);
+        sheet.Outline(new OxyRect(left, axis.ScreenTop, right - left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
+        var off = view.Traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Column.Symbol}: {PageTexts.OffScale(t.OffScale)}");
+        sheet.Write(new ScreenPoint(left, axis.ScreenBase + 9), string.Join(", ", off), Small);
+    }
+}
