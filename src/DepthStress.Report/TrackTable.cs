@@ -29,8 +29,8 @@ public static class TrackTable
         ]),
         new("gamma_ray", "Gamma ray, shale volume",
         [
+            Same(Column("shale_volume"), "shale volume", new(Rust, 0.5), UnitInterval),
             Same(LogColumns.GammaRay, "gamma ray", new(Teal), new(0, 150, 5)),
-            Same(Column("shale_volume"), "shale volume", new(Rust, 0.7), UnitInterval),
         ]),
         new("slowness", "Slowness",
         [
@@ -57,7 +57,7 @@ public static class TrackTable
         new("strength", "Strength",
         [
             new(Column("ucs"), "unconfined, UCS", new(Ink), new(0, 160), new(0, 24000)),
-            new(Column("tensile_strength"), "tensile", new(Gold), new(0, 16), new(0, 2400)),
+            new(Column("tensile_strength"), "tensile", new(Gold), new(0, 40), new(0, 6000)),
             Same(Column("friction_angle"), "friction angle", new(Teal, 0.7), new(0, 60)),
         ]),
         new("stress", "Pressure and total stress",

@@ -1,3 +1,4 @@
+using DepthStress.Core.Model;
 using OxyPlot;
 
 namespace DepthStress.Report.Drawing;
@@ -45,5 +46,5 @@ internal static class PageFrame
     }
 
     private static IReadOnlyList<string> CautionLines(double pageWidth) =>
-        PlainText.Wrap(PageTexts.Caution, Small.Size, false, pageWidth - (2 * Margin), 6);
+        PlainText.Wrap(Caution.Text, Small.Size, false, pageWidth - (2 * Margin), 6);
 }

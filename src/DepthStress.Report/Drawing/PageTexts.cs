@@ -7,11 +7,6 @@ namespace DepthStress.Report.Drawing;
 /// <summary>The words that every picture carries.</summary>
 internal static class PageTexts
 {
-    /// <summary>The caution at the foot of every page.</summary>
-    public const string Caution =
-        "Estimates for planning, not a substitute for measured tests, local codes and regulations, or the judgement of a licensed engineer; "
-        + "do not set mud weight, casing or treatment pressure from this output alone.";
-
     /// <summary>The surface at which depths are zero.</summary>
     public static string Datum(DepthFrame frame) => frame.Datum switch
     {

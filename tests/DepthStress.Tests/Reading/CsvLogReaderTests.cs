@@ -104,13 +104,22 @@ public class CsvLogReaderTests
     }
 
     [Fact]
-    public void Without_a_depth_column_the_file_is_read_with_a_warning_and_rows_may_stand_in_any_order()
+    public void Without_a_depth_column_the_file_cannot_be_used()
     {
-        var read = LogReading.Csv("A,B\n2,5\n1,4\n");
-        Assert.Equal(-1, read.File!.DepthColumn);
+        var read = LogReading.Csv("A,B\n1,5\n2,4\n");
+        Assert.Null(read.File);
         Assert.Equal(
-            ["a.csv: warning: found no depth column, expected one named DEPT, DEPTH, MD, MEASURED_DEPTH, DEPTH_MD, TDEP, MD_DEPTH, MEASDEPTH or MEASUREDDEPTH"],
+            ["a.csv(1): error: found no depth column, expected one named DEPT, DEPTH, MD, MEASURED_DEPTH, DEPTH_MD, TDEP, MD_DEPTH, MEASDEPTH or MEASUREDDEPTH"],
             read.Messages);
+    }
+
+    [Fact]
+    public void A_unit_suffix_is_a_unit_only_where_it_is_asked_for()
+    {
+        var options = new LogReadOptions { UnitSuffixes = true };
+        var file = LogReading.Csv("md_m,inclination_deg\n1,5\n2,4\n", options with { DepthNames = ["md"] }).Clean();
+        Assert.Equal([("md", "m"), ("inclination", "deg")], file.Columns.Select(c => (c.Name, c.Unit!)));
+        Assert.Equal("DT_M", LogReading.Csv("DEPT,DT_M\n1,5\n").Clean().Columns[1].Name);
     }
 
     [Fact]

@@ -1,4 +1,4 @@
-namespace DepthStress.Files.Writing;
+namespace DepthStress.Core.Model;
 
 /// <summary>What every result says about its use.</summary>
 public static class Caution
