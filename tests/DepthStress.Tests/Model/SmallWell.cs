@@ -70,7 +70,7 @@ internal static class SmallWell
     public static LogTable Table(double[] depths, params Curve[] curves) => new(depths, curves);
 
     /// <summary>Vp 4000 m/s, Vs 2400 m/s, 2500 kg/m3 everywhere, unless a curve replaces one.</summary>
-    public static LogTable Logs(params Curve[] replaced) => Table(
+    public static LogTable LogsWith(params Curve[] replaced) => Table(
         Depths,
         Curve(Property.Vp, Same(4000)),
         Curve(Property.Vs, Same(2400)),
@@ -84,7 +84,7 @@ internal static class SmallWell
         return model!;
     }
 
-    public static EarthModel Run(params Curve[] replaced) => Run(Setup, Logs(replaced));
+    public static EarthModel Run(params Curve[] replaced) => Run(Setup, LogsWith(replaced));
 
     public static string[] Errors(WellSetup setup, LogTable logs)
     {
