@@ -11,6 +11,9 @@ internal readonly record struct LayerBounds(int Start, int End, short Zone)
     /// <summary>Room for rounding when a thickness is compared with the greatest one allowed.</summary>
     private const double Slack = 1e-9;
 
+    /// <summary>How many numbers of equal parts are tried.</summary>
+    private const int Tries = 3;
+
     /// <summary>
     /// Cuts the samples that enter layers into one layer per zone, or one in all when there are no zones, each split into nearly
     /// equal parts of true vertical thickness where it is thicker than allowed. A single sample is never split.
@@ -39,34 +42,41 @@ internal readonly record struct LayerBounds(int Start, int End, short Zone)
             return;
         }
 
-        var (thickness, most) = (whole.Thickness(cells), settings.MaxThickness.Value);
-        var cut = whole.Cut(model, cells, Parts(thickness, most));
-        if (cut.Exists(b => b.Thickness(cells) > most * (1 + Slack)))
+        var most = settings.MaxThickness.Value * (1 + Slack);
+        var fewest = (int)Math.Clamp(Math.Ceiling(whole.Thickness(cells) / most), 1, int.MaxValue - Tries);
+        for (var parts = fewest; parts < fewest + Tries; parts++)
         {
-            // Cuts lie between samples: a part may be thicker than an equal share by one sample's cell.
-            var cell = Enumerable.Range(whole.Start, whole.End - whole.Start).Max(cells.Thickness);
-            cut = whole.Cut(model, cells, most > cell ? Parts(thickness, most - cell) : whole.End - whole.Start);
+            var cut = whole.Shares(model, cells, parts);
+            if (!cut.TrueForAll(b => b.End - b.Start == 1 || b.Thickness(cells) <= most)) continue;
+            bounds.AddRange(cut);
+            return;
         }
 
-        bounds.AddRange(cut);
+        bounds.AddRange(whole.Fullest(model, cells, most));
     }
-
-    private static int Parts(double thickness, double most) =>
-        (int)Math.Clamp(Math.Ceiling(thickness / most * (1 - Slack)), 1, int.MaxValue);
 
     private double Thickness(SampleCells cells) => cells.Base(End - 1) - cells.Top(Start);
 
-    private List<LayerBounds> Cut(EarthModel model, SampleCells cells, int parts)
+    /// <summary>Nearly equal parts; cuts lie between samples, so a part may differ from its share by one sample's cell.</summary>
+    private List<LayerBounds> Shares(EarthModel model, SampleCells cells, int parts)
     {
         var (top, share) = (cells.Top(Start), Thickness(cells) / parts);
+        return Cut(model, (from, i) => Math.Floor((cells.Middle(i) - top) / share) > Math.Floor((cells.Middle(from) - top) / share));
+    }
+
+    /// <summary>Parts as thick as allowed, for samples too far apart for equal shares.</summary>
+    private List<LayerBounds> Fullest(EarthModel model, SampleCells cells, double most) =>
+        Cut(model, (from, i) => cells.Base(i) - cells.Top(from) > most);
+
+    private List<LayerBounds> Cut(EarthModel model, Func<int, int, bool> startsAnother)
+    {
         var cut = new List<LayerBounds>();
-        var (from, limit) = (Start, 1);
+        var from = Start;
         for (var i = Start + 1; i < End; i++)
         {
-            if (!model.Usable[i] || cells.Middle(i) < top + (limit * share)) continue;
+            if (!model.Usable[i] || !startsAnother(from, i)) continue;
             cut.Add(new LayerBounds(from, i, Zone).Trimmed(model));
             from = i;
-            limit = Math.Max(limit + 1, (int)((cells.Middle(i) - top) / share) + 1);
         }
 
         cut.Add(new LayerBounds(from, End, Zone));
