@@ -1,4 +1,5 @@
 using DepthStress.Core.Logs;
+using DepthStress.Core.Quantities;
 
 namespace DepthStress.Core.Catalogue;
 
@@ -20,6 +21,13 @@ public readonly record struct Interval(double Low, double High)
         Property.PoissonStatic or Property.PoissonDynamic => new(-1, 0.5),
         _ => NotNegative,
     };
+
+    /// <summary>An interval given in SI, in a unit.</summary>
+    public Interval In(Unit unit)
+    {
+        ArgumentNullException.ThrowIfNull(unit);
+        return new(unit.FromSi(Low), unit.FromSi(High));
+    }
 
     /// <summary>True when the value lies inside, ends included; false for NaN.</summary>
     public bool Contains(double value) => value >= Low && value <= High;

@@ -32,7 +32,7 @@ public static class UserLaw
             Coefficients = coefficients,
             Template = template,
             Formula = formula,
-            ResultDomain = Interval.Physical(predicts),
+            ResultDomain = Interval.Physical(predicts).In(unit),
             Validity = "the user's responsibility",
             Source = "well file",
             Standing = Standing.UserGiven,

@@ -19,10 +19,11 @@ public static class LayerBuilder
     public static LayerTable Build(EarthModel model, LayerSettings settings)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var bounds = LayerBounds.Of(model, settings);
-        var edges = Edges(model, bounds);
-        var weights = Weights(model, bounds, edges);
-        var layers = bounds.Select((b, k) => Make(model, k, b, edges[k], weights)).ToList();
+        ArgumentNullException.ThrowIfNull(settings);
+        var cells = new SampleCells(model);
+        var weights = new double[model.Count];
+        for (var i = 0; i < weights.Length; i++) weights[i] = cells.Thickness(i);
+        var layers = LayerBounds.Of(model, cells, settings).Select((b, k) => Make(model, k, b, cells, weights)).ToList();
         return new LayerTable([.. layers.Select((layer, k) => layer with
         {
             ContrastAbove = Contrast(layers, k, k - 1),
@@ -30,62 +31,17 @@ public static class LayerBuilder
         })]);
     }
 
-    /// <summary>
-    /// Tops and bases in true vertical depth: halfway between the samples of layers that touch, on the outer samples elsewhere.
-    /// </summary>
-    private static (double Top, double Base)[] Edges(EarthModel model, IReadOnlyList<LayerBounds> bounds)
-    {
-        var tvd = model.Values.Read(Property.TrueVerticalDepth);
-        var edges = new (double Top, double Base)[bounds.Count];
-        for (var k = 0; k < edges.Length; k++)
-        {
-            edges[k].Top = k > 0 && bounds[k - 1].End == bounds[k].Start ? edges[k - 1].Base : tvd[bounds[k].Start];
-            var last = bounds[k].End - 1;
-            edges[k].Base = k + 1 < edges.Length && bounds[k + 1].Start == bounds[k].End ? 0.5 * (tvd[last] + tvd[last + 1]) : tvd[last];
-        }
-
-        return edges;
-    }
-
-    /// <summary>The true vertical thickness each usable sample stands for, m: halfway to its neighbours, within its layer.</summary>
-    private static double[] Weights(EarthModel model, IReadOnlyList<LayerBounds> bounds, (double Top, double Base)[] edges)
-    {
-        var tvd = model.Values.Read(Property.TrueVerticalDepth);
-        var weights = new double[model.Count];
-        for (var k = 0; k < bounds.Count; k++)
-        {
-            var previous = -1;
-            var top = edges[k].Top;
-            for (var i = bounds[k].Start; i < bounds[k].End; i++)
-            {
-                if (!model.Usable[i]) continue;
-                if (previous >= 0)
-                {
-                    var middle = 0.5 * (tvd[previous] + tvd[i]);
-                    weights[previous] = middle - top;
-                    top = middle;
-                }
-
-                previous = i;
-            }
-
-            if (previous >= 0) weights[previous] = edges[k].Base - top;
-        }
-
-        return weights;
-    }
-
-    private static Layer Make(EarthModel model, int number, LayerBounds bounds, (double Top, double Base) edge, double[] weights)
+    private static Layer Make(EarthModel model, int number, LayerBounds bounds, SampleCells cells, double[] weights)
     {
         var md = model.Values.Read(Property.MeasuredDepth);
-        var weight = weights.AsSpan(bounds.Start, bounds.End - bounds.Start);
+        var (top, bottom) = (cells.Top(bounds.Start), cells.Base(bounds.End - 1));
         return new Layer
         {
             Number = number + 1,
-            TopMd = AtEdge(model, edge.Top, md[bounds.Start]),
-            BaseMd = AtEdge(model, edge.Base, md[bounds.End - 1]),
-            TopTvd = edge.Top,
-            BaseTvd = edge.Base,
+            TopMd = AtEdge(model, top, md[bounds.Start]),
+            BaseMd = AtEdge(model, bottom, md[bounds.End - 1]),
+            TopTvd = top,
+            BaseTvd = bottom,
             Zone = model.ZoneName(bounds.Zone),
             Lithology = model.LithologyName(MostOf(model, bounds, weights)),
             Samples = Enumerable.Range(bounds.Start, bounds.End - bounds.Start).Count(i => model.Usable[i]),

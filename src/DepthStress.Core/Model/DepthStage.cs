@@ -8,8 +8,6 @@ namespace DepthStress.Core.Model;
 /// <summary>Turns measured depths into vertical ones and decides which samples enter the vertical integrals.</summary>
 internal static class DepthStage
 {
-    private static readonly double SteepestUsable = Units.Degree.ToSi(80);
-
     /// <summary>Fills the depth columns and gives the usable samples.</summary>
     public static bool[] Apply(WellSetup setup, PropertyTable table, List<Finding> findings)
     {
@@ -19,7 +17,7 @@ internal static class DepthStage
         setup.Trajectory.Fill(md, tvd, inclination);
 
         var usable = new bool[table.Count];
-        VerticalProgress.Mask(tvd, inclination, SteepestUsable, usable);
+        VerticalProgress.Mask(tvd, inclination, VerticalProgress.DefaultMaxInclination, usable);
         var left = new bool[table.Count];
         var above = new bool[table.Count];
         var beyond = new bool[table.Count];

@@ -19,7 +19,7 @@ internal static class LawColumns
     /// <summary>Makes the slowness columns that a law of these runs asks for.</summary>
     public static void Derive(PropertyTable table, IReadOnlyList<SettingsRun> runs)
     {
-        var wanted = runs.Select(r => r.Settings).Distinct()
+        var wanted = runs.Select(r => r.Settings).Distinct<StageSettings>(ReferenceEqualityComparer.Instance)
             .SelectMany(s => LawSlots.All.Select(slot => slot.Choice(s)).Where(c => c.IsSet))
             .SelectMany(c => c.Value.Inputs).Select(i => i.Property).ToHashSet();
         Invert(table, Property.Vp, Property.CompressionalSlowness, wanted);

@@ -23,7 +23,7 @@ internal static class PressureStage
         var problems = new List<FormattableString>();
         if (density is null || DensityProfile.Prepare(density, tvd, usable, settings, problems) is not { } profile)
         {
-            diagnostics.Error(SourcePosition.None, "no bulk density at any depth, expected a density curve: the overburden needs it");
+            diagnostics.Error(setup.Position, "no bulk density at any depth, expected a density curve: the overburden needs it");
             return null;
         }
 
@@ -34,28 +34,29 @@ internal static class PressureStage
             problems.Add($"density is not logged from {Quantity.Length(frame.SolidTopTvd)} (ground or mudline) to {Quantity.Length(firstDepth)} true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density");
         }
 
-        foreach (var problem in problems) diagnostics.Error(settings.Gaps.Source.Position, UnitSystem.Metric.Show(problem));
+        foreach (var problem in problems) diagnostics.Error(setup.Position, UnitSystem.Metric.Show(problem));
         if (problems.Count > 0) return null;
 
         table.Adopt(Property.Density, profile.Values);
         var mean = settings.AboveLog.IsSet ? settings.AboveLog.Value : profile.Values[profile.First];
         var carry = Pressure.Overburden.Start(
             frame.WaterDepth ?? 0, settings.WaterDensity.Value, frame.SolidTopTvd, mean, firstDepth, profile.Values[profile.First]);
-        if (firstDepth > frame.SolidTopTvd)
+        var stress = table.Write(Property.VerticalStress);
+        Pressure.Overburden.Scan(tvd, Used(profile, usable), stress, ref carry);
+        if (tvd[profile.FirstLogged] > frame.SolidTopTvd)
         {
             findings.Add(Finding.General(
                 Severity.Note,
-                $"the vertical stress of {Quantity.Pressure(carry.Stress)} at {Quantity.Length(firstDepth)} true vertical depth rests on an assumed mean density of {new Quantity(mean, Dimension.Density)} above the log"));
+                $"the vertical stress of {Quantity.Pressure(stress[profile.FirstLogged])} at {Quantity.Length(tvd[profile.FirstLogged])} true vertical depth rests on an assumed mean density of {new Quantity(mean, Dimension.Density)} above the log"));
         }
 
-        Pressure.Overburden.Scan(tvd, Used(profile, usable), table.Write(Property.VerticalStress), ref carry);
         return profile.Origins;
     }
 
     /// <summary>Fills pore pressure, run by run.</summary>
     public static void PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs)
     {
-        var lines = new Dictionary<PorePressureSettings, PressureLine>();
+        var lines = new Dictionary<PorePressureSettings, PressureLine>(ReferenceEqualityComparer.Instance);
         var tvd = table.Read(Property.TrueVerticalDepth);
         var pressure = table.Write(Property.PorePressure);
         foreach (var run in runs)

@@ -1,5 +1,7 @@
 using DepthStress.Core.Catalogue;
+using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
@@ -15,6 +17,12 @@ public static class SetupCheck
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(diagnostics);
         ZoneCheck.Report(setup, diagnostics);
+        foreach (var (rule, overrides) in setup.Lithologies)
+        {
+            if (overrides.Shale != new ShaleSettings())
+                diagnostics.Error(rule.Position, $"[shale] is set for lithology \"{rule.Name}\", expected it in the well or a zone: lithology rules hold by shale volume");
+        }
+
         var reported = new HashSet<(SourcePosition, string)>();
         foreach (var (owner, position, settings) in Resolved(setup))
         {
@@ -108,8 +116,23 @@ public static class SetupCheck
             case PorePressureMethod.Table:
                 if (!pore.Points.IsSet) Missing(scope, "[pore_pressure] points", "a table of depth and pressure");
                 if (!pore.DepthKind.IsSet) Missing(scope, "[pore_pressure] depth_kind", "md, tvd or tvdss");
+                if (pore.Points.IsSet && pore.DepthKind.IsSet && !GetsDeeper(scope.Setup, pore.Points.Value, pore.DepthKind.Value))
+                    scope.Error(pore.Points.Source.Position, "[pore_pressure] points do not get deeper, expected true vertical depths that increase from point to point");
                 break;
         }
+    }
+
+    private static bool GetsDeeper(WellSetup setup, IReadOnlyList<PressurePoint> points, DepthKind kind)
+    {
+        var above = double.NegativeInfinity;
+        foreach (var point in points)
+        {
+            var depth = ZoneIndex.ToVertical(setup, point.Depth, kind);
+            if (!(depth > above)) return false;
+            above = depth;
+        }
+
+        return points.Count > 0;
     }
 
     private static void ReportStrains(Scope scope)

@@ -10,11 +10,15 @@ namespace DepthStress.Core.Pressure;
 /// </summary>
 public sealed class DensityProfile
 {
-    private DensityProfile(double[] values, OriginTrack origins, int first, int end)
+    /// <summary>A step between neighbouring samples this many times the mean one means that rows are missing.</summary>
+    private const double RowGap = 10;
+
+    private DensityProfile(double[] values, OriginTrack origins, int first, int firstLogged, int end)
     {
         Values = values;
         Origins = origins;
         First = first;
+        FirstLogged = firstLogged;
         End = end;
     }
 
@@ -26,6 +30,9 @@ public sealed class DensityProfile
 
     /// <summary>First sample of the overburden integral.</summary>
     public int First { get; }
+
+    /// <summary>First sample with a logged density that enters the integral; those between it and <see cref="First"/> have the mean above.</summary>
+    public int FirstLogged { get; }
 
     /// <summary>One past the last sample of the overburden integral.</summary>
     public int End { get; }
@@ -62,9 +69,10 @@ public sealed class DensityProfile
         }
 
         for (var k = 1; k < known.Count; k++) Bridge(known[k - 1], known[k], values, tvd, usable, settings.Gaps, origins, problems);
+        if (settings.Gaps.Value.Kind != DensityFillKind.Linear) ReportMissingRows(known[0], known[^1], tvd, usable, problems);
         var end = Continue(known[^1], values, usable, settings.BelowLog.Value, origins);
-        var first = settings.AboveLog.IsSet ? FirstUsable(usable) : known[0];
-        return new DensityProfile(values, origins.Over(density.Origins), first, end);
+        var first = settings.AboveLog.IsSet ? usable.IndexOf(true) : known[0];
+        return new DensityProfile(values, origins.Over(density.Origins), first, known[0], end);
     }
 
     private static void Bridge(
@@ -92,6 +100,18 @@ public sealed class DensityProfile
         }
     }
 
+    /// <summary>The trapezoidal rule would draw a straight line across rows that are not there; only the user may choose that.</summary>
+    private static void ReportMissingRows(int top, int bottom, ReadOnlySpan<double> tvd, ReadOnlySpan<bool> usable, List<FormattableString> problems)
+    {
+        if (bottom == top) return;
+        var longest = RowGap * (tvd[bottom] - tvd[top]) / (bottom - top);
+        for (var i = top; i < bottom; i++)
+        {
+            if (!usable[i] || !usable[i + 1] || !(tvd[i + 1] - tvd[i] > longest)) continue;
+            problems.Add($"there are no samples from {Quantity.Length(tvd[i])} to {Quantity.Length(tvd[i + 1])} true vertical depth, and the overburden needs density there: set [overburden] gaps = \"linear\" or add samples");
+        }
+    }
+
     private static int Continue(int last, double[] values, ReadOnlySpan<bool> usable, DensityFill fill, OriginMarks origins)
     {
         if (fill.Kind is DensityFillKind.None or DensityFillKind.Linear) return last + 1;
@@ -104,8 +124,6 @@ public sealed class DensityProfile
 
         return values.Length;
     }
-
-    private static int FirstUsable(ReadOnlySpan<bool> usable) => usable.IndexOf(true);
 
     private static double Line(double x, double x0, double y0, double x1, double y1) => y0 + ((y1 - y0) * (x - x0) / (x1 - x0));
 

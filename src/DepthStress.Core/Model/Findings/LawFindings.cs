@@ -35,5 +35,13 @@ internal static class LawFindings
         }
     }
 
-    private static string Name(Property property) => CurveRoles.Of(property)?.Title ?? property.ToString();
+    /// <summary>What the user would have to give so that the property is there.</summary>
+    private static string Name(Property property) => property switch
+    {
+        Property.GammaRayIndex => Name(Property.GammaRay),
+        Property.CompressionalSlowness => Name(Property.Vp),
+        Property.YoungsDynamic or Property.PoissonDynamic => $"{Name(Property.Vp)} and {Name(Property.Vs)}",
+        Property.ShearSlowness => Name(Property.Vs),
+        _ => CurveRoles.Of(property)?.Title ?? LawSlots.All.FirstOrDefault(s => s.Property == property)?.Key ?? property.ToString(),
+    };
 }

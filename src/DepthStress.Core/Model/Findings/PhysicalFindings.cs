@@ -26,8 +26,8 @@ internal static class PhysicalFindings
 
         return
         [
-            .. SampleMarks.Where(model, Severity.Warning, $"pore pressure is not below Shmin", i => pp[i] >= shmin[i]),
-            .. SampleMarks.Where(model, Severity.Warning, $"pore pressure is not below the vertical stress", i => pp[i] >= sv[i]),
+            .. SampleMarks.Where(model, Severity.Warning, $"pore pressure is not below Shmin", i => pp[i] > 0 && pp[i] >= shmin[i]),
+            .. SampleMarks.Where(model, Severity.Warning, $"pore pressure is not below the vertical stress", i => pp[i] > 0 && pp[i] >= sv[i]),
             .. SampleMarks.Where(model, Severity.Warning, $"static Young's modulus is not below the dynamic one", i => @static[i] >= dynamic[i]),
             .. SampleMarks.Where(model, Severity.Warning, $"dynamic Poisson's ratio outside 0.05-0.45: doubtful sonic", i => poisson[i] is < 0.05 or > 0.45),
             .. SampleMarks.Where(
