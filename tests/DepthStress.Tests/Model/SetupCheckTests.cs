@@ -111,10 +111,10 @@ public class SetupCheckTests
             Gradient = Chosen(1050.0),
             Reference = Chosen(DepthReference.Mudline, 30),
         });
-        Assert.Equal(["well.toml(30,1): error: an onshore well has no such reference"], Report(gradient));
+        Assert.Equal(["well.toml(30,1): error: found a reference that an onshore well does not have, expected rotary table or ground"], Report(gradient));
         Assert.Empty(Report(Setup with { Settings = gradient, Frame = Sea }));
         gradient = gradient with { PorePressure = gradient.PorePressure with { Reference = Chosen(DepthReference.Ground, 30) } };
-        Assert.Equal(["well.toml(30,1): error: an offshore well has no such reference"], Report(Setup with { Settings = gradient, Frame = Sea }));
+        Assert.Equal(["well.toml(30,1): error: found a reference that an offshore well does not have, expected rotary table, sea surface or mudline"], Report(Setup with { Settings = gradient, Frame = Sea }));
     }
 
     [Fact]

@@ -59,10 +59,10 @@ public class UnitsTests
     [InlineData("C", Temperature, "degC")]
     [InlineData("md", Permeability, "mD")]
     [InlineData("MD", Permeability, "mD")]
-    [InlineData("mpsi", Pressure, "Mpsi")]
-    [InlineData("MPSI", Pressure, "Mpsi")]
-    [InlineData("mpa", Pressure, "MPa")]
-    [InlineData("KPA", Pressure, "kPa")]
+    [InlineData("mpsi", Dimension.Pressure, "Mpsi")]
+    [InlineData("MPSI", Dimension.Pressure, "Mpsi")]
+    [InlineData("mpa", Dimension.Pressure, "MPa")]
+    [InlineData("KPA", Dimension.Pressure, "kPa")]
     [InlineData("PU", Fraction, "pu")]
     [InlineData("V/V", Fraction, "v/v")]
     [InlineData("M", Length, "m")]
@@ -82,7 +82,7 @@ public class UnitsTests
         Assert.Equal(symbol, Units.Find(spelling, dimension)?.Symbol);
 
     [Theory]
-    [InlineData("m", Pressure)]
+    [InlineData("m", Dimension.Pressure)]
     [InlineData("mD", Length)]
     [InlineData("F", Density)]
     [InlineData("", Length)]
