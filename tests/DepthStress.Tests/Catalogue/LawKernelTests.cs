@@ -93,6 +93,14 @@ public class LawKernelTests
         Assert.Equal(1, LawKernel.Apply(UserLaw.Constant(Property.Porosity, Units.Percent, 101), default, result).OutsideDomain);
     }
 
+    // At nu = 0.5 the bulk modulus is infinite, at -1 the shear modulus: results would not be finite.
+    [Theory]
+    [InlineData(0.5, 0)]
+    [InlineData(-1, 0)]
+    [InlineData(0.49, 1)]
+    public void A_Poissons_ratio_at_its_limits_is_outside_the_domain(double value, int evaluated) =>
+        Assert.Equal(evaluated, LawKernel.Apply(UserLaw.Constant(Property.PoissonStatic, Units.One, value), default, new double[1]).Evaluated);
+
     [Fact]
     public void Outcomes_add_up() =>
         Assert.Equal(new LawOutcome(11, 22, 33, 44), new LawOutcome(1, 2, 3, 4) + new LawOutcome(10, 20, 30, 40));
