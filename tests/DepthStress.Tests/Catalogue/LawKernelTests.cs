@@ -54,6 +54,16 @@ public class LawKernelTests
     }
 
     [Fact]
+    public void An_input_outside_its_domain_stays_so_whatever_the_next_one_is()
+    {
+        var law = Law with { Inputs = [Velocity, Velocity] };
+        var inputs = default(LawInputs);
+        inputs.Add([500.0]);
+        inputs.Add([5500.0]);
+        Assert.Equal(new LawOutcome(0, 0, 1, 0), LawKernel.Apply(law with { ResultDomain = Interval.All }, inputs, new double[1]));
+    }
+
+    [Fact]
     public void Columns_that_do_not_fit_are_refused()
     {
         Assert.Throws<ArgumentException>(() => LawKernel.Apply(Law, default, new double[1]));
