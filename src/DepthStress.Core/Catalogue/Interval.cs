@@ -18,7 +18,8 @@ public readonly record struct Interval(double Low, double High)
     public static Interval Physical(Property property) => property switch
     {
         Property.Biot or Property.Porosity or Property.ShaleVolume => new(0, 1),
-        Property.PoissonStatic or Property.PoissonDynamic => new(-1, 0.5),
+        // The ends are left out: at one the shear modulus is infinite, at the other the bulk modulus.
+        Property.PoissonStatic or Property.PoissonDynamic => new(Math.BitIncrement(-1.0), Math.BitDecrement(0.5)),
         _ => NotNegative,
     };
 

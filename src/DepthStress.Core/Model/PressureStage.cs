@@ -29,7 +29,7 @@ internal static class PressureStage
 
         var frame = setup.Frame;
         var firstDepth = tvd[profile.First];
-        if (firstDepth > frame.SolidTopTvd && !settings.AboveLog.IsSet)
+        if (!(firstDepth <= frame.SolidTopTvd) && !settings.AboveLog.IsSet)
         {
             problems.Add($"density is not logged from {Quantity.Length(frame.SolidTopTvd)} (ground or mudline) to {Quantity.Length(firstDepth)} true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density");
         }

@@ -1,9 +1,7 @@
 using DepthStress.Core.Catalogue;
-using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
-using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Core.Model;
@@ -24,43 +22,46 @@ public static class SetupCheck
         }
 
         var reported = new HashSet<(SourcePosition, string)>();
-        foreach (var (owner, position, settings) in Resolved(setup))
+        foreach (var scope in Scopes(setup, (position, text) =>
         {
-            Report(new Scope(setup, owner, position, settings, (p, text) =>
-            {
-                if (reported.Add((p, text))) diagnostics.Error(p, text);
-            }));
+            if (reported.Add((position, text))) diagnostics.Error(position, text);
+        }))
+        {
+            Report(scope);
         }
     }
 
-    private static IEnumerable<(string Owner, SourcePosition Position, StageSettings Settings)> Resolved(WellSetup setup)
+    /// <summary>Each zone, or the well when there are none, followed by its lithologies.</summary>
+    private static IEnumerable<CheckScope> Scopes(WellSetup setup, Action<SourcePosition, string> error)
     {
-        var zones = new List<(string Owner, SourcePosition Position, StageSettings Settings)>();
-        if (setup.Zones.Count == 0) zones.Add(("", setup.Position, setup.Settings));
-        foreach (var zone in setup.Zones) zones.Add(($" in zone \"{zone.Name}\"", zone.Position, zone.Overrides.Over(setup.Settings)));
-        return zones.Concat(
-            from zone in zones
-            from lithology in setup.Lithologies
-            select ($"{zone.Owner} for lithology \"{lithology.Rule.Name}\"", lithology.Rule.Position, lithology.Overrides.Over(zone.Settings)));
+        IEnumerable<CheckScope> zones = setup.Zones.Count == 0
+            ? [new(setup, "", setup.Position, setup.Settings, error, null)]
+            : setup.Zones.Select(z => new CheckScope(setup, $" in zone \"{z.Name}\"", z.Position, z.Overrides.Over(setup.Settings), error, null));
+        foreach (var zone in zones)
+        {
+            yield return zone;
+            foreach (var (rule, overrides) in setup.Lithologies)
+            {
+                yield return new CheckScope(
+                    setup, $"{zone.Owner} for lithology \"{rule.Name}\"", rule.Position, overrides.Over(zone.Settings), error, zone);
+            }
+        }
     }
 
-    private sealed record Scope(
-        WellSetup Setup, string Owner, SourcePosition Position, StageSettings Settings, Action<SourcePosition, string> Error);
-
-    private static void Report(Scope scope)
+    private static void Report(CheckScope scope)
     {
         foreach (var slot in LawSlots.All) ReportLaw(scope, slot);
         ReportShale(scope);
-        ReportPorePressure(scope);
+        PorePressureCheck.Report(scope);
         ReportStrains(scope);
     }
 
-    private static void ReportLaw(Scope scope, LawSlot slot)
+    private static void ReportLaw(CheckScope scope, LawSlot slot)
     {
         var choice = slot.Choice(scope.Settings);
         if (!choice.IsSet)
         {
-            if (slot.Required) Missing(scope, slot.Key, $"methods: {string.Join(", ", MethodCatalogue.For(slot.Property).Select(l => l.Id))}");
+            if (slot.Required) scope.Missing(slot.Key, $"methods: {string.Join(", ", MethodCatalogue.For(slot.Property).Select(l => l.Id))}");
             return;
         }
 
@@ -79,12 +80,12 @@ public static class SetupCheck
         }
     }
 
-    private static void ReportShale(Scope scope)
+    private static void ReportShale(CheckScope scope)
     {
         var shale = scope.Settings.Shale;
         if (!shale.Volume.IsSet) return;
-        if (!shale.Clean.IsSet) Missing(scope, "[shale] clean", "the gamma radiation of clean rock, such as \"25 gAPI\"");
-        if (!shale.Shale.IsSet) Missing(scope, "[shale] shale", "the gamma radiation of shale, such as \"130 gAPI\"");
+        if (!shale.Clean.IsSet) scope.Missing("[shale] clean", "the gamma radiation of clean rock, such as \"25 gAPI\"");
+        if (!shale.Shale.IsSet) scope.Missing("[shale] shale", "the gamma radiation of shale, such as \"130 gAPI\"");
         if (shale.Clean.IsSet && shale.Shale.IsSet && shale.Shale.Value <= shale.Clean.Value)
         {
             scope.Error(
@@ -93,56 +94,13 @@ public static class SetupCheck
         }
     }
 
-    private static void ReportPorePressure(Scope scope)
-    {
-        var (pore, frame) = (scope.Settings.PorePressure, scope.Setup.Frame);
-        if (!pore.Method.IsSet)
-        {
-            Missing(scope, "[pore_pressure] method", "hydrostatic, gradient or table");
-            return;
-        }
-
-        switch (pore.Method.Value)
-        {
-            case PorePressureMethod.Hydrostatic when !pore.FluidDensity.IsSet:
-                Missing(scope, "[pore_pressure] fluid_density", "such as \"1.03 g/cm3\"");
-                break;
-            case PorePressureMethod.Gradient:
-                if (!pore.Gradient.IsSet) Missing(scope, "[pore_pressure] gradient", "such as \"10.5 kPa/m\"");
-                if (!pore.Reference.IsSet) Missing(scope, "[pore_pressure] reference", "rotary table, ground, sea surface or mudline");
-                else if (scope.Setup.FrameKnown && !frame.Has(pore.Reference.Value))
-                    scope.Error(pore.Reference.Source.Position, $"found a reference that an {(frame.IsOffshore ? "offshore" : "onshore")} well does not have, expected {(frame.IsOffshore ? "rotary table, sea surface or mudline" : "rotary table or ground")}");
-                break;
-            case PorePressureMethod.Table:
-                if (!pore.Points.IsSet) Missing(scope, "[pore_pressure] points", "a table of depth and pressure");
-                if (!pore.DepthKind.IsSet) Missing(scope, "[pore_pressure] depth_kind", "md, tvd or tvdss");
-                if (pore.Points.IsSet && pore.DepthKind.IsSet && !GetsDeeper(scope.Setup, pore.Points.Value, pore.DepthKind.Value))
-                    scope.Error(pore.Points.Source.Position, "[pore_pressure] points do not get deeper, expected true vertical depths that increase from point to point");
-                break;
-        }
-    }
-
-    private static bool GetsDeeper(WellSetup setup, IReadOnlyList<PressurePoint> points, DepthKind kind)
-    {
-        var above = double.NegativeInfinity;
-        foreach (var point in points)
-        {
-            var depth = ZoneIndex.ToVertical(setup, point.Depth, kind);
-            if (!(depth > above)) return false;
-            above = depth;
-        }
-
-        return points.Count > 0;
-    }
-
-    private static void ReportStrains(Scope scope)
+    private static void ReportStrains(CheckScope scope)
     {
         var stress = scope.Settings.HorizontalStress;
         var (along, across) = (stress.StrainAlongShmin, stress.StrainAlongShmax);
         if (along.IsSet != across.IsSet)
         {
-            Missing(
-                scope,
+            scope.Missing(
                 along.IsSet ? "[horizontal_stress] strain_along_shmax" : "[horizontal_stress] strain_along_shmin",
                 "both strains or neither");
         }
@@ -151,9 +109,6 @@ public static class SetupCheck
             scope.Error(across.Source.Position, "strain_along_shmax is below strain_along_shmin: exchange them and turn shmax_azimuth by 90 deg");
         }
     }
-
-    private static void Missing(Scope scope, string key, string expected) =>
-        scope.Error(scope.Position, $"{key} is not set{scope.Owner}; expected {expected}");
 
     private static string ParameterKey(Property property) => property switch
     {

@@ -26,7 +26,7 @@ public static class Overburden
         double waterDepth, double waterDensity, double solidTop, double meanDensity, double firstDepth, double firstDensity)
     {
         var water = waterDepth > 0 ? waterDensity * waterDepth : 0;
-        var solid = firstDepth > solidTop ? meanDensity * (firstDepth - solidTop) : 0;
+        var solid = firstDepth <= solidTop ? 0 : meanDensity * (firstDepth - solidTop);
         return new OverburdenCarry(firstDepth, firstDensity, Constants.StandardGravity * (water + solid));
     }
 

@@ -3,8 +3,6 @@ using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Model;
-using DepthStress.Core.Pressure;
-using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
 
@@ -139,16 +137,8 @@ internal static class SetupAssembly
         foreach (var points in sections.Zones.Select(z => z.Overrides).Concat(sections.Lithologies.Select(l => l.Overrides))
             .Append(sections.Settings).Select(s => s.PorePressure.Points).Where(p => p.IsSet))
         {
-            PressurePoint? above = null;
-            foreach (var point in points.Value)
-            {
-                if (double.IsNaN(point.Depth) || double.IsNaN(point.Pressure))
-                    diagnostics.Error(points.Source.Position, "[pore_pressure] points: expected each point with depth and pressure");
-                else if (above is { } a && point.Depth <= a.Depth)
-                    diagnostics.Error(points.Source.Position, UnitSystem.Metric.Show($"[pore_pressure] points: found {Quantity.Length(point.Depth)} below {Quantity.Length(a.Depth)}, expected increasing depths"));
-                above = point;
-            }
-
+            if (points.Value.Any(p => double.IsNaN(p.Depth) || double.IsNaN(p.Pressure)))
+                diagnostics.Error(points.Source.Position, "[pore_pressure] points: expected each point with depth and pressure");
             if (points.Value.Count < 2) diagnostics.Error(points.Source.Position, "[pore_pressure] points: found one point, expected two or more");
         }
     }

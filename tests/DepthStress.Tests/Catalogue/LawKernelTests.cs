@@ -54,6 +54,16 @@ public class LawKernelTests
     }
 
     [Fact]
+    public void An_input_outside_its_domain_stays_so_whatever_the_next_one_is()
+    {
+        var law = Law with { Inputs = [Velocity, Velocity] };
+        var inputs = default(LawInputs);
+        inputs.Add([500.0]);
+        inputs.Add([5500.0]);
+        Assert.Equal(new LawOutcome(0, 0, 1, 0), LawKernel.Apply(law with { ResultDomain = Interval.All }, inputs, new double[1]));
+    }
+
+    [Fact]
     public void Columns_that_do_not_fit_are_refused()
     {
         Assert.Throws<ArgumentException>(() => LawKernel.Apply(Law, default, new double[1]));
@@ -92,6 +102,14 @@ public class LawKernelTests
         Assert.Equal(0.20, result[0], 1e-15); // one multiplication
         Assert.Equal(1, LawKernel.Apply(UserLaw.Constant(Property.Porosity, Units.Percent, 101), default, result).OutsideDomain);
     }
+
+    // At nu = 0.5 the bulk modulus is infinite, at -1 the shear modulus: results would not be finite.
+    [Theory]
+    [InlineData(0.5, 0)]
+    [InlineData(-1, 0)]
+    [InlineData(0.49, 1)]
+    public void A_Poissons_ratio_at_its_limits_is_outside_the_domain(double value, int evaluated) =>
+        Assert.Equal(evaluated, LawKernel.Apply(UserLaw.Constant(Property.PoissonStatic, Units.One, value), default, new double[1]).Evaluated);
 
     [Fact]
     public void Outcomes_add_up() =>

@@ -31,6 +31,15 @@ public class ChainErrorTests
         ["well.toml(1,1): error: density is not logged from 125.0 m (ground or mudline) to 200.0 m true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density"],
         Errors(Setup with { Frame = Sea }, LogsWith()));
 
+    // A frame without its ground is refused before the chain; should one come through, Sv must not start at the first sample.
+    [Fact]
+    public void An_unknown_ground_never_passes_for_one_at_the_first_sample()
+    {
+        var frame = new DepthFrame(DatumKind.RotaryTable, 1000, null, null, null);
+        Assert.Contains("density is not logged from", Assert.Single(Errors(Setup with { Frame = frame }, LogsWith())), StringComparison.Ordinal);
+        Assert.True(double.IsNaN(Core.Pressure.Overburden.Start(0, 1030, double.NaN, 2000, 100, 2000).Stress));
+    }
+
     [Fact]
     public void A_well_whose_samples_are_all_above_the_ground_has_no_density() =>
         Assert.Single(Errors(Setup with { Frame = new DepthFrame(DatumKind.RotaryTable, 1000, 0, null, null) }, LogsWith()));

@@ -69,6 +69,21 @@ public class FindingRulesTests
         Assert.Equal([new DepthRange(400, 400)], finding.Where);
     }
 
+    // Zones may make every choice themselves; samples outside them then have none, and must not be empty without a word.
+    [Fact]
+    public void Samples_outside_the_zones_without_a_choice_are_found()
+    {
+        var zone = new Zone("A", 100, 300, DepthKind.Measured, QuietSettings, WellFile);
+        var model = Run(Setup with { Settings = new StageSettings(), Zones = [zone] }, LogsWith());
+        foreach (var key in new[] { "[moduli] static_youngs", "[moduli] static_poisson", "[biot] coefficient", "[pore_pressure] method" })
+        {
+            var finding = Assert.Single(model.Findings, f => UnitSystem.Metric.Show(f.Text) == key + " is not set for these samples: no horizontal stress");
+            Assert.Equal([new DepthRange(0, 0), new DepthRange(300, 400)], finding.Where);
+        }
+
+        Assert.DoesNotContain(model.Texts(), t => t.StartsWith("pore pressure missing", StringComparison.Ordinal));
+    }
+
     [Fact]
     public void A_law_outside_its_domain_is_found()
     {

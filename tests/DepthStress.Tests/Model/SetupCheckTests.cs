@@ -153,18 +153,24 @@ public class SetupCheckTests
         Assert.Empty(Strained(null, null));
     }
 
+    // What a zone lacks, its lithologies lack too: said once. What a lithology alone lacks is said for each zone.
     [Fact]
     public void A_problem_inside_a_zone_or_lithology_names_it()
     {
-        var zone = new Zone("A", 100, null, DepthKind.Measured, new StageSettings { HorizontalStress = Strains with { StrainAlongShmin = default } }, new("well.toml", 40, 1));
+        var half = new StageSettings { HorizontalStress = Strains with { StrainAlongShmin = default } };
+        var zone = new Zone("A", 100, null, DepthKind.Measured, half, new("well.toml", 40, 1));
+        var other = new Zone("B", 200, null, DepthKind.Measured, new StageSettings(), new("well.toml", 41, 1));
         var rule = new LithologyRule("salt", null, null, null, [7], new("well.toml", 50, 1));
-        var setup = Setup with { Zones = [zone], Lithologies = [new LithologyChoice(rule, new StageSettings())] };
+        var setup = Setup with { Zones = [zone, other], Lithologies = [new LithologyChoice(rule, new StageSettings())] };
+        Assert.Equal(
+            ["well.toml(40,1): error: [horizontal_stress] strain_along_shmin is not set in zone \"A\"; expected both strains or neither"],
+            Report(setup));
         Assert.Equal(
             [
                 "well.toml(40,1): error: [horizontal_stress] strain_along_shmin is not set in zone \"A\"; expected both strains or neither",
-                "well.toml(50,1): error: [horizontal_stress] strain_along_shmin is not set in zone \"A\" for lithology \"salt\"; expected both strains or neither",
+                "well.toml(50,1): error: [horizontal_stress] strain_along_shmin is not set in zone \"B\" for lithology \"salt\"; expected both strains or neither",
             ],
-            Report(setup));
+            Report(setup with { Lithologies = [new LithologyChoice(rule, half)] }));
     }
 
     [Fact]

@@ -13,6 +13,7 @@ internal static class MissingFindings
         var sv = SampleMarks.Column(model, Property.VerticalStress);
         var pp = SampleMarks.Column(model, Property.PorePressure);
         var usable = model.Usable;
+        var unsettled = Lacks(model, s => s.PorePressure.Method.IsSet);
         Finding[] free = model.Runs.Any(r => !r.Settings.HorizontalStress.StrainAlongShmax.IsSet)
             ? [Finding.General(Severity.Note, $"SHmax is empty where nothing constrains it: set strain_along_shmin and strain_along_shmax")]
             : [];
@@ -28,8 +29,25 @@ internal static class MissingFindings
                 model, Severity.Warning, $"no density below the last logged one, so no stress: set [overburden] below_log",
                 i => usable[i] && double.IsNaN(sv[i])),
             .. SampleMarks.Where(
-                model, Severity.Warning, $"pore pressure missing: the depth lies outside the pressure table", i => double.IsNaN(pp[i])),
+                model, Severity.Warning, $"pore pressure missing: the depth lies outside the pressure table",
+                i => double.IsNaN(pp[i]) && !unsettled[i]),
+            .. NotSet(model, "[pore_pressure] method", s => s.PorePressure.Method.IsSet),
+            .. LawSlots.All.Where(s => s.Required).SelectMany(slot => NotSet(model, slot.Key, s => slot.Choice(s).IsSet)),
             .. free,
         ];
+    }
+
+    /// <summary>A choice that zones make but that nobody makes for the samples outside them.</summary>
+    private static IEnumerable<Finding> NotSet(EarthModel model, string key, Predicate<StageSettings> isSet)
+    {
+        var lacks = Lacks(model, isSet);
+        return SampleMarks.Where(model, Severity.Warning, $"{key} is not set for these samples: no horizontal stress", i => lacks[i]);
+    }
+
+    private static bool[] Lacks(EarthModel model, Predicate<StageSettings> isSet)
+    {
+        var lacks = new bool[model.Count];
+        foreach (var run in model.Runs) Array.Fill(lacks, !isSet(run.Settings), run.Start, run.Length);
+        return lacks;
     }
 }
