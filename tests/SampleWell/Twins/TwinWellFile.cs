@@ -58,7 +58,7 @@ internal static class TwinWellFile
             fluid_density = "1.03 g/cm3"
             [moduli]
             static_youngs = "lacy-1997-combined"
-            static_poisson = "dynamic"
+            static_poisson = "equal-to-dynamic"
             [strength]
             ucs = "horsrud-2001-shale"
             friction_angle = "lal-1999-shale-friction"

@@ -69,7 +69,7 @@ internal static class WellFile
 
         [moduli]
         static_youngs = "lacy-1997-combined"
-        static_poisson = "dynamic"           # taken equal to the dynamic one: the plugs do not contradict it
+        static_poisson = "equal-to-dynamic"  # taken equal to the dynamic one: the plugs do not contradict it
 
         [strength]
         ucs = "horsrud-2001-shale"
