@@ -18,7 +18,7 @@ public static class Application
         if (parsed.Errors.Count > 0)
         {
             foreach (var error in parsed.Errors) await terminal.Error.WriteLineAsync($"error: {error.Message}");
-            await terminal.Error.WriteLineAsync($"Run \"{Names(parsed.CommandResult)} --help\" for usage.");
+            await terminal.Error.WriteLineAsync($"Run \"{FullName(parsed.CommandResult)} --help\" for usage.");
             return ExitCodes.Usage;
         }
 
@@ -54,6 +54,6 @@ public static class Application
         new SchemaCommand(terminal),
     };
 
-    private static string Names(CommandResult result) =>
-        result.Parent is CommandResult parent ? $"{Names(parent)} {result.Command.Name}" : "depthstress";
+    private static string FullName(CommandResult result) =>
+        result.Parent is CommandResult parent ? $"{FullName(parent)} {result.Command.Name}" : "depthstress";
 }

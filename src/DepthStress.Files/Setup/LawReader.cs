@@ -14,6 +14,10 @@ internal static class LawReader
 {
     private static readonly (string Word, string Value)[] Shapes = [("linear", "linear"), ("power", "power")];
 
+    private static readonly string[] OfPowerLaws = ["exponent", "input_unit"];
+
+    private static readonly string[] OfLinearLaws = ["offset"];
+
     /// <summary>Reads one choice; null when it is wrong, with the reason reported.</summary>
     public static Law? Read(TomlNode node, string key, Property predicts, DiagnosticBag diagnostics)
     {
@@ -26,7 +30,7 @@ internal static class LawReader
             case TomlNumber number when PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction:
                 return Constant(number, key, predicts, Units.Of(PropertyNames.Dimension(predicts)).First(), number.Value, diagnostics);
             case TomlTable table:
-                var section = new ReadingSection(table, key, diagnostics);
+                var section = new ReadingSection(table, key, diagnostics, new WrongKeys());
                 var law = UserGiven(section, key, predicts, diagnostics);
                 section.ReportUnknown();
                 return law;
@@ -46,7 +50,7 @@ internal static class LawReader
             return null;
         }
 
-        diagnostics.Error(text.Position, $"found the unknown method \"{text.Value}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
+        diagnostics.Error(text.Position, $"found the unknown method \"{Words.Short(text.Value)}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
         return null;
     }
 
@@ -79,32 +83,41 @@ internal static class LawReader
         var input = section.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), "the property it starts from");
         var inputUnit = Unit(section, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
         var unit = Unit(section, "unit", PropertyNames.Dimension(predicts), diagnostics);
-        if (!shape.IsSet || !factor.IsSet)
+        if (!shape.IsSet && section.SourceOf("law") == SettingSource.NotSet) Missing("law", "\"linear\" or \"power\"");
+        if (!factor.IsSet && section.SourceOf("factor") == SettingSource.NotSet) Missing("factor", "a number");
+        if (!shape.IsSet) return null;
+        foreach (var unused in shape.Value == "linear" ? OfPowerLaws : OfLinearLaws)
         {
-            diagnostics.Error(section.Position, $"{key}: expected law = \"linear\" or \"power\", and factor");
-            return null;
+            if (section.SourceOf(unused) is { Kind: not SettingKind.NotSet } source)
+                diagnostics.Error(source.Position, $"{key}: found {unused}, which a {shape.Value} law does not have");
         }
 
         if (shape.Value == "linear")
         {
             if (PropertyNames.Dimension(input.Value) != PropertyNames.Dimension(predicts))
             {
-                diagnostics.Error(section.Position, $"{key}: a linear law needs an input of the same kind of quantity; use law = \"power\" with input_unit and unit");
+                var (found, wanted) = (PropertyNames.Dimension(input.Value), PropertyNames.Dimension(predicts));
+                diagnostics.Error(section.Position, $"{key}: found a linear law from {PropertyNames.Title(input.Value)} ({QuantityText.Name(found)}), expected an input of the same kind as the result ({QuantityText.Name(wanted)}), or law = \"power\" with input_unit and unit");
                 return null;
             }
+
+            if (!factor.IsSet) return null;
 
             var si = Units.Of(PropertyNames.Dimension(predicts)).First();
             var shown = unit ?? si;
             return UserLaw.Linear(predicts, shown, Input(input.Value, shown), factor.Value, offset.IsSet ? shown.FromSi(offset.Value) : 0);
         }
 
-        if (!exponent.IsSet || unit is null || inputUnit is null)
-        {
-            diagnostics.Error(section.Position, $"{key}: a power law needs exponent, unit and input_unit, since its factor depends on them");
-            return null;
-        }
+        if (PropertyNames.Dimension(predicts) == Dimension.None) unit ??= Units.One;
+        if (PropertyNames.Dimension(input.Value) == Dimension.None) inputUnit ??= Units.One;
+        if (section.SourceOf("exponent") == SettingSource.NotSet) Missing("exponent", "a number");
+        if (inputUnit is null && section.SourceOf("input_unit") == SettingSource.NotSet) Missing("input_unit", $"a unit, since the factor depends on it: {Units.Symbols(PropertyNames.Dimension(input.Value))}");
+        if (unit is null && section.SourceOf("unit") == SettingSource.NotSet) Missing("unit", $"a unit, since the factor depends on it: {Units.Symbols(PropertyNames.Dimension(predicts))}");
+        if (!factor.IsSet || !exponent.IsSet || unit is null || inputUnit is null) return null;
 
         return UserLaw.Power(predicts, unit, Input(input.Value, inputUnit), factor.Value, exponent.Value);
+
+        void Missing(string part, string expected) => diagnostics.Error(section.Position, $"{key}: {part} is not set; expected {expected}");
     }
 
     private static LawInput Input(Property property, Unit unit) => new(PropertyNames.Name(property), property, unit);

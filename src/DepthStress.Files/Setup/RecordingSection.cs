@@ -20,6 +20,9 @@ internal sealed class RecordingSection : ISection
     public ISection OwnedBy(SettingKind kind, string owner) => this;
 
     /// <inheritdoc/>
+    public SettingSource SourceOf(string key) => SettingSource.NotSet;
+
+    /// <inheritdoc/>
     public Setting<string> Text(string key, Setting<string> current, string doc) => Add(key, current, v => v);
 
     /// <inheritdoc/>

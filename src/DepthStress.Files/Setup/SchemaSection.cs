@@ -28,6 +28,9 @@ internal sealed class SchemaSection : ISection
     public ISection OwnedBy(SettingKind kind, string owner) => this;
 
     /// <inheritdoc/>
+    public SettingSource SourceOf(string key) => SettingSource.NotSet;
+
+    /// <inheritdoc/>
     public Setting<string> Text(string key, Setting<string> current, string doc) => Add(key, current, Of("string", doc));
 
     /// <inheritdoc/>

@@ -89,7 +89,7 @@ public static class StarterFile
             units = "metric"                      # or "field"
 
             """);
-        return text.ToString();
+        return text.ToString().ReplaceLineEndings("\n");
     }
 
     private static void AppendCurves(StringBuilder text, LogFile log)

@@ -6,8 +6,13 @@ namespace DepthStress.Files.Setup;
 /// <summary>Pieces of messages.</summary>
 internal static class Words
 {
+    private const int MostCharacters = 80;
+
     /// <summary>Words in quotes, with commas.</summary>
     public static string Quoted(IEnumerable<string> words) => string.Join(", ", words.Select(w => $"\"{w}\""));
+
+    /// <summary>A text that a message can hold.</summary>
+    public static string Short(string text) => text.Length <= MostCharacters ? text : text[..MostCharacters] + "...";
 
     /// <summary>An interval in words.</summary>
     public static string Within(Interval interval) => (double.IsFinite(interval.Low), double.IsFinite(interval.High)) switch

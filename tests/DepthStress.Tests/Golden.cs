@@ -1,0 +1,29 @@
+using System.Reflection;
+using System.Text;
+
+namespace DepthStress.Tests;
+
+/// <summary>
+/// Compares whole texts with files kept under Golden/. DEPTHSTRESS_UPDATE_GOLDEN=1 rewrites them on a developer's machine,
+/// never where CI=true.
+/// </summary>
+internal static class Golden
+{
+    private static readonly string Folder = Path.Combine(
+        typeof(Golden).Assembly.GetCustomAttributes<AssemblyMetadataAttribute>().Single(a => a.Key == "RepoRoot").Value!,
+        "tests", "DepthStress.Tests", "Golden");
+
+    public static void Match(string name, string text)
+    {
+        var path = Path.Combine(Folder, name);
+        if (Environment.GetEnvironmentVariable("DEPTHSTRESS_UPDATE_GOLDEN") == "1")
+        {
+            Assert.NotEqual("true", Environment.GetEnvironmentVariable("CI"));
+            Directory.CreateDirectory(Folder);
+            File.WriteAllText(path, text, new UTF8Encoding(false));
+        }
+
+        Assert.True(File.Exists(path), $"There is no golden file {name}.");
+        Assert.Equal(File.ReadAllText(path), text);
+    }
+}
