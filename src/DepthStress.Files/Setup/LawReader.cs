@@ -6,6 +6,16 @@ using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
 
+/// <summary>The keys of a law whose coefficients the user gives.</summary>
+internal sealed record LawParts(
+    Setting<string> Shape,
+    Setting<double> Factor,
+    Setting<double> Exponent,
+    Setting<double> Offset,
+    Setting<Property> Input,
+    Setting<string> InputUnit,
+    Setting<string> Unit);
+
 /// <summary>
 /// Reads the choice of a law: a catalogue id, a constant, or a table with the user's own coefficients
 /// (<c>{ law = "linear", factor, offset, input }</c> or <c>{ law = "power", factor, exponent, input, input_unit, unit }</c>).
@@ -39,6 +49,16 @@ internal static class LawReader
                 return null;
         }
     }
+
+    /// <summary>Declares the keys of a law of the user's own.</summary>
+    public static LawParts Parts(ISection s, Property predicts) => new(
+        s.Choice("law", default, Shapes, "shape of the relation"),
+        s.Number("factor", default, Interval.All, "the factor"),
+        s.Number("exponent", default, Interval.All, "the exponent of a power law"),
+        s.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds"),
+        s.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), $"the property it starts from, by default {PropertyNames.Name(PropertyNames.UsualInput(predicts))}"),
+        s.Text("input_unit", default, "power: the unit of the input that the factor holds for"),
+        s.Text("unit", default, "the unit of the result; a power law's factor holds for it"));
 
     private static Law? FromCatalogue(TomlText text, string key, Property predicts, DiagnosticBag diagnostics)
     {
@@ -76,13 +96,9 @@ internal static class LawReader
 
     private static Law? UserGiven(ReadingSection section, string key, Property predicts, DiagnosticBag diagnostics)
     {
-        var shape = section.Choice("law", default, Shapes, "shape of the relation");
-        var factor = section.Number("factor", default, Interval.All, "the factor");
-        var exponent = section.Number("exponent", default, Interval.All, "the exponent of a power law");
-        var offset = section.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds");
-        var input = section.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), "the property it starts from");
-        var inputUnit = Unit(section, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
-        var unit = Unit(section, "unit", PropertyNames.Dimension(predicts), diagnostics);
+        var (shape, factor, exponent, offset, input, inputSymbol, symbol) = Parts(section, predicts);
+        var inputUnit = Unit(inputSymbol, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
+        var unit = Unit(symbol, "unit", PropertyNames.Dimension(predicts), diagnostics);
         if (!shape.IsSet && section.SourceOf("law") == SettingSource.NotSet) Missing("law", "\"linear\" or \"power\"");
         if (!factor.IsSet && section.SourceOf("factor") == SettingSource.NotSet) Missing("factor", "a number");
         if (!shape.IsSet) return null;
@@ -122,9 +138,8 @@ internal static class LawReader
 
     private static LawInput Input(Property property, Unit unit) => new(PropertyNames.Name(property), property, unit);
 
-    private static Unit? Unit(ReadingSection section, string key, Dimension dimension, DiagnosticBag diagnostics)
+    private static Unit? Unit(Setting<string> text, string key, Dimension dimension, DiagnosticBag diagnostics)
     {
-        var text = section.Text(key, default, "a unit");
         if (!text.IsSet) return null;
         if (Units.Find(text.Value, dimension) is { } unit) return unit;
         diagnostics.Error(text.Source.Position, $"found the unit \"{text.Value}\", expected {key} = one of {Units.Symbols(dimension)}");
