@@ -13,7 +13,7 @@ internal static class InitAction
     {
         var diagnostics = new DiagnosticBag();
         var path = Path.GetFullPath(logFile, terminal.Folder);
-        var name = Path.GetRelativePath(terminal.Folder, path).Replace('\\', '/');
+        var name = Path.GetRelativePath(terminal.Folder, path).Replace(Path.DirectorySeparatorChar, '/');
         if (Path.GetExtension(path).Equals(".toml", StringComparison.OrdinalIgnoreCase))
         {
             terminal.Error.WriteLine($"{name}: error: found a well file, expected a log file (CSV or LAS 2.0); to run a well file: depthstress run {name}");

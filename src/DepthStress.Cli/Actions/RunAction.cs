@@ -41,7 +41,7 @@ internal static class RunAction
         if (LoadedWell.Load(path, diagnostics, stage, cancellation) is not { } well) return new WellOutcome(diagnostics, null, null, ExitCodes.Input);
         if (options.Strict && Strictness.CountWarnings(diagnostics, well.Model) is var warnings and > 0)
         {
-            diagnostics.Error(new SourcePosition(well.File.Name), FormattableString.Invariant($"found {warnings} warnings, expected none with --strict; nothing was written"));
+            diagnostics.Error(new SourcePosition(well.File.Name), FormattableString.Invariant($"found {warnings} {(warnings == 1 ? "warning" : "warnings")}, expected none with --strict; nothing was written"));
             return new WellOutcome(diagnostics, well, null, ExitCodes.Input);
         }
 

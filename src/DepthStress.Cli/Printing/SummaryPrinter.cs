@@ -58,9 +58,9 @@ internal static class SummaryPrinter
         var table = new Table().Border(TableBorder.Simple);
         var length = units.UnitFor(Dimension.Length).Unit;
         table.AddColumn(new TableColumn("zone").NoWrap());
-        table.AddColumn(new TableColumn($"top md\n{length}").RightAligned());
-        table.AddColumn(new TableColumn("cover\n%").RightAligned());
-        foreach (var (title, id, _, _) in Columns) table.AddColumn(new TableColumn($"{title}\n{DepthColumns.Get(id).In(units).Unit}").RightAligned());
+        table.AddColumn(Numbers($"top md\n{length}"));
+        table.AddColumn(Numbers("cover\n%"));
+        foreach (var (title, id, _, _) in Columns) table.AddColumn(Numbers($"{title}\n{DepthColumns.Get(id).In(units).Unit}"));
 
         foreach (var zone in ZoneMeans.Of(model))
         {
@@ -75,6 +75,8 @@ internal static class SummaryPrinter
 
         return table;
     }
+
+    private static TableColumn Numbers(string title) => new TableColumn(title).RightAligned().NoWrap().PadLeft(1).PadRight(0);
 
     private static string Show(double si, Unit unit, int decimals) =>
         double.IsNaN(si) ? "" : unit.FromSi(si).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);

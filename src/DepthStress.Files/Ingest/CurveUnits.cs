@@ -65,7 +65,7 @@ internal static class CurveUnits
         var position = column.Source is { Unit.IsSet: true } s ? s.Unit.Source.Position : column.Column.Position;
         var text = string.Create(
             CultureInfo.InvariantCulture,
-            $"column {column.Column.Name} ({role.Id}): its median is {printed:G5} {unit.Symbol}, which no rock has ({Typical(role, unit)})");
+            $"column {column.Column.Name} ({role.Id}): its median is {printed:G5} {unit.Symbol}, which no {(role.Property is Property.Caliper or Property.BitSize ? "hole" : "rock")} has ({Typical(role, unit)})");
         if (other is null)
         {
             diagnostics.Warning(position, text);
