@@ -37,6 +37,11 @@ public static class Application
             await terminal.Error.WriteLineAsync("interrupted; earlier results are as they were");
             return ExitCodes.Interrupted;
         }
+        catch (IOException e)
+        {
+            await terminal.Error.WriteLineAsync($"error: cannot write what the command prints ({e.Message})");
+            return ExitCodes.Input;
+        }
         catch (Exception e) when (e is not OutOfMemoryException)
         {
             await terminal.Error.WriteLineAsync($"fault of the program, please report it: {e.GetType().Name}: {e.Message}");

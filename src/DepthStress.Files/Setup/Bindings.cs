@@ -78,10 +78,9 @@ internal static class Bindings
 
     private static LogsSection Curves(ISection s, LogsSection l)
     {
-        var depth = s.Tables("depth", l.Depth is null ? [] : [l.Depth], DepthSource, new CurveSource(), "measured depth", "column");
         return l with
         {
-            Depth = depth.Count > 0 ? depth[0] : null,
+            DepthColumns = s.Tables("depth", l.DepthColumns, DepthSource, new CurveSource(), "measured depth", "column"),
             Curves =
             [
                 .. CurveRoles.All

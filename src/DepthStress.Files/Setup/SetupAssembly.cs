@@ -30,6 +30,8 @@ internal static class SetupAssembly
             diagnostics.Error(file, "[logs] files is not set; expected the names of the log files");
         else
             CheckFiles(sections.Logs.Files, diagnostics);
+        if (sections.Logs.DepthColumns is [_, var second, ..])
+            diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
         var frame = Frame(well, file, wrong, diagnostics);
         var trajectory = Trajectory(sections.Survey, file, folder, inputs, wrong, diagnostics);

@@ -1,4 +1,5 @@
 using System.Text.Json.Nodes;
+using DepthStress.Cli;
 using DepthStress.Tests.Setup;
 using SampleWell;
 
@@ -37,6 +38,35 @@ public sealed class CliRunTests : IDisposable
         Assert.DoesNotContain('\u001b', run.Output + run.Error + check.Output);
         Assert.DoesNotContain('\r', run.Output + run.Error + check.Output);
         Assert.DoesNotContain('\u2026', run.Output); // no heading is cut off
+    }
+
+    [Theory]
+    [InlineData("metric", 80)]
+    [InlineData("metric", 120)]
+    [InlineData("field", 80)]
+    [InlineData("field", 120)]
+    public async Task The_summary_fits_the_terminal_and_no_heading_is_cut_off(string units, int width)
+    {
+        using var cli = new CliRunner { Width = width };
+        cli.SmallWell("well.toml");
+        await File.AppendAllTextAsync(cli.Folder.Of("well.toml"), $"[output]\nunits = \"{units}\"\n[[zones]]\nname = \"apricot shale\"\ntop = \"1000 m\"\ndepth_kind = \"md\"\n");
+        var result = await cli.RunAsync("run", "well.toml");
+        Assert.Equal(0, result.Code);
+        Assert.DoesNotContain('\u2026', result.Output);
+        var tables = result.Output.Split("\n\n")[1].Split('\n');
+        Assert.All(tables, line => Assert.True(line.Length <= width, line));
+        foreach (var title in new[] { "Sv", "Pp", "Shmin", "SHmax", "Sv/z", "Pp/z", "Shmin/z", "E dyn", "E stat", "nu stat", "biot" })
+            Assert.Contains(tables, line => line.Split(' ', StringSplitOptions.RemoveEmptyEntries).Contains(title.Split(' ')[^1]));
+    }
+
+    [Fact]
+    public async Task A_terminal_that_cannot_be_written_ends_with_2()
+    {
+        _cli.SmallWell("well.toml");
+        using var error = new StringWriter();
+        await using var full = new FullWriter();
+        Assert.Equal(2, await Application.RunAsync(["run", "well.toml"], new Terminal(full, error, _cli.Folder.Path), CancellationToken.None));
+        Assert.Equal("error: cannot write what the command prints (full)\n", error.ToString());
     }
 
     [Fact]
@@ -137,5 +167,10 @@ public sealed class CliRunTests : IDisposable
 
         Assert.DoesNotContain(_cli.Folder.Path, text, StringComparison.Ordinal);
         Assert.DoesNotContain(Environment.MachineName, text, StringComparison.Ordinal);
+    }
+
+    private sealed class FullWriter : StringWriter
+    {
+        public override void WriteLine(string? value) => throw new IOException("full");
     }
 }

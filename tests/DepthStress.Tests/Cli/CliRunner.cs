@@ -14,13 +14,16 @@ internal sealed class CliRunner : IDisposable
 {
     public TestFolder Folder { get; } = new();
 
+    /// <summary>Columns of the terminal.</summary>
+    public int Width { get; init; } = 120;
+
     public Task<CliResult> RunAsync(params string[] args) => RunAsync(CancellationToken.None, args);
 
     public async Task<CliResult> RunAsync(CancellationToken cancellation, params string[] args)
     {
         using var output = new StringWriter();
         using var error = new StringWriter();
-        var code = await Application.RunAsync(args, new Terminal(output, error, Folder.Path), cancellation);
+        var code = await Application.RunAsync(args, new Terminal(output, error, Folder.Path, Width: Width), cancellation);
         return new CliResult(code, output.ToString(), error.ToString());
     }
 

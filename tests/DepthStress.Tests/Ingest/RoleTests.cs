@@ -76,6 +76,11 @@ public sealed class RoleTests
         Assert.Equal([expected], Ingesting.One("DEPT,GR[gAPI]\n1000,50\n1001,50\n", curves).Messages);
 
     [Fact]
+    public void Depth_is_one_column() => Assert.Equal(
+        ["well.toml(28,18): error: found a second column for depth, expected one: every file is read with it"],
+        Ingesting.One("DEPT[m],MD[m],GR[gAPI]\n1000,1000,50\n", "depth = [\"DEPT\", \"MD\"]").Messages);
+
+    [Fact]
     public void Depth_has_no_splice() => Assert.Equal(
         ["well.toml(28,28): error: found the unknown key \"base\" in depth, expected one of column, unit"],
         Ingesting.One("DEPT[m],GR[gAPI]\n1000,50\n", "depth = { column = \"DEPT\", base = \"3 m\" }").Messages[..1]);
