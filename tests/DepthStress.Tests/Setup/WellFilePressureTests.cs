@@ -57,9 +57,12 @@ public sealed class WellFilePressureTests
         Assert.Equal(expected, WellText.Messages(WellText.Sound + added));
 
     [Fact]
-    public void Points_must_get_deeper() => Assert.Contains(
-        "well.toml(27,10): error: [pore_pressure] points: found 90.0 m after 100.0 m, expected increasing depths",
-        WellText.Messages(WellText.With(
+    public void Points_must_get_deeper()
+    {
+        var message = Assert.Single(WellText.Messages(WellText.With(
             "method = \"hydrostatic\"\nfluid_density = \"1.03 g/cm3\"\n",
             "method = \"table\"\ndepth_kind = \"tvd\"\npoints = [{ depth = \"100 m\", pressure = \"1 MPa\" }, { depth = \"90 m\", pressure = \"2 MPa\" }]\n")));
+        Assert.StartsWith("well.toml(27,10): error: [pore_pressure] points", message, StringComparison.Ordinal);
+        Assert.Contains("increas", message, StringComparison.Ordinal);
+    }
 }
