@@ -1,5 +1,5 @@
 using System.Globalization;
-using DepthStress.Tests.Setup;
+using DepthStress.Tests.WellFiles;
 
 namespace DepthStress.Tests.Cli;
 

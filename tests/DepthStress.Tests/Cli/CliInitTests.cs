@@ -1,4 +1,4 @@
-using DepthStress.Tests.Setup;
+using DepthStress.Tests.WellFiles;
 using SampleWell;
 
 namespace DepthStress.Tests.Cli;

@@ -1,6 +1,6 @@
 using System.Text.Json.Nodes;
 using DepthStress.Cli;
-using DepthStress.Tests.Setup;
+using DepthStress.Tests.WellFiles;
 using SampleWell;
 
 namespace DepthStress.Tests.Cli;

@@ -1,5 +1,5 @@
 using DepthStress.Cli;
-using DepthStress.Tests.Setup;
+using DepthStress.Tests.WellFiles;
 
 namespace DepthStress.Tests.Cli;
 

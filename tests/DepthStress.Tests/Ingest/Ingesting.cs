@@ -2,7 +2,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Setup;
-using DepthStress.Tests.Setup;
+using DepthStress.Tests.WellFiles;
 
 namespace DepthStress.Tests.Ingest;
 

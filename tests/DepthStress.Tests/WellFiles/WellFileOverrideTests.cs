@@ -1,7 +1,7 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Pressure;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Values land in SI where they belong, and know who decided them.</summary>
 public sealed class WellFileOverrideTests

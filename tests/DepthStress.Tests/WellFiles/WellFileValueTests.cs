@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>What the reader says of keys and values it cannot take; every problem with its place.</summary>
 public sealed class WellFileValueTests

@@ -2,7 +2,7 @@ using System.Text;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Files.Setup;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Whole well files: what cannot be opened or read, and every missing key in one run.</summary>
 public sealed class WellFileReaderTests : IDisposable

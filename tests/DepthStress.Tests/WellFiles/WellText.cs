@@ -1,7 +1,7 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Files.Setup;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>A small sound well file, and what the reader says of spoiled ones.</summary>
 internal static class WellText

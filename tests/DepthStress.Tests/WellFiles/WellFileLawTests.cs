@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Methods, constants and laws of the user's own.</summary>
 public sealed class WellFileLawTests

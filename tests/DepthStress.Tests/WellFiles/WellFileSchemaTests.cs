@@ -5,7 +5,7 @@ using DepthStress.Files.Setup;
 using SampleWell;
 using SampleWell.Twins;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>The schema says what the reader takes: made from the same declarations, it must cover every key that shipped files use.</summary>
 public sealed class WellFileSchemaTests

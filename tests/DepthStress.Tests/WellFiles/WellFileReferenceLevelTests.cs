@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Datum, ground, sea and water table must go together.</summary>
 public sealed class WellFileReferenceLevelTests

@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>What the reader says of text that is no sound TOML.</summary>
 public sealed class WellFileSyntaxTests

@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Pore pressure and tectonic strains.</summary>
 public sealed class WellFilePressureTests

@@ -1,7 +1,7 @@
 using System.Text.Json.Nodes;
 using DepthStress.Files.Setup;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>The record of a run says every setting with its value and who decided it.</summary>
 public sealed class RecordingTests

@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>The survey: one way to state it, and a file that can be used.</summary>
 public sealed class WellFileSurveyTests

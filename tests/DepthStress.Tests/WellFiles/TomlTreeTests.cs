@@ -1,7 +1,7 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Files.Setup;
 
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>How TOML text becomes nodes with their places.</summary>
 public sealed class TomlTreeTests

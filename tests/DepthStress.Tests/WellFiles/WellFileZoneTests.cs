@@ -1,4 +1,4 @@
-namespace DepthStress.Tests.Setup;
+namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Zones must follow each other and be whole.</summary>
 public sealed class WellFileZoneTests
