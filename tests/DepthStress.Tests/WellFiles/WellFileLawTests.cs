@@ -1,3 +1,6 @@
+using DepthStress.Core.Catalogue;
+using DepthStress.Files.Setup;
+
 namespace DepthStress.Tests.WellFiles;
 
 /// <summary>Methods, constants and laws of the user's own.</summary>
@@ -18,9 +21,6 @@ public sealed class WellFileLawTests
 
     [Theory]
     [InlineData(
-        "\"equal-to-dynamic\"", "0.7",
-        "well.toml(16,18): error: found the bare number 0.7, expected static_poisson from -1 to 0.5")]
-    [InlineData(
         "coefficient = 0.8", "coefficient = 1.8",
         "well.toml(19,15): error: found the bare number 1.8, expected coefficient from 0 to 1")]
     [InlineData(
@@ -34,6 +34,19 @@ public sealed class WellFileLawTests
         "well.toml(15,17): error: static_youngs: found \"30 m\", a length; expected a pressure in one of MPa, GPa, kPa, Pa, bar, psi, ksi, Mpsi")]
     public void A_constant_must_be_possible(string old, string replacement, params string[] expected) =>
         Assert.Equal(expected, WellText.Messages(WellText.With(old, replacement)));
+
+    [Fact]
+    public void A_constant_poissons_ratio_must_lie_within_its_limits() => Assert.Matches(
+        @"^well\.toml\(16,18\): error: found the bare number 0\.7, expected static_poisson (from -1 to 0\.5|above -1 and below 0\.5)$",
+        Assert.Single(WellText.Messages(WellText.With("\"equal-to-dynamic\"", "0.7"))));
+
+    [Fact]
+    public void An_interval_without_its_ends_is_said_so()
+    {
+        Assert.Equal("above -1 and below 0.5", Words.Within(new Interval(Math.BitIncrement(-1.0), Math.BitDecrement(0.5))));
+        Assert.Equal("from 0 to 1", Words.Within(new Interval(0, 1)));
+        Assert.Equal("of 0 or more", Words.Within(Interval.NotNegative));
+    }
 
     [Theory]
     [InlineData(
