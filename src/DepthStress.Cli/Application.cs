@@ -18,7 +18,7 @@ public static class Application
         if (parsed.Errors.Count > 0)
         {
             foreach (var error in parsed.Errors) await terminal.Error.WriteLineAsync($"error: {error.Message}");
-            await terminal.Error.WriteLineAsync($"Run \"{Names(parsed.CommandResult)} --help\" for usage.");
+            await terminal.Error.WriteLineAsync($"Run \"{FullName(parsed.CommandResult)} --help\" for usage.");
             return ExitCodes.Usage;
         }
 
@@ -37,6 +37,11 @@ public static class Application
             await terminal.Error.WriteLineAsync("interrupted; earlier results are as they were");
             return ExitCodes.Interrupted;
         }
+        catch (IOException e)
+        {
+            await terminal.Error.WriteLineAsync($"error: cannot write what the command prints ({e.Message})");
+            return ExitCodes.Input;
+        }
         catch (Exception e) when (e is not OutOfMemoryException)
         {
             await terminal.Error.WriteLineAsync($"fault of the program, please report it: {e.GetType().Name}: {e.Message}");
@@ -54,6 +59,6 @@ public static class Application
         new SchemaCommand(terminal),
     };
 
-    private static string Names(CommandResult result) =>
-        result.Parent is CommandResult parent ? $"{Names(parent)} {result.Command.Name}" : "depthstress";
+    private static string FullName(CommandResult result) =>
+        result.Parent is CommandResult parent ? $"{FullName(parent)} {result.Command.Name}" : "depthstress";
 }

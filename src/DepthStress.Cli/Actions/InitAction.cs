@@ -13,7 +13,13 @@ internal static class InitAction
     {
         var diagnostics = new DiagnosticBag();
         var path = Path.GetFullPath(logFile, terminal.Folder);
-        var name = Path.GetRelativePath(terminal.Folder, path).Replace('\\', '/');
+        var name = Path.GetRelativePath(terminal.Folder, path).Replace(Path.DirectorySeparatorChar, '/');
+        if (Path.GetExtension(path).Equals(".toml", StringComparison.OrdinalIgnoreCase))
+        {
+            terminal.Error.WriteLine($"{name}: error: found a well file, expected a log file (CSV or LAS 2.0); to run a well file: depthstress run {name}");
+            return ExitCodes.Input;
+        }
+
         var log = LogFileReader.Read(path, name, new LogReadOptions(), diagnostics);
         DiagnosticPrinter.Print(terminal, diagnostics);
         if (log is null || diagnostics.HasErrors) return ExitCodes.Input;

@@ -24,8 +24,9 @@ internal static class RunAction
         });
 
         var code = ExitCodes.Done;
-        foreach (var outcome in outcomes)
+        foreach (var (outcome, path) in outcomes.Zip(paths))
         {
+            if (paths.Length > 1 && outcome.Diagnostics.Items.Count > 0) await terminal.Error.WriteLineAsync($"{path}:");
             DiagnosticPrinter.Print(terminal, outcome.Diagnostics);
             if (outcome.Well is { } well) SummaryPrinter.Print(terminal, well, outcome.Folder);
             code = Math.Max(code, outcome.Code);
@@ -40,7 +41,7 @@ internal static class RunAction
         if (LoadedWell.Load(path, diagnostics, stage, cancellation) is not { } well) return new WellOutcome(diagnostics, null, null, ExitCodes.Input);
         if (options.Strict && Strictness.CountWarnings(diagnostics, well.Model) is var warnings and > 0)
         {
-            diagnostics.Error(new SourcePosition(well.File.Name), FormattableString.Invariant($"found {warnings} warnings, expected none with --strict; nothing was written"));
+            diagnostics.Error(new SourcePosition(well.File.Name), FormattableString.Invariant($"found {warnings} {(warnings == 1 ? "warning" : "warnings")}, expected none with --strict; nothing was written"));
             return new WellOutcome(diagnostics, well, null, ExitCodes.Input);
         }
 
@@ -52,6 +53,11 @@ internal static class RunAction
         catch (ResultFolderException e)
         {
             diagnostics.Error(new SourcePosition(folder), e.Message);
+            return new WellOutcome(diagnostics, null, null, ExitCodes.Input);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            diagnostics.Error(new SourcePosition(folder), $"the results cannot be written ({e.Message}); earlier results are as they were");
             return new WellOutcome(diagnostics, null, null, ExitCodes.Input);
         }
 

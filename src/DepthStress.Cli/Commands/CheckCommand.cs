@@ -18,6 +18,7 @@ internal sealed class CheckCommand : Command
     {
         Add(WellFile);
         Add(Strict);
+        Validators.Add(result => Names.Check(result, WellFile));
         SetAction((parsed, cancellation) => Task.FromResult(
             CheckAction.Run(terminal, parsed.GetRequiredValue(WellFile), parsed.GetValue(Strict), cancellation)));
     }

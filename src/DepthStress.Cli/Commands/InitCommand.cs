@@ -18,6 +18,7 @@ internal sealed class InitCommand : Command
     {
         Add(LogFile);
         Add(Force);
+        Validators.Add(result => Names.Check(result, LogFile));
         SetAction(parsed => InitAction.Run(terminal, parsed.GetRequiredValue(LogFile), parsed.GetValue(Force)));
     }
 }

@@ -1,5 +1,7 @@
 using System.CommandLine;
+using System.Globalization;
 using DepthStress.Cli.Actions;
+using DepthStress.Cli.Runs;
 
 namespace DepthStress.Cli.Commands;
 
@@ -25,6 +27,13 @@ internal sealed class RunCommand : Command
     {
         Description = "How many wells to work on at a time (default: one per core)",
         HelpName = "N",
+        CustomParser = result =>
+        {
+            var text = result.Tokens[0].Value;
+            if (int.TryParse(text, NumberStyles.None, CultureInfo.InvariantCulture, out var jobs) && jobs > 0) return jobs;
+            result.AddError($"found --jobs {text}, expected a whole number of 1 or more");
+            return 0;
+        },
     };
 
     /// <summary>Whether warnings fail.</summary>
@@ -40,9 +49,11 @@ internal sealed class RunCommand : Command
         Add(Strict);
         Validators.Add(result =>
         {
-            if (result.GetValue(Out) is not null && result.GetValue(WellFiles) is { Length: > 1 })
-                result.AddError("--out takes the results of one well; found several well files");
-            if (result.GetResult(Jobs) is not null && result.GetValue(Jobs) < 1) result.AddError("--jobs takes a number of 1 or more");
+            var files = Names.Of(result, WellFiles);
+            if (result.GetResult(Out) is not null && files.Count > 1) result.AddError("found --out with several well files, expected one: --out takes the results of one well");
+            Names.Check(result, WellFiles);
+            foreach (var shared in files.Where(f => f.Length > 0).GroupBy(f => ResultWriter.DefaultFolder(Path.GetFullPath(f, terminal.Folder))).Where(g => g.Count() > 1))
+                result.AddError($"found well files that share one result folder ({string.Join(", ", shared)}), expected each well once and under a name of its own");
         });
         SetAction((parsed, cancellation) =>
         {

@@ -22,7 +22,7 @@ internal static class SummaryPrinter
         var units = file.Sections.Output.Units.Value;
         terminal.Output.WriteLine($"Well {file.Setup.Name}: {Extent(model, units)}");
         terminal.Output.WriteLine();
-        terminal.Tables().Write(Zones(model, units));
+        foreach (var columns in terminal.Width < FullWidth ? Narrow : [Columns]) terminal.Tables().Write(Zones(model, units, columns));
         terminal.Output.WriteLine();
         foreach (var finding in model.Findings) terminal.Output.WriteLine(FindingText.Of(finding, units, model.Count));
         terminal.Output.WriteLine();
@@ -53,18 +53,23 @@ internal static class SummaryPrinter
         ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu stat", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
     ];
 
-    private static Table Zones(EarthModel model, UnitSystem units)
+    /// <summary>Below this many characters the table is cut into three, so that no heading is.</summary>
+    private const int FullWidth = 120;
+
+    private static readonly (string Title, string Column, int Metric, int Field)[][] Narrow = [Columns[..4], Columns[4..7], Columns[7..]];
+
+    private static Table Zones(EarthModel model, UnitSystem units, (string Title, string Column, int Metric, int Field)[] columns)
     {
         var table = new Table().Border(TableBorder.Simple);
         var length = units.UnitFor(Dimension.Length).Unit;
         table.AddColumn(new TableColumn("zone").NoWrap());
-        table.AddColumn(new TableColumn($"top md\n{length}").RightAligned());
-        table.AddColumn(new TableColumn("cover\n%").RightAligned());
-        foreach (var (title, id, _, _) in Columns) table.AddColumn(new TableColumn($"{title}\n{DepthColumns.Get(id).In(units).Unit}").RightAligned());
+        table.AddColumn(Numbers($"top md\n{length}"));
+        table.AddColumn(Numbers("cover\n%"));
+        foreach (var (title, id, _, _) in columns) table.AddColumn(Numbers($"{title}\n{DepthColumns.Get(id).In(units).Unit}"));
 
         foreach (var zone in ZoneMeans.Of(model))
         {
-            var cells = Columns.Select(c =>
+            var cells = columns.Select(c =>
             {
                 var column = DepthColumns.Get(c.Column);
                 return Show(zone.Mean(column), column.In(units).Unit, units == UnitSystem.Metric ? c.Metric : c.Field);
@@ -75,6 +80,8 @@ internal static class SummaryPrinter
 
         return table;
     }
+
+    private static TableColumn Numbers(string title) => new TableColumn(title).RightAligned().NoWrap().PadLeft(1).PadRight(0);
 
     private static string Show(double si, Unit unit, int decimals) =>
         double.IsNaN(si) ? "" : unit.FromSi(si).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);

@@ -28,14 +28,24 @@ internal static class CurveUnits
         return null;
     }
 
-    /// <summary>The column's values in SI; slowness becomes velocity.</summary>
-    public static double[] ToSi(double[] values, Unit unit)
+    /// <summary>The column's values in SI; slowness becomes velocity, and what is no slowness is taken out with a warning.</summary>
+    public static double[] ToSi(CurveRole role, ColumnChoice column, Unit unit, DiagnosticBag diagnostics)
     {
-        var si = (double[])values.Clone();
+        var si = (double[])column.Column.Values.Clone();
         unit.ToSi(si);
-        if (unit.Dimension == Dimension.Slowness)
+        if (unit.Dimension != Dimension.Slowness) return si;
+        var removed = 0;
+        for (var i = 0; i < si.Length; i++)
         {
-            for (var i = 0; i < si.Length; i++) si[i] = si[i] > 0 ? 1 / si[i] : double.NaN;
+            if (si[i] <= 0) removed++;
+            si[i] = si[i] > 0 ? 1 / si[i] : double.NaN;
+        }
+
+        if (removed > 0)
+        {
+            diagnostics.Warning(
+                column.Column.Position,
+                string.Create(CultureInfo.InvariantCulture, $"column {column.Column.Name} ({role.Id}): found {removed} slownesses of zero or less, expected them above zero: taken out"));
         }
 
         return si;
@@ -55,7 +65,7 @@ internal static class CurveUnits
         var position = column.Source is { Unit.IsSet: true } s ? s.Unit.Source.Position : column.Column.Position;
         var text = string.Create(
             CultureInfo.InvariantCulture,
-            $"column {column.Column.Name} ({role.Id}): its median is {printed:G5} {unit.Symbol}, which no rock has ({Typical(role, unit)})");
+            $"column {column.Column.Name} ({role.Id}): its median is {printed:G5} {unit.Symbol}, which no {(role.Property is Property.Caliper or Property.BitSize ? "hole" : "rock")} has ({Typical(role, unit)})");
         if (other is null)
         {
             diagnostics.Warning(position, text);
@@ -64,7 +74,7 @@ internal static class CurveUnits
 
         diagnostics.Error(
             position,
-            string.Create(CultureInfo.InvariantCulture, $"{text}; read as {other.Symbol} it would be {FromSi(unit, ToSi(other, printed)):G5} {unit.Symbol}: state the unit in [logs.curves]"));
+            string.Create(CultureInfo.InvariantCulture, $"{text}; read as {other.Symbol} it would be {FromSi(unit, ToSi(other, printed)):G5} {unit.Symbol}; state the unit in [logs.curves]: {role.Id} = {{ column = \"{column.Column.Name}\", unit = \"{other.Symbol}\" }}"));
         return false;
     }
 

@@ -21,7 +21,7 @@ public static class LogIngest
         ArgumentNullException.ThrowIfNull(well);
         ArgumentNullException.ThrowIfNull(diagnostics);
         var own = new DiagnosticBag();
-        var logs = well.Sections.Logs.Files.IsSet ? ReadFiles(well, own) : null;
+        var logs = well.Sections.Logs.Files is { IsSet: true, Value.Count: > 0 } ? ReadFiles(well, own) : null;
         foreach (var diagnostic in own.Items) diagnostics.Add(diagnostic);
         return logs;
     }
@@ -30,9 +30,9 @@ public static class LogIngest
     {
         var section = well.Sections.Logs;
         var files = new List<LogFile>();
-        foreach (var name in section.Files.Value)
+        foreach (var name in section.Files.Value.Distinct(StringComparer.Ordinal))
         {
-            if (LogFileReader.Read(well.Resolve(name), name, Options(section), diagnostics) is { } file) files.Add(file);
+            if (LogFileReader.Read(well.Resolve(name), name, Options(section, name), diagnostics) is { } file) files.Add(file);
         }
 
         if (diagnostics.HasErrors) return null;
@@ -50,12 +50,12 @@ public static class LogIngest
         return diagnostics.HasErrors ? null : new IngestedLogs(new LogTable(grid, curves), files, roles);
     }
 
-    private static LogReadOptions Options(LogsSection section) => new()
+    private static LogReadOptions Options(LogsSection section, string file) => new()
     {
         DepthColumn = section.Depth is { Column.IsSet: true } depth ? depth.Column.Value : null,
         MissingByColumn = section.Curves
             .SelectMany(c => c.Sources)
-            .Where(s => s.Column.IsSet && s.Missing.IsSet)
+            .Where(s => s.Column.IsSet && s.Missing.IsSet && (!s.File.IsSet || s.File.Value == file))
             .GroupBy(s => s.Column.Value, StringComparer.OrdinalIgnoreCase)
             .ToDictionary(g => g.Key, g => g.First().Missing.Value, StringComparer.OrdinalIgnoreCase),
     };
@@ -92,7 +92,7 @@ public static class LogIngest
                 continue;
             }
 
-            var si = CurveUnits.ToSi(column.Column.Values, unit);
+            var si = CurveUnits.ToSi(choice.Role, column, unit, diagnostics);
             usable &= CurveUnits.Check(choice.Role, column, unit, si, diagnostics);
             var resampled = new bool[grid.Length];
             var own = depths[files.IndexOf(column.File)];

@@ -19,7 +19,25 @@ internal static class RoleAssignment
             if (columns.Count > 0) choices.Add(new RoleChoice(role, columns));
         }
 
+        ReportShared(choices, diagnostics);
         return choices;
+    }
+
+    private static void ReportShared(List<RoleChoice> choices, DiagnosticBag diagnostics)
+    {
+        var shared =
+            from choice in choices
+            from column in choice.Columns
+            group (choice.Role, Choice: column) by column.Column into uses
+            where uses.Select(u => u.Role).Distinct().Count() > 1
+            select uses.ToList();
+        foreach (var uses in shared)
+        {
+            var source = uses.Select(u => u.Choice.Source).LastOrDefault(s => s is not null);
+            diagnostics.Error(
+                source?.Column.Source.Position ?? uses[0].Choice.Column.Position,
+                $"found the column \"{uses[0].Choice.Column.Name}\" for {string.Join(" and ", uses.Select(u => u.Role.Id).Distinct())}, expected a column of its own for each role");
+        }
     }
 
     /// <summary>The columns that usual mnemonics find for a role, the most specific mnemonic first.</summary>

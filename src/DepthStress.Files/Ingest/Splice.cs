@@ -34,6 +34,7 @@ internal static class Splice
 
         // Below the last splice depth there is no run.
         values.AsSpan(start).Fill(double.NaN);
+        resampled.AsSpan(start).Clear();
         if (start < grid.Length) tracks.Add(new OriginRun(start, grid.Length, SampleOrigin.None, ""));
 
         var origins = OriginTrack.From(tracks);

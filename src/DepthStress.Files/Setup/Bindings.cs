@@ -78,10 +78,9 @@ internal static class Bindings
 
     private static LogsSection Curves(ISection s, LogsSection l)
     {
-        var depth = s.Tables("depth", l.Depth is null ? [] : [l.Depth], Source, new CurveSource(), "measured depth", "column");
         return l with
         {
-            Depth = depth.Count > 0 ? depth[0] : null,
+            DepthColumns = s.Tables("depth", l.DepthColumns, DepthSource, new CurveSource(), "measured depth", "column"),
             Curves =
             [
                 .. CurveRoles.All
@@ -99,6 +98,13 @@ internal static class Bindings
         Unit = s.Text("unit", c.Unit, "the unit, when the file states none or a wrong one"),
         Missing = s.Number("missing", c.Missing, Interval.All, "a further value that means missing"),
         Base = s.Quantity("base", c.Base, Sign.Any, Dimension.Length, "measured depth down to which this column is used"),
+        Position = s.Position,
+    };
+
+    private static CurveSource DepthSource(ISection s, CurveSource c) => c with
+    {
+        Column = s.Text("column", c.Column, "name of the column"),
+        Unit = s.Text("unit", c.Unit, "the unit, when the files state none or a wrong one"),
         Position = s.Position,
     };
 
@@ -165,26 +171,26 @@ internal static class Bindings
     public static PorePressureSettings PorePressure(ISection s, PorePressureSettings p)
     {
         var points = s.Tables(
-            "points", p.Points.IsSet ? p.Points.Value : [], Point, new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
+            "points", p.Points.IsSet ? p.Points.Value : [], (t, point) => Point(t, point, p.Points.Source), new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
         return p with
         {
             Method = s.Choice("method", p.Method, PressureMethods, "how pore pressure is had"),
             FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic: density of the pore fluid"),
             Gradient = s.FluidDensity("gradient", p.Gradient, "gradient: pressure per depth, or the density of such a fluid"),
             Reference = s.Choice("reference", p.Reference, References, "gradient: what depth counts from"),
-            Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, new SettingSource(SettingKind.WellFile, s.Position)) : p.Points,
+            Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, s.SourceOf("points")) : p.Points,
             DepthKind = s.Choice("depth_kind", p.DepthKind, DepthKinds, "table: the kind of depth of its points"),
         };
     }
 
-    private static PressurePoint Point(ISection s, PressurePoint p)
+    private static PressurePoint Point(ISection s, PressurePoint p, SettingSource source)
     {
-        var depth = s.Quantity("depth", Known(p.Depth), Sign.Any, Dimension.Length, "depth of the point");
-        var pressure = s.Quantity("pressure", Known(p.Pressure), Sign.NotNegative, Dimension.Pressure, "pore pressure there");
+        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth of the point");
+        var pressure = s.Quantity("pressure", Known(p.Pressure, source), Sign.NotNegative, Dimension.Pressure, "pore pressure there");
         return new PressurePoint(depth.IsSet ? depth.Value : double.NaN, pressure.IsSet ? pressure.Value : double.NaN);
     }
 
-    private static Setting<double> Known(double value) => double.IsNaN(value) ? default : Setting.Default(value);
+    private static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
 
     private static DensityFill Stated(double density) => new(DensityFillKind.Stated, density);
 

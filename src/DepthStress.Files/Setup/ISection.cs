@@ -26,6 +26,9 @@ internal interface ISection
     /// <summary>The same table, its settings owned by a zone or lithology rule.</summary>
     ISection OwnedBy(SettingKind kind, string owner);
 
+    /// <summary>Who decided a key of the table; not set where it says nothing.</summary>
+    SettingSource SourceOf(string key);
+
     /// <summary>A text.</summary>
     Setting<string> Text(string key, Setting<string> current, string doc);
 

@@ -6,6 +6,16 @@ using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
 
+/// <summary>The keys of a law whose coefficients the user gives.</summary>
+internal sealed record LawParts(
+    Setting<string> Shape,
+    Setting<double> Factor,
+    Setting<double> Exponent,
+    Setting<double> Offset,
+    Setting<Property> Input,
+    Setting<string> InputUnit,
+    Setting<string> Unit);
+
 /// <summary>
 /// Reads the choice of a law: a catalogue id, a constant, or a table with the user's own coefficients
 /// (<c>{ law = "linear", factor, offset, input }</c> or <c>{ law = "power", factor, exponent, input, input_unit, unit }</c>).
@@ -13,6 +23,10 @@ namespace DepthStress.Files.Setup;
 internal static class LawReader
 {
     private static readonly (string Word, string Value)[] Shapes = [("linear", "linear"), ("power", "power")];
+
+    private static readonly string[] OfPowerLaws = ["exponent", "input_unit"];
+
+    private static readonly string[] OfLinearLaws = ["offset"];
 
     /// <summary>Reads one choice; null when it is wrong, with the reason reported.</summary>
     public static Law? Read(TomlNode node, string key, Property predicts, DiagnosticBag diagnostics)
@@ -26,7 +40,7 @@ internal static class LawReader
             case TomlNumber number when PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction:
                 return Constant(number, key, predicts, Units.Of(PropertyNames.Dimension(predicts)).First(), number.Value, diagnostics);
             case TomlTable table:
-                var section = new ReadingSection(table, key, diagnostics);
+                var section = new ReadingSection(table, key, diagnostics, new WrongKeys());
                 var law = UserGiven(section, key, predicts, diagnostics);
                 section.ReportUnknown();
                 return law;
@@ -35,6 +49,16 @@ internal static class LawReader
                 return null;
         }
     }
+
+    /// <summary>Declares the keys of a law of the user's own.</summary>
+    public static LawParts Parts(ISection s, Property predicts) => new(
+        s.Choice("law", default, Shapes, "shape of the relation"),
+        s.Number("factor", default, Interval.All, "the factor"),
+        s.Number("exponent", default, Interval.All, "the exponent of a power law"),
+        s.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds"),
+        s.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), $"the property it starts from, by default {PropertyNames.Name(PropertyNames.UsualInput(predicts))}"),
+        s.Text("input_unit", default, "power: the unit of the input that the factor holds for"),
+        s.Text("unit", default, "the unit of the result; a power law's factor holds for it"));
 
     private static Law? FromCatalogue(TomlText text, string key, Property predicts, DiagnosticBag diagnostics)
     {
@@ -46,7 +70,7 @@ internal static class LawReader
             return null;
         }
 
-        diagnostics.Error(text.Position, $"found the unknown method \"{text.Value}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
+        diagnostics.Error(text.Position, $"found the unknown method \"{Words.Short(text.Value)}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
         return null;
     }
 
@@ -72,46 +96,50 @@ internal static class LawReader
 
     private static Law? UserGiven(ReadingSection section, string key, Property predicts, DiagnosticBag diagnostics)
     {
-        var shape = section.Choice("law", default, Shapes, "shape of the relation");
-        var factor = section.Number("factor", default, Interval.All, "the factor");
-        var exponent = section.Number("exponent", default, Interval.All, "the exponent of a power law");
-        var offset = section.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds");
-        var input = section.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), "the property it starts from");
-        var inputUnit = Unit(section, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
-        var unit = Unit(section, "unit", PropertyNames.Dimension(predicts), diagnostics);
-        if (!shape.IsSet || !factor.IsSet)
+        var (shape, factor, exponent, offset, input, inputSymbol, symbol) = Parts(section, predicts);
+        var inputUnit = Unit(inputSymbol, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
+        var unit = Unit(symbol, "unit", PropertyNames.Dimension(predicts), diagnostics);
+        if (!shape.IsSet && section.SourceOf("law") == SettingSource.NotSet) Missing("law", "\"linear\" or \"power\"");
+        if (!factor.IsSet && section.SourceOf("factor") == SettingSource.NotSet) Missing("factor", "a number");
+        if (!shape.IsSet) return null;
+        foreach (var unused in shape.Value == "linear" ? OfPowerLaws : OfLinearLaws)
         {
-            diagnostics.Error(section.Position, $"{key}: expected law = \"linear\" or \"power\", and factor");
-            return null;
+            if (section.SourceOf(unused) is { Kind: not SettingKind.NotSet } source)
+                diagnostics.Error(source.Position, $"{key}: found {unused}, which a {shape.Value} law does not have");
         }
 
         if (shape.Value == "linear")
         {
             if (PropertyNames.Dimension(input.Value) != PropertyNames.Dimension(predicts))
             {
-                diagnostics.Error(section.Position, $"{key}: a linear law needs an input of the same kind of quantity; use law = \"power\" with input_unit and unit");
+                var (found, wanted) = (PropertyNames.Dimension(input.Value), PropertyNames.Dimension(predicts));
+                diagnostics.Error(section.Position, $"{key}: found a linear law from {PropertyNames.Title(input.Value)} ({QuantityText.Name(found)}), expected an input of the same kind as the result ({QuantityText.Name(wanted)}), or law = \"power\" with input_unit and unit");
                 return null;
             }
+
+            if (!factor.IsSet) return null;
 
             var si = Units.Of(PropertyNames.Dimension(predicts)).First();
             var shown = unit ?? si;
             return UserLaw.Linear(predicts, shown, Input(input.Value, shown), factor.Value, offset.IsSet ? shown.FromSi(offset.Value) : 0);
         }
 
-        if (!exponent.IsSet || unit is null || inputUnit is null)
-        {
-            diagnostics.Error(section.Position, $"{key}: a power law needs exponent, unit and input_unit, since its factor depends on them");
-            return null;
-        }
+        if (PropertyNames.Dimension(predicts) == Dimension.None) unit ??= Units.One;
+        if (PropertyNames.Dimension(input.Value) == Dimension.None) inputUnit ??= Units.One;
+        if (section.SourceOf("exponent") == SettingSource.NotSet) Missing("exponent", "a number");
+        if (inputUnit is null && section.SourceOf("input_unit") == SettingSource.NotSet) Missing("input_unit", $"a unit, since the factor depends on it: {Units.Symbols(PropertyNames.Dimension(input.Value))}");
+        if (unit is null && section.SourceOf("unit") == SettingSource.NotSet) Missing("unit", $"a unit, since the factor depends on it: {Units.Symbols(PropertyNames.Dimension(predicts))}");
+        if (!factor.IsSet || !exponent.IsSet || unit is null || inputUnit is null) return null;
 
         return UserLaw.Power(predicts, unit, Input(input.Value, inputUnit), factor.Value, exponent.Value);
+
+        void Missing(string part, string expected) => diagnostics.Error(section.Position, $"{key}: {part} is not set; expected {expected}");
     }
 
     private static LawInput Input(Property property, Unit unit) => new(PropertyNames.Name(property), property, unit);
 
-    private static Unit? Unit(ReadingSection section, string key, Dimension dimension, DiagnosticBag diagnostics)
+    private static Unit? Unit(Setting<string> text, string key, Dimension dimension, DiagnosticBag diagnostics)
     {
-        var text = section.Text(key, default, "a unit");
         if (!text.IsSet) return null;
         if (Units.Find(text.Value, dimension) is { } unit) return unit;
         diagnostics.Error(text.Source.Position, $"found the unit \"{text.Value}\", expected {key} = one of {Units.Symbols(dimension)}");

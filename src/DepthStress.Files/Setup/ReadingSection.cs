@@ -13,20 +13,23 @@ internal sealed class ReadingSection : ISection
     private readonly SettingKind _kind;
     private readonly string? _owner;
     private readonly DiagnosticBag _diagnostics;
+    private readonly WrongKeys _wrong;
     private readonly List<string> _known;
+    private readonly List<string> _later = [];
 
     /// <summary>Makes the section of a table.</summary>
-    public ReadingSection(TomlTable table, string path, DiagnosticBag diagnostics)
-        : this(table, path, diagnostics, SettingKind.WellFile, null, [])
+    public ReadingSection(TomlTable table, string path, DiagnosticBag diagnostics, WrongKeys wrong)
+        : this(table, path, diagnostics, wrong, SettingKind.WellFile, null, [])
     {
     }
 
     private ReadingSection(
-        TomlTable table, string path, DiagnosticBag diagnostics, SettingKind kind, string? owner, List<string> known)
+        TomlTable table, string path, DiagnosticBag diagnostics, WrongKeys wrong, SettingKind kind, string? owner, List<string> known)
     {
         _table = table;
         _path = path;
         _diagnostics = diagnostics;
+        _wrong = wrong;
         _kind = kind;
         _owner = owner;
         _known = known;
@@ -36,16 +39,20 @@ internal sealed class ReadingSection : ISection
     public SourcePosition Position => _table.Position;
 
     /// <inheritdoc/>
-    public ISection OwnedBy(SettingKind kind, string owner) => new ReadingSection(_table, _path, _diagnostics, kind, owner, _known);
+    public ISection OwnedBy(SettingKind kind, string owner) => new ReadingSection(_table, _path, _diagnostics, _wrong, kind, owner, _known);
+
+    /// <inheritdoc/>
+    public SettingSource SourceOf(string key) => _table.Items.TryGetValue(key, out var item) ? Source(item.Value) : SettingSource.NotSet;
 
     /// <summary>Reports keys that no binding asked for.</summary>
     public void ReportUnknown()
     {
         foreach (var (key, item) in _table.Items)
         {
-            if (_known.Contains(key)) continue;
-            var place = _path.Length == 0 ? "" : $" in {_path}";
-            _diagnostics.Error(item.Key, $"found the unknown key \"{key}\"{place}, expected one of {string.Join(", ", _known)}{NearestName.Hint(key, _known)}");
+            if (_known.Contains(key) || _later.Contains(key)) continue;
+            var isSection = _path.Length == 0 && item.Value is TomlTable or TomlArray { Items: [TomlTable, ..] };
+            var found = isSection ? $"section [{Words.Short(key)}]" : $"key \"{Words.Short(key)}\"{(_path.Length == 0 ? "" : $" in {_path}")}";
+            _diagnostics.Error(item.Key, $"found the unknown {found}, expected one of {string.Join(", ", _known)}{NearestName.Hint(key, _known)}");
         }
     }
 
@@ -98,15 +105,11 @@ internal sealed class ReadingSection : ISection
     {
         if (Find(key) is not { } node) return current;
         var list = words.Select(w => w.Word).ToList();
-        if (node is not TomlText text)
-        {
-            _diagnostics.Error(node.Position, $"found {node.Kind}, expected {key} = one of {Words.Quoted(list)}");
-            return current;
-        }
-
-        var index = list.IndexOf(text.Value);
+        var index = node is TomlText word ? list.IndexOf(word.Value) : -1;
         if (index >= 0) return new Setting<T>(words[index].Value, Source(node));
-        _diagnostics.Error(node.Position, $"found \"{text.Value}\", expected {key} = one of {Words.Quoted(list)}{NearestName.Hint(text.Value, list)}");
+        _wrong.Add(_path, key, _owner);
+        var (found, hint) = node is TomlText text ? ($"\"{Words.Short(text.Value)}\"", NearestName.Hint(text.Value, list)) : (node.Kind, "");
+        _diagnostics.Error(node.Position, $"found {found}, expected {key} = one of {Words.Quoted(list)}{hint}");
         return current;
     }
 
@@ -115,7 +118,9 @@ internal sealed class ReadingSection : ISection
         string key, Setting<T> current, IReadOnlyList<(string Word, T Value)> words, Dimension dimension, Func<double, T> make, Func<T, double?> quantity, string doc)
     {
         if (Find(key) is not TomlText text || text.Value.Length == 0 || !Words.StartsNumber(text.Value)) return Choice(key, current, words, doc);
-        return Quantity(text, key, Sign.Positive, dimension) is { } si ? new Setting<T>(make(si), Source(text)) : current;
+        if (Quantity(text, key, Sign.Positive, dimension) is { } si) return new Setting<T>(make(si), Source(text));
+        _wrong.Add(_path, key, _owner);
+        return current;
     }
 
     /// <inheritdoc/>
@@ -149,10 +154,14 @@ internal sealed class ReadingSection : ISection
                 table.Add(shorthand, text.Position, text);
             }
 
-            if (table is null)
-                _diagnostics.Error(item.Position, $"found {item.Kind}, expected {(shorthand is null ? $"[[{Join(key)}]]" : $"{key} = a {shorthand} name, a table, or a list of tables")}");
-            else
+            if (table is not null)
+            {
                 list.Add(Bind(table, shorthand is null ? $"[[{Join(key)}]]" : key, empty, bind));
+                continue;
+            }
+
+            _wrong.Add(_path, key, _owner);
+            _diagnostics.Error(item.Position, $"found {item.Kind}, expected {(shorthand is null ? $"[[{Join(key)}]]" : $"{key} = a {shorthand} name, a table, or a list of tables")}");
         }
 
         return list;
@@ -161,13 +170,14 @@ internal sealed class ReadingSection : ISection
     /// <inheritdoc/>
     public void Later(string key)
     {
-        if (Find(key) is not null)
-            _diagnostics.Error(_table.Items[key].Key, $"found the section [{key}], which this version does not support yet; remove it, its content would have no effect");
+        _later.Add(key);
+        if (_table.Items.TryGetValue(key, out var item))
+            _diagnostics.Error(item.Key, $"found the section [{key}], which this version does not support yet; remove it, its content would have no effect");
     }
 
     private T Bind<T>(TomlTable table, string path, T current, Func<ISection, T, T> bind)
     {
-        var section = new ReadingSection(table, path, _diagnostics, _kind, _owner, []);
+        var section = new ReadingSection(table, path, _diagnostics, _wrong, _kind, _owner, []);
         var bound = bind(section, current);
         section.ReportUnknown();
         return bound;
@@ -192,12 +202,22 @@ internal sealed class ReadingSection : ISection
     }
 
     private Setting<T> Read<T>(string key, Setting<T> current, Func<TomlNode, T?> read)
-        where T : class =>
-        Find(key) is { } node && read(node) is { } value ? new Setting<T>(value, Source(node)) : current;
+        where T : class
+    {
+        if (Find(key) is not { } node) return current;
+        if (read(node) is { } value) return new Setting<T>(value, Source(node));
+        _wrong.Add(_path, key, _owner);
+        return current;
+    }
 
     private Setting<T> Read<T>(string key, Setting<T> current, Func<TomlNode, T?> read)
-        where T : struct =>
-        Find(key) is { } node && read(node) is { } value ? new Setting<T>(value, Source(node)) : current;
+        where T : struct
+    {
+        if (Find(key) is not { } node) return current;
+        if (read(node) is { } value) return new Setting<T>(value, Source(node));
+        _wrong.Add(_path, key, _owner);
+        return current;
+    }
 
     private SettingSource Source(TomlNode node) => new(_kind, node.Position, _owner);
 

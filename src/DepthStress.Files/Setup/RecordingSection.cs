@@ -11,13 +11,19 @@ namespace DepthStress.Files.Setup;
 internal sealed class RecordingSection : ISection
 {
     /// <summary>What has been written so far.</summary>
-    public JsonObject Json { get; } = [];
+    public JsonObject Json { get; private init; } = [];
+
+    /// <summary>True in a zone or lithology rule, which decides only what it says itself.</summary>
+    private bool OnlyStated { get; init; }
 
     /// <inheritdoc/>
     public SourcePosition Position => SourcePosition.None;
 
     /// <inheritdoc/>
-    public ISection OwnedBy(SettingKind kind, string owner) => this;
+    public ISection OwnedBy(SettingKind kind, string owner) => new RecordingSection { Json = Json, OnlyStated = true };
+
+    /// <inheritdoc/>
+    public SettingSource SourceOf(string key) => SettingSource.NotSet;
 
     /// <inheritdoc/>
     public Setting<string> Text(string key, Setting<string> current, string doc) => Add(key, current, v => v);
@@ -75,16 +81,16 @@ internal sealed class RecordingSection : ISection
     {
     }
 
-    private static JsonObject Inner<T>(T current, Func<ISection, T, T> bind)
+    private JsonObject Inner<T>(T current, Func<ISection, T, T> bind)
     {
-        var inner = new RecordingSection();
+        var inner = new RecordingSection { OnlyStated = OnlyStated };
         bind(inner, current);
         return inner.Json;
     }
 
     private Setting<T> Add<T>(string key, Setting<T> current, Func<T, JsonNode> show)
     {
-        if (current.IsSet) Json[key] = new JsonObject { ["value"] = show(current.Value), ["from"] = From(current.Source) };
+        if (current.IsSet && !(OnlyStated && current.Source.Kind == SettingKind.Default)) Json[key] = new JsonObject { ["value"] = show(current.Value), ["from"] = From(current.Source) };
         return current;
     }
 

@@ -28,6 +28,9 @@ internal sealed class SchemaSection : ISection
     public ISection OwnedBy(SettingKind kind, string owner) => this;
 
     /// <inheritdoc/>
+    public SettingSource SourceOf(string key) => SettingSource.NotSet;
+
+    /// <inheritdoc/>
     public Setting<string> Text(string key, Setting<string> current, string doc) => Add(key, current, Of("string", doc));
 
     /// <inheritdoc/>
@@ -84,18 +87,14 @@ internal sealed class SchemaSection : ISection
         JsonNode constant = dimension is Dimension.None or Dimension.Fraction
             ? new JsonObject { ["type"] = "number" }
             : QuantitySchema("one value", dimension);
+        var parts = new SchemaSection();
+        LawReader.Parts(parts, predicts);
+        var own = parts.Schema("a relation with coefficients of your own");
+        own["required"] = List(["law", "factor"]);
         return Add(key, current, new JsonObject
         {
             ["description"] = doc,
-            ["anyOf"] = new JsonArray(
-                new JsonObject { ["enum"] = List(MethodCatalogue.For(predicts).Select(l => l.Id)) },
-                constant,
-                new JsonObject
-                {
-                    ["type"] = "object",
-                    ["required"] = List(["law", "factor"]),
-                    ["properties"] = new JsonObject { ["law"] = new JsonObject { ["enum"] = List(["linear", "power"]) }, ["factor"] = new JsonObject { ["type"] = "number" } },
-                }),
+            ["anyOf"] = new JsonArray(new JsonObject { ["enum"] = List(MethodCatalogue.For(predicts).Select(l => l.Id)) }, constant, own),
         });
     }
 

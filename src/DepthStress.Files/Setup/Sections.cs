@@ -62,8 +62,11 @@ public sealed record LogsSection
     /// <summary>The log files, relative to the well file.</summary>
     public Setting<IReadOnlyList<string>> Files { get; init; }
 
-    /// <summary>The column that holds measured depth, when it is not the usual one.</summary>
-    public CurveSource? Depth { get; init; }
+    /// <summary>The column that holds measured depth, when it is not the usual one; one at most in a sound file.</summary>
+    public IReadOnlyList<CurveSource> DepthColumns { get; init; } = [];
+
+    /// <summary>The column that holds measured depth, or null where it is the usual one.</summary>
+    public CurveSource? Depth => DepthColumns is [var first, ..] ? first : null;
 
     /// <summary>The choices of columns; roles without one are found by their usual names.</summary>
     public IReadOnlyList<CurveChoice> Curves { get; init; } = [];

@@ -12,20 +12,30 @@ internal static class SetupAssembly
     /// <summary>Stands in for reference levels that cannot be used, so that the other problems can be found in the same run.</summary>
     private static readonly DepthFrame AnyFrame = new(DatumKind.Ground, 0, 0, null, null);
 
+    private static readonly string[] RuleKeys =
+    [
+        "shale_volume_min", "shale_volume_max", "density_min", "density_max", "photoelectric_min", "photoelectric_max", "facies",
+    ];
+
     /// <summary>Assembles the setup and reports what is wrong with it.</summary>
-    public static WellSetup Assemble(WellFileSections sections, string name, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
+    public static WellSetup Assemble(
+        WellFileSections sections, string name, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         var file = new SourcePosition(name);
         var well = sections.Well;
         if (!well.Name.IsSet) diagnostics.Error(file, "[well] name is not set");
         if (!sections.Logs.Files.IsSet || sections.Logs.Files.Value.Count == 0)
             diagnostics.Error(file, "[logs] files is not set; expected the names of the log files");
+        else
+            CheckFiles(sections.Logs.Files, diagnostics);
+        if (sections.Logs.DepthColumns is [_, var second, ..])
+            diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
-        var frame = Frame(well, file, diagnostics);
-        var trajectory = Trajectory(sections.Survey, file, folder, inputs, diagnostics);
-        CheckPoints(sections, diagnostics);
+        var frame = Frame(well, file, wrong, diagnostics);
+        var trajectory = Trajectory(sections.Survey, file, folder, inputs, wrong, diagnostics);
+        CheckPoints(sections, wrong, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
-        var lithologies = Lithologies(sections.Lithologies, diagnostics);
+        var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
         return new WellSetup
         {
             Position = file,
@@ -41,7 +51,7 @@ internal static class SetupAssembly
         };
     }
 
-    private static DepthFrame? Frame(WellSection well, SourcePosition file, DiagnosticBag diagnostics)
+    private static DepthFrame? Frame(WellSection well, SourcePosition file, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         if (!well.Datum.IsSet) diagnostics.Error(file, "[well] datum is not set; expected \"rotary table\", \"ground\" or \"sea level\"");
         var elevation = well.DatumElevation;
@@ -59,24 +69,44 @@ internal static class SetupAssembly
         if (well.GroundElevation.IsSet && well.WaterDepth.IsSet)
         {
             diagnostics.Error(
-                well.WaterDepth.Source.Position, "found both ground_elevation and water_depth; expected the first onshore, the second offshore");
+                well.WaterDepth.Source.Position, "found both ground_elevation and water_depth, expected the first in a well on land or the second in a well at sea");
             return null;
         }
 
-        if (!well.GroundElevation.IsSet && !well.WaterDepth.IsSet)
+        if (!well.GroundElevation.IsSet && !well.WaterDepth.IsSet && !wrong.Has("[well]", "ground_elevation", "water_depth"))
             diagnostics.Error(file, "[well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them");
         if (!well.Datum.IsSet || !elevation.IsSet || well.GroundElevation.IsSet == well.WaterDepth.IsSet) return null;
-        if (well.GroundElevation.IsSet && !well.WaterTableDepth.IsSet)
+        if (well.GroundElevation.IsSet && !well.WaterTableDepth.IsSet && !wrong.Has("[well]", "water_table_depth"))
             diagnostics.Note(file, "[well] water_table_depth is not set: the water table is taken at the ground");
 
         var frame = new DepthFrame(
             well.Datum.Value, elevation.Value, Value(well.GroundElevation), Value(well.WaterDepth), Value(well.WaterTableDepth));
         var problems = DepthFrame.Validate(frame);
-        foreach (var problem in problems) diagnostics.Error(well.DatumElevation.IsSet ? well.DatumElevation.Source.Position : file, $"[well]: {problem}");
+        foreach (var problem in problems) diagnostics.Error(Place(well, problem, file), $"[well]: {problem}");
         return problems.Count == 0 ? frame : null;
     }
 
-    private static Trajectory? Trajectory(SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, DiagnosticBag diagnostics)
+    /// <summary>The key that a problem of the frame is about.</summary>
+    private static SourcePosition Place(WellSection well, string problem, SourcePosition file)
+    {
+        (string Words, SettingSource Source)[] keys =
+        [
+            ("found a water table depth", well.WaterTableDepth.Source), ("found a water depth", well.WaterDepth.Source),
+            ("found a ground elevation", well.GroundElevation.Source), ("found a datum elevation", well.DatumElevation.Source),
+            ("found the ground as datum", well.Datum.Source),
+        ];
+        var place = keys.FirstOrDefault(k => problem.StartsWith(k.Words, StringComparison.Ordinal)).Source ?? SettingSource.NotSet;
+        return place.Kind == SettingKind.WellFile ? place.Position : file;
+    }
+
+    private static void CheckFiles(Setting<IReadOnlyList<string>> files, DiagnosticBag diagnostics)
+    {
+        foreach (var twice in files.Value.GroupBy(f => f, StringComparer.Ordinal).Where(g => g.Count() > 1))
+            diagnostics.Error(files.Source.Position, $"found the file \"{twice.Key}\" twice in [logs] files, expected each once");
+    }
+
+    private static Trajectory? Trajectory(
+        SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         if (survey.File.IsSet && survey.Vertical is { IsSet: true, Value: true })
         {
@@ -92,7 +122,7 @@ internal static class SetupAssembly
         }
 
         if (survey.Vertical is { IsSet: true, Value: true }) return Core.Depth.Trajectory.Vertical;
-        diagnostics.Error(file, "[survey] is not set; expected file = \"...\" or vertical = true");
+        if (!wrong.Has("[survey]", "file", "vertical")) diagnostics.Error(file, "[survey] is not set; expected file = \"...\" or vertical = true");
         return null;
     }
 
@@ -111,7 +141,7 @@ internal static class SetupAssembly
         return zones;
     }
 
-    private static List<LithologyChoice> Lithologies(IReadOnlyList<LithologySection> sections, DiagnosticBag diagnostics)
+    private static List<LithologyChoice> Lithologies(IReadOnlyList<LithologySection> sections, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         var choices = new List<LithologyChoice>();
         foreach (var section in sections)
@@ -124,7 +154,10 @@ internal static class SetupAssembly
                 Range(section.PhotoelectricMin, section.PhotoelectricMax),
                 section.Facies.IsSet ? section.Facies.Value : [],
                 section.Position);
-            if (rule is { ShaleVolume: null, Density: null, Photoelectric: null, Facies.Count: 0 })
+            CheckOrder(section.ShaleVolumeMin, section.ShaleVolumeMax, "shale_volume", diagnostics);
+            CheckOrder(section.DensityMin, section.DensityMax, "density", diagnostics);
+            CheckOrder(section.PhotoelectricMin, section.PhotoelectricMax, "photoelectric", diagnostics);
+            if (rule is { ShaleVolume: null, Density: null, Photoelectric: null, Facies.Count: 0 } && !wrong.Has("[[lithology]]", RuleKeys))
                 diagnostics.Error(section.Position, "[[lithology]] has no rule; expected a cut-off such as shale_volume_max, or facies");
             choices.Add(new LithologyChoice(rule, section.Overrides));
         }
@@ -132,13 +165,20 @@ internal static class SetupAssembly
         return choices;
     }
 
-    private static void CheckPoints(WellFileSections sections, DiagnosticBag diagnostics)
+    private static void CheckOrder(Setting<double> low, Setting<double> high, string name, DiagnosticBag diagnostics)
+    {
+        if (low.IsSet && high.IsSet && low.Value > high.Value)
+            diagnostics.Error(low.Source.Position, $"found {name}_min above {name}_max, expected a range that something can lie in");
+    }
+
+    private static void CheckPoints(WellFileSections sections, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         foreach (var points in sections.Zones.Select(z => z.Overrides).Concat(sections.Lithologies.Select(l => l.Overrides))
             .Append(sections.Settings).Select(s => s.PorePressure.Points).Where(p => p.IsSet))
         {
-            if (points.Value.Any(p => double.IsNaN(p.Depth) || double.IsNaN(p.Pressure)))
+            if (points.Value.Any(p => double.IsNaN(p.Depth) || double.IsNaN(p.Pressure)) && !wrong.Has("[points]", "depth", "pressure"))
                 diagnostics.Error(points.Source.Position, "[pore_pressure] points: expected each point with depth and pressure");
+
             if (points.Value.Count < 2) diagnostics.Error(points.Source.Position, "[pore_pressure] points: found one point, expected two or more");
         }
     }

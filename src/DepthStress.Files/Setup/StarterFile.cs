@@ -70,7 +70,10 @@ public static class StarterFile
 
             [overburden]
             # above_log = "2.0 g/cm3"             # <- mean density from the ground or mudline to the first logged density
-            gaps = "none"                         # gaps in density are an error; "linear" bridges them
+
+            """);
+        AppendGaps(text, log);
+        text.Append("""
             below_log = "hold"                    # below the last density its value is held
 
             [pore_pressure]
@@ -89,7 +92,7 @@ public static class StarterFile
             units = "metric"                      # or "field"
 
             """);
-        return text.ToString();
+        return text.ToString().ReplaceLineEndings("\n");
     }
 
     private static void AppendCurves(StringBuilder text, LogFile log)
@@ -110,6 +113,36 @@ public static class StarterFile
             var doubt = known ? "" : "<- confirm the unit; ";
             text.AppendLine(CultureInfo.InvariantCulture, $"{role.Id + " = " + value,-38}# {doubt}{role.Title}, {Stated(column)}, {Present(log, column)}{rivals}");
         }
+    }
+
+    private static void AppendGaps(StringBuilder text, LogFile log)
+    {
+        var density = RoleAssignment.Candidates(CurveRoles.Of(Property.Density)!, [log]);
+        var (gaps, longest) = density.Count > 0 ? Gaps(density[0].Column.Values, log.Columns[log.DepthColumn].Values) : (0, 0);
+        text.AppendLine(gaps == 0
+            ? "gaps = \"none\"                         # gaps in density are an error; \"linear\" bridges them"
+            : string.Create(
+                CultureInfo.InvariantCulture,
+                $"# gaps = \"linear\"                     # <- gaps in density are an error unless bridged: found {gaps}, the longest {longest:F1} {Plain(log.Columns[log.DepthColumn].Unit ?? "")}"));
+    }
+
+    /// <summary>How often values are missing between others, and the longest stretch.</summary>
+    private static (int Count, double Longest) Gaps(double[] values, double[] depths)
+    {
+        var (count, longest, last) = (0, 0.0, -1);
+        for (var i = 0; i < values.Length; i++)
+        {
+            if (!double.IsFinite(values[i])) continue;
+            if (last >= 0 && i - last > 1)
+            {
+                count++;
+                longest = Math.Max(longest, depths[i] - depths[last]);
+            }
+
+            last = i;
+        }
+
+        return (count, longest);
     }
 
     private static void AppendShale(StringBuilder text, LogFile log)

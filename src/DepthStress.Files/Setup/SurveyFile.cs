@@ -11,7 +11,7 @@ internal static class SurveyFile
 {
     private static readonly string[] DepthNames = ["md", "measured_depth", "depth", "dept"];
     private static readonly string[] InclinationNames = ["inclination", "inc", "incl"];
-    private static readonly string[] AzimuthNames = ["azimuth", "azi", "azim"];
+    private static readonly string[] AzimuthNames = ["azimuth", "azi", "azim", "az"];
 
     /// <summary>Reads a survey; null when it cannot be used.</summary>
     /// <param name="path">Full path.</param>

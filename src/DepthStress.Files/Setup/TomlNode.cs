@@ -12,13 +12,13 @@ internal abstract record TomlNode(SourcePosition Position)
 /// <summary>A string.</summary>
 internal sealed record TomlText(string Value, SourcePosition Position) : TomlNode(Position)
 {
-    public override string Kind => $"the text \"{Value}\"";
+    public override string Kind => $"the text \"{Words.Short(Value)}\"";
 }
 
 /// <summary>A number without a unit.</summary>
 internal sealed record TomlNumber(double Value, string Spelling, SourcePosition Position) : TomlNode(Position)
 {
-    public override string Kind => $"the bare number {Spelling}";
+    public override string Kind => $"the bare number {Words.Short(Spelling)}";
 }
 
 /// <summary>True or false.</summary>

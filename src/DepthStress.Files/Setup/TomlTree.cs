@@ -6,10 +6,12 @@ using Tomlyn.Syntax;
 namespace DepthStress.Files.Setup;
 
 /// <summary>Turns TOML text into nodes that know their place.</summary>
-internal static class TomlTree
+internal sealed class TomlTree
 {
-    /// <summary>Syntax errors beyond this number add nothing: one open string cascades.</summary>
-    private const int MostSyntaxErrors = 10;
+    private readonly string _file;
+    private readonly DiagnosticBag _diagnostics;
+
+    private TomlTree(string file, DiagnosticBag diagnostics) => (_file, _diagnostics) = (file, diagnostics);
 
     /// <summary>Parses a document; null when its syntax is wrong, with every error reported.</summary>
     public static TomlTable? Parse(string text, string file, DiagnosticBag diagnostics)
@@ -21,44 +23,47 @@ internal static class TomlTree
         }
         catch (TomlException e)
         {
-            diagnostics.Error(new SourcePosition(file, e.Line ?? 0, e.Column ?? 0), $"TOML: {e.Message}");
+            diagnostics.Error(new SourcePosition(file, e.Line ?? 0, e.Column ?? 0), $"TOML: {TomlErrors.Text(e.Message)}");
             return null;
         }
 
-        foreach (var message in document.Diagnostics.Take(MostSyntaxErrors))
-            diagnostics.Error(At(file, message.Span), $"TOML: {message.Message.TrimEnd('.')}");
-        if (document.HasErrors) return null;
+        TomlErrors.Report(document, file, diagnostics);
+        return document.HasErrors ? null : new TomlTree(file, diagnostics).Root(document);
+    }
 
-        var root = new TomlTable(new SourcePosition(file));
-        Fill(root, document.KeyValues, file);
+    private TomlTable Root(DocumentSyntax document)
+    {
+        var root = new TomlTable(new SourcePosition(_file));
+        Fill(root, document.KeyValues);
         foreach (var table in document.Tables)
         {
-            var path = Path(table.Name!);
-            var parent = path.SkipLast(1).Aggregate(root, (t, key) => Descend(t, key, file, table.Name!.Span));
-            var position = At(file, table.Name!.Span);
-            Fill(table is TableArraySyntax ? Append(parent, path[^1], position) : Descend(parent, path[^1], file, table.Name.Span), table.Items, file);
+            var position = At(table.Name!.Span);
+            var path = Path(table.Name!, position);
+            var parent = path.SkipLast(1).Aggregate(root, (t, key) => Descend(t, key, position));
+            Fill(table is TableArraySyntax ? Append(parent, path[^1], position) : Descend(parent, path[^1], position), table.Items);
         }
 
         return root;
     }
 
-    private static void Fill(TomlTable table, IEnumerable<KeyValueSyntax> items, string file)
+    private void Fill(TomlTable table, IEnumerable<KeyValueSyntax> items)
     {
         foreach (var item in items)
         {
-            var path = Path(item.Key!);
-            var parent = path.SkipLast(1).Aggregate(table, (t, key) => Descend(t, key, file, item.Key!.Span));
-            parent.Add(path[^1], At(file, item.Key!.Span), Value(item.Value!, file));
+            var position = At(item.Key!.Span);
+            var path = Path(item.Key!, position);
+            var parent = path.SkipLast(1).Aggregate(table, (t, key) => Descend(t, key, position));
+            parent.Add(path[^1], position, Value(item.Value!));
         }
     }
 
-    private static TomlNode Value(ValueSyntax value, string file)
+    private TomlNode Value(ValueSyntax value)
     {
-        var position = At(file, value.Span);
+        var position = At(value.Span);
         switch (value)
         {
             case StringValueSyntax text:
-                return new TomlText(text.Value ?? "", position);
+                return new TomlText(Printable(text.Value ?? "", position), position);
             case IntegerValueSyntax integer:
                 return new TomlNumber(integer.Value, integer.Token!.Text!, position);
             case FloatValueSyntax number:
@@ -66,26 +71,27 @@ internal static class TomlTree
             case BooleanValueSyntax flag:
                 return new TomlFlag(flag.Value, position);
             case ArraySyntax array:
-                return new TomlArray([.. array.Items.Select(i => Value(i.Value!, file))], position);
+                return new TomlArray([.. array.Items.Select(i => Value(i.Value!))], position);
             case InlineTableSyntax inline:
                 var table = new TomlTable(position);
-                Fill(table, inline.Items.Select(i => i.KeyValue!), file);
+                Fill(table, inline.Items.Select(i => i.KeyValue!));
                 return table;
             default:
                 return new TomlDate(position);
         }
     }
 
-    private static TomlTable Descend(TomlTable table, string key, string file, SourceSpan span)
+    private TomlTable Descend(TomlTable table, string key, SourcePosition position)
     {
         if (table.Items.TryGetValue(key, out var item))
         {
             if (item.Value is TomlTable inner) return inner;
             if (item.Value is TomlArray { Items: [.., TomlTable last] }) return last;
+            _diagnostics.Error(position, $"found \"{Words.Short(key)}\" as a table, expected each key once: it is {item.Value.Kind} at {item.Key}");
         }
 
-        var made = new TomlTable(At(file, span));
-        table.Add(key, At(file, span), made);
+        var made = new TomlTable(position);
+        table.Add(key, position, made);
         return made;
     }
 
@@ -102,10 +108,19 @@ internal static class TomlTree
         return made;
     }
 
-    private static string[] Path(KeySyntax key) => [Name(key.Key!), .. key.DotKeys.Select(d => Name(d.Key!))];
+    private string[] Path(KeySyntax key, SourcePosition position) =>
+        [.. key.DotKeys.Select(d => d.Key!).Prepend(key.Key!).Select(k => Printable(Name(k), position))];
+
+    /// <summary>Names end in messages and results: one that breaks lines or drives a terminal is refused.</summary>
+    private string Printable(string text, SourcePosition position)
+    {
+        if (!text.Any(char.IsControl)) return text;
+        _diagnostics.Error(position, "found a control character or a line break inside a text, expected plain text");
+        return new([.. text.Where(c => !char.IsControl(c))]);
+    }
 
     private static string Name(BareKeyOrStringValueSyntax key) =>
         key is StringValueSyntax text ? text.Value ?? "" : ((BareKeySyntax)key).Key!.Text ?? "";
 
-    private static SourcePosition At(string file, SourceSpan span) => new(file, span.Start.Line + 1, span.Start.Column + 1);
+    private SourcePosition At(SourceSpan span) => TomlErrors.At(_file, span);
 }

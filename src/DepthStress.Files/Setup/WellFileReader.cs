@@ -23,16 +23,22 @@ public static class WellFileReader
         ArgumentNullException.ThrowIfNull(diagnostics);
         var name = Path.GetFileName(path);
         if (ReadText(path, name, diagnostics) is not var (text, hash) || TomlTree.Parse(text, name, diagnostics) is not { } root) return null;
-        var section = new ReadingSection(root, "", diagnostics);
+        var wrong = new WrongKeys();
+        var section = new ReadingSection(root, "", diagnostics, wrong);
         var sections = Bindings.All(section, new WellFileSections());
         section.ReportUnknown();
 
         var full = Path.GetFullPath(path);
         var inputs = new List<InputFile> { new(name, hash) };
-        var setup = SetupAssembly.Assemble(sections, name, Path.GetDirectoryName(full)!, inputs, diagnostics);
-        SetupCheck.Report(setup, diagnostics);
+        var checks = new DiagnosticBag();
+        var setup = SetupAssembly.Assemble(sections, name, Path.GetDirectoryName(full)!, inputs, wrong, checks);
+        SetupCheck.Report(setup, checks);
+        foreach (var check in checks.Items.Where(c => !wrong.Explains(c))) diagnostics.Add(check);
         return new WellFile(full, name, sections, setup, inputs);
     }
+
+    private static bool LooksLikeLog(string name, string text) =>
+        text.StartsWith('~') || Path.GetExtension(name).ToUpperInvariant() is ".LAS" or ".CSV";
 
     private static (string Text, string Hash)? ReadText(string path, string name, DiagnosticBag diagnostics)
     {
@@ -53,6 +59,12 @@ public static class WellFileReader
 
             var bytes = File.ReadAllBytes(path);
             var text = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false, throwOnInvalidBytes: true).GetString(bytes).TrimStart('\uFEFF');
+            if (LooksLikeLog(name, text))
+            {
+                diagnostics.Error(position, $"found a log file, expected a well file (TOML); to write one for these logs: depthstress init {name}");
+                return null;
+            }
+
             return (text, Convert.ToHexStringLower(SHA256.HashData(bytes)));
         }
         catch (DecoderFallbackException)

@@ -7,7 +7,7 @@ namespace DepthStress.Files.Setup;
 /// <summary>The JSON Schema of the well file, made from the same declarations that read it.</summary>
 public static class WellFileSchema
 {
-    private static readonly JsonSerializerOptions Indented = new() { WriteIndented = true, Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping };
+    private static readonly JsonSerializerOptions Indented = new() { WriteIndented = true, NewLine = "\n", Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping };
 
     /// <summary>The schema as JSON text.</summary>
     public static string Json()

@@ -1,0 +1,113 @@
+using DepthStress.Tests.WellFiles;
+using SampleWell;
+
+namespace DepthStress.Tests.Cli;
+
+/// <summary>The command <c>init</c>: recognises, asks, never overwrites; what it writes runs once the marked lines are filled in.</summary>
+public sealed class CliInitTests : IDisposable
+{
+    private readonly CliRunner _cli = new();
+
+    public void Dispose() => _cli.Dispose();
+
+    [Fact]
+    public async Task Recognised_curves_and_units_are_written_down()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs);
+        var result = await _cli.RunAsync("init", "well.csv");
+        Assert.Equal((0, "Wrote well.toml. Fill in the lines marked <-, then run: depthstress check well.toml\n", ""), (result.Code, result.Output, result.Error));
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains("files = [\"well.csv\"]\n", text, StringComparison.Ordinal);
+        Assert.Contains("compressional = \"DTC\"                 # compressional slowness or velocity, us/ft, 1000.0 to 1002.0 m\n", text, StringComparison.Ordinal);
+        Assert.Contains("density = \"RHOB\"                      # bulk density, g/cm3, 1000.0 to 1002.0 m\n", text, StringComparison.Ordinal);
+        Assert.DoesNotContain('\r', text);
+    }
+
+    [Fact]
+    public async Task What_only_the_user_knows_is_asked_for()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs);
+        await _cli.RunAsync("init", "well.csv");
+        var asked = _cli.Folder.Read("well.toml").Split('\n').Where(l => l.Contains("# <-", StringComparison.Ordinal)).Select(l => l.Trim('#', ' ').Split(' ')[0]);
+        Assert.Equal(["datum_elevation", "water_depth", "ground_elevation", "vertical", "above_log", "method"], asked);
+
+        var check = await _cli.RunAsync("check", "well.toml");
+        Assert.Equal(2, check.Code);
+        Assert.Equal(
+            [
+                "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level",
+                "well.toml: error: [well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them",
+                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient or table",
+            ],
+            check.Error.Split('\n', StringSplitOptions.RemoveEmptyEntries));
+    }
+
+    [Fact]
+    public async Task Units_that_the_file_lacks_are_marked()
+    {
+        _cli.Folder.Write("well.csv", "MD,DTC,DT,RHOB[g/cm3]\n1000,90,90,2.4\n1001,91,91,2.4\n");
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains("depth = { column = \"MD\", unit = \"m\" }   # <- the file states no unit: confirm\n", text, StringComparison.Ordinal);
+        Assert.Contains(
+            "compressional = { column = \"DTC\", unit = \"us/ft\" }# <- confirm the unit; compressional slowness or velocity, no unit, 1000.0 to 1001.0; also there: DT\n",
+            text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task An_existing_well_file_is_replaced_only_when_asked()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs);
+        _cli.Folder.Write("well.toml", "mine");
+        var refused = await _cli.RunAsync("init", "well.csv");
+        Assert.Equal((2, "", "error: found well.toml already there; use --force to replace it\n"), (refused.Code, refused.Output, refused.Error));
+        Assert.Equal("mine", _cli.Folder.Read("well.toml"));
+        Assert.Equal(0, (await _cli.RunAsync("init", "well.csv", "--force")).Code);
+        Assert.StartsWith("# Starter well file for well.csv.", _cli.Folder.Read("well.toml"), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("nope.las", "nope.las: error: file not found\n")]
+    [InlineData("well.toml", "well.toml: error: found a well file, expected a log file (CSV or LAS 2.0); to run a well file: depthstress run well.toml\n")]
+    [InlineData("folder", "folder: error: found a folder, expected a log file\n")]
+    public async Task Something_else_than_a_log_file_is_refused(string name, string expected)
+    {
+        _cli.Folder.Write("well.toml", WellText.Sound);
+        _cli.Folder.Write("folder/x", "");
+        var result = await _cli.RunAsync("init", name);
+        Assert.Equal((2, "", expected), (result.Code, result.Output, result.Error));
+    }
+
+    [Fact]
+    public async Task Odd_names_stay_sound_in_the_well_file()
+    {
+        _cli.Folder.Write("l\u00f8g \"q\" \\ #.csv", WellText.Logs.Replace("GR[gAPI]", "\"G\"\"R[gAPI]\"", StringComparison.Ordinal));
+        Assert.Equal(0, (await _cli.RunAsync("init", "l\u00f8g \"q\" \\ #.csv")).Code);
+        Fill("l\u00f8g \"q\" \\ #.toml");
+        var result = await _cli.RunAsync("check", "l\u00f8g \"q\" \\ #.toml");
+        Assert.Equal((0, ""), (result.Code, result.Error));
+    }
+
+    [Fact]
+    public async Task The_starter_for_the_sample_well_runs_once_its_marked_lines_are_filled_in()
+    {
+        SampleLogs.Write(_cli.Folder.Of("logs"));
+        Assert.Equal(0, (await _cli.RunAsync("init", "logs/quillback-4.las")).Code);
+        Assert.Contains("gaps = \"linear\"                     # <- gaps in density are an error unless bridged: found ", Fill("quillback-4.toml"), StringComparison.Ordinal);
+        var result = await _cli.RunAsync("run", "quillback-4.toml");
+        Assert.Equal(0, result.Code);
+        Assert.DoesNotContain(": error: ", result.Error, StringComparison.Ordinal);
+        Assert.Contains("depth.csv", _cli.Files("quillback-4-results").Keys);
+        Assert.Contains("whole log", result.Output, StringComparison.Ordinal);
+    }
+
+    /// <summary>Takes the comment sign from the marked lines, as a user would; onshore.</summary>
+    private string Fill(string name)
+    {
+        var lines = _cli.Folder.Read(name).Split('\n').Select(line =>
+            line.StartsWith("# ", StringComparison.Ordinal) && line.Contains("# <-", StringComparison.Ordinal) && !line.Contains("offshore", StringComparison.Ordinal)
+                ? line[2..]
+                : line.StartsWith("# water_table", StringComparison.Ordinal) ? line[2..] : line);
+        return File.ReadAllText(_cli.Folder.Write(name, string.Join('\n', lines)));
+    }
+}
