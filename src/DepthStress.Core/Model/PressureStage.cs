@@ -21,33 +21,34 @@ internal static class PressureStage
         var settings = setup.Overburden;
         var tvd = table.Read(Property.TrueVerticalDepth);
         var problems = new List<FormattableString>();
-        if (density is null || DensityProfile.Prepare(density, tvd, usable, settings, problems) is not { } profile)
+        if (density is null || DensityProfile.Prepare(density, tvd, usable, setup.Frame.SolidTopTvd, settings, problems) is not { } profile)
         {
             diagnostics.Error(setup.Position, "no bulk density at any depth, expected a density curve: the overburden needs it");
             return null;
         }
 
         var frame = setup.Frame;
-        var firstDepth = tvd[profile.First];
-        if (!(firstDepth <= frame.SolidTopTvd) && !settings.AboveLog.IsSet)
+        var (firstDepth, depth) = (tvd[profile.First], tvd[profile.First] - frame.SolidTopTvd);
+        if (!(depth <= 0) && profile.Above is null)
         {
-            problems.Add($"density is not logged from {Quantity.Length(frame.SolidTopTvd)} (ground or mudline) to {Quantity.Length(firstDepth)} true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density");
+            problems.Add($"density is not logged from {Quantity.Length(frame.SolidTopTvd)} (ground or mudline) to {Quantity.Length(firstDepth)} true vertical depth, and the overburden needs it: set [overburden] above_log");
         }
 
         foreach (var problem in problems) diagnostics.Error(setup.Position, UnitSystem.Metric.Show(problem));
         if (problems.Count > 0) return null;
 
         table.Adopt(Property.Density, profile.Values);
-        var mean = settings.AboveLog.IsSet ? settings.AboveLog.Value : profile.Values[profile.First];
+        var above = depth <= 0 ? 0 : profile.Above!.MassAbove(depth);
         var carry = Pressure.Overburden.Start(
-            frame.WaterDepth ?? 0, settings.WaterDensity.Value, frame.SolidTopTvd, mean, firstDepth, profile.Values[profile.First]);
+            frame.WaterDepth ?? 0, settings.WaterDensity.Value, above, firstDepth, profile.Values[profile.First]);
         var stress = table.Write(Property.VerticalStress);
         Pressure.Overburden.Scan(tvd, Used(profile, usable), stress, ref carry);
-        if (tvd[profile.FirstLogged] > frame.SolidTopTvd)
+        Pressure.Overburden.FillUnloggedShare(stress, Logged(profile.Origins), above * Constants.StandardGravity, table.Write(Property.UnloggedShare));
+        if (profile.Above is { } assumed && tvd[profile.FirstLogged] > frame.SolidTopTvd)
         {
             findings.Add(Finding.General(
                 Severity.Note,
-                $"the vertical stress of {Quantity.Pressure(stress[profile.FirstLogged])} at {Quantity.Length(tvd[profile.FirstLogged])} true vertical depth rests on an assumed mean density of {new Quantity(mean, Dimension.Density)} above the log"));
+                $"the vertical stress of {Quantity.Pressure(stress[profile.FirstLogged])} at {Quantity.Length(tvd[profile.FirstLogged])} true vertical depth rests on {assumed.Words} above the log"));
         }
 
         return profile.Origins;
@@ -72,6 +73,14 @@ internal static class PressureStage
 
             line.Fill(tvd.Slice(run.Start, run.Length), pressure.Slice(run.Start, run.Length));
         }
+    }
+
+    private static bool[] Logged(OriginTrack origins)
+    {
+        var logged = new bool[origins.Count];
+        foreach (var run in origins.Runs)
+            Array.Fill(logged, run.Origin is SampleOrigin.Measured or SampleOrigin.Spliced or SampleOrigin.Edited, run.Start, run.End - run.Start);
+        return logged;
     }
 
     /// <summary>The profile's density, missing where a sample stays out of the integral.</summary>
