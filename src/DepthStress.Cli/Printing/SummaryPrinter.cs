@@ -18,12 +18,14 @@ internal static class SummaryPrinter
     /// <param name="folder">Where the results are, or null when none were written.</param>
     public static void Print(Terminal terminal, LoadedWell well, string? folder)
     {
-        var (file, _, model) = well;
+        var (file, _, model, _) = well;
         var units = file.Sections.Output.Units.Value;
         terminal.Output.WriteLine($"Well {file.Setup.Name}: {Extent(model, units)}");
         terminal.Output.WriteLine();
         terminal.Tables().Write(Zones(model, units));
         terminal.Output.WriteLine();
+        ChoicePrinter.Print(terminal, model, units);
+        BarrierPrinter.Print(terminal, well);
         foreach (var finding in model.Findings) terminal.Output.WriteLine(FindingText.Of(finding, units, model.Count));
         terminal.Output.WriteLine();
         if (folder is not null) terminal.Output.WriteLine($"Results: {Path.GetRelativePath(terminal.Folder, folder)}");
@@ -61,6 +63,8 @@ internal static class SummaryPrinter
         table.AddColumn(new TableColumn($"top md\n{length}").RightAligned());
         table.AddColumn(new TableColumn("cover\n%").RightAligned());
         foreach (var (title, id, _, _) in Columns) table.AddColumn(new TableColumn($"{title}\n{DepthColumns.Get(id).In(units).Unit}").RightAligned());
+        table.AddColumn(new TableColumn("unlogged\n% of Sv").RightAligned());
+        foreach (var column in table.Columns) column.NoWrap().Padding(0, 0, 1, 0);
 
         foreach (var zone in ZoneMeans.Of(model))
         {
@@ -70,7 +74,8 @@ internal static class SummaryPrinter
                 return Show(zone.Mean(column), column.In(units).Unit, units == UnitSystem.Metric ? c.Metric : c.Field);
             });
             table.AddRow([
-                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells]);
+                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells,
+                Show(zone.Mean(DepthColumns.Get("sv_unlogged_share")), Units.Percent, 0)]);
         }
 
         return table;

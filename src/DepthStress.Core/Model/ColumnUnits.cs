@@ -24,7 +24,7 @@ public static class ColumnUnits
         (new(Units.GramPerCubicCentimetre, 4), new(Units.PoundPerGallon, 3));
 
     /// <summary>Fractions of volume.</summary>
-    public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 5), new(Units.Fraction, 5));
+    public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 4), new(Units.Fraction, 4));
 
     /// <summary>Pure numbers.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Numbers { get; } = (new(Units.One, 5), new(Units.One, 5));

@@ -1,3 +1,4 @@
+using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
@@ -15,8 +16,9 @@ internal static class PressureStage
     /// <param name="usable">Samples that enter the integral.</param>
     /// <param name="diagnostics">Gets errors that name unfilled intervals.</param>
     /// <param name="findings">Gets what rests on assumptions.</param>
+    /// <param name="uses">Gets the relation used above the log.</param>
     public static OriginTrack? Overburden(
-        WellSetup setup, Curve? density, PropertyTable table, bool[] usable, DiagnosticBag diagnostics, List<Finding> findings)
+        WellSetup setup, Curve? density, PropertyTable table, bool[] usable, DiagnosticBag diagnostics, List<Finding> findings, List<LawUse> uses)
     {
         var settings = setup.Overburden;
         var tvd = table.Read(Property.TrueVerticalDepth);
@@ -49,29 +51,48 @@ internal static class PressureStage
             findings.Add(Finding.General(
                 Severity.Note,
                 $"the vertical stress of {Quantity.Pressure(stress[profile.FirstLogged])} at {Quantity.Length(tvd[profile.FirstLogged])} true vertical depth rests on {assumed.Words} above the log"));
+            if (assumed.Law is { } law) uses.Add(new LawUse(LawSlots.AboveLog, law, ZoneIndex.None, ZoneIndex.None, new LawOutcome(profile.FirstLogged + 1, 0, 0, 0)));
         }
 
         return profile.Origins;
     }
 
     /// <summary>Fills pore pressure, run by run.</summary>
-    public static void PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs)
+    public static void PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses)
     {
-        var lines = new Dictionary<PorePressureSettings, PressureLine>(ReferenceEqualityComparer.Instance);
+        var plans = new Dictionary<PorePressureSettings, PorePressurePlan>(ReferenceEqualityComparer.Instance);
         var tvd = table.Read(Property.TrueVerticalDepth);
         var pressure = table.Write(Property.PorePressure);
         foreach (var run in runs)
         {
             var settings = run.Settings.PorePressure;
             if (!settings.Method.IsSet) continue;
-            if (!lines.TryGetValue(settings, out var line))
+            if (!plans.TryGetValue(settings, out var plan)) plans.Add(settings, plan = PorePressurePlan.Prepare(setup, settings));
+            var depths = tvd.Slice(run.Start, run.Length);
+            var result = pressure.Slice(run.Start, run.Length);
+            if (plan.Law is not { } law || plan.Trend is not { } trend)
             {
-                line = PressureLine.Prepare(
-                    settings, setup.Frame, setup.Overburden.WaterDensity.Value, (depth, kind) => ZoneIndex.ToVertical(setup, depth, kind));
-                lines.Add(settings, line);
+                plan.Line.Fill(depths, result);
+                continue;
             }
 
-            line.Fill(tvd.Slice(run.Start, run.Length), pressure.Slice(run.Start, run.Length));
+            plan.Line.Fill(depths, table.Write(Property.NormalPressure).Slice(run.Start, run.Length));
+            trend.Fill(depths, setup.Frame.SolidTopTvd, table.Write(Property.NormalSlowness).Slice(run.Start, run.Length));
+            uses.Add(new LawUse(LawSlots.PorePressure, law, run.Zone, run.Lithology, LawKernel.Apply(law, LawColumns.For(law, table, run), result)));
+        }
+    }
+
+    /// <summary>What a pore-pressure method needs: its line, or normal pressure, trend and law.</summary>
+    private sealed record PorePressurePlan(PressureLine Line, TrendLine? Trend, Law? Law)
+    {
+        public static PorePressurePlan Prepare(WellSetup setup, PorePressureSettings settings)
+        {
+            var line = PressureLine.Prepare(
+                settings, setup.Frame, setup.Overburden.WaterDensity.Value, (depth, kind) => ZoneIndex.ToVertical(setup, depth, kind));
+            if (settings.Method.Value != PorePressureMethod.EatonSonic) return new PorePressurePlan(line, null, null);
+            var law = PressureMethods.EatonSonic;
+            if (settings.Exponent.IsSet) law = law with { Coefficients = [new Coefficient("n", settings.Exponent.Value)] };
+            return new PorePressurePlan(line, new TrendLine(settings.Trend.Value), law);
         }
     }
 

@@ -105,7 +105,7 @@ internal static class SetupAssembly
             if (!zone.Top.IsSet) diagnostics.Error(zone.Position, "[[zones]] top is not set");
             if (!zone.DepthKind.IsSet) diagnostics.Error(zone.Position, "[[zones]] depth_kind is not set; expected \"md\", \"tvd\" or \"tvdss\"");
             if (!zone.Name.IsSet || !zone.Top.IsSet || !zone.DepthKind.IsSet) continue;
-            zones.Add(new Zone(zone.Name.Value, zone.Top.Value, Value(zone.Base), zone.DepthKind.Value, zone.Overrides, zone.Position));
+            zones.Add(new Zone(zone.Name.Value, zone.Top.Value, Value(zone.Base), zone.DepthKind.Value, zone.Overrides, zone.Position) { Target = zone.Target.Value });
         }
 
         return zones;
@@ -123,7 +123,10 @@ internal static class SetupAssembly
                 Range(section.DensityMin, section.DensityMax),
                 Range(section.PhotoelectricMin, section.PhotoelectricMax),
                 section.Facies.IsSet ? section.Facies.Value : [],
-                section.Position);
+                section.Position)
+            {
+                Salt = section.Salt.Value,
+            };
             if (rule is { ShaleVolume: null, Density: null, Photoelectric: null, Facies.Count: 0 })
                 diagnostics.Error(section.Position, "[[lithology]] has no rule; expected a cut-off such as shale_volume_max, or facies");
             choices.Add(new LithologyChoice(rule, section.Overrides));

@@ -37,7 +37,7 @@ public class ChainErrorTests
     {
         var frame = new DepthFrame(DatumKind.RotaryTable, 1000, null, null, null);
         Assert.Contains("density is not logged from", Assert.Single(Errors(Setup with { Frame = frame }, LogsWith())), StringComparison.Ordinal);
-        Assert.True(double.IsNaN(Core.Pressure.Overburden.Start(0, 1030, double.NaN, 2000, 100, 2000).Stress));
+        Assert.True(double.IsNaN(Core.Pressure.Overburden.Start(0, 1030, double.NaN, 100, 2000).Stress));
     }
 
     [Fact]

@@ -86,7 +86,7 @@ public class DepthColumnsTests
     public void Offshore_gradients_count_from_the_sea_surface()
     {
         var model = Run(
-            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(2000.0) } },
+            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2000.0)) } },
             Table([225], Curve(Property.Density, 2400)));
         var gradient = new double[1];
         DepthColumns.Get("sv_gradient").Fill(model, 0, UnitSystem.Metric, gradient);
