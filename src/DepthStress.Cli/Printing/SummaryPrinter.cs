@@ -52,7 +52,7 @@ internal static class SummaryPrinter
     [
         ("Sv", "sv", 1, 0), ("Pp", "pp", 1, 0), ("Shmin", "shmin", 1, 0), ("SHmax", "shmax", 1, 0),
         ("Sv/z", "sv_gradient", 2, 3), ("Pp/z", "pp_gradient", 2, 3), ("Shmin/z", "shmin_gradient", 2, 3),
-        ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu stat", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
+        ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
     ];
 
     private static Table Zones(EarthModel model, UnitSystem units)
@@ -63,7 +63,7 @@ internal static class SummaryPrinter
         table.AddColumn(new TableColumn($"top md\n{length}").RightAligned());
         table.AddColumn(new TableColumn("cover\n%").RightAligned());
         foreach (var (title, id, _, _) in Columns) table.AddColumn(new TableColumn($"{title}\n{DepthColumns.Get(id).In(units).Unit}").RightAligned());
-        table.AddColumn(new TableColumn("unlogged\n% of Sv").RightAligned());
+        table.AddColumn(new TableColumn("no log\n% Sv").RightAligned());
         foreach (var column in table.Columns) column.NoWrap().Padding(0, 0, 1, 0);
 
         foreach (var zone in ZoneMeans.Of(model))
