@@ -5,4 +5,6 @@ namespace DepthStress.Report;
 /// <summary>What a picture shows and in which units.</summary>
 /// <param name="Units">The units of every scale.</param>
 /// <param name="Tracks">Ids of <see cref="TrackTable"/> in the order to draw them; null means every track that has a curve.</param>
-public sealed record PictureOptions(UnitSystem Units, IReadOnlyList<string>? Tracks = null);
+/// <param name="Scales">The user's scales of single curves, by the id of their column, in its unit; null means none.</param>
+public sealed record PictureOptions(
+    UnitSystem Units, IReadOnlyList<string>? Tracks = null, IReadOnlyDictionary<string, CurveScale>? Scales = null);

@@ -8,7 +8,13 @@ namespace DepthStress.Report;
 /// <param name="Id">Its name in the well file.</param>
 /// <param name="Title">What it shows, in plain words.</param>
 /// <param name="Curves">Its curves in drawing order; those without a value are left out.</param>
-public sealed record TrackDefinition(string Id, string Title, IReadOnlyList<CurveDefinition> Curves);
+public sealed record TrackDefinition(string Id, string Title, IReadOnlyList<CurveDefinition> Curves)
+{
+    /// <summary>The same track with the user's scales for its curves.</summary>
+    public TrackDefinition With(IReadOnlyDictionary<string, CurveScale>? scales) => scales is null
+        ? this
+        : this with { Curves = [.. Curves.Select(c => scales.TryGetValue(c.Column.Id, out var s) ? c with { Metric = s, Field = s } : c)] };
+}
 
 /// <summary>One curve of a track.</summary>
 /// <param name="Column">Where its values and units come from.</param>

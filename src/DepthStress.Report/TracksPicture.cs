@@ -51,9 +51,9 @@ public static class TracksPicture
 
     private static IReadOnlyList<TrackDefinition> Chosen(PictureOptions options)
     {
-        if (options.Tracks is null) return TrackTable.All;
-        return [.. options.Tracks.Select(id => TrackTable.Find(id) ?? throw new ArgumentException(
-            $"found the unknown track \"{id}\", expected one of {string.Join(", ", TrackTable.All.Select(t => t.Id))}", nameof(options)))];
+        var chosen = options.Tracks?.Select(id => TrackTable.Find(id) ?? throw new ArgumentException(
+            $"found the unknown track \"{id}\", expected one of {string.Join(", ", TrackTable.All.Select(t => t.Id))}", nameof(options)));
+        return [.. (chosen ?? TrackTable.All).Select(t => t.With(options.Scales))];
     }
 
     private static double[] Read(EarthModel model, string column, UnitSystem units)

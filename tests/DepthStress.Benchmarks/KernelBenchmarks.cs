@@ -50,7 +50,7 @@ public class KernelBenchmarks
     [Benchmark]
     public OverburdenCarry OverburdenScan()
     {
-        var carry = Overburden.Start(0, 0, 0, 2100, _tvd[0], _density[0]);
+        var carry = Overburden.Start(0, 0, ShallowDensity.Mean(2100).MassAbove(_tvd[0]), _tvd[0], _density[0]);
         Overburden.Scan(_tvd, _density, _sv, ref carry);
         return carry;
     }

@@ -18,12 +18,14 @@ internal static class SummaryPrinter
     /// <param name="folder">Where the results are, or null when none were written.</param>
     public static void Print(Terminal terminal, LoadedWell well, string? folder)
     {
-        var (file, _, model) = well;
+        var (file, _, model, _) = well;
         var units = file.Sections.Output.Units.Value;
         terminal.Output.WriteLine($"Well {file.Setup.Name}: {Extent(model, units)}");
         terminal.Output.WriteLine();
         foreach (var columns in terminal.Width < FullWidth ? Narrow : [Columns]) terminal.Tables().Write(Zones(model, units, columns));
         terminal.Output.WriteLine();
+        ChoicePrinter.Print(terminal, model, units);
+        BarrierPrinter.Print(terminal, well);
         foreach (var finding in model.Findings) terminal.Output.WriteLine(FindingText.Of(finding, units, model.Count));
         terminal.Output.WriteLine();
         if (folder is not null) terminal.Output.WriteLine($"Results: {Path.GetRelativePath(terminal.Folder, folder)}");
@@ -50,7 +52,7 @@ internal static class SummaryPrinter
     [
         ("Sv", "sv", 1, 0), ("Pp", "pp", 1, 0), ("Shmin", "shmin", 1, 0), ("SHmax", "shmax", 1, 0),
         ("Sv/z", "sv_gradient", 2, 3), ("Pp/z", "pp_gradient", 2, 3), ("Shmin/z", "shmin_gradient", 2, 3),
-        ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu stat", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
+        ("E dyn", "youngs_dynamic", 1, 2), ("E stat", "youngs_static", 1, 2), ("nu", "poisson_static", 3, 3), ("biot", "biot", 2, 2),
     ];
 
     /// <summary>Below this many characters the table is cut into three, so that no heading is.</summary>
@@ -66,6 +68,9 @@ internal static class SummaryPrinter
         table.AddColumn(Numbers($"top md\n{length}"));
         table.AddColumn(Numbers("cover\n%"));
         foreach (var (title, id, _, _) in columns) table.AddColumn(Numbers($"{title}\n{DepthColumns.Get(id).In(units).Unit}"));
+        var last = columns.Contains(Columns[^1]);
+        if (last) table.AddColumn(Numbers("no log\n% Sv"));
+        foreach (var column in table.Columns) column.NoWrap().Padding(0, 0, 1, 0);
 
         foreach (var zone in ZoneMeans.Of(model))
         {
@@ -74,8 +79,9 @@ internal static class SummaryPrinter
                 var column = DepthColumns.Get(c.Column);
                 return Show(zone.Mean(column), column.In(units).Unit, units == UnitSystem.Metric ? c.Metric : c.Field);
             });
+            string[] share = last ? [Show(zone.Mean(DepthColumns.Get("sv_unlogged_share")), Units.Percent, 0)] : [];
             table.AddRow([
-                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells]);
+                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells, .. share]);
         }
 
         return table;

@@ -2,6 +2,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Setup;
+using DepthStress.Report;
 
 namespace DepthStress.Cli.Runs;
 
@@ -9,7 +10,8 @@ namespace DepthStress.Cli.Runs;
 /// <param name="File">The well file.</param>
 /// <param name="Logs">The logs.</param>
 /// <param name="Model">The model.</param>
-internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel Model)
+/// <param name="Pictures">How its pictures are drawn.</param>
+internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel Model, PictureOptions Pictures)
 {
     /// <summary>Reads and computes a well; null when its input cannot be used.</summary>
     /// <param name="path">Full path of the well file.</param>
@@ -20,12 +22,13 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
     {
         stage("reading the well file");
         if (WellFileReader.Read(path, diagnostics) is not { } file) return null;
+        var pictures = PictureChoice.Of(file.Sections.Output, diagnostics);
         cancellation.ThrowIfCancellationRequested();
         stage("reading the logs");
         var logs = LogIngest.Read(file, diagnostics);
         if (logs is null || diagnostics.HasErrors) return null;
         cancellation.ThrowIfCancellationRequested();
         stage("computing");
-        return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model) : null;
+        return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model, pictures) : null;
     }
 }

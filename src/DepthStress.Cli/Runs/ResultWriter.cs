@@ -15,10 +15,9 @@ internal static class ResultWriter
     /// <summary>Writes the results; on any failure or interruption the earlier ones stay as they were.</summary>
     public static void Write(LoadedWell well, DiagnosticBag diagnostics, string folder, Action<string> stage, CancellationToken cancellation)
     {
-        var (file, logs, model) = well;
+        var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
         var layers = LayerBuilder.Build(model, file.Sections.Layers);
-        var pictures = new PictureOptions(units);
         (string Name, Action<Stream> Write)[] results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),

@@ -18,6 +18,9 @@ public sealed record LithologyRule(
     IReadOnlyList<double> Facies,
     SourcePosition Position)
 {
+    /// <summary>True for salt, which flows until all stresses are equal.</summary>
+    public bool Salt { get; init; }
+
     /// <summary>True when the sample meets every cut-off; a missing value meets none.</summary>
     public bool Holds(double shaleVolume, double density, double photoelectric, double facies) =>
         (ShaleVolume is not { } v || v.Contains(shaleVolume))

@@ -99,6 +99,24 @@ public enum Property
     /// <summary>Shear slowness, s/m; derived from <see cref="Vs"/>.</summary>
     ShearSlowness,
 
+    /// <summary>Normal pore pressure, Pa.</summary>
+    NormalPressure,
+
+    /// <summary>Compressional slowness of normally compacted shale, s/m.</summary>
+    NormalSlowness,
+
+    /// <summary>Share of the vertical stress that comes from depths without a density log.</summary>
+    UnloggedShare,
+
+    /// <summary>True vertical depth below the ground or mudline, m; only laws of shallow density take it.</summary>
+    DepthBelowSurface,
+
+    /// <summary>Mean density from the ground or mudline to a depth, kg/m3; only laws of shallow density give it.</summary>
+    MeanDensityAbove,
+
+    /// <summary>Density above the first log, kg/m3; only laws of shallow density give it.</summary>
+    ShallowDensity,
+
     /// <summary>Parameter: density of the rock's matrix, kg/m3.</summary>
     MatrixDensity,
 

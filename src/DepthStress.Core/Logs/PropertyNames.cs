@@ -31,6 +31,13 @@ public static class PropertyNames
         (Property.FrictionAngle, "friction_angle", "angle of internal friction", Quantities.Dimension.Angle),
         (Property.TensileStrength, "tensile_strength", "tensile strength", Quantities.Dimension.Pressure),
         (Property.Biot, "biot", "Biot's coefficient", Quantities.Dimension.None),
+        (Property.VerticalStress, "sv", "vertical stress", Quantities.Dimension.Pressure),
+        (Property.NormalPressure, "normal_pressure", "normal pore pressure", Quantities.Dimension.Pressure),
+        (Property.NormalSlowness, "normal_slowness", "slowness of the normal trend", Quantities.Dimension.Slowness),
+        (Property.PorePressure, "pp", "pore pressure", Quantities.Dimension.Pressure),
+        (Property.DepthBelowSurface, "depth_below_surface", "depth below ground or mudline", Quantities.Dimension.Length),
+        (Property.MeanDensityAbove, "mean_density_above", "mean density above the log", Quantities.Dimension.Density),
+        (Property.ShallowDensity, "shallow_density", "density above the log", Quantities.Dimension.Density),
     ];
 
     /// <summary>The property's name in well files.</summary>

@@ -45,10 +45,11 @@ public static class Chain
             runs = SettingsRun.Resolve(setup, zones, lithologies);
         }
 
-        if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings) is not { } densityOrigins) return null;
-        PressureStage.PorePressure(setup, table, runs);
+        LawColumns.Derive(table, runs);
+        if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings, uses) is not { } densityOrigins) return null;
+        PressureStage.PorePressure(setup, table, runs, uses);
         RockStage(table, runs, uses);
-        StressStage.Apply(table, runs);
+        StressStage.Apply(setup, table, runs);
 
         var model = new EarthModel
         {
@@ -60,7 +61,7 @@ public static class Chain
             Lithologies = lithologies,
             Runs = runs,
             DensityOrigins = densityOrigins,
-            StressBasis = StressStage.Basis(logs, densityOrigins, table),
+            StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, lithologies),
             LawUses = uses,
             Findings = findings,
         };
@@ -90,7 +91,6 @@ public static class Chain
                 table.Write(Property.YoungsDynamic), table.Write(Property.PoissonDynamic));
         }
 
-        LawColumns.Derive(table, runs);
         foreach (var slot in LawSlots.Rock) LawStage.Apply(slot, table, runs, uses);
     }
 }

@@ -9,7 +9,7 @@ public static class ColumnUnits
     public static (ColumnUnit Metric, ColumnUnit Field) Depths { get; } = (new(Units.Metre, 4), new(Units.Foot, 4));
 
     /// <summary>Velocities.</summary>
-    public static (ColumnUnit Metric, ColumnUnit Field) Velocities { get; } = (new(Units.MetrePerSecond, 2), new(Units.FootPerSecond, 2));
+    public static (ColumnUnit Metric, ColumnUnit Field) Velocities { get; } = (new(Units.MetrePerSecond, 1), new(Units.FootPerSecond, 1));
 
     /// <summary>Slownesses, as logs print them everywhere.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Slownesses { get; } =
@@ -21,10 +21,10 @@ public static class ColumnUnits
 
     /// <summary>Equivalent mud densities.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) MudDensities { get; } =
-        (new(Units.GramPerCubicCentimetre, 4), new(Units.PoundPerGallon, 3));
+        (new(Units.GramPerCubicCentimetre, 3), new(Units.PoundPerGallon, 2));
 
     /// <summary>Fractions of volume.</summary>
-    public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 5), new(Units.Fraction, 5));
+    public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 4), new(Units.Fraction, 4));
 
     /// <summary>Pure numbers.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Numbers { get; } = (new(Units.One, 5), new(Units.One, 5));

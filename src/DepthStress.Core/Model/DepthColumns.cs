@@ -56,6 +56,7 @@ public static class DepthColumns
         Origin("vs_origin", "origin of the shear velocity", Property.Vs),
         Origin("density_origin", "origin of the density", Property.Density),
         Words("stress_basis", "weakest origin the stresses rest on", "weakest of the three origins", (m, i) => m.StressBasis[i].Name()),
+        Stored("sv_unlogged_share", "share of the vertical stress from depths without a density log", "", Fractions, Property.UnloggedShare, "weight assumed or filled / sv"),
     ];
 
     /// <summary>The columns of numbers.</summary>

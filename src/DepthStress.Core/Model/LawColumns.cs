@@ -1,5 +1,6 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 
 namespace DepthStress.Core.Model;
 
@@ -22,6 +23,7 @@ internal static class LawColumns
         var wanted = runs.Select(r => r.Settings).Distinct<StageSettings>(ReferenceEqualityComparer.Instance)
             .SelectMany(s => LawSlots.All.Select(slot => slot.Choice(s)).Where(c => c.IsSet))
             .SelectMany(c => c.Value.Inputs).Select(i => i.Property).ToHashSet();
+        if (runs.Any(r => r.Settings.PorePressure.Method is { IsSet: true, Value: PorePressureMethod.EatonSonic })) wanted.Add(Property.CompressionalSlowness);
         Invert(table, Property.Vp, Property.CompressionalSlowness, wanted);
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }

@@ -29,6 +29,12 @@ public static class LawSlots
         new(Property.Biot, "[biot] coefficient", true, s => s.Biot.Coefficient),
     ];
 
-    /// <summary>All of them.</summary>
+    /// <summary>Where a method of pore pressure is recorded; the choice itself is no law.</summary>
+    public static LawSlot PorePressure { get; } = new(Property.PorePressure, "[pore_pressure] method", false, _ => default);
+
+    /// <summary>Where a method of density above the log is recorded.</summary>
+    public static LawSlot AboveLog { get; } = new(Property.ShallowDensity, "[overburden] above_log", false, _ => default);
+
+    /// <summary>All whose choice is a law.</summary>
     public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, .. Rock];
 }

@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
 
 namespace DepthStress.Core.Model;
@@ -18,6 +19,8 @@ public static class MethodCatalogue
         .. StrengthMethods.All,
         .. FrictionMethods.All,
         .. BiotMethods.All,
+        .. ShallowDensityMethods.All,
+        .. PressureMethods.All,
     ];
 
     /// <summary>The entry of an id, or null.</summary>

@@ -12,7 +12,7 @@ internal static class PorePressureCheck
         var (pore, frame) = (scope.Settings.PorePressure, scope.Setup.Frame);
         if (!pore.Method.IsSet)
         {
-            scope.Missing("[pore_pressure] method", "hydrostatic, gradient or table");
+            scope.Missing("[pore_pressure] method", $"hydrostatic, gradient, table or {PressureMethods.EatonSonic.Id}");
             return;
         }
 
@@ -20,6 +20,12 @@ internal static class PorePressureCheck
         {
             case PorePressureMethod.Hydrostatic when !pore.FluidDensity.IsSet:
                 scope.Missing("[pore_pressure] fluid_density", "such as \"1.03 g/cm3\"");
+                break;
+            case PorePressureMethod.EatonSonic:
+                if (!pore.FluidDensity.IsSet) scope.Missing("[pore_pressure] fluid_density", "the fluid of normal pressure, such as \"1.03 g/cm3\"");
+                if (!pore.Trend.IsSet) scope.Missing("[pore_pressure] trend", "two or more points of depth below the ground or mudline and slowness");
+                else if (!IsTrend(pore.Trend.Value))
+                    scope.Error(pore.Trend.Source.Position, "[pore_pressure] trend: expected two or more points with depth and slowness, from top to bottom");
                 break;
             case PorePressureMethod.Gradient:
                 if (!pore.Gradient.IsSet) scope.Missing("[pore_pressure] gradient", "such as \"10.5 kPa/m\"");
@@ -35,6 +41,11 @@ internal static class PorePressureCheck
                 break;
         }
     }
+
+    private static bool IsTrend(IReadOnlyList<TrendPoint> points) =>
+        points.Count > 1
+        && points.All(p => !double.IsNaN(p.Depth) && !double.IsNaN(p.Slowness))
+        && points.Zip(points.Skip(1)).All(pair => pair.Second.Depth > pair.First.Depth);
 
     private static bool GetsDeeper(WellSetup setup, IReadOnlyList<PressurePoint> points, DepthKind kind)
     {

@@ -9,15 +9,28 @@ internal static class StressStage
     /// <summary>The log curves that a horizontal stress rests on.</summary>
     private static readonly Property[] StressCurves = [Property.Vp, Property.Vs, Property.Density];
 
-    /// <summary>Fills the horizontal stresses, run by run; SHmax stays missing where no strain constrains it.</summary>
-    public static void Apply(PropertyTable table, IReadOnlyList<SettingsRun> runs)
+    /// <summary>True when a lithology is salt, whose stresses are all equal.</summary>
+    public static bool IsSalt(WellSetup setup, int lithology) => lithology >= 0 && setup.Lithologies[lithology].Rule.Salt;
+
+    /// <summary>
+    /// Fills the horizontal stresses, run by run; SHmax stays missing where no strain constrains it, and salt is isotropic.
+    /// </summary>
+    public static void Apply(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs)
     {
         var shmin = table.Write(Property.MinHorizontalStress);
         var shmax = table.Write(Property.MaxHorizontalStress);
-        if (!table.Has(Property.YoungsStatic) || !table.Has(Property.PoissonStatic) || !table.Has(Property.Biot)) return;
+        var elastic = table.Has(Property.YoungsStatic) && table.Has(Property.PoissonStatic) && table.Has(Property.Biot);
         foreach (var run in runs)
         {
             var (settings, start, n) = (run.Settings.HorizontalStress, run.Start, run.Length);
+            if (IsSalt(setup, run.Lithology))
+            {
+                table.Read(Property.VerticalStress).Slice(start, n).CopyTo(shmin.Slice(start, n));
+                table.Read(Property.VerticalStress).Slice(start, n).CopyTo(shmax.Slice(start, n));
+                continue;
+            }
+
+            if (!elastic) continue;
             var strained = settings.StrainAlongShmin.IsSet && settings.StrainAlongShmax.IsSet;
             StrainModel.Fill(
                 table.Read(Property.YoungsStatic).Slice(start, n),
@@ -34,7 +47,7 @@ internal static class StressStage
     }
 
     /// <summary>The weakest origin of the curves each sample's stresses rest on; density alone where only Sv is there.</summary>
-    public static SampleOrigin[] Basis(LogTable logs, OriginTrack density, PropertyTable table)
+    public static SampleOrigin[] Basis(WellSetup setup, LogTable logs, OriginTrack density, PropertyTable table, ReadOnlySpan<short> lithologies)
     {
         var basis = new SampleOrigin[table.Count];
         density.Weaken(basis);
@@ -49,7 +62,7 @@ internal static class StressStage
         for (var i = 0; i < basis.Length; i++)
         {
             if (double.IsNaN(sv[i])) basis[i] = SampleOrigin.None;
-            else if (double.IsNaN(shmin[i])) basis[i] = vertical[i];
+            else if (double.IsNaN(shmin[i]) || IsSalt(setup, lithologies[i])) basis[i] = vertical[i];
         }
 
         return basis;

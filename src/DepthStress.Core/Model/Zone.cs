@@ -12,7 +12,11 @@ namespace DepthStress.Core.Model;
 /// <param name="Overrides">What the zone decides; all else comes from the well's settings.</param>
 /// <param name="Position">Where the zone stands in the well file.</param>
 public sealed record Zone(
-    string Name, double Top, double? Base, DepthKind DepthKind, StageSettings Overrides, SourcePosition Position);
+    string Name, double Top, double? Base, DepthKind DepthKind, StageSettings Overrides, SourcePosition Position)
+{
+    /// <summary>True for a zone whose neighbours are looked at as stress barriers.</summary>
+    public bool Target { get; init; }
+}
 
 /// <summary>A lithology rule with its own choices.</summary>
 /// <param name="Rule">When it holds.</param>

@@ -13,8 +13,12 @@ public sealed class DensityProfile
     /// <summary>A step between neighbouring samples this many times the mean one means that rows are missing.</summary>
     private const double RowGap = 10;
 
-    private DensityProfile(double[] values, OriginTrack origins, int first, int firstLogged, int end)
+    /// <summary>What is assumed above the log is tied to the median density of its first metres: one sample may be wrong.</summary>
+    private const double TieLength = 10;
+
+    private DensityProfile(double[] values, OriginTrack origins, ShallowDensity? above, int first, int firstLogged, int end)
     {
+        Above = above;
         Values = values;
         Origins = origins;
         First = first;
@@ -28,10 +32,13 @@ public sealed class DensityProfile
     /// <summary>Where each value came from.</summary>
     public OriginTrack Origins { get; }
 
+    /// <summary>What is assumed above the log, tied to its first values; null when nothing was chosen.</summary>
+    public ShallowDensity? Above { get; }
+
     /// <summary>First sample of the overburden integral.</summary>
     public int First { get; }
 
-    /// <summary>First sample with a logged density that enters the integral; those between it and <see cref="First"/> have the mean above.</summary>
+    /// <summary>First sample with a logged density that enters the integral; those between it and <see cref="First"/> have what is assumed above.</summary>
     public int FirstLogged { get; }
 
     /// <summary>One past the last sample of the overburden integral.</summary>
@@ -41,13 +48,15 @@ public sealed class DensityProfile
     /// <param name="density">The log.</param>
     /// <param name="tvd">True vertical depth of each sample, m.</param>
     /// <param name="usable">Samples that enter the integral.</param>
+    /// <param name="solidTop">True vertical depth of the ground or mudline, m.</param>
     /// <param name="settings">The choices.</param>
-    /// <param name="problems">Gaps left open, as errors that name the interval.</param>
+    /// <param name="problems">Gets gaps left open and assumptions that cannot hold, as errors that name the depths.</param>
     /// <returns>The profile, or null when there is no usable density at all.</returns>
     public static DensityProfile? Prepare(
         Curve density,
         ReadOnlySpan<double> tvd,
         ReadOnlySpan<bool> usable,
+        double solidTop,
         OverburdenSettings settings,
         List<FormattableString> problems)
     {
@@ -63,16 +72,34 @@ public sealed class DensityProfile
 
         if (known.Count == 0) return null;
         var origins = new OriginMarks(values.Length);
+        var shallow = Tied(known, values, tvd, solidTop, settings.AboveLog, problems);
         for (var i = 0; i < known[0]; i++)
         {
-            if (usable[i]) origins.Set(values, i, settings.AboveLog.IsSet ? settings.AboveLog.Value : double.NaN, SampleOrigin.Assumed);
+            if (usable[i]) origins.Set(values, i, shallow?.DensityAt(tvd[i] - solidTop) ?? double.NaN, SampleOrigin.Assumed);
         }
 
         for (var k = 1; k < known.Count; k++) Bridge(known[k - 1], known[k], values, tvd, usable, settings.Gaps, origins, problems);
         if (settings.Gaps.Value.Kind != DensityFillKind.Linear) ReportMissingRows(known[0], known[^1], tvd, usable, problems);
         var end = Continue(known[^1], values, usable, settings.BelowLog.Value, origins);
         var first = settings.AboveLog.IsSet ? usable.IndexOf(true) : known[0];
-        return new DensityProfile(values, origins.Over(density.Origins), first, known[0], end);
+        return new DensityProfile(values, origins.Over(density.Origins), shallow, first, known[0], end);
+    }
+
+    private static ShallowDensity? Tied(
+        List<int> known, double[] values, ReadOnlySpan<double> tvd, double solidTop, Setting<ShallowDensity> choice, List<FormattableString> problems)
+    {
+        if (!choice.IsSet) return null;
+        var top = tvd[known[0]];
+        var first = new List<double>();
+        foreach (var i in known)
+        {
+            if (tvd[i] > top + TieLength) break;
+            first.Add(values[i]);
+        }
+
+        var tied = choice.Value.Tie(top - solidTop, MathNet.Numerics.Statistics.Statistics.Median(first), out var problem);
+        if (problem is not null) problems.Add(problem);
+        return tied;
     }
 
     private static void Bridge(

@@ -26,8 +26,8 @@ public readonly record struct DensityFill(DensityFillKind Kind, double Density =
 /// <summary>How the vertical stress is had where density is not logged.</summary>
 public sealed record OverburdenSettings
 {
-    /// <summary>Mean density from the ground or mudline to the first logged density, kg/m3.</summary>
-    public Setting<double> AboveLog { get; init; }
+    /// <summary>What is assumed for density from the ground or mudline to the first logged value; there is no default.</summary>
+    public Setting<ShallowDensity> AboveLog { get; init; }
 
     /// <summary>What bridges gaps inside the log.</summary>
     public Setting<DensityFill> Gaps { get; init; } = Setting.Default(new DensityFill(DensityFillKind.None));

@@ -14,6 +14,9 @@ public enum PorePressureMethod
 
     /// <summary>Straight lines between given points.</summary>
     Table,
+
+    /// <summary>Eaton's relation for sonic slowness against a given normal trend.</summary>
+    EatonSonic,
 }
 
 /// <summary>One point of a pore-pressure table.</summary>
@@ -27,7 +30,7 @@ public sealed record PorePressureSettings
     /// <summary>The method; there is no default.</summary>
     public Setting<PorePressureMethod> Method { get; init; }
 
-    /// <summary>Density of the pore fluid for the hydrostatic method, kg/m3.</summary>
+    /// <summary>Density of the pore fluid for the hydrostatic and the trend methods, kg/m3.</summary>
     public Setting<double> FluidDensity { get; init; }
 
     /// <summary>Fluid density that gives the gradient, kg/m3.</summary>
@@ -42,6 +45,12 @@ public sealed record PorePressureSettings
     /// <summary>The kind of depth the table states.</summary>
     public Setting<DepthKind> DepthKind { get; init; }
 
+    /// <summary>The normal trend of slowness, from top to bottom.</summary>
+    public Setting<IReadOnlyList<TrendPoint>> Trend { get; init; }
+
+    /// <summary>The exponent of a trend method; the published one when it is not set.</summary>
+    public Setting<double> Exponent { get; init; }
+
     /// <summary>These settings where they were decided, else those below them.</summary>
     public PorePressureSettings Over(PorePressureSettings below)
     {
@@ -54,6 +63,8 @@ public sealed record PorePressureSettings
             Reference = Reference.Over(below.Reference),
             Points = Points.Over(below.Points),
             DepthKind = DepthKind.Over(below.DepthKind),
+            Trend = Trend.Over(below.Trend),
+            Exponent = Exponent.Over(below.Exponent),
         };
     }
 }

@@ -20,7 +20,7 @@ public sealed class PressureLine
         _gradientBelow = gradientBelow;
     }
 
-    /// <summary>Makes the plan.</summary>
+    /// <summary>Makes the plan; for a trend method, that of the normal pressure.</summary>
     /// <param name="settings">Complete settings of one method.</param>
     /// <param name="frame">The well's reference levels.</param>
     /// <param name="waterDensity">Density of sea water, kg/m3, for the pressure at the mudline.</param>
@@ -33,7 +33,7 @@ public sealed class PressureLine
         ArgumentNullException.ThrowIfNull(toVertical);
         switch (settings.Method.Value)
         {
-            case PorePressureMethod.Hydrostatic:
+            case PorePressureMethod.Hydrostatic or PorePressureMethod.EatonSonic:
                 return new PressureLine([frame.HydrostaticTopTvd], [0], settings.FluidDensity.Value * Constants.StandardGravity);
             case PorePressureMethod.Gradient:
                 var reference = settings.Reference.Value;

@@ -49,7 +49,12 @@ public static class UnitSystems
     public static string Show(this UnitSystem system, FormattableString message)
     {
         ArgumentNullException.ThrowIfNull(message);
-        var arguments = Array.ConvertAll(message.GetArguments(), a => a is Quantity q ? system.Show(q) : a);
+        var arguments = Array.ConvertAll(message.GetArguments(), a => a switch
+        {
+            Quantity q => system.Show(q),
+            FormattableString inner => system.Show(inner),
+            _ => a,
+        });
         return string.Format(CultureInfo.InvariantCulture, message.Format, arguments);
     }
 }

@@ -30,9 +30,10 @@ internal static class Bindings
 
     private static readonly (string, UnitSystem)[] UnitSystems = [("metric", UnitSystem.Metric), ("field", UnitSystem.Field)];
 
-    private static readonly (string, PorePressureMethod)[] PressureMethods =
+    private static readonly (string, PorePressureMethod)[] PressureWords =
     [
         ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
+        (PressureMethods.EatonSonic.Id, PorePressureMethod.EatonSonic),
     ];
 
     private static readonly (string, DensityFill)[] GapFills =
@@ -125,6 +126,7 @@ internal static class Bindings
             Top = s.Quantity("top", z.Top, Sign.Any, Dimension.Length, "depth of the top"),
             Base = s.Quantity("base", z.Base, Sign.Any, Dimension.Length, "depth of the base, when the next top does not end the zone"),
             DepthKind = s.Choice("depth_kind", z.DepthKind, DepthKinds, "the kind of top and base: measured, true vertical, or true vertical below sea level"),
+            Target = s.Flag("target", z.Target, "true: the summary names the nearest stress barriers above and below"),
             Overrides = StageBindings.All(own, z.Overrides),
             Position = s.Position,
         };
@@ -144,6 +146,7 @@ internal static class Bindings
             PhotoelectricMin = s.Quantity("photoelectric_min", l.PhotoelectricMin, Sign.NotNegative, Dimension.Photoelectric, "least photoelectric factor"),
             PhotoelectricMax = s.Quantity("photoelectric_max", l.PhotoelectricMax, Sign.NotNegative, Dimension.Photoelectric, "greatest photoelectric factor"),
             Facies = s.Numbers("facies", l.Facies, "values of the facies curve"),
+            Salt = s.Flag("salt", l.Salt, "true for salt: both horizontal stresses equal the vertical one"),
             Overrides = StageBindings.All(own, l.Overrides),
             Position = s.Position,
         };
@@ -151,7 +154,7 @@ internal static class Bindings
 
     private static OverburdenSettings Overburden(ISection s, OverburdenSettings o) => o with
     {
-        AboveLog = s.Quantity("above_log", o.AboveLog, Sign.Positive, Dimension.Density, "mean density from the ground or mudline to the first logged density"),
+        AboveLog = s.ShallowDensity("above_log", o.AboveLog, "density from the ground or mudline to the first logged value"),
         Gaps = s.ChoiceOrQuantity("gaps", o.Gaps, GapFills, Dimension.Density, Stated, Density, "what bridges gaps in the density log"),
         BelowLog = s.ChoiceOrQuantity("below_log", o.BelowLog, BelowFills, Dimension.Density, Stated, Density, "what continues density below its last value"),
         WaterDensity = s.FluidDensity("water_density", o.WaterDensity, "density of sea water"),
@@ -159,12 +162,23 @@ internal static class Bindings
 
     private static LayerSettings Layers(ISection s, LayerSettings l) => l with
     {
+        BarrierContrast = s.Quantity("barrier_contrast", l.BarrierContrast, Sign.Positive, Dimension.Pressure, "how much a layer's Shmin must exceed a target's to count as a barrier"),
         MaxThickness = s.Quantity("max_thickness", l.MaxThickness, Sign.Positive, Dimension.Length, "greatest true vertical thickness of a layer"),
     };
 
     private static OutputSection Output(ISection s, OutputSection o) => o with
     {
         Units = s.Choice("units", o.Units, UnitSystems, "the units of the results"),
+        Tracks = s.Texts("tracks", o.Tracks, "the tracks to draw, in their order"),
+        Scales = s.Tables("scales", o.Scales, Scale, new(), "scales of single curves in the tracks"),
+    };
+
+    private static ScaleSection Scale(ISection s, ScaleSection c) => c with
+    {
+        Curve = s.Text("curve", c.Curve, "the curve, named like its column without the unit"),
+        Left = s.Text("left", c.Left, "value at the left edge of the track, with its unit"),
+        Right = s.Text("right", c.Right, "value at the right edge of the track, with its unit"),
+        Position = s.Position,
     };
 
     /// <summary>The [pore_pressure] section.</summary>
@@ -172,14 +186,18 @@ internal static class Bindings
     {
         var points = s.Tables(
             "points", p.Points.IsSet ? p.Points.Value : [], (t, point) => Point(t, point, p.Points.Source), new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
+        var trend = s.Tables(
+            "trend", p.Trend.IsSet ? p.Trend.Value : [], (t, point) => TrendPoint(t, point, p.Trend.Source), new(double.NaN, double.NaN), "trend methods: slowness of normally compacted shale at depths below the ground or mudline");
         return p with
         {
-            Method = s.Choice("method", p.Method, PressureMethods, "how pore pressure is had"),
-            FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic: density of the pore fluid"),
+            Method = s.Choice("method", p.Method, PressureWords, "how pore pressure is had"),
+            FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic and trend methods: density of the pore fluid"),
             Gradient = s.FluidDensity("gradient", p.Gradient, "gradient: pressure per depth, or the density of such a fluid"),
             Reference = s.Choice("reference", p.Reference, References, "gradient: what depth counts from"),
             Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, s.SourceOf("points")) : p.Points,
             DepthKind = s.Choice("depth_kind", p.DepthKind, DepthKinds, "table: the kind of depth of its points"),
+            Trend = trend.Count > 0 ? new Setting<IReadOnlyList<TrendPoint>>(trend, s.SourceOf("trend")) : p.Trend,
+            Exponent = s.Number("exponent", p.Exponent, new Interval(0.1, 10), "trend methods: exponent, when it is not the published one"),
         };
     }
 
@@ -191,6 +209,13 @@ internal static class Bindings
     }
 
     private static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
+
+    private static TrendPoint TrendPoint(ISection s, TrendPoint p, SettingSource source)
+    {
+        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth below the ground or mudline");
+        var slowness = s.Quantity("slowness", Known(p.Slowness, source), Sign.Positive, Dimension.Slowness, "slowness of normally compacted shale there");
+        return new TrendPoint(depth.IsSet ? depth.Value : double.NaN, slowness.IsSet ? slowness.Value : double.NaN);
+    }
 
     private static DensityFill Stated(double density) => new(DensityFillKind.Stated, density);
 

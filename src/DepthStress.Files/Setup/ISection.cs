@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
@@ -59,6 +60,9 @@ internal interface ISection
 
     /// <summary>A law from the catalogue, a constant, or a law of the user's own.</summary>
     Setting<Law> Law(string key, Setting<Law> current, Property predicts, string doc);
+
+    /// <summary>What is assumed for density above the log.</summary>
+    Setting<ShallowDensity> ShallowDensity(string key, Setting<ShallowDensity> current, string doc);
 
     /// <summary>A table inside this one.</summary>
     T Table<T>(string key, T current, Func<ISection, T, T> bind, string doc);

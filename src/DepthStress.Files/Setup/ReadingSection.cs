@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
@@ -126,6 +127,10 @@ internal sealed class ReadingSection : ISection
     /// <inheritdoc/>
     public Setting<Law> Law(string key, Setting<Law> current, Property predicts, string doc) =>
         Read(key, current, node => LawReader.Read(node, key, predicts, _diagnostics));
+
+    /// <inheritdoc/>
+    public Setting<ShallowDensity> ShallowDensity(string key, Setting<ShallowDensity> current, string doc) =>
+        Read(key, current, node => ShallowDensityReader.Read(node, key, _diagnostics));
 
     /// <inheritdoc/>
     public T Table<T>(string key, T current, Func<ISection, T, T> bind, string doc)

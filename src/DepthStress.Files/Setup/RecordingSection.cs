@@ -3,6 +3,7 @@ using System.Text.Json.Nodes;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
@@ -61,6 +62,15 @@ internal sealed class RecordingSection : ISection
     /// <inheritdoc/>
     public Setting<Law> Law(string key, Setting<Law> current, Property predicts, string doc) =>
         Add(key, current, law => law.Standing == Standing.UserGiven ? $"{law.Text} {law.Unit.Symbol}".TrimEnd() : law.Id);
+
+    /// <inheritdoc/>
+    public Setting<ShallowDensity> ShallowDensity(string key, Setting<ShallowDensity> current, string doc) => Add(key, current, v => v switch
+    {
+        MeanDensity mean => Show(mean.Density, Dimension.Density),
+        ExponentialDensity e => $"{ShallowDensityReader.Exponential} from {Show(e.Surface, Dimension.Density)} towards {Show(e.Matrix, Dimension.Density)}",
+        PointDensity points => new JsonArray([.. points.Points.Select(p => (JsonNode)$"{Show(p.Density, Dimension.Density)} at {Show(p.Depth, Dimension.Length)}")]),
+        _ => v.Law!.Id,
+    });
 
     /// <inheritdoc/>
     public T Table<T>(string key, T current, Func<ISection, T, T> bind, string doc)

@@ -3,6 +3,7 @@ using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
@@ -95,6 +96,27 @@ internal sealed class SchemaSection : ISection
         {
             ["description"] = doc,
             ["anyOf"] = new JsonArray(new JsonObject { ["enum"] = List(MethodCatalogue.For(predicts).Select(l => l.Id)) }, constant, own),
+        });
+    }
+
+    /// <inheritdoc/>
+    public Setting<ShallowDensity> ShallowDensity(string key, Setting<ShallowDensity> current, string doc)
+    {
+        var exponential = new SchemaSection();
+        exponential.Choice("method", default, [(ShallowDensityReader.Exponential, 0)], "the shape of the curve");
+        exponential.Quantity("surface_density", default, Sign.Positive, Dimension.Density, "density at the ground or mudline");
+        exponential.Quantity("matrix_density", default, Sign.Positive, Dimension.Density, "density that great depth tends to");
+        var point = new SchemaSection();
+        point.Quantity("depth", default, Sign.NotNegative, Dimension.Length, "depth below the ground or mudline");
+        point.Quantity("density", default, Sign.Positive, Dimension.Density, "density there");
+        return Add(key, current, new JsonObject
+        {
+            ["description"] = doc,
+            ["anyOf"] = new JsonArray(
+                QuantitySchema("a mean density", Dimension.Density),
+                new JsonObject { ["enum"] = List(ShallowDensityReader.Laws.Select(l => l.Id)) },
+                exponential.Schema("an exponential that meets the first logged density"),
+                new JsonObject { ["type"] = "array", ["items"] = point.Schema("a density at a depth") }),
         });
     }
 

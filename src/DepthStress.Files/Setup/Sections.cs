@@ -113,6 +113,9 @@ public sealed record ZoneSection
     /// <summary>The kind of these depths.</summary>
     public Setting<DepthKind> DepthKind { get; init; }
 
+    /// <summary>True when the zone is a target.</summary>
+    public Setting<bool> Target { get; init; }
+
     /// <summary>What the zone decides.</summary>
     public StageSettings Overrides { get; init; } = new();
 
@@ -147,6 +150,9 @@ public sealed record LithologySection
     /// <summary>Facies codes.</summary>
     public Setting<IReadOnlyList<double>> Facies { get; init; }
 
+    /// <summary>True for salt.</summary>
+    public Setting<bool> Salt { get; init; }
+
     /// <summary>What the rule decides.</summary>
     public StageSettings Overrides { get; init; } = new();
 
@@ -154,9 +160,31 @@ public sealed record LithologySection
     public SourcePosition Position { get; init; }
 }
 
+/// <summary>One [[output.scales]] table.</summary>
+public sealed record ScaleSection
+{
+    /// <summary>The curve, by the id of its column.</summary>
+    public Setting<string> Curve { get; init; }
+
+    /// <summary>The value at the left edge of the track, as text with its unit.</summary>
+    public Setting<string> Left { get; init; }
+
+    /// <summary>The value at the right edge of the track, as text with its unit.</summary>
+    public Setting<string> Right { get; init; }
+
+    /// <summary>Where the scale stands.</summary>
+    public SourcePosition Position { get; init; }
+}
+
 /// <summary>The [output] section.</summary>
 public sealed record OutputSection
 {
+    /// <summary>Ids of the tracks to draw, in their order; not set means all.</summary>
+    public Setting<IReadOnlyList<string>> Tracks { get; init; }
+
+    /// <summary>Scales of single curves.</summary>
+    public IReadOnlyList<ScaleSection> Scales { get; init; } = [];
+
     /// <summary>The units of the results.</summary>
     public Setting<UnitSystem> Units { get; init; } = Setting.Default(UnitSystem.Metric);
 }

@@ -135,7 +135,7 @@ internal static class SetupAssembly
             if (!zone.Top.IsSet) diagnostics.Error(zone.Position, "[[zones]] top is not set");
             if (!zone.DepthKind.IsSet) diagnostics.Error(zone.Position, "[[zones]] depth_kind is not set; expected \"md\", \"tvd\" or \"tvdss\"");
             if (!zone.Name.IsSet || !zone.Top.IsSet || !zone.DepthKind.IsSet) continue;
-            zones.Add(new Zone(zone.Name.Value, zone.Top.Value, Value(zone.Base), zone.DepthKind.Value, zone.Overrides, zone.Position));
+            zones.Add(new Zone(zone.Name.Value, zone.Top.Value, Value(zone.Base), zone.DepthKind.Value, zone.Overrides, zone.Position) { Target = zone.Target.Value });
         }
 
         return zones;
@@ -153,7 +153,10 @@ internal static class SetupAssembly
                 Range(section.DensityMin, section.DensityMax),
                 Range(section.PhotoelectricMin, section.PhotoelectricMax),
                 section.Facies.IsSet ? section.Facies.Value : [],
-                section.Position);
+                section.Position)
+            {
+                Salt = section.Salt.Value,
+            };
             CheckOrder(section.ShaleVolumeMin, section.ShaleVolumeMax, "shale_volume", diagnostics);
             CheckOrder(section.DensityMin, section.DensityMax, "density", diagnostics);
             CheckOrder(section.PhotoelectricMin, section.PhotoelectricMax, "photoelectric", diagnostics);

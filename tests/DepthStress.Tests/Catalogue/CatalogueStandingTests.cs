@@ -25,6 +25,9 @@ public class CatalogueStandingTests
         ["lal-1999-shale"] = Standing.Confirmed, // Rock Physics Handbook p. 387
         ["lal-1999-shale-friction"] = Standing.Confirmed, // Zoback 2007 p. 116 Table 4.4
         ["krief-1990-biot"] = Standing.FromMemory, // coefficient never read in the source
+        ["traugott-1997"] = Standing.Confirmed, // Zhang 2019 p. 190 eqs 6.4-6.6
+        ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
+        ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
     };
 
     [Fact]

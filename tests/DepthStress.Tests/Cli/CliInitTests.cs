@@ -37,7 +37,7 @@ public sealed class CliInitTests : IDisposable
             [
                 "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level",
                 "well.toml: error: [well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them",
-                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient or table",
+                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
             ],
             check.Error.Split('\n', StringSplitOptions.RemoveEmptyEntries));
     }

@@ -22,13 +22,13 @@ public class ChainErrorTests
     public void Every_open_interval_of_density_is_named_in_one_run() => Assert.Equal(
         [
             "well.toml(1,1): error: density is missing from 100.0 m to 300.0 m true vertical depth, and the overburden needs it: set [overburden] gaps = \"linear\" or a density",
-            "well.toml(1,1): error: density is not logged from 0.0 m (ground or mudline) to 100.0 m true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density",
+            "well.toml(1,1): error: density is not logged from 0.0 m (ground or mudline) to 100.0 m true vertical depth, and the overburden needs it: set [overburden] above_log",
         ],
         Errors(Setup, LogsWith(Curve(Property.Density, Gap, 2500, Gap, 2500, 2500))));
 
     [Fact]
     public void Offshore_the_open_interval_starts_at_the_mudline() => Assert.Equal(
-        ["well.toml(1,1): error: density is not logged from 125.0 m (ground or mudline) to 200.0 m true vertical depth, and the overburden needs it: set [overburden] above_log to a mean density"],
+        ["well.toml(1,1): error: density is not logged from 125.0 m (ground or mudline) to 200.0 m true vertical depth, and the overburden needs it: set [overburden] above_log"],
         Errors(Setup with { Frame = Sea }, LogsWith()));
 
     // A frame without its ground is refused before the chain; should one come through, Sv must not start at the first sample.
@@ -37,7 +37,7 @@ public class ChainErrorTests
     {
         var frame = new DepthFrame(DatumKind.RotaryTable, 1000, null, null, null);
         Assert.Contains("density is not logged from", Assert.Single(Errors(Setup with { Frame = frame }, LogsWith())), StringComparison.Ordinal);
-        Assert.True(double.IsNaN(Core.Pressure.Overburden.Start(0, 1030, double.NaN, 2000, 100, 2000).Stress));
+        Assert.True(double.IsNaN(Core.Pressure.Overburden.Start(0, 1030, double.NaN, 100, 2000).Stress));
     }
 
     [Fact]

@@ -165,7 +165,7 @@ public class ChainTests
     public void Offshore_the_water_weighs_and_the_air_does_not()
     {
         var model = Run(
-            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(2000.0) } },
+            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2000.0)) } },
             Table([125, 225, 325], Curve(Property.Density, Gap, 2400, 2400), Curve(Property.Vp, Same(4000, 3)), Curve(Property.Vs, Same(2400, 3))));
         Assert.Equal(1030 * G * 100, model.Column(Property.VerticalStress)[0], Pascal);
         Assert.Equal(G * (103000 + (2200 * 100) + (2400 * 100)), model.Column(Property.VerticalStress)[2], Pascal);
@@ -175,7 +175,7 @@ public class ChainTests
     [Fact]
     public void Samples_above_the_ground_stay_out()
     {
-        var model = Run(Setup with { Frame = new DepthFrame(DatumKind.RotaryTable, 150, 0, null, null), Overburden = new OverburdenSettings { AboveLog = Chosen(2000.0) } }, LogsWith());
+        var model = Run(Setup with { Frame = new DepthFrame(DatumKind.RotaryTable, 150, 0, null, null), Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2000.0)) } }, LogsWith());
         Assert.Equal([false, false, true, true, true], model.Usable);
         Assert.Equal(2000 * G * 50, model.Column(Property.VerticalStress)[2], Pascal);
         Assert.Contains(model.Findings, f => f.Samples == 2 && f.Text.Format == "logs above the ground or mudline: left out");

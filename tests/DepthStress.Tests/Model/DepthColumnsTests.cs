@@ -47,7 +47,7 @@ public class DepthColumnsTests
 
     [Fact]
     public void Headers_and_their_order_are_the_contract() => Assert.Equal(
-        Contract.Split(' '), DepthColumns.All.Select(c => c is NumberColumn<EarthModel> n ? n.Header(UnitSystem.Metric) : c.Id));
+        $"{Contract} sv_unlogged_share".Split(' '), DepthColumns.All.Select(c => c is NumberColumn<EarthModel> n ? n.Header(UnitSystem.Metric) : c.Id));
 
     [Fact]
     public void Field_headers_carry_field_units() => Assert.Equal(
@@ -86,7 +86,7 @@ public class DepthColumnsTests
     public void Offshore_gradients_count_from_the_sea_surface()
     {
         var model = Run(
-            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(2000.0) } },
+            Setup with { Frame = Sea, Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2000.0)) } },
             Table([225], Curve(Property.Density, 2400)));
         var gradient = new double[1];
         DepthColumns.Get("sv_gradient").Fill(model, 0, UnitSystem.Metric, gradient);

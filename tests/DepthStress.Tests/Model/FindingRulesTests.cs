@@ -181,7 +181,7 @@ public class FindingRulesTests
     [Fact]
     public void An_assumed_density_above_the_log_is_told_with_what_rests_on_it()
     {
-        var setup = Quiet(QuietSettings) with { Overburden = new OverburdenSettings { AboveLog = Chosen(2000.0) } };
+        var setup = Quiet(QuietSettings) with { Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2000.0)) } };
         var logs = Table([50, 150, 200, 400], Curve(Property.Vp, Same(4000, 4)), Curve(Property.Vs, Same(2400, 4)), Curve(Property.Density, Gap, Gap, 2500, 2500));
         Assert.Contains(
             "the vertical stress of 4.05 MPa at 200.0 m true vertical depth rests on an assumed mean density of 2.000 g/cm3 above the log",

@@ -44,7 +44,7 @@ public class SetupCheckTests
             "well.toml(1,1): error: [moduli] static_youngs is not set; expected methods: lacy-1997-sandstone, lacy-1997-shale, lacy-1997-combined, horsrud-2001-shale-modulus",
             "well.toml(1,1): error: [moduli] static_poisson is not set; expected methods: equal-to-dynamic",
             "well.toml(1,1): error: [biot] coefficient is not set; expected methods: krief-1990-biot",
-            "well.toml(1,1): error: [pore_pressure] method is not set; expected hydrostatic, gradient or table",
+            "well.toml(1,1): error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
         ],
         Report(new StageSettings()));
 

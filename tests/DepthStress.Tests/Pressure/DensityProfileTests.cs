@@ -15,16 +15,16 @@ public class DensityProfileTests
     private static readonly bool[] AllUsable = [true, true, true, true, true, true];
 
     private static OverburdenSettings Gaps(DensityFillKind kind, double density = Gap) =>
-        new() { AboveLog = Chosen(2100.0), Gaps = Chosen(new DensityFill(kind, density)) };
+        new() { AboveLog = Chosen(ShallowDensity.Mean(2100.0)), Gaps = Chosen(new DensityFill(kind, density)) };
 
     private static OverburdenSettings Below(DensityFillKind kind, double density = Gap) =>
-        new() { AboveLog = Chosen(2100.0), BelowLog = Chosen(new DensityFill(kind, density)) };
+        new() { AboveLog = Chosen(ShallowDensity.Mean(2100.0)), BelowLog = Chosen(new DensityFill(kind, density)) };
 
     private static (DensityProfile? Profile, string[] Problems) Prepare(
         double[] density, OverburdenSettings settings, bool[]? usable = null, double[]? tvd = null)
     {
         var problems = new List<FormattableString>();
-        var profile = DensityProfile.Prepare(Curve(Property.Density, density), tvd ?? Tvd, usable ?? AllUsable, settings, problems);
+        var profile = DensityProfile.Prepare(Curve(Property.Density, density), tvd ?? Tvd, usable ?? AllUsable, solidTop: 0, settings, problems);
         return (profile, [.. problems.Select(p => UnitSystem.Metric.Show(p))]);
     }
 
@@ -75,7 +75,7 @@ public class DensityProfileTests
     [Fact]
     public void Above_the_log_the_mean_density_is_an_assumption()
     {
-        var (profile, _) = Prepare([Gap, Gap, 2300, 2300, 2300, 2300], new OverburdenSettings { AboveLog = Chosen(2100.0) });
+        var (profile, _) = Prepare([Gap, Gap, 2300, 2300, 2300, 2300], new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2100.0)) });
         Assert.Equal([2100, 2100, 2300, 2300, 2300, 2300], profile!.Values);
         Assert.Equal("assumed assumed measured measured measured measured", Origins(profile));
         Assert.Equal((0, 2, 6), (profile.First, profile.FirstLogged, profile.End));

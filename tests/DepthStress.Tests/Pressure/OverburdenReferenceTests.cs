@@ -12,7 +12,7 @@ public class OverburdenReferenceTests
     public void Constant_density_gives_its_weight()
     {
         var stress = new double[5];
-        var carry = Overburden.Start(0, 1030, 0, 2300, 0, 2300);
+        var carry = Overburden.Start(0, 1030, 0, 0, 2300);
         Overburden.Scan([0, 100, 250, 260, 1000], [2300, 2300, 2300, 2300, 2300], stress, ref carry);
         Assert.Equal(0, stress[0]);
         Assert.Equal(2300 * G * 250, stress[2], 1e-6);
@@ -25,7 +25,7 @@ public class OverburdenReferenceTests
     {
         double[] tvd = [0, 3, 10, 500, 501, 2000];
         var stress = new double[tvd.Length];
-        var carry = Overburden.Start(0, 1030, 0, 2000, 0, 2000);
+        var carry = Overburden.Start(0, 1030, 0, 0, 2000);
         Overburden.Scan(tvd, [.. tvd.Select(z => 2000 + (0.2 * z))], stress, ref carry);
         for (var i = 0; i < tvd.Length; i++) Assert.Equal(G * ((2000 * tvd[i]) + (0.1 * tvd[i] * tvd[i])), stress[i], 1e-7 * (1 + stress[i]) * 1e-3);
     }
@@ -35,7 +35,7 @@ public class OverburdenReferenceTests
     [Fact]
     public void Offshore_the_water_weighs_and_the_air_does_not()
     {
-        var carry = Overburden.Start(100, 1030, 125, 1900, 200, 2100);
+        var carry = Overburden.Start(100, 1030, ShallowDensity.Mean(1900).MassAbove(75), 200, 2100);
         Assert.Equal(2407532.575, carry.Stress, 1e-6);
         var stress = new double[2];
         Overburden.Scan([200, 300], [2100, 2300], stress, ref carry);
@@ -45,13 +45,13 @@ public class OverburdenReferenceTests
 
     [Fact]
     public void A_first_sample_at_the_mudline_carries_the_water_alone() =>
-        Assert.Equal(1030 * G * 100, Overburden.Start(100, 1030, 125, 1900, 125, 2100).Stress, 1e-6);
+        Assert.Equal(1030 * G * 100, Overburden.Start(100, 1030, 0, 125, 2100).Stress, 1e-6);
 
     [Fact]
     public void A_sample_left_out_gets_no_stress_and_the_integral_goes_on()
     {
         var stress = new double[3];
-        var carry = Overburden.Start(0, 1030, 0, 2000, 0, 2000);
+        var carry = Overburden.Start(0, 1030, 0, 0, 2000);
         Overburden.Scan([0, 50, 100], [2000, double.NaN, 2200], stress, ref carry);
         Assert.True(double.IsNaN(stress[1]));
         Assert.Equal(2100 * G * 100, stress[2], 1e-6);
@@ -67,7 +67,7 @@ public class OverburdenReferenceTests
             for (var i = 0; i < n; i++) tvd[i] = z += steps[i];
             var rho = density[..n].Select((d, i) => missing[i] ? double.NaN : d).ToArray();
             var (whole, parts) = (new double[n], new double[n]);
-            var start = Overburden.Start(0, 1030, 0, 2000, tvd[0], density[0]);
+            var start = Overburden.Start(0, 1030, ShallowDensity.Mean(2000).MassAbove(tvd[0]), tvd[0], density[0]);
             var (one, many) = (start, start);
             Overburden.Scan(tvd, rho, whole, ref one);
             for (var from = 0; from < n; from += chunk)

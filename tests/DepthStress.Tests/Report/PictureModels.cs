@@ -63,7 +63,7 @@ internal static class PictureModels
             Trajectory = path,
             Zones = zones,
             Settings = settings,
-            Overburden = new() { AboveLog = Set(2150.0), Gaps = Set(new DensityFill(DensityFillKind.Linear)), BelowLog = Set(new DensityFill(DensityFillKind.Hold)) },
+            Overburden = new() { AboveLog = Set(ShallowDensity.Mean(2150.0)), Gaps = Set(new DensityFill(DensityFillKind.Linear)), BelowLog = Set(new DensityFill(DensityFillKind.Hold)) },
         };
         var table = new LogTable(md, curves.Select(c => new Curve(
             CurveRoles.Find(c.Role)!, c.Role, c.Values, OriginTrack.Of(c.Values, SampleOrigin.Measured, "invented"))));

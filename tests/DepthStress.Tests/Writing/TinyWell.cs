@@ -70,7 +70,7 @@ internal static class TinyWell
                 ? new HorizontalStressSettings { StrainAlongShmin = Chosen(1e-4), StrainAlongShmax = Chosen(4e-4) }
                 : new HorizontalStressSettings(),
         },
-        Overburden = new OverburdenSettings { AboveLog = Chosen(2200.0), Gaps = Chosen(new DensityFill(DensityFillKind.Linear)) },
+        Overburden = new OverburdenSettings { AboveLog = Chosen(ShallowDensity.Mean(2200.0)), Gaps = Chosen(new DensityFill(DensityFillKind.Linear)) },
     };
 
     private static Trajectory Path()

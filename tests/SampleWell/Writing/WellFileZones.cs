@@ -25,6 +25,7 @@ internal static class WellFileZones
 
             """,
         RockKind.Sand => """
+            target = true                        # the reservoir: the summary names its stress barriers
             [zones.moduli]
             static_youngs = "lacy-1997-sandstone"
             [zones.strength]

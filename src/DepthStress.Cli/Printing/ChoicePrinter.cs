@@ -1,0 +1,39 @@
+using System.Globalization;
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+using Spectre.Console;
+
+namespace DepthStress.Cli.Printing;
+
+/// <summary>Prints how much Shmin hangs on the two choices that logs cannot settle.</summary>
+internal static class ChoicePrinter
+{
+    /// <summary>Prints one row per zone that has a Shmin; nothing when none has.</summary>
+    public static void Print(Terminal terminal, EarthModel model, UnitSystem units)
+    {
+        var sensitivities = ShminSensitivity.Of(model);
+        if (sensitivities.Count == 0) return;
+        var (unit, decimals) = units == UnitSystem.Metric ? (Units.Megapascal, 1) : (Units.Psi, 0);
+        var format = "F" + decimals.ToString(CultureInfo.InvariantCulture);
+        var signed = decimals == 0 ? "+0;-0;0" : "+0.0;-0.0;0.0";
+        var (nu, biot) = (ShminSensitivity.PoissonStep, ShminSensitivity.BiotStep);
+        terminal.Output.WriteLine($"What the choices of static Poisson's ratio and Biot's coefficient do to mean Shmin, {unit}:");
+        var table = new Table().Border(TableBorder.Simple);
+        table.AddColumn(new TableColumn("zone").NoWrap());
+        foreach (var title in (string[])["Shmin", Shift("nu stat", -nu), Shift("nu stat", nu), Shift("biot", -biot), Shift("biot", biot)])
+            table.AddColumn(new TableColumn(title).RightAligned());
+        foreach (var s in sensitivities)
+        {
+            string Change(double si) => unit.FromSi(si).ToString(signed, CultureInfo.InvariantCulture);
+            table.AddRow(
+                Markup.Escape(s.Zone < 0 ? "no zone" : model.ZoneName(s.Zone)),
+                unit.FromSi(s.Shmin).ToString(format, CultureInfo.InvariantCulture),
+                Change(s.PoissonLower), Change(s.PoissonHigher), Change(s.BiotLower), Change(s.BiotHigher));
+        }
+
+        terminal.Tables().Write(table);
+        terminal.Output.WriteLine();
+    }
+
+    private static string Shift(string name, double step) => string.Create(CultureInfo.InvariantCulture, $"{name} {step:+0.00;-0.00}");
+}
