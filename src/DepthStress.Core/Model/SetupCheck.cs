@@ -1,6 +1,5 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
-using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
@@ -52,7 +51,7 @@ public static class SetupCheck
         var choice = slot.Choice(scope.Settings);
         if (!choice.IsSet)
         {
-            if (slot.Required) Missing(scope, slot.Key, $"methods: {string.Join(", ", MethodCatalogue.For(slot.Property).Select(l => l.Id))}");
+            if (slot.Required) Missing(scope, slot.Key, $"methods: {MethodCatalogue.Choices(slot.Property)}");
             return;
         }
 
@@ -66,8 +65,8 @@ public static class SetupCheck
 
         foreach (var input in law.Inputs)
         {
-            if (LawColumns.Parameter(input.Property, scope.Settings) is double.NaN)
-                scope.Error(choice.Source.Position, $"{slot.Key} = \"{law.Id}\" needs {ParameterKey(input.Property)}{scope.Owner}");
+            if (LawParameters.Of(input.Property) is { } parameter && double.IsNaN(parameter.Value(scope.Settings)))
+                scope.Error(choice.Source.Position, $"{slot.Key} = \"{law.Id}\" needs {parameter.Key}{scope.Owner}");
         }
     }
 
@@ -131,10 +130,4 @@ public static class SetupCheck
 
     private static void Missing(Scope scope, string key, string expected) =>
         scope.Error(scope.Position, $"{key} is not set{scope.Owner}; expected {expected}");
-
-    private static string ParameterKey(Property property) => property switch
-    {
-        Property.MatrixDensity => "[porosity] matrix_density",
-        _ => "[porosity] fluid_density",
-    };
 }

@@ -42,11 +42,11 @@ internal static class LawReader
         if (MethodCatalogue.Find(text.Value) is { } law)
         {
             if (law.Predicts == predicts) return law;
-            diagnostics.Error(text.Position, $"found \"{law.Id}\", which gives {PropertyNames.Title(law.Predicts)}; expected {key} = a method for {PropertyNames.Title(predicts)}: {string.Join(", ", ids)}");
+            diagnostics.Error(text.Position, $"found \"{law.Id}\", which gives {PropertyNames.Title(law.Predicts)}; expected {key} = a method for {PropertyNames.Title(predicts)}: {MethodCatalogue.Choices(predicts)}");
             return null;
         }
 
-        diagnostics.Error(text.Position, $"found the unknown method \"{text.Value}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
+        diagnostics.Error(text.Position, $"found the unknown method \"{text.Value}\", expected {key} = one of {MethodCatalogue.Choices(predicts)}{NearestName.Hint(text.Value, ids)}");
         return null;
     }
 
@@ -76,7 +76,7 @@ internal static class LawReader
         var factor = section.Number("factor", default, Interval.All, "the factor");
         var exponent = section.Number("exponent", default, Interval.All, "the exponent of a power law");
         var offset = section.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds");
-        var input = section.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), "the property it starts from");
+        var input = InputProperty(section, key, predicts, diagnostics);
         var inputUnit = Unit(section, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
         var unit = Unit(section, "unit", PropertyNames.Dimension(predicts), diagnostics);
         if (!shape.IsSet || !factor.IsSet)
@@ -118,9 +118,25 @@ internal static class LawReader
         return null;
     }
 
-    /// <summary>What a law may start from: everything the chain knows before the property.</summary>
-    private static List<(string, Property)> Inputs(Property predicts) =>
-        [.. PropertyNames.LawInputsBefore(predicts).Select(p => (PropertyNames.Name(p), p))];
+    /// <summary>What a law starts from: anything the chain knows before the law's result.</summary>
+    private static Setting<Property> InputProperty(ReadingSection section, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        var usual = Setting.Default(PropertyNames.UsualInput(predicts));
+        var text = section.Text("input", default, "the property it starts from");
+        if (!text.IsSet) return usual;
+        var known = PropertyNames.LawInputsBefore(predicts).ToList();
+        var names = known.ConvertAll(PropertyNames.Name);
+        if (PropertyNames.Find(text.Value) is not { } property)
+        {
+            diagnostics.Error(text.Source.Position, $"found \"{text.Value}\", expected input = one of {Words.Quoted(names)}{NearestName.Hint(text.Value, names)}");
+            return usual;
+        }
+
+        if (known.Contains(property)) return new Setting<Property>(property, text.Source);
+        var reason = property == predicts ? "which is what the law gives" : $"which is not known yet where {PropertyNames.Title(predicts)} is computed";
+        diagnostics.Error(text.Source.Position, $"{key}: found the input \"{text.Value}\", {reason}; expected one of {Words.Quoted(names)}");
+        return usual;
+    }
 
     private static string ConstantWords(Property predicts) =>
         PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction
