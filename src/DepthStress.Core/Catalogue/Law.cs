@@ -31,6 +31,10 @@ public sealed record LawInput(string Symbol, Property Property, Unit Unit, Inter
 /// <param name="Scatter">Its published standard deviation, if there is one.</param>
 public sealed record Coefficient(string Symbol, double Value, string Unit = "", double? Scatter = null)
 {
+    /// <summary>The value as text, such as 1.745e-9.</summary>
+    public string Number => Value.ToString(CultureInfo.InvariantCulture)
+        .Replace("E-0", "e-", StringComparison.Ordinal).Replace("E", "e", StringComparison.Ordinal);
+
     /// <summary>Coefficients named a, b, c ... in order.</summary>
     public static Coefficient[] Named(params double[] values) => [.. values.Select((v, k) => new Coefficient(((char)('a' + k)).ToString(), v))];
 }
@@ -91,8 +95,9 @@ public sealed record Law
     public required string Template { get; init; }
 
     /// <summary>The formula as text with its coefficients put in.</summary>
-    public string Text => Coefficients.Aggregate(
-        Template, (text, c) => text.Replace($"{{{c.Symbol}}}", c.Value.ToString(CultureInfo.InvariantCulture), StringComparison.Ordinal));
+    public string Text => Coefficients
+        .Aggregate(Template, (text, c) => text.Replace($"{{{c.Symbol}}}", c.Number, StringComparison.Ordinal))
+        .Replace("+ -", "- ", StringComparison.Ordinal);
 
     /// <summary>The formula as code.</summary>
     public required LawFormula Formula { get; init; }

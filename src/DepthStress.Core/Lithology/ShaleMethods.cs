@@ -28,7 +28,7 @@ public static class ShaleMethods
             "any age", $"Clavier and others 1971, {Public}", Standing.Confirmed, WorkedExample.Computed(0.226908, 6, 0.4)),
         Entry("steiber-1970", "Steiber's curve", "Vsh = I / ({a} - {b} I)", Steiber, [3, 2],
             "young rock of the Gulf Coast (common practice)", $"Steiber (also Stieber) 1970, {Public}", Standing.Confirmed, WorkedExample.Computed(0.181818, 6, 0.4)),
-        Entry("steiber-1970-gentle", "Steiber's curve, gentler variant", "Vsh = I / ({a} - {b} I)", Steiber, [2, 1],
+        Entry("steiber-1970-gentle", "Steiber's curve, gentler variant", "Vsh = I / ({a} - I)", (x, c) => x[0] / (c[0] - x[0]), [2],
             "a variant of Steiber's curve", Variant, Standing.FromMemory, WorkedExample.Computed(0.25, 6, 0.4)),
         Entry("steiber-1970-steep", "Steiber's curve, steeper variant", "Vsh = I / ({a} - {b} I)", Steiber, [4, 3],
             "a variant of Steiber's curve", Variant, Standing.FromMemory, WorkedExample.Computed(0.142857, 6, 0.4)),
