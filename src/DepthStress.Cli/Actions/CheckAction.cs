@@ -21,6 +21,8 @@ internal static class CheckAction
         terminal.Output.WriteLine();
         CoveragePrinter.Print(terminal, well.Logs, units);
         terminal.Output.WriteLine();
+        FeedPrinter.Print(terminal, well.Model);
+        terminal.Output.WriteLine();
         foreach (var finding in well.Model.Findings) terminal.Output.WriteLine(FindingText.Of(finding, units, well.Model.Count));
         return strict && Strictness.CountWarnings(diagnostics, well.Model) > 0 ? ExitCodes.Input : ExitCodes.Done;
     }

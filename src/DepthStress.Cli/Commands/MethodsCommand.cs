@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.CommandLine.Completions;
 using DepthStress.Cli.Actions;
 using DepthStress.Core.Model;
 
@@ -15,12 +16,30 @@ internal sealed class MethodsCommand : Command
         Arity = ArgumentArity.ZeroOrOne,
     };
 
+    /// <summary>What the listed methods give.</summary>
+    public readonly Option<string?> For = new("--for")
+    {
+        Description = $"List what gives a property: {string.Join(", ", MethodsAction.Results)}",
+        HelpName = "PROPERTY",
+    };
+
+    /// <summary>The rock the listed methods are made for.</summary>
+    public readonly Option<string?> Rock = new("--rock")
+    {
+        Description = $"List what is made for a rock: {string.Join(", ", MethodsAction.Rocks)}",
+        HelpName = "ROCK",
+    };
+
     /// <summary>Declares the command.</summary>
     public MethodsCommand(Terminal terminal)
         : base("methods", "List the method catalogue, or show one method: formula, units, range, source")
     {
-        Id.CompletionSources.Add(_ => MethodCatalogue.All.Select(l => new System.CommandLine.Completions.CompletionItem(l.Id)));
+        Id.CompletionSources.Add(_ => MethodCatalogue.All.Select(l => new CompletionItem(l.Id)));
+        For.CompletionSources.Add(_ => MethodsAction.Results.Select(w => new CompletionItem(w)));
+        Rock.CompletionSources.Add(_ => MethodsAction.Rocks.Select(w => new CompletionItem(w)));
         Add(Id);
-        SetAction(parsed => MethodsAction.Run(terminal, parsed.GetValue(Id)));
+        Add(For);
+        Add(Rock);
+        SetAction(parsed => MethodsAction.Run(terminal, parsed.GetValue(Id), parsed.GetValue(For), parsed.GetValue(Rock)));
     }
 }

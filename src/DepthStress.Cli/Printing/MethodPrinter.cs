@@ -1,68 +1,82 @@
-using System.Globalization;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Logs;
-using Spectre.Console;
+using DepthStress.Core.Model;
 
 namespace DepthStress.Cli.Printing;
 
-/// <summary>Prints the method catalogue.</summary>
+/// <summary>Prints the method catalogue, or one method of it.</summary>
 internal static class MethodPrinter
 {
-    /// <summary>Prints a line per method, grouped by what it gives.</summary>
+    private const int FormulaColumn = 38;
+
+    private const int FieldColumn = 11;
+
+    /// <summary>Prints a line per method, grouped by what it gives and by rock, with what the symbols mean.</summary>
     public static void List(Terminal terminal, IReadOnlyList<Law> laws)
     {
         foreach (var group in laws.GroupBy(l => l.Predicts))
         {
-            terminal.Output.WriteLine(PropertyNames.Title(group.Key));
-            foreach (var law in group) terminal.Output.WriteLine($"  {law.Id,-28} {law.Text}  [{law.Unit.Symbol}]{(law.Standing == Standing.FromMemory ? "  (recalled)" : "")}");
+            terminal.Output.WriteLine($"{PropertyNames.Title(group.Key)}: {Key(group.Key)}, --for {PropertyNames.Name(group.Key)}");
+            foreach (var rock in group.GroupBy(l => l.Rocks))
+            {
+                terminal.Output.WriteLine($"  {MethodWords.Of(rock.Key)}");
+                foreach (var law in rock) Line(terminal, law);
+            }
+
+            var symbols = group.SelectMany(l => l.Inputs).Select(i => $"{i.Symbol} {PropertyNames.Title(i.Property)}").Distinct();
+            HangingText.Write(terminal, "  symbols:", FieldColumn, string.Join("; ", symbols));
+            terminal.Output.WriteLine();
         }
+
+        var recalled = laws.Count(l => l.Standing == Standing.FromMemory);
+        var marks = recalled == 0 ? "" : FormattableString.Invariant($"; {MethodWords.RecalledMark} {recalled} with coefficients recalled, not read: they need accept_unverified = true");
+        HangingText.Write(terminal, "", 0, FormattableString.Invariant($"{laws.Count} methods{marks}. One method whole: depthstress methods ID"));
     }
 
     /// <summary>Prints one method whole.</summary>
     public static void Show(Terminal terminal, Law law)
     {
-        var grid = new Grid().AddColumn(new GridColumn().NoWrap().PadRight(3)).AddColumn();
-        void Row(string name, string text) => grid.AddRow(new Text(name), new Text(text));
-        Row("method", law.Id);
-        Row("", law.Title);
-        Row("gives", $"{PropertyNames.Title(law.Predicts)}, {Unit(law.Unit.Symbol)}");
-        Row("rock", law.Rocks == RockKinds.Any ? "any" : law.Rocks.ToString().ToLowerInvariant());
-        Row("formula", law.Text);
-        foreach (var input in law.Inputs) Row(input == law.Inputs[0] ? "from" : "", $"{input.Symbol}: {PropertyNames.Title(input.Property)}, {Unit(input.Unit.Symbol)}{Limits(input)}");
-        foreach (var c in law.Coefficients)
-            Row(c == law.Coefficients[0] ? "with" : "", string.Create(CultureInfo.InvariantCulture, $"{c.Symbol} = {c.Value} {c.Unit}").TrimEnd());
-        Row("valid for", law.Validity);
-        Row("source", law.Source);
-        Row("standing", law.Standing switch
-        {
-            Standing.Confirmed => "coefficients read in the source named",
-            Standing.Identity => "identity or definition",
-            _ => "coefficients recalled, not read: needs accept_unverified = true",
-        });
-        if (law.Example is { } example)
-        {
-            var inputs = law.Inputs.Zip(example.Inputs, (i, x) => string.Create(CultureInfo.InvariantCulture, $"{i.Symbol} = {x} {i.Unit.Symbol}").TrimEnd());
-            Row("example", string.Create(CultureInfo.InvariantCulture, $"{string.Join(", ", inputs)} gives {example.Result} {law.Unit.Symbol}").TrimEnd());
-            Row("", $"{Basis(example.Basis)}: {example.Source}");
-        }
-
-        terminal.Tables().Write(grid);
+        void Field(string name, string text) => HangingText.Write(terminal, name, FieldColumn, text);
+        terminal.Output.WriteLine(law.Id);
+        HangingText.Write(terminal, "", 0, law.Title);
+        terminal.Output.WriteLine();
+        Field("gives", $"{PropertyNames.Title(law.Predicts)}, {MethodWords.Of(law.Unit)}{Missing(law)}");
+        Field("choose", $"{Key(law.Predicts)} = \"{law.Id}\"");
+        Field("rock", MethodWords.Of(law.Rocks));
+        Field("formula", law.Text);
+        foreach (var input in law.Inputs) Field(input == law.Inputs[0] ? "from" : "", MethodWords.Of(input) + Limits(input));
+        if (law.Coefficients.Count > 0) Field("with", string.Join(", ", law.Coefficients.Select(Text)));
+        Field("valid for", law.Validity);
+        Field("source", law.Source);
+        Field("standing", MethodWords.Of(law.Standing));
+        if (law.Example is not { } example) return;
+        var inputs = law.Inputs.Zip(example.Inputs, (i, x) => $"{i.Symbol} = {MethodWords.Quantity(x, i.Unit)}");
+        Field("example", $"{string.Join(", ", inputs)} gives {MethodWords.Quantity(example.Result, law.Unit)}");
+        Field("", $"{MethodWords.Of(example.Basis)}: {example.Source}");
     }
 
-    private static string Unit(string symbol) => symbol.Length == 0 ? "no unit" : symbol;
-
-    private static string Basis(ExampleBasis basis) => basis switch
+    private static void Line(Terminal terminal, Law law)
     {
-        ExampleBasis.Printed => "printed",
-        ExampleBasis.Identity => "identity",
-        _ => "self-computed",
-    };
+        var units = law.Inputs.Where(i => i.Unit.Symbol.Length > 0).Select(i => $"{i.Symbol}{HangingText.Tie}{i.Unit.Symbol}");
+        if (law.Unit.Symbol.Length > 0) units = units.Prepend(law.Unit.Symbol);
+        var mark = law.Standing == Standing.FromMemory ? MethodWords.RecalledMark : ' ';
+        HangingText.Write(terminal, $"  {mark} {law.Id}", FormulaColumn, $"{law.Text} [{string.Join("; ", units)}]".Replace(" []", "", StringComparison.Ordinal));
+    }
+
+    private static string Key(Property property) => LawSlots.OfCatalogue.First(s => s.Property == property).Key;
+
+    private static string Text(Coefficient c)
+    {
+        var scatter = c.Scatter is { } s ? FormattableString.Invariant($" +/- {s}") : "";
+        return $"{c.Symbol} = {c.Number}{scatter} {c.Unit}".TrimEnd();
+    }
+
+    private static string Missing(Law law) =>
+        MethodWords.Outside(law.ResultDomain) is { } where ? $"; missing {where}" : "";
 
     private static string Limits(LawInput input)
     {
-        var limits = input.Domain == Interval.All || input.Domain == Interval.NotNegative ? "" : $"; no result outside {Text(input.Domain)}";
-        return input.Range == Interval.All ? limits : $"{limits}; fitted in {Text(input.Range)}";
+        var domain = MethodWords.Outside(input.Domain) is { } where ? $"; no result {where}" : "";
+        return input.Range == Interval.All ? domain : $"{domain}; fitted from {MethodWords.Within(input.Range)}";
     }
-
-    private static string Text(Interval interval) => string.Create(CultureInfo.InvariantCulture, $"{interval.Low} to {interval.High}");
 }

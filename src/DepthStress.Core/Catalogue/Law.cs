@@ -29,7 +29,15 @@ public sealed record LawInput(string Symbol, Property Property, Unit Unit, Inter
 /// <param name="Value">Its value.</param>
 /// <param name="Unit">Its unit as text, empty for a pure number.</param>
 /// <param name="Scatter">Its published standard deviation, if there is one.</param>
-public sealed record Coefficient(string Symbol, double Value, string Unit = "", double? Scatter = null);
+public sealed record Coefficient(string Symbol, double Value, string Unit = "", double? Scatter = null)
+{
+    /// <summary>The value as text, such as 1.745e-9.</summary>
+    public string Number => Value.ToString(CultureInfo.InvariantCulture)
+        .Replace("E-0", "e-", StringComparison.Ordinal).Replace("E", "e", StringComparison.Ordinal);
+
+    /// <summary>Coefficients named a, b, c ... in order.</summary>
+    public static Coefficient[] Named(params double[] values) => [.. values.Select((v, k) => new Coefficient(((char)('a' + k)).ToString(), v))];
+}
 
 /// <summary>A worked number that shows a law's use and checks its code.</summary>
 /// <param name="Inputs">One value per input, in published units.</param>
@@ -37,7 +45,12 @@ public sealed record Coefficient(string Symbol, double Value, string Unit = "", 
 /// <param name="Digits">Significant digits that must agree.</param>
 /// <param name="Basis">What the expected number rests on.</param>
 /// <param name="Source">Where it is printed, or why it must hold.</param>
-public sealed record WorkedExample(double[] Inputs, double Result, int Digits, ExampleBasis Basis, string Source);
+public sealed record WorkedExample(double[] Inputs, double Result, int Digits, ExampleBasis Basis, string Source)
+{
+    /// <summary>A number computed from the formula as written, in full precision and apart from this code.</summary>
+    public static WorkedExample Computed(double result, int digits, params double[] inputs) =>
+        new(inputs, result, digits, ExampleBasis.SelfComputed, "the formula as written");
+}
 
 /// <summary>
 /// An empirical relation that gives one property from others, sample by sample: one entry of the method catalogue.
@@ -82,8 +95,9 @@ public sealed record Law
     public required string Template { get; init; }
 
     /// <summary>The formula as text with its coefficients put in.</summary>
-    public string Text => Coefficients.Aggregate(
-        Template, (text, c) => text.Replace($"{{{c.Symbol}}}", c.Value.ToString(CultureInfo.InvariantCulture), StringComparison.Ordinal));
+    public string Text => Coefficients
+        .Aggregate(Template, (text, c) => text.Replace($"{{{c.Symbol}}}", c.Number, StringComparison.Ordinal))
+        .Replace("+ -", "- ", StringComparison.Ordinal);
 
     /// <summary>The formula as code.</summary>
     public required LawFormula Formula { get; init; }

@@ -7,9 +7,9 @@ namespace DepthStress.Core.Catalogue;
 public ref struct LawInputs
 {
     /// <summary>The most inputs a law may have.</summary>
-    public const int Most = 4;
+    public const int Most = 6;
 
-    private ReadOnlySpan<double> _a, _b, _c, _d;
+    private ReadOnlySpan<double> _a, _b, _c, _d, _e, _f;
 
     /// <summary>Number of columns.</summary>
     public int Count { get; private set; }
@@ -21,6 +21,8 @@ public ref struct LawInputs
         1 => _b,
         2 => _c,
         3 => _d,
+        4 => _e,
+        5 => _f,
         _ => throw new ArgumentOutOfRangeException(nameof(index)),
     };
 
@@ -33,7 +35,9 @@ public ref struct LawInputs
             case 1: _b = column; break;
             case 2: _c = column; break;
             case 3: _d = column; break;
-            default: throw new InvalidOperationException("A law has at most four inputs.");
+            case 4: _e = column; break;
+            case 5: _f = column; break;
+            default: throw new InvalidOperationException("A law has at most six inputs.");
         }
     }
 }

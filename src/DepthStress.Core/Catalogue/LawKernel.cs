@@ -3,6 +3,9 @@ namespace DepthStress.Core.Catalogue;
 /// <summary>Applies a law to columns: SI in, published units inside, SI out.</summary>
 public static class LawKernel
 {
+    /// <summary>Samples that are worked on together: what they need stays in the nearest cache.</summary>
+    private const int Block = 128;
+
     /// <summary>
     /// Evaluates the law for every sample. NaN in gives NaN out; a value outside the law's domain gives NaN.
     /// </summary>
@@ -21,36 +24,26 @@ public static class LawKernel
                 throw new ArgumentException("A column is not as long as the destination.", nameof(inputs));
         }
 
-        Span<double> values = stackalloc double[LawInputs.Most];
-        values = values[..inputs.Count];
-        int evaluated = 0, missing = 0, outsideDomain = 0, outsideRange = 0;
-        for (var i = 0; i < destination.Length; i++)
+        Span<double> values = stackalloc double[LawInputs.Most * Block];
+        Span<State> states = stackalloc State[Block];
+        var outcome = default(LawOutcome);
+        for (var start = 0; start < destination.Length; start += Block)
         {
-            var state = Gather(law, inputs, i, values);
-            if (state == State.Missing)
+            var results = destination.Slice(start, Math.Min(Block, destination.Length - start));
+            states.Clear();
+            for (var k = 0; k < inputs.Count; k++)
             {
-                destination[i] = double.NaN;
-                missing++;
-                continue;
+                var column = inputs[k].Length == 1 ? inputs[k] : inputs[k].Slice(start, results.Length);
+                Gather(law.Inputs[k], column, values[k..], inputs.Count, states[..results.Length]);
             }
 
-            var result = state == State.OutsideDomain ? double.NaN : law.Evaluate(values);
-            if (!law.ResultDomain.Contains(result) || !double.IsFinite(result))
-            {
-                destination[i] = double.NaN;
-                outsideDomain++;
-                continue;
-            }
-
-            destination[i] = law.Unit.ToSi(result);
-            evaluated++;
-            if (state == State.OutsideRange) outsideRange++;
+            outcome += Evaluate(law, values, inputs.Count, states, results);
         }
 
-        return new LawOutcome(evaluated, missing, outsideDomain, outsideRange);
+        return outcome;
     }
 
-    private enum State
+    private enum State : byte
     {
         Good,
         OutsideRange,
@@ -58,21 +51,49 @@ public static class LawKernel
         Missing,
     }
 
-    private static State Gather(Law law, LawInputs inputs, int sample, Span<double> values)
+    /// <summary>Puts one input of a block, in its published unit, beside the others of each sample, and keeps the worst state.</summary>
+    private static void Gather(LawInput input, ReadOnlySpan<double> column, Span<double> values, int step, Span<State> states)
     {
-        var state = State.Good;
-        for (var k = 0; k < values.Length; k++)
+        var (unit, domain, range) = (input.Unit, input.Domain, input.Range);
+        double offset = unit.Offset, factor = unit.Factor;
+        var single = column.Length == 1;
+        for (int i = 0, at = 0; i < states.Length; i++, at += step)
         {
-            var column = inputs[k];
-            var si = column.Length == 1 ? column[0] : column[sample];
-            if (double.IsNaN(si)) return State.Missing;
-            var input = law.Inputs[k];
-            var value = input.Unit.FromSi(si);
-            values[k] = value;
-            if (!input.Domain.Contains(value)) state = State.OutsideDomain;
-            else if (state == State.Good && !input.Range.Contains(value)) state = State.OutsideRange;
+            var si = column[single ? 0 : i];
+            var value = (si - offset) / factor;
+            values[at] = value;
+            if (domain.Contains(value) && range.Contains(value)) continue;
+            var state = double.IsNaN(si) ? State.Missing : domain.Contains(value) ? State.OutsideRange : State.OutsideDomain;
+            if (state > states[i]) states[i] = state;
+        }
+    }
+
+    private static LawOutcome Evaluate(Law law, ReadOnlySpan<double> values, int step, ReadOnlySpan<State> states, Span<double> results)
+    {
+        var (formula, domain) = (law.Formula, law.ResultDomain);
+        var coefficients = law.Values;
+        double offset = law.Unit.Offset, factor = law.Unit.Factor;
+        int evaluated = 0, missing = 0, outsideDomain = 0, outsideRange = 0;
+        for (int i = 0, at = 0; i < results.Length; i++, at += step)
+        {
+            var state = states[i];
+            if (state < State.OutsideDomain)
+            {
+                var result = formula(values.Slice(at, step), coefficients);
+                if (domain.Contains(result) && double.IsFinite(result))
+                {
+                    results[i] = (result * factor) + offset;
+                    evaluated++;
+                    if (state == State.OutsideRange) outsideRange++;
+                    continue;
+                }
+            }
+
+            results[i] = double.NaN;
+            if (state == State.Missing) missing++;
+            else outsideDomain++;
         }
 
-        return state;
+        return new LawOutcome(evaluated, missing, outsideDomain, outsideRange);
     }
 }

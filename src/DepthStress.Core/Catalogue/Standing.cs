@@ -34,6 +34,9 @@ public enum RockKinds
 
     /// <summary>Any sedimentary rock.</summary>
     Any = Sandstone | Shale | Limestone | Dolomite,
+
+    /// <summary>Igneous and metamorphic rock.</summary>
+    Crystalline = 16,
 }
 
 /// <summary>What the expected number of a worked example rests on.</summary>

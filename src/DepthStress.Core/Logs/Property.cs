@@ -122,4 +122,31 @@ public enum Property
 
     /// <summary>Parameter: density of the fluid in the pores the density tool sees, kg/m3.</summary>
     PoreFluidDensity,
+
+    /// <summary>Parameter: compressional slowness of the rock's matrix, s/m.</summary>
+    MatrixSlowness,
+
+    /// <summary>Parameter: compressional slowness of the fluid in the pores, s/m.</summary>
+    FluidSlowness,
+
+    /// <summary>Compressional velocity of the rock's matrix, m/s; from <see cref="MatrixSlowness"/>.</summary>
+    MatrixVelocity,
+
+    /// <summary>Compressional velocity of the fluid in the pores, m/s; from <see cref="FluidSlowness"/>.</summary>
+    FluidVelocity,
+
+    /// <summary>Parameter: what the porosity of uncompacted rock is divided by, a number of 1 or more.</summary>
+    CompactionFactor,
+
+    /// <summary>Parameter: bulk modulus of the rock's grains, Pa.</summary>
+    MineralBulkModulus,
+
+    /// <summary>Parameter: shear modulus of the rock's grains, Pa.</summary>
+    MineralShearModulus,
+
+    /// <summary>Parameter: shear velocity of the rock's matrix, m/s.</summary>
+    MatrixShearVelocity,
+
+    /// <summary>Parameter: porosity at which the grains of the rock part, v/v.</summary>
+    CriticalPorosity,
 }

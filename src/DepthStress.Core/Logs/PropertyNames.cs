@@ -22,6 +22,11 @@ public static class PropertyNames
         (Property.ShaleVolume, "shale_volume", "shale volume", Quantities.Dimension.Fraction),
         (Property.MatrixDensity, "matrix_density", "matrix density", Quantities.Dimension.Density),
         (Property.PoreFluidDensity, "fluid_density", "pore fluid density", Quantities.Dimension.Density),
+        (Property.MatrixSlowness, "matrix_slowness", "matrix slowness", Quantities.Dimension.Slowness),
+        (Property.FluidSlowness, "fluid_slowness", "pore fluid slowness", Quantities.Dimension.Slowness),
+        (Property.MatrixVelocity, "matrix_velocity", "matrix velocity", Quantities.Dimension.Velocity),
+        (Property.FluidVelocity, "fluid_velocity", "pore fluid velocity", Quantities.Dimension.Velocity),
+        (Property.CompactionFactor, "compaction_factor", "compaction factor", Quantities.Dimension.None),
         (Property.Porosity, "porosity", "porosity", Quantities.Dimension.Fraction),
         (Property.YoungsDynamic, "youngs_dynamic", "dynamic Young's modulus", Quantities.Dimension.Pressure),
         (Property.PoissonDynamic, "poisson_dynamic", "dynamic Poisson's ratio", Quantities.Dimension.None),
@@ -30,6 +35,10 @@ public static class PropertyNames
         (Property.Ucs, "ucs", "unconfined compressive strength", Quantities.Dimension.Pressure),
         (Property.FrictionAngle, "friction_angle", "angle of internal friction", Quantities.Dimension.Angle),
         (Property.TensileStrength, "tensile_strength", "tensile strength", Quantities.Dimension.Pressure),
+        (Property.MineralBulkModulus, "mineral_bulk_modulus", "bulk modulus of the mineral", Quantities.Dimension.Pressure),
+        (Property.MineralShearModulus, "mineral_shear_modulus", "shear modulus of the mineral", Quantities.Dimension.Pressure),
+        (Property.MatrixShearVelocity, "matrix_shear_velocity", "matrix shear velocity", Quantities.Dimension.Velocity),
+        (Property.CriticalPorosity, "critical_porosity", "critical porosity", Quantities.Dimension.Fraction),
         (Property.Biot, "biot", "Biot's coefficient", Quantities.Dimension.None),
         (Property.VerticalStress, "sv", "vertical stress", Quantities.Dimension.Pressure),
         (Property.NormalPressure, "normal_pressure", "normal pore pressure", Quantities.Dimension.Pressure),
@@ -39,6 +48,10 @@ public static class PropertyNames
         (Property.MeanDensityAbove, "mean_density_above", "mean density above the log", Quantities.Dimension.Density),
         (Property.ShallowDensity, "shallow_density", "density above the log", Quantities.Dimension.Density),
     ];
+
+    /// <summary>The property of a name in well files, or null.</summary>
+    public static Property? Find(string name) =>
+        Array.Find(Known, k => k.Name == name) is { Name: not null } known ? known.Property : null;
 
     /// <summary>The property's name in well files.</summary>
     public static string Name(Property property) => Of(property).Name;

@@ -28,17 +28,10 @@ internal static class LawColumns
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }
 
-    /// <summary>The settings that stand for a parameter, or null when the property is a column.</summary>
-    public static double? Parameter(Property property, StageSettings settings) => property switch
-    {
-        Property.MatrixDensity => settings.Porosity.MatrixDensity is { IsSet: true } s ? s.Value : double.NaN,
-        Property.PoreFluidDensity => settings.Porosity.FluidDensity is { IsSet: true } s ? s.Value : double.NaN,
-        _ => null,
-    };
 
     private static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
     {
-        if (Parameter(property, run.Settings) is { } value) return new double[] { value };
+        if (LawParameters.Of(property) is { } parameter) return new[] { parameter.Value(run.Settings) };
         return table.Has(property) ? table.Read(property).Slice(run.Start, run.Length) : Missing;
     }
 

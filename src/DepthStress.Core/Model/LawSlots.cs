@@ -29,12 +29,15 @@ public static class LawSlots
         new(Property.Biot, "[biot] coefficient", true, s => s.Biot.Coefficient),
     ];
 
-    /// <summary>Where a method of pore pressure is recorded; the choice itself is no law.</summary>
+    /// <summary>Where a method of pore pressure is recorded; the choice itself is a word.</summary>
     public static LawSlot PorePressure { get; } = new(Property.PorePressure, "[pore_pressure] method", false, _ => default);
 
-    /// <summary>Where a method of density above the log is recorded.</summary>
+    /// <summary>Where a method of density above the log is recorded; the choice itself may be more than a law.</summary>
     public static LawSlot AboveLog { get; } = new(Property.ShallowDensity, "[overburden] above_log", false, _ => default);
 
     /// <summary>All whose choice is a law.</summary>
     public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, .. Rock];
+
+    /// <summary>Every place of the well file that takes an entry of the catalogue.</summary>
+    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure];
 }

@@ -9,6 +9,8 @@ namespace DepthStress.Core.Model;
 /// <summary>The method catalogue: every published relation the program knows, once, put together from the stages' own entries.</summary>
 public static class MethodCatalogue
 {
+    private const int MostListed = 6;
+
     /// <summary>Every entry, grouped by what it gives.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [
@@ -18,6 +20,7 @@ public static class MethodCatalogue
         .. StaticPoissonMethods.All,
         .. StrengthMethods.All,
         .. FrictionMethods.All,
+        .. TensileMethods.All,
         .. BiotMethods.All,
         .. ShallowDensityMethods.All,
         .. PressureMethods.All,
@@ -28,4 +31,13 @@ public static class MethodCatalogue
 
     /// <summary>The entries that give a property.</summary>
     public static IEnumerable<Law> For(Property property) => All.Where(l => l.Predicts == property);
+
+    /// <summary>The ids that give a property, for messages; where they are many, the first ones and how to list them all.</summary>
+    public static string Choices(Property property)
+    {
+        var ids = For(property).Select(l => l.Id).ToList();
+        return ids.Count <= MostListed
+            ? string.Join(", ", ids)
+            : $"{string.Join(", ", ids.Take(MostListed - 2))} and others, see \"depthstress methods --for {PropertyNames.Name(property)}\"";
+    }
 }

@@ -1,7 +1,6 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
-using DepthStress.Core.Logs;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Core.Model;
@@ -61,7 +60,7 @@ public static class SetupCheck
         var choice = slot.Choice(scope.Settings);
         if (!choice.IsSet)
         {
-            if (slot.Required) scope.Missing(slot.Key, $"methods: {string.Join(", ", MethodCatalogue.For(slot.Property).Select(l => l.Id))}");
+            if (slot.Required) scope.Missing(slot.Key, $"a value or a method: {MethodCatalogue.Choices(slot.Property)}");
             return;
         }
 
@@ -75,8 +74,8 @@ public static class SetupCheck
 
         foreach (var input in law.Inputs)
         {
-            if (LawColumns.Parameter(input.Property, scope.Settings) is double.NaN)
-                scope.Error(choice.Source.Position, $"{slot.Key} = \"{law.Id}\" needs {ParameterKey(input.Property)}{scope.Owner}");
+            if (LawParameters.Of(input.Property) is { } parameter && double.IsNaN(parameter.Value(scope.Settings)))
+                scope.Error(choice.Source.Position, $"{slot.Key} = \"{law.Id}\" needs {parameter.Key}{scope.Owner}");
         }
     }
 
@@ -109,10 +108,4 @@ public static class SetupCheck
             scope.Error(across.Source.Position, "strain_along_shmax is below strain_along_shmin: exchange them and turn shmax_azimuth by 90 deg");
         }
     }
-
-    private static string ParameterKey(Property property) => property switch
-    {
-        Property.MatrixDensity => "[porosity] matrix_density",
-        _ => "[porosity] fluid_density",
-    };
 }

@@ -51,12 +51,18 @@ internal static class LawReader
     }
 
     /// <summary>Declares the keys of a law of the user's own.</summary>
-    public static LawParts Parts(ISection s, Property predicts) => new(
+    public static LawParts Parts(ISection s, Property predicts) => Parts(s, predicts, t => t.Choice(
+        "input",
+        Setting.Default(PropertyNames.UsualInput(predicts)),
+        [.. PropertyNames.LawInputsBefore(predicts).Select(p => (PropertyNames.Name(p), p))],
+        $"the property it starts from, by default {PropertyNames.Name(PropertyNames.UsualInput(predicts))}"));
+
+    private static LawParts Parts(ISection s, Property predicts, Func<ISection, Setting<Property>> input) => new(
         s.Choice("law", default, Shapes, "shape of the relation"),
         s.Number("factor", default, Interval.All, "the factor"),
         s.Number("exponent", default, Interval.All, "the exponent of a power law"),
         s.Quantity("offset", default, Sign.Any, PropertyNames.Dimension(predicts), "what a linear law adds"),
-        s.Choice("input", new Setting<Property>(PropertyNames.UsualInput(predicts), SettingSource.Default), Inputs(predicts), $"the property it starts from, by default {PropertyNames.Name(PropertyNames.UsualInput(predicts))}"),
+        input(s),
         s.Text("input_unit", default, "power: the unit of the input that the factor holds for"),
         s.Text("unit", default, "the unit of the result; a power law's factor holds for it"));
 
@@ -66,11 +72,11 @@ internal static class LawReader
         if (MethodCatalogue.Find(text.Value) is { } law)
         {
             if (law.Predicts == predicts) return law;
-            diagnostics.Error(text.Position, $"found \"{law.Id}\", which gives {PropertyNames.Title(law.Predicts)}; expected {key} = a method for {PropertyNames.Title(predicts)}: {string.Join(", ", ids)}");
+            diagnostics.Error(text.Position, $"found \"{law.Id}\", which gives {PropertyNames.Title(law.Predicts)}; expected {key} = a method for {PropertyNames.Title(predicts)}: {MethodCatalogue.Choices(predicts)}");
             return null;
         }
 
-        diagnostics.Error(text.Position, $"found the unknown method \"{Words.Short(text.Value)}\", expected {key} = one of {string.Join(", ", ids)}{NearestName.Hint(text.Value, ids)}");
+        diagnostics.Error(text.Position, $"found the unknown method \"{Words.Short(text.Value)}\", expected {key} = one of {MethodCatalogue.Choices(predicts)}{NearestName.Hint(text.Value, ids)}");
         return null;
     }
 
@@ -96,7 +102,7 @@ internal static class LawReader
 
     private static Law? UserGiven(ReadingSection section, string key, Property predicts, DiagnosticBag diagnostics)
     {
-        var (shape, factor, exponent, offset, input, inputSymbol, symbol) = Parts(section, predicts);
+        var (shape, factor, exponent, offset, input, inputSymbol, symbol) = Parts(section, predicts, s => InputProperty(s, key, predicts, diagnostics));
         var inputUnit = Unit(inputSymbol, "input_unit", PropertyNames.Dimension(input.Value), diagnostics);
         var unit = Unit(symbol, "unit", PropertyNames.Dimension(predicts), diagnostics);
         if (!shape.IsSet && section.SourceOf("law") == SettingSource.NotSet) Missing("law", "\"linear\" or \"power\"");
@@ -146,9 +152,25 @@ internal static class LawReader
         return null;
     }
 
-    /// <summary>What a law may start from: everything the chain knows before the property.</summary>
-    private static List<(string, Property)> Inputs(Property predicts) =>
-        [.. PropertyNames.LawInputsBefore(predicts).Select(p => (PropertyNames.Name(p), p))];
+    /// <summary>What a law starts from: anything the chain knows before the law's result.</summary>
+    private static Setting<Property> InputProperty(ISection section, string key, Property predicts, DiagnosticBag diagnostics)
+    {
+        var usual = Setting.Default(PropertyNames.UsualInput(predicts));
+        var text = section.Text("input", default, "the property it starts from");
+        if (!text.IsSet) return usual;
+        var known = PropertyNames.LawInputsBefore(predicts).ToList();
+        var names = known.ConvertAll(PropertyNames.Name);
+        if (PropertyNames.Find(text.Value) is not { } property)
+        {
+            diagnostics.Error(text.Source.Position, $"found \"{text.Value}\", expected input = one of {Words.Quoted(names)}{NearestName.Hint(text.Value, names)}");
+            return usual;
+        }
+
+        if (known.Contains(property)) return new Setting<Property>(property, text.Source);
+        var reason = property == predicts ? "which is what the law gives" : $"which is not known yet where {PropertyNames.Title(predicts)} is computed";
+        diagnostics.Error(text.Source.Position, $"{key}: found the input \"{text.Value}\", {reason}; expected one of {Words.Quoted(names)}");
+        return usual;
+    }
 
     private static string ConstantWords(Property predicts) =>
         PropertyNames.Dimension(predicts) is Dimension.None or Dimension.Fraction

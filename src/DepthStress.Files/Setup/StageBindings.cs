@@ -35,6 +35,9 @@ internal static class StageBindings
         Porosity = s.Law("porosity", c.Porosity, Property.Porosity, "relation that gives porosity"),
         MatrixDensity = s.Quantity("matrix_density", c.MatrixDensity, Sign.Positive, Dimension.Density, "density of the matrix"),
         FluidDensity = s.FluidDensity("fluid_density", c.FluidDensity, "density of the fluid the density tool sees"),
+        MatrixSlowness = s.Quantity("matrix_slowness", c.MatrixSlowness, Sign.Positive, Dimension.Slowness, "compressional slowness of the matrix"),
+        FluidSlowness = s.Quantity("fluid_slowness", c.FluidSlowness, Sign.Positive, Dimension.Slowness, "compressional slowness of the pore fluid"),
+        CompactionFactor = s.Number("compaction_factor", c.CompactionFactor, new Interval(1, 5), "what sonic porosity is divided by in rock that is not compacted"),
     };
 
     private static ModuliSettings Moduli(ISection s, ModuliSettings c) => c with
@@ -53,6 +56,10 @@ internal static class StageBindings
     private static BiotSettings Biot(ISection s, BiotSettings c) => c with
     {
         Coefficient = s.Law("coefficient", c.Coefficient, Property.Biot, "Biot's coefficient, a number or a relation"),
+        MineralBulkModulus = s.Quantity("mineral_bulk_modulus", c.MineralBulkModulus, Sign.Positive, Dimension.Pressure, "bulk modulus of the grains"),
+        MineralShearModulus = s.Quantity("mineral_shear_modulus", c.MineralShearModulus, Sign.Positive, Dimension.Pressure, "shear modulus of the grains"),
+        MatrixShearVelocity = s.Quantity("matrix_shear_velocity", c.MatrixShearVelocity, Sign.Positive, Dimension.Velocity, "shear velocity of the matrix"),
+        CriticalPorosity = s.Number("critical_porosity", c.CriticalPorosity, new Interval(0.01, 1), "porosity at which the grains part"),
     };
 
     private static HorizontalStressSettings HorizontalStress(ISection s, HorizontalStressSettings c) => c with

@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using DepthStress.Core.Catalogue;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -159,7 +160,7 @@ public static class StarterFile
         var (clean, shale) = (Math.Round(SortedArrayStatistics.Percentile(gamma, 5)), Math.Round(SortedArrayStatistics.Percentile(gamma, 95)));
         text.AppendLine(CultureInfo.InvariantCulture, $"""
             [shale]
-            volume = "linear-gamma-ray"           # or {string.Join(", ", MethodCatalogue.For(Property.ShaleVolume).Select(l => l.Id).Where(i => i != "linear-gamma-ray"))}
+            volume = "linear-gamma-ray"           # or {string.Join(", ", MethodCatalogue.For(Property.ShaleVolume).Where(l => l.Standing == Standing.Confirmed).Select(l => l.Id).Where(i => i != "linear-gamma-ray"))}
             {$"clean = \"{clean} gAPI\"",-38}# the log's 5th percentile, a starting point
             {$"shale = \"{shale} gAPI\"",-38}# the log's 95th percentile, a starting point
             """);

@@ -41,9 +41,9 @@ public class SetupCheckTests
     [Fact]
     public void Every_required_choice_is_asked_for_with_the_methods_that_fit() => Assert.Equal(
         [
-            "well.toml(1,1): error: [moduli] static_youngs is not set; expected methods: lacy-1997-sandstone, lacy-1997-shale, lacy-1997-combined, horsrud-2001-shale-modulus",
-            "well.toml(1,1): error: [moduli] static_poisson is not set; expected methods: equal-to-dynamic",
-            "well.toml(1,1): error: [biot] coefficient is not set; expected methods: krief-1990-biot",
+            "well.toml(1,1): error: [moduli] static_youngs is not set; expected a value or a method: lacy-1997-sandstone, lacy-1997-shale, lacy-1997-combined, ohen-2003-shale and others, see \"depthstress methods --for youngs_static\"",
+            "well.toml(1,1): error: [moduli] static_poisson is not set; expected a value or a method: equal-to-dynamic",
+            "well.toml(1,1): error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"",
             "well.toml(1,1): error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
         ],
         Report(new StageSettings()));

@@ -11,7 +11,7 @@ public sealed class WellFileValueTests
     [InlineData(
         "[biot]", "[bito]",
         "well.toml(18,2): error: found the unknown section [bito], expected one of accept_unverified, well, logs, survey, zones, lithology, shale, porosity, moduli, strength, biot, pore_pressure, horizontal_stress, overburden, layers, output; did you mean \"biot\"?",
-        "well.toml: error: [biot] coefficient is not set; expected methods: krief-1990-biot")]
+        "well.toml: error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"")]
     [InlineData(
         "\"rotary table\"", "\"rotary tabel\"",
         "well.toml(3,9): error: found \"rotary tabel\", expected datum = one of \"rotary table\", \"ground\", \"sea level\"; did you mean \"rotary table\"?")]

@@ -14,7 +14,12 @@ internal static class LawFindings
         {
             var (slot, law) = uses.Key;
             var total = uses.Aggregate(default(LawOutcome), (sum, use) => sum + use.Outcome);
-            if (total.OutsideDomain > 0)
+            if (total is { OutsideDomain: > 0, Evaluated: 0 })
+            {
+                yield return new Finding(
+                    Severity.Warning, $"{slot.Key}: {law.Id} gives no result at any sample, it has no meaning for their values", total.OutsideDomain, []);
+            }
+            else if (total.OutsideDomain > 0)
             {
                 yield return new Finding(
                     Severity.Warning, $"{slot.Key}: {law.Id} has no meaning for these samples, the result is missing", total.OutsideDomain, []);
@@ -28,7 +33,7 @@ internal static class LawFindings
 
             foreach (var input in law.Inputs)
             {
-                if (LawColumns.Parameter(input.Property, model.Runs[0].Settings) is not null || model.Values.Has(input.Property)) continue;
+                if (LawParameters.Of(input.Property) is not null || model.Values.Has(input.Property)) continue;
                 yield return Finding.General(
                     Severity.Warning, $"{slot.Key}: {law.Id} needs {Name(input.Property)}, which is not there; the result is missing");
             }
