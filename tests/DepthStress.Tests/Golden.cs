@@ -9,14 +9,19 @@ namespace DepthStress.Tests;
 /// </summary>
 internal static class Golden
 {
-    private static readonly string Folder = Path.Combine(
-        typeof(Golden).Assembly.GetCustomAttributes<AssemblyMetadataAttribute>().Single(a => a.Key == "RepoRoot").Value!,
-        "tests", "DepthStress.Tests", "Golden");
+    /// <summary>The root of the repository.</summary>
+    public static string RepoRoot { get; } =
+        typeof(Golden).Assembly.GetCustomAttributes<AssemblyMetadataAttribute>().Single(a => a.Key == "RepoRoot").Value!;
+
+    /// <summary>True when kept files are to be rewritten.</summary>
+    public static bool Updating { get; } = Environment.GetEnvironmentVariable("DEPTHSTRESS_UPDATE_GOLDEN") == "1";
+
+    private static readonly string Folder = Path.Combine(RepoRoot, "tests", "DepthStress.Tests", "Golden");
 
     public static void Match(string name, string text)
     {
         var path = Path.Combine(Folder, name);
-        if (Environment.GetEnvironmentVariable("DEPTHSTRESS_UPDATE_GOLDEN") == "1")
+        if (Updating)
         {
             Assert.NotEqual("true", Environment.GetEnvironmentVariable("CI"));
             Directory.CreateDirectory(Folder);
