@@ -19,7 +19,7 @@ internal static class CheckAction
         var units = well.File.Sections.Output.Units.Value;
         terminal.Output.WriteLine(FormattableString.Invariant($"Well {well.File.Setup.Name}: {well.Model.Count} samples from {string.Join(", ", well.Logs.Files.Select(f => f.Name))}"));
         terminal.Output.WriteLine();
-        CoveragePrinter.Print(terminal, well.Logs, units);
+        CoveragePrinter.Print(terminal, well.Logs, well.Model, units);
         terminal.Output.WriteLine();
         FeedPrinter.Print(terminal, well.Model);
         terminal.Output.WriteLine();

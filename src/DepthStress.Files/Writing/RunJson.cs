@@ -5,6 +5,7 @@ using System.Text.Json.Nodes;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Setup;
 
@@ -49,7 +50,8 @@ public static class RunJson
                 ["file"] = i.Name,
                 ["sha256"] = i.Sha256,
             })),
-            ["curves"] = Array(logs.Logs.Curves.Select(Curve)),
+            ["curves"] = Array(CurveQuality.Of(model).Select(Curve)),
+            ["plausibility"] = Array(Plausibility.Of(model).Select(s => (JsonNode)units.Show(s))),
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
@@ -69,20 +71,24 @@ public static class RunJson
         return json;
     }
 
-    private static JsonObject Curve(Core.Logs.Curve curve) => new()
+    private static JsonObject Curve(CurveQuality quality) => new()
     {
-        ["role"] = curve.Role.Id,
-        ["source"] = curve.Source,
-        ["origins"] = Array(curve.Origins.Runs
-            .Where(r => r.Origin != Core.Logs.SampleOrigin.None)
-            .GroupBy(r => (r.Origin, r.Step))
-            .Select(g => new JsonObject
-            {
-                ["origin"] = Core.Logs.SampleOrigins.Name(g.Key.Origin),
-                ["step"] = g.Key.Step,
-                ["samples"] = g.Sum(r => r.End - r.Start),
-            })),
+        ["role"] = quality.Role.Id,
+        ["source"] = quality.Source,
+        ["present"] = Math.Round(quality.Present, 6),
+        ["top_md_m"] = Number(quality.Top),
+        ["base_md_m"] = Number(quality.Base),
+        ["gaps"] = quality.Gaps,
+        ["longest_gap_m"] = Number(quality.LongestGap),
+        ["origins"] = Array(quality.Origins.Select(o => new JsonObject
+        {
+            ["origin"] = Core.Logs.SampleOrigins.Name(o.Origin),
+            ["step"] = o.Step,
+            ["samples"] = o.Samples,
+        })),
     };
+
+    private static JsonNode? Number(double value) => double.IsNaN(value) ? null : Math.Round(value, 4);
 
     private static JsonObject Method(IGrouping<(LawSlot Slot, Law Law), LawUse> uses)
     {

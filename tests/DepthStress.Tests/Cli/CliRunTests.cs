@@ -131,7 +131,7 @@ public sealed class CliRunTests : IDisposable
         Assert.Equal((0, ""), (result.Code, result.Error));
         Assert.Equal(["logs.csv", "well.toml"], _cli.Files(".").Keys);
         Assert.Empty(Directory.EnumerateDirectories(_cli.Folder.Path));
-        Assert.Contains("compressional   DTC      us/ft", result.Output, StringComparison.Ordinal);
+        Assert.Contains("compressional  DTC     us/ft", result.Output, StringComparison.Ordinal);
         Assert.Contains("no curve for: caliper, bit_size,", result.Output, StringComparison.Ordinal);
     }
 

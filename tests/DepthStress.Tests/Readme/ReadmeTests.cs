@@ -62,6 +62,15 @@ public sealed partial class ReadmeTests : IDisposable
     }
 
     [Fact]
+    public async Task The_layer_table_of_the_sample_well_is_as_agreed()
+    {
+        CopySampleLogs();
+        using var output = new StringWriter();
+        Assert.Equal(0, await Application.RunAsync(["run", "sample-logs/quillback-4.toml"], new Terminal(output, output, _folder.Path), CancellationToken.None));
+        Golden.Match("sample-layers.csv", _folder.Read("sample-logs/quillback-4-results/layers.csv"));
+    }
+
+    [Fact]
     public void The_two_commands_stand_in_the_readme_as_the_check_script_runs_them()
     {
         var script = File.ReadAllText(Path.Combine(Golden.RepoRoot, ".ci", "run"));
