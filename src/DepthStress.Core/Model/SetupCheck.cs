@@ -20,6 +20,9 @@ public static class SetupCheck
                 diagnostics.Error(rule.Position, $"[shale] is set for lithology \"{rule.Name}\", expected it in the well or a zone: lithology rules hold by shale volume");
         }
 
+        if (setup.Overburden.AboveLog is { IsSet: true, Value.Law: { } above } choice)
+            ReportRecalled(setup, LawSlots.AboveLog, above, choice.Source.Position, diagnostics.Error);
+
         var reported = new HashSet<(SourcePosition, string)>();
         foreach (var scope in Scopes(setup, (position, text) =>
         {
@@ -55,6 +58,12 @@ public static class SetupCheck
         ReportStrains(scope);
     }
 
+    private static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
+    {
+        if (law.Standing == Standing.FromMemory && !setup.AcceptUnverified)
+            error(position, $"{slot.Key} = \"{law.Id}\": its coefficients were recalled, not read in the source; set accept_unverified = true to use it");
+    }
+
     private static void ReportLaw(CheckScope scope, LawSlot slot)
     {
         var choice = slot.Choice(scope.Settings);
@@ -65,13 +74,7 @@ public static class SetupCheck
         }
 
         var law = choice.Value;
-        if (law.Standing == Standing.FromMemory && !scope.Setup.AcceptUnverified)
-        {
-            scope.Error(
-                choice.Source.Position,
-                $"{slot.Key} = \"{law.Id}\": its coefficients were recalled, not read in the source; set accept_unverified = true to use it");
-        }
-
+        ReportRecalled(scope.Setup, slot, law, choice.Source.Position, scope.Error);
         foreach (var input in law.Inputs)
         {
             if (LawParameters.Of(input.Property) is { } parameter && double.IsNaN(parameter.Value(scope.Settings)))

@@ -49,6 +49,17 @@ public class SetupCheckTests
         Report(new StageSettings()));
 
     [Fact]
+    public void A_recalled_method_above_the_log_needs_consent_too()
+    {
+        var recalled = Method("traugott-1997") with { Standing = Standing.FromMemory };
+        var setup = Setup with { Overburden = new OverburdenSettings { AboveLog = Chosen<ShallowDensity>(new MeanDensityLaw(recalled), 9) } };
+        Assert.Equal(
+            ["well.toml(9,1): error: [overburden] above_log = \"traugott-1997\": its coefficients were recalled, not read in the source; set accept_unverified = true to use it"],
+            Report(setup));
+        Assert.Empty(Report(setup with { AcceptUnverified = true }));
+    }
+
+    [Fact]
     public void A_recalled_method_needs_consent()
     {
         var setup = Setup with
