@@ -24,12 +24,13 @@ internal static class BarrierPrinter
         if (double.IsNaN(target.Shmin)) return $"Target {target.Zone}: no Shmin inside it, so nothing can be said about barriers.";
         var limit = units.Show(Quantity.Pressure(settings.BarrierContrast.Value));
         return $"Target {target.Zone}, mean Shmin {units.Show(Quantity.Pressure(target.Shmin))}: "
-            + $"barrier above {Words(target.Above, units, limit)}; below {Words(target.Below, units, limit)}.";
+            + $"barrier above {Words(target.Above, target.AboveUnknown, units, limit)}; below {Words(target.Below, target.BelowUnknown, units, limit)}.";
     }
 
-    private static string Words(StressBarrier? barrier, UnitSystem units, string limit)
+    private static string Words(StressBarrier? barrier, bool unknown, UnitSystem units, string limit)
     {
-        if (barrier is null) return $"none (no layer with {limit} more at equal depth)";
+        if (barrier is null && unknown) return $"unknown (rock without a layer or Shmin comes before any layer with {limit} more at equal depth)";
+        if (barrier is null) return $"none in the log (no layer with {limit} more at equal depth)";
         var (unit, decimals) = units.UnitFor(Dimension.Length);
         string Depth(double si) => unit.FromSi(si).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
         var place = barrier.Distance < 0.01 ? "" : $", {units.Show(Quantity.Length(barrier.Distance))} away";

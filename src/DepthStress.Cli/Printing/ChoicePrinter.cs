@@ -26,12 +26,14 @@ internal static class ChoicePrinter
         {
             string Change(double si) => unit.FromSi(si).ToString(signed, CultureInfo.InvariantCulture);
             table.AddRow(
-                Markup.Escape(s.Zone < 0 ? "no zone" : model.ZoneName(s.Zone)),
+                Markup.Escape(s.Zone < 0 ? (model.Setup.Zones.Count == 0 ? "whole log" : "no zone") : model.ZoneName(s.Zone)),
                 unit.FromSi(s.Shmin).ToString(format, CultureInfo.InvariantCulture),
                 Change(s.PoissonLower), Change(s.PoissonHigher), Change(s.BiotLower), Change(s.BiotHigher));
         }
 
         terminal.Tables().Write(table);
+        if (sensitivities.Sum(s => s.Held) is > 0 and var held)
+            terminal.Output.WriteLine(FormattableString.Invariant($"In {held} samples a shifted value was held at its limit: Poisson's ratio at 0.5 at most, Biot's coefficient at 0 to 1."));
         terminal.Output.WriteLine();
     }
 

@@ -40,6 +40,12 @@ internal static class PictureChoice
             return;
         }
 
+        if (scales.ContainsKey(curve.Column.Id))
+        {
+            diagnostics.Error(scale.Position, $"[[output.scales]]: found a second scale for \"{curve.Column.Id}\", expected one");
+            return;
+        }
+
         var unit = curve.Column.In(units).Unit;
         if (End(scale.Left, unit, diagnostics) is not { } left || End(scale.Right, unit, diagnostics) is not { } right) return;
         if (left == right) diagnostics.Error(scale.Position, "[[output.scales]]: found the same value left and right, expected two values");

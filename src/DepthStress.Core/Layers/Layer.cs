@@ -6,10 +6,11 @@ namespace DepthStress.Core.Layers;
 /// <param name="Top">At the first sample that has one.</param>
 /// <param name="Base">At the last sample that has one.</param>
 /// <param name="Mean">Mean over true vertical thickness.</param>
-public readonly record struct LayerProfile(double Top, double Base, double Mean)
+/// <param name="Depth">True vertical depth that the mean stands for: the mean depth of the samples that have a value, m.</param>
+public readonly record struct LayerProfile(double Top, double Base, double Mean, double Depth)
 {
     /// <summary>No value.</summary>
-    public static LayerProfile None { get; } = new(double.NaN, double.NaN, double.NaN);
+    public static LayerProfile None { get; } = new(double.NaN, double.NaN, double.NaN, double.NaN);
 }
 
 /// <summary>One layer: its geometry, and its properties averaged over true vertical thickness, in SI.</summary>

@@ -47,7 +47,7 @@ public static class LayerBuilder
             Samples = Enumerable.Range(bounds.Start, bounds.End - bounds.Start).Count(i => model.Usable[i]),
             NotMeasured = NotMeasured(model, bounds, weights),
             Means = Averaged.Where(model.Values.Has).ToDictionary(p => p, p => Mean(Column(model, p, bounds), weights.AsSpan(bounds.Start))),
-            Profiles = Profiled.Where(model.Values.Has).ToDictionary(p => p, p => Profile(Column(model, p, bounds), weights.AsSpan(bounds.Start))),
+            Profiles = Profiled.Where(model.Values.Has).ToDictionary(p => p, p => Profile(Column(model, p, bounds), weights.AsSpan(bounds.Start), Column(model, Property.TrueVerticalDepth, bounds))),
         };
     }
 
@@ -74,12 +74,23 @@ public static class LayerBuilder
         return total > 0 ? sum / total : double.NaN;
     }
 
-    private static LayerProfile Profile(ReadOnlySpan<double> values, ReadOnlySpan<double> weights)
+    private static LayerProfile Profile(ReadOnlySpan<double> values, ReadOnlySpan<double> weights, ReadOnlySpan<double> tvd)
     {
         int first = 0, last = values.Length - 1;
         while (first < values.Length && double.IsNaN(values[first])) first++;
         while (last >= 0 && double.IsNaN(values[last])) last--;
-        return last < 0 ? LayerProfile.None : new LayerProfile(values[first], values[last], Mean(values, weights));
+        return last < 0 ? LayerProfile.None : new LayerProfile(values[first], values[last], Mean(values, weights), Depth(values, weights, tvd));
+    }
+
+    private static double Depth(ReadOnlySpan<double> values, ReadOnlySpan<double> weights, ReadOnlySpan<double> tvd)
+    {
+        var depths = tvd.ToArray();
+        for (var i = 0; i < depths.Length; i++)
+        {
+            if (double.IsNaN(values[i])) depths[i] = double.NaN;
+        }
+
+        return Mean(depths, weights);
     }
 
     private static int MostOf(EarthModel model, LayerBounds bounds, double[] weights)

@@ -21,47 +21,68 @@ public sealed record StressBarrier(
 /// <param name="Below">The nearest barrier below, or null.</param>
 public sealed record StressTarget(string Zone, double Shmin, StressBarrier? Above, StressBarrier? Below)
 {
+    /// <summary>Edges of layers this close are one, m.</summary>
+    private const double SameEdge = 1e-6;
+
+    /// <summary>True when rock of unknown Shmin comes before any barrier above.</summary>
+    public bool AboveUnknown { get; private init; }
+
+    /// <summary>True when rock of unknown Shmin comes before any barrier below.</summary>
+    public bool BelowUnknown { get; private init; }
+
     /// <summary>
     /// Finds the barriers of every target zone: going away from the target, the first layer whose mean Shmin exceeds the
     /// target's at equal depth by the wanted contrast, together with the layers behind it that do so too. "At equal depth"
-    /// takes the target's mean Shmin gradient below the ground or sea surface, so that depth alone makes no barrier. Layers
-    /// without stress end the search: nobody knows what they hold.
+    /// takes the target's mean Shmin gradient below the ground or sea surface, so that depth alone makes no barrier. A layer
+    /// without stress or a part of the log that lies in no layer ends the search: nobody knows what it holds.
     /// </summary>
     public static IReadOnlyList<StressTarget> Find(EarthModel model, LayerTable table, LayerSettings settings)
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(table);
         ArgumentNullException.ThrowIfNull(settings);
-        var targets = new List<StressTarget>();
-        foreach (var zone in model.Setup.Zones.Where(z => z.Target))
-        {
-            var layers = table.Layers;
-            var inside = Enumerable.Range(0, layers.Count).Where(k => layers[k].Zone == zone.Name).ToList();
-            var surface = model.Setup.Frame.SurfaceTvd;
-            var (shmin, gradient) = (Mean(inside.Select(k => layers[k]), Least), Mean(inside.Select(k => layers[k]), l => Least(l) / (Middle(l) - surface)));
-            double Contrast(Layer layer) => Least(layer) - (gradient * (Middle(layer) - surface));
-            targets.Add(double.IsNaN(shmin)
-                ? new StressTarget(zone.Name, double.NaN, null, null)
-                : new StressTarget(
-                    zone.Name,
-                    shmin,
-                    Nearest(layers, inside[0] - 1, -1, Contrast, layers[inside[0]].TopTvd, settings),
-                    Nearest(layers, inside[^1] + 1, 1, Contrast, layers[inside[^1]].BaseTvd, settings)));
-        }
-
-        return targets;
+        return [.. model.Setup.Zones.Where(z => z.Target).Select(z => Find(z.Name, model, table.Layers, settings.BarrierContrast.Value))];
     }
 
-    private static StressBarrier? Nearest(
-        IReadOnlyList<Layer> layers, int start, int step, Func<Layer, double> contrast, double edge, LayerSettings settings)
+    private static StressTarget Find(string name, EarthModel model, IReadOnlyList<Layer> layers, double least)
     {
-        bool Inside(int k) => k >= 0 && k < layers.Count;
-        var least = settings.BarrierContrast.Value;
-        var first = start;
-        while (Inside(first) && contrast(layers[first]) < least) first += step;
-        if (!Inside(first) || double.IsNaN(contrast(layers[first]))) return null;
+        var inside = Enumerable.Range(0, layers.Count).Where(k => layers[k].Zone == name).ToList();
+        var shmin = Mean(inside.Select(k => layers[k]), Least);
+        if (double.IsNaN(shmin)) return new StressTarget(name, double.NaN, null, null);
+        var surface = model.Setup.Frame.SurfaceTvd;
+        double Below(Layer layer) => layer.Profile(Property.MinHorizontalStress).Depth - surface;
+        var gradient = Mean(inside.Select(k => layers[k]), l => Least(l) / Below(l));
+        double Contrast(Layer layer) => Least(layer) - (gradient * Below(layer));
+        var above = Nearest(layers, inside[0], -1, Contrast, least, out var aboveUnknown);
+        var below = Nearest(layers, inside[^1], 1, Contrast, least, out var belowUnknown);
+        var first = Array.IndexOf(model.Usable, true);
+        var last = Array.LastIndexOf(model.Usable, true);
+        var tvd = model.Values.Read(Property.TrueVerticalDepth);
+        return new StressTarget(name, shmin, above, below)
+        {
+            AboveUnknown = above is null && (aboveUnknown || layers[0].TopTvd > tvd[first] + SameEdge),
+            BelowUnknown = below is null && (belowUnknown || layers[^1].BaseTvd < tvd[last] - SameEdge),
+        };
+    }
+
+    /// <summary>Walks from a layer of the target to the nearest barrier; null when rock of unknown stress or the end of the layers comes first.</summary>
+    private static StressBarrier? Nearest(
+        IReadOnlyList<Layer> layers, int target, int step, Func<Layer, double> contrast, double least, out bool unknown)
+    {
+        bool Touches(int k)
+        {
+            var (upper, lower) = (Math.Min(k, k + step), Math.Max(k, k + step));
+            return upper >= 0 && lower < layers.Count && Math.Abs(layers[lower].TopTvd - layers[upper].BaseTvd) <= SameEdge;
+        }
+
+        var at = target;
+        while (Touches(at) && contrast(layers[at + step]) < least) at += step;
+        unknown = at + step >= 0 && at + step < layers.Count;
+        if (!Touches(at) || double.IsNaN(contrast(layers[at + step]))) return null;
+        unknown = false;
+        var first = at + step;
         var last = first;
-        while (Inside(last + step) && contrast(layers[last + step]) >= least) last += step;
+        while (Touches(last) && contrast(layers[last + step]) >= least) last += step;
 
         var (top, bottom) = (Math.Min(first, last), Math.Max(first, last));
         var barrier = layers.Skip(top).Take(bottom - top + 1).ToList();
@@ -70,7 +91,7 @@ public sealed record StressTarget(string Zone, double Shmin, StressBarrier? Abov
             barrier[0].TopMd,
             barrier[^1].BaseMd,
             barrier.Sum(Thickness),
-            Math.Abs(edge - (step < 0 ? barrier[^1].BaseTvd : barrier[0].TopTvd)),
+            Math.Abs(step < 0 ? layers[target].TopTvd - barrier[^1].BaseTvd : barrier[0].TopTvd - layers[target].BaseTvd),
             Mean(barrier, contrast),
             Mean(barrier, l => l.NotMeasured));
     }
@@ -78,8 +99,6 @@ public sealed record StressTarget(string Zone, double Shmin, StressBarrier? Abov
     private static double Least(Layer layer) => layer.Profile(Property.MinHorizontalStress).Mean;
 
     private static double Thickness(Layer layer) => layer.BaseTvd - layer.TopTvd;
-
-    private static double Middle(Layer layer) => 0.5 * (layer.TopTvd + layer.BaseTvd);
 
     /// <summary>Mean over thickness of the layers that have a value.</summary>
     private static double Mean(IEnumerable<Layer> layers, Func<Layer, double> value)

@@ -12,13 +12,13 @@ public sealed class ZoneMeans
     private readonly EarthModel _model;
     private readonly List<int> _samples;
 
-    private ZoneMeans(EarthModel model, short zone, List<int> samples, int all)
+    private ZoneMeans(EarthModel model, short zone, List<int> samples, List<int> all)
     {
         _model = model;
         _samples = samples;
         Name = model.ZoneName(zone);
-        TopMd = model.Values.Read(Property.MeasuredDepth)[Array.IndexOf(model.Zones, zone)];
-        Covered = samples.Count / (double)all;
+        TopMd = model.Values.Read(Property.MeasuredDepth)[all[0]];
+        Covered = samples.Count / (double)all.Count;
     }
 
     /// <summary>The zone's name; empty when the well has no zones.</summary>
@@ -34,14 +34,14 @@ public sealed class ZoneMeans
     public static IReadOnlyList<ZoneMeans> Of(EarthModel model)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var shmin = model.Values.Read(Property.MinHorizontalStress).ToArray();
+        var shmin = SampleMarks.Column(model, Property.MinHorizontalStress);
         var means = new List<ZoneMeans>();
-        foreach (var zone in model.Zones.Distinct())
+        foreach (var zone in Enumerable.Range(0, model.Count).GroupBy(i => model.Zones[i]))
         {
-            if (zone < 0 && model.Setup.Zones.Count > 0) continue;
-            var all = Enumerable.Range(0, model.Count).Where(i => model.Zones[i] == zone).ToList();
-            var covered = all.Where(i => !double.IsNaN(shmin[i])).ToList();
-            means.Add(new ZoneMeans(model, zone, covered.Count > 0 ? covered : all, all.Count));
+            if (zone.Key < 0 && model.Setup.Zones.Count > 0) continue;
+            var all = zone.ToList();
+            var covered = all.FindAll(i => !double.IsNaN(shmin[i]));
+            means.Add(new ZoneMeans(model, zone.Key, covered.Count > 0 ? covered : all, all));
         }
 
         return means;

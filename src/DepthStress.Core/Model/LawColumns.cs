@@ -28,7 +28,6 @@ internal static class LawColumns
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }
 
-
     private static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
     {
         if (LawParameters.Of(property) is { } parameter) return new[] { parameter.Value(run.Settings) };

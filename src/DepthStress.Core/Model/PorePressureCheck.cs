@@ -42,10 +42,9 @@ internal static class PorePressureCheck
         }
     }
 
+    /// <summary>A value that could not be read has been reported where it stands.</summary>
     private static bool IsTrend(IReadOnlyList<TrendPoint> points) =>
-        points.Count > 1
-        && points.All(p => !double.IsNaN(p.Depth) && !double.IsNaN(p.Slowness))
-        && points.Zip(points.Skip(1)).All(pair => pair.Second.Depth > pair.First.Depth);
+        points.Count > 1 && points.Zip(points.Skip(1)).All(pair => !(pair.Second.Depth <= pair.First.Depth));
 
     private static bool GetsDeeper(WellSetup setup, IReadOnlyList<PressurePoint> points, DepthKind kind)
     {

@@ -37,7 +37,8 @@ internal static class PressureStage
         }
 
         foreach (var problem in problems) diagnostics.Error(setup.Position, UnitSystem.Metric.Show(problem));
-        if (problems.Count > 0) return null;
+        if (profile.Untied is { } untied) diagnostics.Error(settings.AboveLog.Source.Position, UnitSystem.Metric.Show(untied));
+        if (problems.Count > 0 || profile.Untied is not null) return null;
 
         table.Adopt(Property.Density, profile.Values);
         var above = depth <= 0 ? 0 : profile.Above!.MassAbove(depth);

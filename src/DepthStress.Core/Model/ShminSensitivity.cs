@@ -22,50 +22,75 @@ public sealed record ShminSensitivity(
     /// <summary>The change of Biot's coefficient that is tried.</summary>
     public const double BiotStep = 0.1;
 
+    /// <summary>
+    /// Samples where a shifted value would leave its physical range (Poisson's ratio up to 1/2, Biot's coefficient from 0 to
+    /// 1) and was held at the end of it.
+    /// </summary>
+    public int Held { get; private init; }
+
     /// <summary>The sensitivity of every zone that has a Shmin, from top to bottom.</summary>
     public static IReadOnlyList<ShminSensitivity> Of(EarthModel model)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var sums = new Dictionary<short, (int Count, double Shmin, double[] Other)>();
+        var sums = new Dictionary<short, Sum>();
         foreach (var run in model.Runs)
         {
             if (StressStage.IsSalt(model.Setup, run.Lithology)) continue;
-            var sum = sums.TryGetValue(run.Zone, out var before) ? before : (Count: 0, Shmin: 0.0, Other: new double[4]);
-            Add(model, run, ref sum);
-            sums[run.Zone] = sum;
+            if (!sums.TryGetValue(run.Zone, out var sum)) sums.Add(run.Zone, sum = new Sum());
+            Add(model, run, sum);
         }
 
-        return
-        [
-            .. sums.Where(s => s.Value.Count > 0).Select(s =>
-            {
-                var (count, shmin, other) = s.Value;
-                double Change(int k) => (other[k] - shmin) / count;
-                return new ShminSensitivity(s.Key, shmin / count, Change(0), Change(1), Change(2), Change(3));
-            }),
-        ];
+        return [.. sums.Where(s => s.Value.Count > 0).Select(s => s.Value.ToSensitivity(s.Key))];
     }
 
-    private static void Add(EarthModel model, in SettingsRun run, ref (int Count, double Shmin, double[] Other) sum)
+    private static void Add(EarthModel model, in SettingsRun run, Sum sum)
     {
         var shmin = model.Values.Read(Property.MinHorizontalStress);
-        var (along, across) = (run.Settings.HorizontalStress.StrainAlongShmin, run.Settings.HorizontalStress.StrainAlongShmax);
+        var (along, across) = run.Settings.HorizontalStress.BothStrains() ?? (0, 0);
         var e = model.Values.Read(Property.YoungsStatic);
         var nu = model.Values.Read(Property.PoissonStatic);
         var biot = model.Values.Read(Property.Biot);
         var sv = model.Values.Read(Property.VerticalStress);
         var pp = model.Values.Read(Property.PorePressure);
+        ReadOnlySpan<(double Poisson, double Biot)> tries = [(-PoissonStep, 0), (PoissonStep, 0), (0, -BiotStep), (0, BiotStep)];
         for (var i = run.Start; i < run.End; i++)
         {
             if (double.IsNaN(shmin[i])) continue;
             sum.Count++;
             sum.Shmin += shmin[i];
-            ReadOnlySpan<(double Poisson, double Biot)> tries = [(-PoissonStep, 0), (PoissonStep, 0), (0, -BiotStep), (0, BiotStep)];
+            var held = false;
             for (var k = 0; k < tries.Length; k++)
             {
-                sum.Other[k] += StrainModel.Of(
-                    e[i], nu[i] + tries[k].Poisson, biot[i] + tries[k].Biot, sv[i], pp[i], along.IsSet ? along.Value : 0, across.IsSet ? across.Value : 0);
+                var (poisson, coefficient) = (nu[i] + tries[k].Poisson, biot[i] + tries[k].Biot);
+                if (tries[k].Poisson != 0) held |= Hold(ref poisson, -1 + PoissonStep, 0.5);
+                else held |= Hold(ref coefficient, 0, 1);
+                sum.Other[k] += StrainModel.Of(e[i], poisson, coefficient, sv[i], pp[i], along, across);
             }
+
+            if (held) sum.Held++;
         }
+    }
+
+    private static bool Hold(ref double value, double low, double high)
+    {
+        if (value >= low && value <= high) return false;
+        value = Math.Clamp(value, low, high);
+        return true;
+    }
+
+    private sealed class Sum
+    {
+        public int Count { get; set; }
+
+        public int Held { get; set; }
+
+        public double Shmin { get; set; }
+
+        public double[] Other { get; } = new double[4];
+
+        public ShminSensitivity ToSensitivity(short zone) =>
+            new(zone, Shmin / Count, Change(0), Change(1), Change(2), Change(3)) { Held = Held };
+
+        private double Change(int k) => (Other[k] - Shmin) / Count;
     }
 }

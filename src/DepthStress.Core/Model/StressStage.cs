@@ -31,18 +31,18 @@ internal static class StressStage
             }
 
             if (!elastic) continue;
-            var strained = settings.StrainAlongShmin.IsSet && settings.StrainAlongShmax.IsSet;
+            var strains = settings.BothStrains();
             StrainModel.Fill(
                 table.Read(Property.YoungsStatic).Slice(start, n),
                 table.Read(Property.PoissonStatic).Slice(start, n),
                 table.Read(Property.Biot).Slice(start, n),
                 table.Read(Property.VerticalStress).Slice(start, n),
                 table.Read(Property.PorePressure).Slice(start, n),
-                strained ? settings.StrainAlongShmin.Value : 0,
-                strained ? settings.StrainAlongShmax.Value : 0,
+                strains?.AlongShmin ?? 0,
+                strains?.AlongShmax ?? 0,
                 shmin.Slice(start, n),
                 shmax.Slice(start, n));
-            if (!strained) shmax.Slice(start, n).Fill(double.NaN);
+            if (strains is null) shmax.Slice(start, n).Fill(double.NaN);
         }
     }
 

@@ -35,6 +35,9 @@ public sealed class DensityProfile
     /// <summary>What is assumed above the log, tied to its first values; null when nothing was chosen.</summary>
     public ShallowDensity? Above { get; }
 
+    /// <summary>Why what is assumed above the log cannot be tied to it; null when it can.</summary>
+    public FormattableString? Untied { get; private init; }
+
     /// <summary>First sample of the overburden integral.</summary>
     public int First { get; }
 
@@ -50,7 +53,7 @@ public sealed class DensityProfile
     /// <param name="usable">Samples that enter the integral.</param>
     /// <param name="solidTop">True vertical depth of the ground or mudline, m.</param>
     /// <param name="settings">The choices.</param>
-    /// <param name="problems">Gets gaps left open and assumptions that cannot hold, as errors that name the depths.</param>
+    /// <param name="problems">Gets gaps left open, as errors that name the depths.</param>
     /// <returns>The profile, or null when there is no usable density at all.</returns>
     public static DensityProfile? Prepare(
         Curve density,
@@ -72,7 +75,7 @@ public sealed class DensityProfile
 
         if (known.Count == 0) return null;
         var origins = new OriginMarks(values.Length);
-        var shallow = Tied(known, values, tvd, solidTop, settings.AboveLog, problems);
+        var shallow = Tied(known, values, tvd, solidTop, settings.AboveLog, out var untied);
         for (var i = 0; i < known[0]; i++)
         {
             if (usable[i]) origins.Set(values, i, shallow?.DensityAt(tvd[i] - solidTop) ?? double.NaN, SampleOrigin.Assumed);
@@ -82,14 +85,16 @@ public sealed class DensityProfile
         if (settings.Gaps.Value.Kind != DensityFillKind.Linear) ReportMissingRows(known[0], known[^1], tvd, usable, problems);
         var end = Continue(known[^1], values, usable, settings.BelowLog.Value, origins);
         var first = settings.AboveLog.IsSet ? usable.IndexOf(true) : known[0];
-        return new DensityProfile(values, origins.Over(density.Origins), shallow, first, known[0], end);
+        return new DensityProfile(values, origins.Over(density.Origins), shallow, first, known[0], end) { Untied = untied };
     }
 
     private static ShallowDensity? Tied(
-        List<int> known, double[] values, ReadOnlySpan<double> tvd, double solidTop, Setting<ShallowDensity> choice, List<FormattableString> problems)
+        List<int> known, double[] values, ReadOnlySpan<double> tvd, double solidTop, Setting<ShallowDensity> choice, out FormattableString? problem)
     {
+        problem = null;
         if (!choice.IsSet) return null;
         var top = tvd[known[0]];
+        if (!(top > solidTop)) return choice.Value; // nothing lies above the log
         var first = new List<double>();
         foreach (var i in known)
         {
@@ -97,9 +102,7 @@ public sealed class DensityProfile
             first.Add(values[i]);
         }
 
-        var tied = choice.Value.Tie(top - solidTop, MathNet.Numerics.Statistics.Statistics.Median(first), out var problem);
-        if (problem is not null) problems.Add(problem);
-        return tied;
+        return choice.Value.Tie(top - solidTop, MathNet.Numerics.Statistics.Statistics.Median(first), out problem);
     }
 
     private static void Bridge(

@@ -113,6 +113,9 @@ public sealed record LocalDensityLaw(Law Relation) : ShallowDensity
 /// <param name="Rate">Rate b, 1/m; NaN before it is tied.</param>
 public sealed record ExponentialDensity(double Surface, double Matrix, double Rate = double.NaN) : ShallowDensity
 {
+    /// <summary>Below it two terms of the series are exact to a part in 10^12.</summary>
+    private const double SmallExponent = 2e-6;
+
     /// <inheritdoc/>
     public override FormattableString Words =>
         $"an exponential from {new Quantity(Surface, Dimension.Density)} at the ground or mudline to the first logged density";
@@ -121,7 +124,13 @@ public sealed record ExponentialDensity(double Surface, double Matrix, double Ra
     public override double DensityAt(double depth) => Matrix - ((Matrix - Surface) * Math.Exp(-Rate * depth));
 
     /// <inheritdoc/>
-    public override double MassAbove(double depth) => (Matrix * depth) - ((Matrix - Surface) * (1 - Math.Exp(-Rate * depth)) / Rate);
+    public override double MassAbove(double depth)
+    {
+        // The mean of exp(-b z) down to x = b z; its series where the difference would lose all its digits.
+        var x = Rate * depth;
+        var mean = x < SmallExponent ? 1 - (x / 2) : (1 - Math.Exp(-x)) / x;
+        return depth * (Matrix - ((Matrix - Surface) * mean));
+    }
 
     /// <inheritdoc/>
     public override ShallowDensity Tie(double depth, double density, out FormattableString? problem)

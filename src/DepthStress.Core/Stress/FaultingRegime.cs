@@ -3,7 +3,7 @@ namespace DepthStress.Core.Stress;
 /// <summary>Anderson's classes of faulting (1951), by the order of the three stresses.</summary>
 public enum FaultingRegime : byte
 {
-    /// <summary>At least one stress is missing.</summary>
+    /// <summary>At least one stress is missing, or all three are equal, as in salt.</summary>
     Unknown,
 
     /// <summary>Sv is the greatest.</summary>
@@ -19,10 +19,11 @@ public enum FaultingRegime : byte
 /// <summary>Classifies stress states.</summary>
 public static class FaultingRegimes
 {
-    /// <summary>The class of a stress state; unknown when a stress is missing.</summary>
+    /// <summary>The class of a stress state; unknown when a stress is missing or all three are equal.</summary>
     public static FaultingRegime Of(double vertical, double shmin, double shmax)
     {
         if (double.IsNaN(vertical) || double.IsNaN(shmin) || double.IsNaN(shmax)) return FaultingRegime.Unknown;
+        if (shmin == vertical && shmax == vertical) return FaultingRegime.Unknown;
         if (shmax <= vertical) return FaultingRegime.Normal;
         return shmin < vertical ? FaultingRegime.StrikeSlip : FaultingRegime.Reverse;
     }

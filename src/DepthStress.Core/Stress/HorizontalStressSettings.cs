@@ -17,6 +17,10 @@ public sealed record HorizontalStressSettings
     /// <summary>Coefficient of friction of existing faults for the frictional limit; the default is common practice.</summary>
     public Setting<double> FrictionCoefficient { get; init; } = Setting.Default(0.6);
 
+    /// <summary>The strains along Shmin and SHmax; null where they are not both chosen, which counts as none.</summary>
+    public (double AlongShmin, double AlongShmax)? BothStrains() =>
+        StrainAlongShmin.IsSet && StrainAlongShmax.IsSet ? (StrainAlongShmin.Value, StrainAlongShmax.Value) : null;
+
     /// <summary>These settings where they were decided, else those below them.</summary>
     public HorizontalStressSettings Over(HorizontalStressSettings below)
     {

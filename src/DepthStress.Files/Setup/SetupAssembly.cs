@@ -176,8 +176,15 @@ internal static class SetupAssembly
 
     private static void CheckPoints(WellFileSections sections, WrongKeys wrong, DiagnosticBag diagnostics)
     {
-        foreach (var points in sections.Zones.Select(z => z.Overrides).Concat(sections.Lithologies.Select(l => l.Overrides))
-            .Append(sections.Settings).Select(s => s.PorePressure.Points).Where(p => p.IsSet))
+        var pressures = sections.Zones.Select(z => z.Overrides).Concat(sections.Lithologies.Select(l => l.Overrides))
+            .Append(sections.Settings).Select(s => s.PorePressure).ToList();
+        foreach (var trend in pressures.Select(p => p.Trend).Where(t => t.IsSet))
+        {
+            if (trend.Value.Any(p => double.IsNaN(p.Depth) || double.IsNaN(p.Slowness)) && !wrong.Has("[trend]", "depth", "slowness"))
+                diagnostics.Error(trend.Source.Position, "[pore_pressure] trend: expected each point with depth and slowness");
+        }
+
+        foreach (var points in pressures.Select(p => p.Points).Where(p => p.IsSet))
         {
             if (points.Value.Any(p => double.IsNaN(p.Depth) || double.IsNaN(p.Pressure)) && !wrong.Has("[points]", "depth", "pressure"))
                 diagnostics.Error(points.Source.Position, "[pore_pressure] points: expected each point with depth and pressure");

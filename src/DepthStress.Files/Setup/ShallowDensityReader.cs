@@ -31,8 +31,9 @@ internal static class ShallowDensityReader
             case TomlText text:
                 return FromCatalogue(text, key, diagnostics);
             case TomlTable table:
-                var section = new ReadingSection(table, key, diagnostics, new WrongKeys());
-                var exponential = FromTable(section, key, diagnostics);
+                var wrong = new WrongKeys();
+                var section = new ReadingSection(table, key, diagnostics, wrong);
+                var exponential = FromTable(section, key, wrong, diagnostics);
                 section.ReportUnknown();
                 return exponential;
             case TomlArray array:
@@ -64,11 +65,12 @@ internal static class ShallowDensityReader
         return null;
     }
 
-    private static ExponentialDensity? FromTable(ReadingSection section, string key, DiagnosticBag diagnostics)
+    private static ExponentialDensity? FromTable(ReadingSection section, string key, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         var method = section.Choice("method", default, Methods, "the shape of the curve");
         var surface = section.Quantity("surface_density", default, Sign.Positive, Dimension.Density, "density at the ground or mudline");
         var matrix = section.Quantity("matrix_density", default, Sign.Positive, Dimension.Density, "density that great depth tends to");
+        if (wrong.Has(key, "method", "surface_density", "matrix_density")) return null;
         if (!method.IsSet || !surface.IsSet || !matrix.IsSet)
             diagnostics.Error(section.Position, $"{key}: expected method = \"{Exponential}\", surface_density and matrix_density");
         else if (surface.Value >= matrix.Value)
@@ -90,7 +92,8 @@ internal static class ShallowDensityReader
                 return null;
             }
 
-            var section = new ReadingSection(table, key, diagnostics, new WrongKeys());
+            var wrong = new WrongKeys();
+            var section = new ReadingSection(table, key, diagnostics, wrong);
             var depth = section.Quantity("depth", default, Sign.NotNegative, Dimension.Length, "depth below the ground or mudline");
             var density = section.Quantity("density", default, Sign.Positive, Dimension.Density, "density there");
             section.ReportUnknown();
@@ -101,7 +104,7 @@ internal static class ShallowDensityReader
             }
 
             sound = false;
-            diagnostics.Error(item.Position, $"{key}: expected each point with depth below ground or mudline and density, from top to bottom");
+            if (!wrong.Has(key, "depth", "density")) diagnostics.Error(item.Position, $"{key}: expected each point with depth below ground or mudline and density, from top to bottom");
         }
 
         if (array.Items.Count == 0) diagnostics.Error(array.Position, $"{key}: found no points");

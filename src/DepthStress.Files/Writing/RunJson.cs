@@ -55,7 +55,7 @@ public static class RunJson
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
-            ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(Method)),
+            ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
         };
         using var writer = new Utf8JsonWriter(destination, new JsonWriterOptions { Indented = true, NewLine = "\n", Encoder = Indented.Encoder });
         json.WriteTo(writer, Indented);
@@ -90,7 +90,7 @@ public static class RunJson
 
     private static JsonNode? Number(double value) => double.IsNaN(value) ? null : Math.Round(value, 4);
 
-    private static JsonObject Method(IGrouping<(LawSlot Slot, Law Law), LawUse> uses)
+    private static JsonObject Method(EarthModel model, IGrouping<(LawSlot Slot, Law Law), LawUse> uses)
     {
         var (slot, law) = uses.Key;
         var total = uses.Aggregate(default(LawOutcome), (sum, use) => sum + use.Outcome);
@@ -112,6 +112,12 @@ public static class RunJson
             ["input_missing"] = total.InputMissing,
             ["outside_domain"] = total.OutsideDomain,
             ["outside_range"] = total.OutsideRange,
+            ["where"] = Array(uses.GroupBy(u => (u.Zone, u.Lithology)).Select(g => new JsonObject
+            {
+                ["zone"] = model.ZoneName(g.Key.Zone),
+                ["lithology"] = model.LithologyName(g.Key.Lithology),
+                ["samples"] = g.Sum(u => u.Outcome.Evaluated),
+            })),
         };
     }
 

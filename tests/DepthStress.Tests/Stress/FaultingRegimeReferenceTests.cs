@@ -26,7 +26,6 @@ public class FaultingRegimeReferenceTests
     {
         Assert.Equal(FaultingRegime.Normal, FaultingRegimes.Of(70, 50, 70));
         Assert.Equal(FaultingRegime.Reverse, FaultingRegimes.Of(70, 70, 90));
-        Assert.Equal(FaultingRegime.Normal, FaultingRegimes.Of(70, 70, 70));
         Assert.Equal(2.0, FaultingRegimes.ShapeNumber(70, 70, 90), 1e-12); // between strike-slip and reverse
     }
 
@@ -42,7 +41,11 @@ public class FaultingRegimeReferenceTests
     }
 
     [Fact]
-    public void Three_equal_stresses_have_no_shape() => Assert.True(double.IsNaN(FaultingRegimes.ShapeNumber(70, 70, 70)));
+    public void Three_equal_stresses_have_no_shape_and_no_regime()
+    {
+        Assert.True(double.IsNaN(FaultingRegimes.ShapeNumber(70, 70, 70)));
+        Assert.Equal(FaultingRegime.Unknown, FaultingRegimes.Of(70, 70, 70));
+    }
 
     // Definition: 0-1 normal, 1-2 strike-slip, 2-3 reverse.
     [Fact]

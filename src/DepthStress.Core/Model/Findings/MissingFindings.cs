@@ -1,5 +1,6 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 
 namespace DepthStress.Core.Model;
 
@@ -12,7 +13,9 @@ internal static class MissingFindings
         var (vp, vs) = (SampleMarks.Column(model, Property.Vp), SampleMarks.Column(model, Property.Vs));
         var sv = SampleMarks.Column(model, Property.VerticalStress);
         var pp = SampleMarks.Column(model, Property.PorePressure);
+        var shmin = SampleMarks.Column(model, Property.MinHorizontalStress); // salt has one without logs
         var usable = model.Usable;
+        var trend = Lacks(model, s => s.PorePressure.Method is not { IsSet: true, Value: PorePressureMethod.EatonSonic });
         var unsettled = Lacks(model, s => s.PorePressure.Method.IsSet);
         Finding[] free = model.Runs.Any(r => !r.Settings.HorizontalStress.StrainAlongShmax.IsSet)
             ? [Finding.General(Severity.Note, $"SHmax is empty where nothing constrains it: set strain_along_shmin and strain_along_shmax")]
@@ -21,16 +24,19 @@ internal static class MissingFindings
         [
             .. SampleMarks.Where(
                 model, Severity.Warning, $"compressional log missing: no moduli, no horizontal stress",
-                i => usable[i] && double.IsNaN(vp[i])),
+                i => usable[i] && double.IsNaN(vp[i]) && double.IsNaN(shmin[i])),
             .. SampleMarks.Where(
                 model, Severity.Warning, $"shear log missing: no moduli, no horizontal stress",
-                i => usable[i] && double.IsNaN(vs[i]) && !double.IsNaN(vp[i])),
+                i => usable[i] && double.IsNaN(vs[i]) && !double.IsNaN(vp[i]) && double.IsNaN(shmin[i])),
             .. SampleMarks.Where(
                 model, Severity.Warning, $"no density below the last logged one, so no stress: set [overburden] below_log",
                 i => usable[i] && double.IsNaN(sv[i])),
             .. SampleMarks.Where(
                 model, Severity.Warning, $"pore pressure missing: the depth lies outside the pressure table",
-                i => double.IsNaN(pp[i]) && !unsettled[i]),
+                i => double.IsNaN(pp[i]) && !unsettled[i] && !trend[i]),
+            .. SampleMarks.Where(
+                model, Severity.Warning, $"compressional log missing: no pore pressure by {PressureMethods.EatonSonic.Id}",
+                i => usable[i] && double.IsNaN(pp[i]) && trend[i] && double.IsNaN(vp[i])),
             .. NotSet(model, "[pore_pressure] method", s => s.PorePressure.Method.IsSet),
             .. LawSlots.All.Where(s => s.Required).SelectMany(slot => NotSet(model, slot.Key, s => slot.Choice(s).IsSet)),
             .. free,
