@@ -40,7 +40,7 @@ public sealed record Layer
     /// <summary>Number of samples that enter the means.</summary>
     public required int Samples { get; init; }
 
-    /// <summary>Share of its thickness whose stress does not rest on measured logs alone, 0 to 1.</summary>
+    /// <summary>Share of its thickness that has no Shmin or one that does not rest on measured logs alone, 0 to 1.</summary>
     public required double NotMeasured { get; init; }
 
     /// <summary>Means over true vertical thickness by property; NaN when no sample has a value.</summary>

@@ -103,10 +103,11 @@ public static class LayerBuilder
     private static double NotMeasured(EarthModel model, LayerBounds bounds, double[] weights)
     {
         double other = 0, total = 0;
+        var shmin = model.Values.Read(Property.MinHorizontalStress);
         for (var i = bounds.Start; i < bounds.End; i++)
         {
             total += weights[i];
-            if (model.StressBasis[i] is not (SampleOrigin.Measured or SampleOrigin.Spliced)) other += weights[i];
+            if (double.IsNaN(shmin[i]) || model.StressBasis[i] is not (SampleOrigin.Measured or SampleOrigin.Spliced)) other += weights[i];
         }
 
         return total > 0 ? other / total : double.NaN;

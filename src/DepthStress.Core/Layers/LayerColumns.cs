@@ -40,7 +40,7 @@ public static class LayerColumns
         Number("shmin_contrast_above", "mean Shmin of the layer above minus this one's", "", Stresses, "difference of means", l => l.ContrastAbove),
         Number("shmin_contrast_below", "mean Shmin of the layer below minus this one's", "", Stresses, "difference of means", l => l.ContrastBelow),
         Number("samples", "number of samples", "", Counts, "count", l => l.Samples),
-        Number("share_not_measured", "share of the thickness whose stress does not rest on measured logs alone", "", Fractions, "stress_basis", l => l.NotMeasured),
+        Number("share_not_measured", "share of the thickness that has no Shmin or one that does not rest on measured logs alone", "", Fractions, "stress_basis", l => l.NotMeasured),
     ];
 
     private static NumberColumn<LayerTable> Number(

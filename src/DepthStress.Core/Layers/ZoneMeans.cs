@@ -12,13 +12,13 @@ public sealed class ZoneMeans
     private readonly EarthModel _model;
     private readonly List<int> _samples;
 
-    private ZoneMeans(EarthModel model, short zone, List<int> samples, List<int> all)
+    private ZoneMeans(EarthModel model, short zone, List<int> covered, List<int> all)
     {
         _model = model;
-        _samples = samples;
+        _samples = covered.Count > 0 ? covered : all;
         Name = model.ZoneName(zone);
         TopMd = model.Values.Read(Property.MeasuredDepth)[all[0]];
-        Covered = samples.Count / (double)all.Count;
+        Covered = covered.Count / (double)all.Count;
     }
 
     /// <summary>The zone's name; empty when the well has no zones.</summary>
@@ -27,7 +27,7 @@ public sealed class ZoneMeans
     /// <summary>Measured depth of the zone's first sample, m.</summary>
     public double TopMd { get; }
 
-    /// <summary>Share of the zone's samples that the means are over, 0 to 1.</summary>
+    /// <summary>Share of the zone's samples that have a least horizontal stress, 0 to 1.</summary>
     public double Covered { get; }
 
     /// <summary>The means of every zone that has samples, from top to bottom.</summary>
@@ -41,7 +41,7 @@ public sealed class ZoneMeans
             if (zone.Key < 0 && model.Setup.Zones.Count > 0) continue;
             var all = zone.ToList();
             var covered = all.FindAll(i => !double.IsNaN(shmin[i]));
-            means.Add(new ZoneMeans(model, zone.Key, covered.Count > 0 ? covered : all, all));
+            means.Add(new ZoneMeans(model, zone.Key, covered, all));
         }
 
         return means;

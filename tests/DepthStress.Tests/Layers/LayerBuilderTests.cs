@@ -91,6 +91,10 @@ public class LayerBuilderTests
     }
 
     [Fact]
+    public void Thickness_without_horizontal_stress_is_not_measured() =>
+        Assert.Equal(0.25, Assert.Single(Build(Run(Curve(Property.Vs, 2400, double.NaN, 2400, 2400, 2400)))).NotMeasured, 1e-12);
+
+    [Fact]
     public void The_share_not_measured_is_a_share_of_thickness()
     {
         var setup = Setup with { Overburden = new OverburdenSettings { Gaps = Chosen(new DensityFill(DensityFillKind.Linear)) } };

@@ -33,7 +33,7 @@ public class ZoneMeansTests
     {
         var model = Run(Setup, Table(Depths, Curve(Property.Density, Same(2500))));
         var zone = Assert.Single(ZoneMeans.Of(model));
-        Assert.Equal(("", 0.0, 1.0), (zone.Name, zone.TopMd, zone.Covered));
+        Assert.Equal(("", 0.0, 0.0), (zone.Name, zone.TopMd, zone.Covered));
         Assert.Equal(2500 * G * 200, Mean(zone, "sv"), 1);
     }
 
