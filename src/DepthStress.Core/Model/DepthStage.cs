@@ -14,7 +14,8 @@ internal static class DepthStage
         var md = table.Read(Property.MeasuredDepth);
         var tvd = table.Write(Property.TrueVerticalDepth);
         var inclination = table.Write(Property.Inclination);
-        setup.Trajectory.Fill(md, tvd, inclination);
+        var azimuth = new double[table.Count];
+        setup.Trajectory.Fill(md, tvd, inclination, azimuth);
 
         var usable = new bool[table.Count];
         VerticalProgress.Mask(tvd, inclination, VerticalProgress.DefaultMaxInclination, usable);

@@ -114,6 +114,14 @@ internal static class Bindings
         File = s.Text("file", v.File, "survey as CSV with measured depth, inclination and azimuth, relative to the well file"),
         Vertical = s.Flag("vertical", v.Vertical, "true when the hole is vertical"),
         North = s.Choice("north", v.North, Norths, "what azimuths count from"),
+        TieIn = s.Table("tie_in", v.TieIn, TieIn, "the point from which the survey counts; above it the hole is taken as straight from the datum"),
+    };
+
+    private static TieInSection TieIn(ISection s, TieInSection t) => t with
+    {
+        MeasuredDepth = s.Quantity("md", t.MeasuredDepth, Sign.Positive, Dimension.Length, "measured depth of the point"),
+        TrueVerticalDepth = s.Quantity("tvd", t.TrueVerticalDepth, Sign.Positive, Dimension.Length, "true vertical depth of the point below the datum"),
+        Position = s.Position,
     };
 
     private static ZoneSection Zone(ISection s, ZoneSection z)

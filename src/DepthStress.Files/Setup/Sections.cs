@@ -85,6 +85,19 @@ public enum NorthReference
     Magnetic,
 }
 
+/// <summary>The point from which a survey counts.</summary>
+public sealed record TieInSection
+{
+    /// <summary>Measured depth, m.</summary>
+    public Setting<double> MeasuredDepth { get; init; }
+
+    /// <summary>True vertical depth, m.</summary>
+    public Setting<double> TrueVerticalDepth { get; init; }
+
+    /// <summary>Where it stands; unknown when the file has none.</summary>
+    public SourcePosition? Position { get; init; }
+}
+
 /// <summary>The [survey] section.</summary>
 public sealed record SurveySection
 {
@@ -96,6 +109,9 @@ public sealed record SurveySection
 
     /// <summary>What azimuths count from.</summary>
     public Setting<NorthReference> North { get; init; }
+
+    /// <summary>The point from which the survey counts.</summary>
+    public TieInSection TieIn { get; init; } = new();
 }
 
 /// <summary>One [[zones]] table.</summary>
