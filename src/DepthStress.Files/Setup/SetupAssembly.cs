@@ -43,6 +43,8 @@ internal static class SetupAssembly
             Frame = frame ?? AnyFrame,
             FrameKnown = frame is not null,
             Trajectory = trajectory ?? Trajectory.Vertical,
+            PathCurve = sections.Survey.Curve,
+            Bedding = SurveyAssembly.Bedding(sections.Survey, diagnostics),
             Zones = zones,
             Lithologies = lithologies,
             Settings = sections.Settings,

@@ -18,11 +18,17 @@ internal static class SurveyAssembly
             return null;
         }
 
+        if (survey.Curve.IsSet && (survey.File.IsSet || vertical))
+        {
+            diagnostics.Error(survey.Curve.Source.Position, $"found both a depth curve and {(vertical ? "vertical = true" : "a survey file")}, expected one of them");
+            return null;
+        }
+
         if (!survey.File.IsSet)
         {
             if (survey.TieIn.Position is { } alone) diagnostics.Error(alone, "found tie_in without a survey file, expected file = \"...\" with it");
-            if (vertical) return Trajectory.Vertical;
-            if (!wrong.Has("[survey]", "file", "vertical")) diagnostics.Error(file, "[survey] is not set; expected file = \"...\" or vertical = true");
+            if (vertical || survey.Curve.IsSet) return Trajectory.Vertical;
+            if (!wrong.Has("[survey]", "file", "curve", "vertical")) diagnostics.Error(file, "[survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true");
             return null;
         }
 
@@ -33,6 +39,24 @@ internal static class SurveyAssembly
         var path = SurveyFile.Read(System.IO.Path.GetFullPath(survey.File.Value, folder), survey.File.Value, tieIn, inputs, diagnostics);
         if (path is not null && tieIn is not null) Note(tieIn, survey.TieIn.Position ?? file, diagnostics);
         return path;
+    }
+
+    /// <summary>The lie of the beds; flat, with the reason reported, where it cannot be used.</summary>
+    public static Bedding Bedding(SurveySection survey, DiagnosticBag diagnostics)
+    {
+        var (dip, azimuth) = (survey.BeddingDip, survey.DipAzimuth);
+        var stated = dip.Source.Kind != SettingKind.Default;
+        if (azimuth.IsSet && !stated) diagnostics.Error(azimuth.Source.Position, "found dip_azimuth without bedding_dip, expected both");
+        if (dip.Value == 0) return Core.Depth.Bedding.Flat;
+        if (dip.Value > Math.PI / 2)
+            diagnostics.Error(dip.Source.Position, Invariant($"found a bedding_dip of {dip.Value * 180 / Math.PI:G6} deg, expected at most 90 deg"));
+        else if (survey.Curve.IsSet)
+            diagnostics.Error(dip.Source.Position, "found bedding_dip with a depth curve, expected a survey file: the curve does not say in which direction the hole leans");
+        else if (!azimuth.IsSet && survey.File.IsSet)
+            diagnostics.Error(dip.Source.Position, "found bedding_dip without dip_azimuth, expected both");
+        else
+            return new Bedding(dip.Value, azimuth.IsSet ? azimuth.Value : 0);
+        return Core.Depth.Bedding.Flat;
     }
 
     private static TieIn? TieIn(TieInSection section, WrongKeys wrong, DiagnosticBag diagnostics)

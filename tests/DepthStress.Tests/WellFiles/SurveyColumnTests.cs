@@ -111,6 +111,30 @@ public sealed class SurveyColumnTests
     public void A_tie_in_that_cannot_be_is_an_error(string tieIn, string expected) =>
         Assert.Equal(expected, Read("md_m,inclination_deg,azimuth_deg\n1500,0.2,40\n", "\ntie_in = " + tieIn).Messages[0]);
 
+    [Theory]
+    [InlineData("vertical = true\ncurve = \"true_vertical_depth\"", "well.toml(13,9): error: found both a depth curve and vertical = true, expected one of them")]
+    [InlineData(Surveyed + "\ncurve = \"vertical_position\"", "well.toml(14,9): error: found both a depth curve and a survey file, expected one of them")]
+    [InlineData("curve = \"tvd\"", "well.toml(12,9): error: found \"tvd\", expected curve = one of \"true_vertical_depth\", \"vertical_position\"")]
+    [InlineData("vertical = true\ndip_azimuth = \"90 deg\"", "well.toml(13,15): error: found dip_azimuth without bedding_dip, expected both")]
+    [InlineData("vertical = true\nbedding_dip = \"91 deg\"", "well.toml(13,15): error: found a bedding_dip of 91 deg, expected at most 90 deg")]
+    [InlineData(Surveyed + "\nbedding_dip = \"12 deg\"", "well.toml(14,15): error: found bedding_dip without dip_azimuth, expected both")]
+    [InlineData(
+        "curve = \"vertical_position\"\nbedding_dip = \"12 deg\"\ndip_azimuth = \"230 deg\"",
+        "well.toml(13,15): error: found bedding_dip with a depth curve, expected a survey file: the curve does not say in which direction the hole leans")]
+    public void What_contradicts_itself_in_the_survey_section_is_an_error(string survey, string expected) => Assert.Equal(
+        [expected], WellText.Messages(WellText.With("vertical = true", survey), ("survey.csv", "md_m,inc_deg,azi_deg\n0,0,0\n100,0,0\n")));
+
+    [Fact]
+    public void The_beds_and_the_depth_curve_reach_the_setup()
+    {
+        Assert.Equal(0, WellText.Sections(WellText.Sound).Setup.Bedding.Dip);
+        var text = WellText.With("vertical = true", "vertical = true\nbedding_dip = \"12 deg\"\ndip_azimuth = \"230 deg\"");
+        var bedding = WellText.Sections(text).Setup.Bedding;
+        Assert.Equal(12 * Math.PI / 180, bedding.Dip, 1e-12); // rounding
+        Assert.Equal(230 * Math.PI / 180, bedding.DipAzimuth, 1e-12);
+        Assert.Equal(Core.Logs.Property.LoggedVerticalPosition, WellText.Sections(WellText.With("vertical = true", "curve = \"vertical_position\"")).Setup.PathCurve.Value);
+    }
+
     [Fact]
     public void A_tie_in_without_a_survey_file_is_an_error() => Assert.Equal(
         ["well.toml(13,10): error: found tie_in without a survey file, expected file = \"...\" with it"],

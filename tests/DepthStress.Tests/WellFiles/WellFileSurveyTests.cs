@@ -8,8 +8,8 @@ public sealed class WellFileSurveyTests
     private static string Surveyed { get; } = WellText.With("vertical = true", "file = \"survey.csv\"\nnorth = \"grid\"");
 
     [Theory]
-    [InlineData("", "well.toml: error: [survey] is not set; expected file = \"...\" or vertical = true")]
-    [InlineData("vertical = false", "well.toml: error: [survey] is not set; expected file = \"...\" or vertical = true")]
+    [InlineData("", "well.toml: error: [survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true")]
+    [InlineData("vertical = false", "well.toml: error: [survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true")]
     [InlineData(
         "vertical = true\nfile = \"survey.csv\"\nnorth = \"grid\"",
         "well.toml(12,12): error: found both a survey file and vertical = true, expected one of them")]
