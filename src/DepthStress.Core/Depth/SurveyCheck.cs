@@ -11,7 +11,7 @@ internal static class SurveyCheck
     /// <summary>Headings as near as this (rad) to opposite ones leave the plane of the arc open.</summary>
     private const double ReversalMargin = 1e-6;
 
-    public static void Problems(ReadOnlySpan<SurveyStation> stations, List<(int Station, string Problem)> problems)
+    public static void Problems(ReadOnlySpan<SurveyStation> stations, TieIn? tieIn, List<(int Station, string Problem)> problems)
     {
         if (stations.Length == 0) problems.Add((0, "found no survey station, expected one at least"));
         for (var i = 0; i < stations.Length; i++)
@@ -22,6 +22,9 @@ internal static class SurveyCheck
             if (IsReversal(stations[i - 1], stations[i]))
                 problems.Add((i, "found a hole that turns back on itself since the station before, expected a turn of less than 180 deg"));
         }
+
+        if (tieIn is not null && stations.Length > 0 && stations[0].MeasuredDepth < tieIn.MeasuredDepth)
+            problems.Add((0, string.Create(CultureInfo.InvariantCulture, $"found measured depth {stations[0].MeasuredDepth:G10} m above the tie-in at {tieIn.MeasuredDepth:G10} m, expected none above it")));
     }
 
     public static void Notes(ReadOnlySpan<SurveyStation> stations, List<(int Station, string Note)> notes)
@@ -31,7 +34,7 @@ internal static class SurveyCheck
         {
             notes.Add((0, string.Create(
                 CultureInfo.InvariantCulture,
-                $"found an inclination of {Degrees(first.Inclination)} deg at the first station, measured depth {first.MeasuredDepth:G10} m; the hole above it is taken as vertical")));
+                $"found an inclination of {Degrees(first.Inclination)} deg at the first station, measured depth {first.MeasuredDepth:G10} m, below a hole that is taken as vertical")));
         }
     }
 

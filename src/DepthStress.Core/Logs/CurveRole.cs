@@ -17,4 +17,8 @@ public sealed record CurveRole(
     Dimension[] Dimensions,
     double TypicalLow,
     double TypicalHigh,
-    params string[] Mnemonics);
+    params string[] Mnemonics)
+{
+    /// <summary>True for a curve that tells where the hole is, not what the rock is: of several the first serves.</summary>
+    public bool IsPosition => Property is Property.LoggedVerticalDepth or Property.LoggedVerticalPosition;
+}

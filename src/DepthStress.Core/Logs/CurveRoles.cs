@@ -39,6 +39,10 @@ public static class CurveRoles
             "VSH", "VSHALE", "VCL"),
         new("facies", "facies code", Property.Facies, [None], double.NegativeInfinity, double.PositiveInfinity,
             "FACIES", "LITHO", "LITHOLOGY"),
+        new("true_vertical_depth", "true vertical depth below the datum", Property.LoggedVerticalDepth, [Length], double.NegativeInfinity, double.PositiveInfinity,
+            "TVD", "TVDRT", "TVD_RT", "TVDBRT", "TVDKB", "TVD_KB", "TVDRKB", "TVD_RKB", "TVDDF"),
+        new("vertical_position", "height above or depth below sea level", Property.LoggedVerticalPosition, [Length], double.NegativeInfinity, double.PositiveInfinity,
+            "Z_LOC", "ZLOC", "TVDSS", "TVD_SS", "TVDMSL", "TVD_MSL", "ELEVATION", "Z"),
     ];
 
     /// <summary>Column names for measured depth (common practice).</summary>

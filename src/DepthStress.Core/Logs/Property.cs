@@ -12,6 +12,15 @@ public enum Property
     /// <summary>Angle between the hole and the vertical, rad.</summary>
     Inclination,
 
+    /// <summary>Angle between the hole and the normal of the beds, rad.</summary>
+    BeddingAngle,
+
+    /// <summary>Vertical depth below the datum as a log file has it, m.</summary>
+    LoggedVerticalDepth,
+
+    /// <summary>Height above or depth below mean sea level as a log file has it, m.</summary>
+    LoggedVerticalPosition,
+
     /// <summary>Compressional velocity, m/s.</summary>
     Vp,
 

@@ -31,8 +31,11 @@ public static class Chain
             if (Finding.About(Severity.Warning, $"{removal.Reason}: taken out", logs.Depths, removal.Samples) is { } finding) findings.Add(finding);
         }
 
+        if (CurvePath.Resolve(setup, logs, diagnostics, findings) is not { } resolved) return null;
+        setup = resolved;
         var table = Adopt(logs);
         var usable = DepthStage.Apply(setup, table, findings);
+        findings.AddRange(DepthCrossCheck.Of(setup, logs, table));
         var zones = new short[logs.Count];
         var lithologies = new short[logs.Count];
         ZoneIndex.Fill(setup, logs.Depths, zones);

@@ -31,6 +31,9 @@ public sealed record NumberColumn<TSource>(
     string Id, string Title, string Symbol, ColumnUnit Metric, ColumnUnit Field, string Formula, ColumnReader<TSource> Read)
     : Column<TSource>(Id, Title, Formula)
 {
+    /// <summary>False for a column that results.las leaves out: a line of LAS has 256 characters at most.</summary>
+    public bool InLas { get; init; } = true;
+
     /// <summary>How results of a unit system write it.</summary>
     public ColumnUnit In(UnitSystem system) => system == UnitSystem.Metric ? Metric : Field;
 

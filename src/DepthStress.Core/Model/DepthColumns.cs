@@ -57,6 +57,7 @@ public static class DepthColumns
         Origin("density_origin", "origin of the density", Property.Density),
         Words("stress_basis", "weakest origin the stresses rest on", "weakest of the three origins", (m, i) => m.StressBasis[i].Name()),
         Stored("sv_unlogged_share", "share of the vertical stress from depths without a density log", "", Fractions, Property.UnloggedShare, "weight assumed or filled / sv"),
+        Stored("bedding_angle", "angle between the hole and the normal of the beds", "", Angles, Property.BeddingAngle, "[survey] bedding_dip, dip_azimuth") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>

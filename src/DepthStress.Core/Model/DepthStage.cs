@@ -14,7 +14,9 @@ internal static class DepthStage
         var md = table.Read(Property.MeasuredDepth);
         var tvd = table.Write(Property.TrueVerticalDepth);
         var inclination = table.Write(Property.Inclination);
-        setup.Trajectory.Fill(md, tvd, inclination);
+        var azimuth = new double[table.Count];
+        setup.Trajectory.Fill(md, tvd, inclination, azimuth);
+        setup.Bedding.Fill(inclination, azimuth, table.Write(Property.BeddingAngle));
 
         var usable = new bool[table.Count];
         VerticalProgress.Mask(tvd, inclination, VerticalProgress.DefaultMaxInclination, usable);
@@ -29,9 +31,10 @@ internal static class DepthStage
             beyond[i] = md[i] > setup.Trajectory.LastStation;
         }
 
+        var last = setup.PathCurve.IsSet ? "value of the depth curve" : "survey station";
         Add(findings, Severity.Warning, $"hole steeper than 80 deg or turning upwards: left out of the overburden, trends and layers", md, left);
         Add(findings, Severity.Note, $"logs above the ground or mudline: left out", md, above);
-        Add(findings, Severity.Warning, $"logs below the last survey station at {Quantity.Length(setup.Trajectory.LastStation)} measured depth: the hole is taken to go straight on", md, beyond);
+        Add(findings, Severity.Warning, $"logs below the last {last} at {Quantity.Length(setup.Trajectory.LastStation)} measured depth: the hole is taken to go straight on", md, beyond);
         return usable;
     }
 

@@ -13,7 +13,8 @@ public static class SetupCheck
     {
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(diagnostics);
-        ZoneCheck.Report(setup, diagnostics);
+        // Where the path comes from a curve, zones are checked once it is known.
+        if (!setup.PathCurve.IsSet) ZoneCheck.Report(setup, diagnostics);
         foreach (var (rule, overrides) in setup.Lithologies)
         {
             if (overrides.Shale != new ShaleSettings())

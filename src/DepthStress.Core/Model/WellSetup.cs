@@ -1,5 +1,6 @@
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 
 namespace DepthStress.Core.Model;
@@ -19,8 +20,14 @@ public sealed record WellSetup
     /// <summary>False when the reference levels only stand in for wrong ones, while further problems are looked for.</summary>
     public bool FrameKnown { get; init; } = true;
 
-    /// <summary>The path of the hole.</summary>
+    /// <summary>The path of the hole; a vertical one stands in while <see cref="PathCurve"/> is still to be read.</summary>
     public required Trajectory Trajectory { get; init; }
+
+    /// <summary>The depth curve of the logs that the path follows; not set where the path is known without.</summary>
+    public Setting<Property> PathCurve { get; init; }
+
+    /// <summary>The lie of the beds.</summary>
+    public Bedding Bedding { get; init; } = Bedding.Flat;
 
     /// <summary>The zones from top to bottom; may be empty.</summary>
     public IReadOnlyList<Zone> Zones { get; init; } = [];

@@ -24,6 +24,7 @@ internal static class CurveUnits
 
         // A curve that nobody asked for by name and that the stresses do not rest on is left out instead.
         if (choice.Stated || IsEssential(role)) diagnostics.Error(position, message);
+        else if (role.IsPosition) diagnostics.Note(position, message + "; the curve is not used");
         else diagnostics.Warning(position, message + "; the curve is not used");
         return null;
     }

@@ -15,7 +15,7 @@ internal static class RoleAssignment
         foreach (var role in CurveRoles.All)
         {
             var stated = logs.Curves.FirstOrDefault(c => c.Role == role.Id);
-            var columns = stated is null ? ByName(role, files, diagnostics) : Stated(role, stated.Sources, files, diagnostics);
+            var columns = stated is null ? ByName(role, files, choices, diagnostics) : Stated(role, stated.Sources, files, diagnostics);
             if (columns.Count > 0) choices.Add(new RoleChoice(role, columns));
         }
 
@@ -50,9 +50,24 @@ internal static class RoleAssignment
            select new ColumnChoice(file, column, null),
     ];
 
-    private static IReadOnlyList<ColumnChoice> ByName(CurveRole role, IReadOnlyList<LogFile> files, DiagnosticBag diagnostics)
+    private static IReadOnlyList<ColumnChoice> ByName(
+        CurveRole role, IReadOnlyList<LogFile> files, List<RoleChoice> taken, DiagnosticBag diagnostics)
     {
         var found = Candidates(role, files);
+        if (role.IsPosition)
+        {
+            // Nobody asked for these: they never stand in the way of what the well file says.
+            found = [.. found.Where(f => !taken.Exists(t => t.Columns.Any(c => c.Column == f.Column)))];
+            if (found.Count > 1)
+            {
+                diagnostics.Note(
+                    found[0].Column.Position,
+                    $"found {found.Count} columns for the role {role.Id} ({string.Join(", ", found.Select(c => $"{c.Column.Name} in {c.File.Name}"))}), took the first; another can be named in [logs.curves]");
+            }
+
+            return [.. found.Take(1)];
+        }
+
         if (found.Count < 2) return found;
         var names = string.Join(", ", found.Select(c => $"{c.Column.Name} in {c.File.Name}"));
         diagnostics.Error(

@@ -28,6 +28,9 @@ internal static class Bindings
     private static readonly (string, NorthReference)[] Norths =
         [("true", NorthReference.True), ("grid", NorthReference.Grid), ("magnetic", NorthReference.Magnetic)];
 
+    private static readonly (string, Property)[] PathCurves =
+        [("true_vertical_depth", Property.LoggedVerticalDepth), ("vertical_position", Property.LoggedVerticalPosition)];
+
     private static readonly (string, UnitSystem)[] UnitSystems = [("metric", UnitSystem.Metric), ("field", UnitSystem.Field)];
 
     private static readonly (string, PorePressureMethod)[] PressureWords =
@@ -112,8 +115,19 @@ internal static class Bindings
     private static SurveySection Survey(ISection s, SurveySection v) => v with
     {
         File = s.Text("file", v.File, "survey as CSV with measured depth, inclination and azimuth, relative to the well file"),
+        Curve = s.Choice("curve", v.Curve, PathCurves, "instead of a file: the curve of the logs that the path follows"),
         Vertical = s.Flag("vertical", v.Vertical, "true when the hole is vertical"),
         North = s.Choice("north", v.North, Norths, "what azimuths count from"),
+        TieIn = s.Table("tie_in", v.TieIn, TieIn, "the point from which the survey counts; above it the hole is taken as straight from the datum"),
+        BeddingDip = s.Quantity("bedding_dip", v.BeddingDip, Sign.NotNegative, Dimension.Angle, "angle between the beds and the horizontal"),
+        DipAzimuth = s.Quantity("dip_azimuth", v.DipAzimuth, Sign.Any, Dimension.Angle, "direction in which the beds go down, from the north of the survey"),
+    };
+
+    private static TieInSection TieIn(ISection s, TieInSection t) => t with
+    {
+        MeasuredDepth = s.Quantity("md", t.MeasuredDepth, Sign.Positive, Dimension.Length, "measured depth of the point"),
+        TrueVerticalDepth = s.Quantity("tvd", t.TrueVerticalDepth, Sign.Positive, Dimension.Length, "true vertical depth of the point below the datum"),
+        Position = s.Position,
     };
 
     private static ZoneSection Zone(ISection s, ZoneSection z)

@@ -1,6 +1,7 @@
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
+using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
@@ -85,17 +86,42 @@ public enum NorthReference
     Magnetic,
 }
 
+/// <summary>The point from which a survey counts.</summary>
+public sealed record TieInSection
+{
+    /// <summary>Measured depth, m.</summary>
+    public Setting<double> MeasuredDepth { get; init; }
+
+    /// <summary>True vertical depth, m.</summary>
+    public Setting<double> TrueVerticalDepth { get; init; }
+
+    /// <summary>Where it stands; unknown when the file has none.</summary>
+    public SourcePosition? Position { get; init; }
+}
+
 /// <summary>The [survey] section.</summary>
 public sealed record SurveySection
 {
     /// <summary>The survey file, relative to the well file.</summary>
     public Setting<string> File { get; init; }
 
+    /// <summary>The depth curve of the logs that the path follows.</summary>
+    public Setting<Property> Curve { get; init; }
+
     /// <summary>True when the hole is taken as vertical.</summary>
     public Setting<bool> Vertical { get; init; }
 
     /// <summary>What azimuths count from.</summary>
     public Setting<NorthReference> North { get; init; }
+
+    /// <summary>The point from which the survey counts.</summary>
+    public TieInSection TieIn { get; init; } = new();
+
+    /// <summary>Angle between the beds and the horizontal, rad.</summary>
+    public Setting<double> BeddingDip { get; init; } = Setting.Default(0.0);
+
+    /// <summary>The direction in which the beds go down, rad.</summary>
+    public Setting<double> DipAzimuth { get; init; }
 }
 
 /// <summary>One [[zones]] table.</summary>

@@ -32,7 +32,7 @@ internal static class SetupAssembly
             diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
         var frame = Frame(well, file, wrong, diagnostics);
-        var trajectory = Trajectory(sections.Survey, file, folder, inputs, wrong, diagnostics);
+        var trajectory = SurveyAssembly.Path(sections.Survey, file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
@@ -42,7 +42,9 @@ internal static class SetupAssembly
             Name = well.Name.Value ?? "",
             Frame = frame ?? AnyFrame,
             FrameKnown = frame is not null,
-            Trajectory = trajectory ?? Core.Depth.Trajectory.Vertical,
+            Trajectory = trajectory ?? Trajectory.Vertical,
+            PathCurve = sections.Survey.Curve,
+            Bedding = SurveyAssembly.Bedding(sections.Survey, diagnostics),
             Zones = zones,
             Lithologies = lithologies,
             Settings = sections.Settings,
@@ -103,27 +105,6 @@ internal static class SetupAssembly
     {
         foreach (var twice in files.Value.GroupBy(f => f, StringComparer.Ordinal).Where(g => g.Count() > 1))
             diagnostics.Error(files.Source.Position, $"found the file \"{twice.Key}\" twice in [logs] files, expected each once");
-    }
-
-    private static Trajectory? Trajectory(
-        SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
-    {
-        if (survey.File.IsSet && survey.Vertical is { IsSet: true, Value: true })
-        {
-            diagnostics.Error(survey.Vertical.Source.Position, "found both a survey file and vertical = true, expected one of them");
-            return null;
-        }
-
-        if (survey.File.IsSet)
-        {
-            if (!survey.North.IsSet)
-                diagnostics.Error(file, "[survey] north is not set; expected \"true\", \"grid\" or \"magnetic\", what the survey's azimuths count from");
-            return SurveyFile.Read(Path.GetFullPath(survey.File.Value, folder), survey.File.Value, inputs, diagnostics);
-        }
-
-        if (survey.Vertical is { IsSet: true, Value: true }) return Core.Depth.Trajectory.Vertical;
-        if (!wrong.Has("[survey]", "file", "vertical")) diagnostics.Error(file, "[survey] is not set; expected file = \"...\" or vertical = true");
-        return null;
     }
 
     private static List<Zone> Zones(IReadOnlyList<ZoneSection> sections, DiagnosticBag diagnostics)

@@ -40,7 +40,10 @@ public static class StarterFile
         text.Append("""
 
             [survey]
-            vertical = true                       # <- confirm; or instead: file = "survey.csv" and north = "true", "grid" or "magnetic"
+
+            """);
+        text.AppendLine(StarterSurvey.Line(log));
+        text.Append("""
 
             # [[zones]]                           # named intervals; any section below may be overridden inside one, as [zones.moduli]
             # name = "upper sand"

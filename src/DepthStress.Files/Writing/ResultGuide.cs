@@ -45,7 +45,7 @@ public static class ResultGuide
         Row(text, "stress", "", "stresses and pressures are total, compression positive");
         Row(text, "missing", "", $"empty in .csv, {ResultsLas.Null} in results.las, null in layers.json");
         Row(text, "names", "", "a text that a spreadsheet would run as a formula has an apostrophe in front; control characters are left out");
-        Row(text, "results.las", "", "the columns of numbers of depth.csv, names in capitals without units, measured depth as DEPT");
+        Row(text, "results.las", "", $"the columns of numbers of depth.csv without {string.Join(", ", DepthColumns.Numbers.Where(c => !c.InLas).Select(c => c.Id))}, names in capitals without units, measured depth as DEPT");
         Row(text, ResultManifest.FileName, "", "names the files that a new run replaces; a folder that holds anything else is left alone");
     }
 

@@ -42,6 +42,19 @@ public sealed class CliInitTests : IDisposable
             check.Error.Split('\n', StringSplitOptions.RemoveEmptyEntries));
     }
 
+    [Theory]
+    [InlineData("z_loc[m]\n1000,-960.00\n1100,-1060.5\n1200,-1160.50\n", "vertical = true                       # <- confirm: z_loc agrees with a vertical hole within 0.50 m, its datum 39.5 m above sea level; or instead: file = ")]
+    [InlineData("TVDSS[m]\n1000,960\n1100,1060\n", "vertical = true                       # <- confirm: TVDSS agrees with a vertical hole within 0.00 m, its datum 40.0 m above sea level; or instead: file = ")]
+    [InlineData("TVD[m]\n1000,999.1\n1100,1099.3\n", "vertical = true                       # <- confirm: TVD agrees with a vertical hole within 0.90 m; or instead: file = ")]
+    [InlineData("TVD[m]\n1000,998.4\n1100,1099\n", "curve = \"true_vertical_depth\"         # <- confirm: TVD departs from a vertical hole by up to 1.60 m; or instead: file = ")]
+    [InlineData("ZLOC[ft]\n1000,-3000\n1100,-3200\n", "curve = \"vertical_position\"           # <- confirm: ZLOC departs from a vertical hole by up to 19.52 m; or instead: file = ")]
+    public async Task A_depth_curve_says_whether_the_hole_is_vertical(string log, string expected)
+    {
+        _cli.Folder.Write("well.csv", "DEPT[m]," + log);
+        await _cli.RunAsync("init", "well.csv");
+        Assert.Contains("[survey]\n" + expected, _cli.Folder.Read("well.toml"), StringComparison.Ordinal);
+    }
+
     [Fact]
     public async Task Units_that_the_file_lacks_are_marked()
     {

@@ -56,7 +56,7 @@ public class SurveyProblemTests
         List<(int Station, string Note)> notes = [];
         Assert.True(Trajectory.TryCreate([Station(100, 1.5, 0)], out _, [], notes));
         Assert.Equal(
-            [(0, "found an inclination of 1.5 deg at the first station, measured depth 100 m; the hole above it is taken as vertical")], notes);
+            [(0, "found an inclination of 1.5 deg at the first station, measured depth 100 m, below a hole that is taken as vertical")], notes);
         notes.Clear();
         Assert.True(Trajectory.TryCreate([Station(100, 0.9, 0)], out _, [], notes));
         Assert.True(Trajectory.TryCreate([Station(0, 30, 0)], out _, [], notes));

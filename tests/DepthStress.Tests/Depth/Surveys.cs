@@ -23,6 +23,24 @@ internal static class Surveys
         return trajectory;
     }
 
+    /// <summary>A survey that counts from a tie-in.</summary>
+    public static Trajectory Tied(TieIn tieIn, params ReadOnlySpan<SurveyStation> stations)
+    {
+        List<(int Station, string Problem)> problems = [];
+        Assert.True(Trajectory.TryCreate(stations, tieIn, out var trajectory, problems, []), string.Join("; ", problems));
+        return trajectory;
+    }
+
+    /// <summary>Filling many depths gives the very numbers of single points.</summary>
+    public static void FillEqualsAt(Trajectory path, double[] md)
+    {
+        double[] tvd = new double[md.Length], inclination = new double[md.Length], azimuth = new double[md.Length];
+        path.Fill(md, tvd, inclination, azimuth);
+        Assert.Equal(md.Select(d => path.At(d).TrueVerticalDepth), tvd);
+        Assert.Equal(md.Select(d => path.At(d).Inclination), inclination);
+        Assert.Equal(md.Select(d => path.At(d).Azimuth), azimuth);
+    }
+
     private static Gen<SurveyStation[]> Of(double maxInclination) =>
         Gen.Select(Gen.Double[0.5, 200], Gen.Double[0, maxInclination], Gen.Double[0, Math.Tau]).Array[1, 12].Select(steps =>
         {

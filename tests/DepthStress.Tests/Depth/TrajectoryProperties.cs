@@ -71,10 +71,7 @@ public class TrajectoryProperties
         {
             var path = Surveys.Path(stations);
             if (sorted) Array.Sort(md);
-            double[] tvd = new double[md.Length], inclination = new double[md.Length];
-            path.Fill(md, tvd, inclination);
-            Assert.Equal(md.Select(d => path.At(d).TrueVerticalDepth), tvd);
-            Assert.Equal(md.Select(d => path.At(d).Inclination), inclination);
+            Surveys.FillEqualsAt(path, md);
         });
 
     [Fact]

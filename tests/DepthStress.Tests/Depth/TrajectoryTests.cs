@@ -75,9 +75,9 @@ public class TrajectoryTests
         Assert.True(double.IsNaN(path.At(md).Inclination));
         Assert.False(path.At(md).Extrapolated);
         Assert.True(double.IsNaN(path.MeasuredDepthAt(md)));
-        double[] tvd = [1], inclination = [1];
-        path.Fill([md], tvd, inclination);
-        Assert.True(double.IsNaN(tvd[0]) && double.IsNaN(inclination[0]));
+        double[] tvd = [1], inclination = [1], azimuth = [1];
+        path.Fill([md], tvd, inclination, azimuth);
+        Assert.All([tvd[0], inclination[0], azimuth[0]], v => Assert.True(double.IsNaN(v)));
     }
 
     [Fact]
@@ -85,18 +85,16 @@ public class TrajectoryTests
     {
         var path = Path(Station(50, 0, 0), Station(100, 60, 90), Station(180, 95, 100), Station(260, 40, 20));
         double[] md = [300, 20, 100, 260, double.NaN, 180, 70, 70, -3, 50, 259];
-        double[] tvd = new double[md.Length], inclination = new double[md.Length];
-        path.Fill(md, tvd, inclination);
-        Assert.Equal(md.Select(d => path.At(d).TrueVerticalDepth), tvd);
-        Assert.Equal(md.Select(d => path.At(d).Inclination), inclination);
+        Surveys.FillEqualsAt(path, md);
     }
 
     [Fact]
     public void Spans_of_unequal_length_are_refused_before_anything_is_written()
     {
         double[] tvd = [7, 7];
-        Assert.Throws<ArgumentException>("tvd", () => Trajectory.Vertical.Fill([1], tvd, new double[1]));
-        Assert.Throws<ArgumentException>("inclination", () => Trajectory.Vertical.Fill([1, 2], tvd, new double[1]));
+        Assert.Throws<ArgumentException>("tvd", () => Trajectory.Vertical.Fill([1], tvd, new double[1], new double[1]));
+        Assert.Throws<ArgumentException>("inclination", () => Trajectory.Vertical.Fill([1, 2], tvd, new double[1], new double[2]));
+        Assert.Throws<ArgumentException>("azimuth", () => Trajectory.Vertical.Fill([1, 2], tvd, new double[2], new double[1]));
         Assert.Equal([7, 7], tvd);
     }
 

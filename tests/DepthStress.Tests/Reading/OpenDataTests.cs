@@ -1,6 +1,7 @@
 using System.Globalization;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Files.Reading;
+using DepthStress.Files.Setup;
 
 namespace DepthStress.Tests.Reading;
 
@@ -99,6 +100,17 @@ public class OpenDataTests
                     Assert.Equal(expected == -999.25 ? double.NaN : expected, file.Columns[c].Values[r]);
                 }
             }
+        }
+    }
+
+    /// <summary>All three are vertical; their z_loc is in m, negative below the sea, though the files state no unit.</summary>
+    [OpenDataFact]
+    public void The_wells_own_positions_agree_with_vertical_holes()
+    {
+        foreach (var path in Directory.GetFiles(Path.Combine(OpenDataFactAttribute.Folder, "wells"), "*.las"))
+        {
+            var file = LogFileReader.Read(path, "well", new LogReadOptions(), new DiagnosticBag())!;
+            Assert.Contains("# <- confirm: z_loc agrees with a vertical hole within 0.", StarterFile.For(file), StringComparison.Ordinal);
         }
     }
 

@@ -22,7 +22,7 @@ public sealed class WellFileReaderTests : IDisposable
             "well.toml: error: [well] datum is not set; expected \"rotary table\", \"ground\" or \"sea level\"",
             "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level",
             "well.toml: error: [well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them",
-            "well.toml: error: [survey] is not set; expected file = \"...\" or vertical = true",
+            "well.toml: error: [survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true",
             "well.toml: error: [moduli] static_youngs is not set; expected a value or a method: lacy-1997-sandstone, lacy-1997-shale, lacy-1997-combined, ohen-2003-shale and others, see \"depthstress methods --for youngs_static\"",
             "well.toml: error: [moduli] static_poisson is not set; expected a value or a method: equal-to-dynamic",
             "well.toml: error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"",

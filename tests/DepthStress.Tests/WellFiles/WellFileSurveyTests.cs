@@ -8,8 +8,8 @@ public sealed class WellFileSurveyTests
     private static string Surveyed { get; } = WellText.With("vertical = true", "file = \"survey.csv\"\nnorth = \"grid\"");
 
     [Theory]
-    [InlineData("", "well.toml: error: [survey] is not set; expected file = \"...\" or vertical = true")]
-    [InlineData("vertical = false", "well.toml: error: [survey] is not set; expected file = \"...\" or vertical = true")]
+    [InlineData("", "well.toml: error: [survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true")]
+    [InlineData("vertical = false", "well.toml: error: [survey] is not set; expected file = \"...\", curve = \"...\" or vertical = true")]
     [InlineData(
         "vertical = true\nfile = \"survey.csv\"\nnorth = \"grid\"",
         "well.toml(12,12): error: found both a survey file and vertical = true, expected one of them")]
@@ -23,10 +23,10 @@ public sealed class WellFileSurveyTests
     public void A_survey_that_is_not_there_is_named() => Assert.Equal(["survey.csv: error: file not found"], WellText.Messages(Surveyed));
 
     [Theory]
-    [InlineData(Header + "0,0,0\n100,190,0\n", "survey.csv: error: survey station 2: found an inclination of 190 deg, expected 0 to 180 deg")]
+    [InlineData(Header + "0,0,0\n100,190,0\n", "survey.csv(3): error: survey station 2: found an inclination of 190 deg, expected 0 to 180 deg")]
     [InlineData(Header + "0,0,0\n100,10,0\n90,10,0\n", "survey.csv(4): error: depth decreases in 1 row, first from 100 to 90, expected increasing")]
     [InlineData(
-        "md_m,inclination_deg\n0,0\n100,10\n", "survey.csv(1): error: found no column for azimuth, expected one named azimuth, azi, azim, az")]
+        "md_m,inclination_deg\n0,0\n100,10\n", "survey.csv(1): error: found no column for azimuth, expected one named azimuth, azi, azim, az, hazi, bearing")]
     [InlineData(
         "md,inclination,azimuth\n0,0,0\n100,10,4\n",
         "survey.csv(1,1): error: column md: found no unit, expected one of m, ft, in, mm, cm, as in md[m]",
