@@ -9,16 +9,33 @@ namespace DepthStress.Core.Layers;
 /// </summary>
 public sealed class ZoneMeans
 {
+    private const int Chunk = 1024;
     private readonly EarthModel _model;
-    private readonly List<int> _samples;
+    private readonly bool[] _samples;
+    private readonly int _start;
+    private readonly int _end;
 
-    private ZoneMeans(EarthModel model, short zone, List<int> samples, int all)
+    private ZoneMeans(EarthModel model, short zone)
     {
         _model = model;
-        _samples = samples;
+        _samples = new bool[model.Count];
+        var shmin = model.Values.Read(Property.MinHorizontalStress);
+        int all = 0, covered = 0;
+        for (var i = 0; i < _samples.Length; i++)
+        {
+            if (model.Zones[i] != zone) continue;
+            all++;
+            if (double.IsNaN(shmin[i])) continue;
+            _samples[i] = true;
+            covered++;
+        }
+
+        if (covered == 0) covered = all;
+        if (!_samples.Contains(true)) _samples = Array.ConvertAll(model.Zones, z => z == zone);
+        (_start, _end) = (Array.IndexOf(_samples, true), Array.LastIndexOf(_samples, true) + 1);
         Name = model.ZoneName(zone);
         TopMd = model.Values.Read(Property.MeasuredDepth)[Array.IndexOf(model.Zones, zone)];
-        Covered = samples.Count / (double)all;
+        Covered = covered / (double)all;
     }
 
     /// <summary>The zone's name; empty when the well has no zones.</summary>
@@ -34,14 +51,11 @@ public sealed class ZoneMeans
     public static IReadOnlyList<ZoneMeans> Of(EarthModel model)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var shmin = model.Values.Read(Property.MinHorizontalStress).ToArray();
         var means = new List<ZoneMeans>();
         foreach (var zone in model.Zones.Distinct())
         {
             if (zone < 0 && model.Setup.Zones.Count > 0) continue;
-            var all = Enumerable.Range(0, model.Count).Where(i => model.Zones[i] == zone).ToList();
-            var covered = all.Where(i => !double.IsNaN(shmin[i])).ToList();
-            means.Add(new ZoneMeans(model, zone, covered.Count > 0 ? covered : all, all.Count));
+            means.Add(new ZoneMeans(model, zone));
         }
 
         return means;
@@ -53,13 +67,17 @@ public sealed class ZoneMeans
         ArgumentNullException.ThrowIfNull(column);
         double sum = 0;
         var count = 0;
-        var value = new double[1];
-        foreach (var i in _samples)
+        Span<double> values = stackalloc double[Chunk];
+        for (var start = _start; start < _end; start += Chunk)
         {
-            column.Read(_model, i, value);
-            if (double.IsNaN(value[0])) continue;
-            sum += value[0];
-            count++;
+            var chunk = values[..Math.Min(Chunk, _end - start)];
+            column.Read(_model, start, chunk);
+            for (var i = 0; i < chunk.Length; i++)
+            {
+                if (!_samples[start + i] || double.IsNaN(chunk[i])) continue;
+                sum += chunk[i];
+                count++;
+            }
         }
 
         return count > 0 ? sum / count : double.NaN;
