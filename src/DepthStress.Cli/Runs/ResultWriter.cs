@@ -1,3 +1,4 @@
+using System.Runtime.ExceptionServices;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
 using DepthStress.Files.Writing;
@@ -31,12 +32,19 @@ internal static class ResultWriter
         ];
 
         using var target = ResultFolder.Begin(folder);
-        foreach (var (name, write) in results)
+        try
         {
-            cancellation.ThrowIfCancellationRequested();
-            stage($"writing {name}");
-            using var stream = target.Create(name);
-            write(stream);
+            // Each file is made from the finished model alone, so their order does not matter.
+            Parallel.ForEach(results, new ParallelOptions { CancellationToken = cancellation }, result =>
+            {
+                stage($"writing {result.Name}");
+                using var stream = target.Create(result.Name);
+                result.Write(stream);
+            });
+        }
+        catch (AggregateException e)
+        {
+            ExceptionDispatchInfo.Throw(e.InnerExceptions[0]);
         }
 
         cancellation.ThrowIfCancellationRequested();

@@ -9,6 +9,7 @@ namespace DepthStress.Core.Layers;
 /// </summary>
 public sealed class ZoneMeans
 {
+    private const int Chunk = 1024;
     private readonly EarthModel _model;
     private readonly List<int> _samples;
 
@@ -34,17 +35,17 @@ public sealed class ZoneMeans
     public static IReadOnlyList<ZoneMeans> Of(EarthModel model)
     {
         ArgumentNullException.ThrowIfNull(model);
-        var shmin = SampleMarks.Column(model, Property.MinHorizontalStress);
-        var means = new List<ZoneMeans>();
-        foreach (var zone in Enumerable.Range(0, model.Count).GroupBy(i => model.Zones[i]))
+        var shmin = model.Values.Read(Property.MinHorizontalStress);
+        var zones = new Dictionary<short, (List<int> Covered, List<int> All)>();
+        for (var i = 0; i < model.Count; i++)
         {
-            if (zone.Key < 0 && model.Setup.Zones.Count > 0) continue;
-            var all = zone.ToList();
-            var covered = all.FindAll(i => !double.IsNaN(shmin[i]));
-            means.Add(new ZoneMeans(model, zone.Key, covered, all));
+            if (model.Zones[i] < 0 && model.Setup.Zones.Count > 0) continue;
+            if (!zones.TryGetValue(model.Zones[i], out var samples)) zones.Add(model.Zones[i], samples = ([], []));
+            samples.All.Add(i);
+            if (!shmin.IsEmpty && !double.IsNaN(shmin[i])) samples.Covered.Add(i);
         }
 
-        return means;
+        return [.. zones.Select(z => new ZoneMeans(model, z.Key, z.Value.Covered, z.Value.All))];
     }
 
     /// <summary>The mean of a column, SI; NaN when no sample has a value.</summary>
@@ -53,13 +54,19 @@ public sealed class ZoneMeans
         ArgumentNullException.ThrowIfNull(column);
         double sum = 0;
         var count = 0;
-        var value = new double[1];
-        foreach (var i in _samples)
+        Span<double> buffer = stackalloc double[Chunk];
+        for (var k = 0; k < _samples.Count;)
         {
-            column.Read(_model, i, value);
-            if (double.IsNaN(value[0])) continue;
-            sum += value[0];
-            count++;
+            var start = _samples[k];
+            var values = buffer[..Math.Min(Chunk, _model.Count - start)];
+            column.Read(_model, start, values);
+            for (; k < _samples.Count && _samples[k] < start + values.Length; k++)
+            {
+                var value = values[_samples[k] - start];
+                if (double.IsNaN(value)) continue;
+                sum += value;
+                count++;
+            }
         }
 
         return count > 0 ? sum / count : double.NaN;

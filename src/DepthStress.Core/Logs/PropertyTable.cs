@@ -17,6 +17,9 @@ public sealed class PropertyTable
     /// <summary>The property's values, empty when it has no column.</summary>
     public ReadOnlySpan<double> Read(Property property) => _columns[(int)property];
 
+    /// <summary>The property's own array, to be read only by what cannot hold a span; null when it has no column.</summary>
+    internal double[]? Held(Property property) => _columns[(int)property];
+
     /// <summary>The property's values to be written; a new column starts as all missing.</summary>
     public Span<double> Write(Property property)
     {

@@ -17,8 +17,11 @@ public static class DepthColumns
     [
         Stored("md", "measured depth", "MD", Depths, Property.MeasuredDepth, "depth along the hole below the datum"),
         Stored("tvd", "true vertical depth", "TVD", Depths, Property.TrueVerticalDepth, "minimum curvature"),
-        Number("tvdss", "true vertical depth below sea level", "TVDSS", Depths, "tvd - datum elevation",
-            (m, i) => m.Setup.Frame.ToSubsea(m.Values.Read(Property.TrueVerticalDepth)[i])),
+        Number("tvdss", "true vertical depth below sea level", "TVDSS", Depths, "tvd - datum elevation", (model, start, destination) =>
+        {
+            var tvd = Of(model, Property.TrueVerticalDepth, start, destination.Length);
+            for (var i = 0; i < tvd.Length; i++) destination[i] = model.Setup.Frame.ToSubsea(tvd[i]);
+        }),
         Stored("vp", "compressional velocity", "Vp", Velocities, Property.Vp, "log"),
         Stored("vs", "shear velocity", "Vs", Velocities, Property.Vs, "log"),
         Stored("density", "bulk density", "rho", Densities, Property.Density, "log, filled as chosen"),
@@ -48,8 +51,13 @@ public static class DepthColumns
         MudEquivalent("sv", "vertical stress", "Sv", Property.VerticalStress),
         Words("regime", "faulting regime", "order of the three stresses (Anderson 1951)", (m, i) => FaultingRegimes.Of(
             At(m, Property.VerticalStress, i), At(m, Property.MinHorizontalStress, i), At(m, Property.MaxHorizontalStress, i)).Name()),
-        Number("a_phi", "stress shape number", "A_phi", ColumnUnits.Numbers, "Simpson 1997", (m, i) => FaultingRegimes.ShapeNumber(
-            At(m, Property.VerticalStress, i), At(m, Property.MinHorizontalStress, i), At(m, Property.MaxHorizontalStress, i))),
+        Number("a_phi", "stress shape number", "A_phi", ColumnUnits.Numbers, "Simpson 1997", (model, start, destination) =>
+        {
+            var sv = Of(model, Property.VerticalStress, start, destination.Length);
+            var shmin = Of(model, Property.MinHorizontalStress, start, destination.Length);
+            var shmax = Of(model, Property.MaxHorizontalStress, start, destination.Length);
+            for (var i = 0; i < destination.Length; i++) destination[i] = FaultingRegimes.ShapeNumber(sv[i], shmin[i], shmax[i]);
+        }),
         Words("zone", "zone", "[[zones]]", (m, i) => m.ZoneName(m.Zones[i])),
         Words("lithology", "lithology", "[[lithology]]", (m, i) => m.LithologyName(m.Lithologies[i])),
         Origin("vp_origin", "origin of the compressional velocity", Property.Vp),
@@ -71,33 +79,52 @@ public static class DepthColumns
     private static double At(EarthModel model, Property property, int index) =>
         model.Values.Has(property) ? model.Values.Read(property)[index] : double.NaN;
 
+    /// <summary>Rows of a stored property; all missing when the model has none.</summary>
+    private static ReadOnlySpan<double> Of(EarthModel model, Property property, int start, int count)
+    {
+        if (model.Values.Has(property)) return model.Values.Read(property).Slice(start, count);
+        var missing = new double[count];
+        Array.Fill(missing, double.NaN);
+        return missing;
+    }
+
     private static NumberColumn<EarthModel> Stored(
         string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, Property property, string formula) =>
         new(id, title, symbol, units.Metric, units.Field, formula, (model, start, destination) =>
-        {
-            if (model.Values.Has(property)) model.Values.Read(property).Slice(start, destination.Length).CopyTo(destination);
-            else destination.Fill(double.NaN);
-        });
+            Of(model, property, start, destination.Length).CopyTo(destination));
 
     private static NumberColumn<EarthModel> Number(
-        string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, string formula, Func<EarthModel, int, double> value) =>
-        new(id, title, symbol, units.Metric, units.Field, formula, (model, start, destination) =>
-        {
-            for (var i = 0; i < destination.Length; i++) destination[i] = value(model, start + i);
-        });
+        string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, string formula, ColumnReader<EarthModel> read) =>
+        new(id, title, symbol, units.Metric, units.Field, formula, read);
 
     private static NumberColumn<EarthModel> Elastic(string id, string title, string symbol, string formula, Func<double, double, double> constant) =>
-        Number(id, title, symbol, Moduli, formula, (m, i) => constant(At(m, Property.YoungsStatic, i), At(m, Property.PoissonStatic, i)));
+        Number(id, title, symbol, Moduli, formula, (model, start, destination) =>
+        {
+            var youngs = Of(model, Property.YoungsStatic, start, destination.Length);
+            var poisson = Of(model, Property.PoissonStatic, start, destination.Length);
+            for (var i = 0; i < destination.Length; i++) destination[i] = constant(youngs[i], poisson[i]);
+        });
 
     private static NumberColumn<EarthModel> SurfaceGradient(string id, string title, string symbol, Property property) =>
         Number(
             id + "_gradient", title + " gradient", symbol, Gradients, $"{id} / true vertical depth below ground, or below sea surface offshore",
-            (m, i) => Ratio(At(m, property, i), At(m, Property.TrueVerticalDepth, i) - m.Setup.Frame.SurfaceTvd));
+            (model, start, destination) =>
+            {
+                var surface = model.Setup.Frame.SurfaceTvd;
+                var values = Of(model, property, start, destination.Length);
+                var tvd = Of(model, Property.TrueVerticalDepth, start, destination.Length);
+                for (var i = 0; i < destination.Length; i++) destination[i] = Ratio(values[i], tvd[i] - surface);
+            });
 
     private static NumberColumn<EarthModel> MudEquivalent(string id, string title, string symbol, Property property) =>
         Number(
             id + "_emw", title + " as equivalent mud density", symbol + " EMW", MudDensities, $"{id} / (g * true vertical depth below the datum)",
-            (m, i) => Ratio(At(m, property, i), At(m, Property.TrueVerticalDepth, i) * Constants.StandardGravity));
+            (model, start, destination) =>
+            {
+                var values = Of(model, property, start, destination.Length);
+                var tvd = Of(model, Property.TrueVerticalDepth, start, destination.Length);
+                for (var i = 0; i < destination.Length; i++) destination[i] = Ratio(values[i], tvd[i] * Constants.StandardGravity);
+            });
 
     private static TextColumn<EarthModel> Words(string id, string title, string formula, Func<EarthModel, int, string> word) =>
         new(id, title, formula, (model, start, destination) =>

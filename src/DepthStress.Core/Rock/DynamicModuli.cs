@@ -1,3 +1,6 @@
+using System.Numerics;
+using System.Runtime.CompilerServices;
+
 namespace DepthStress.Core.Rock;
 
 /// <summary>
@@ -30,17 +33,28 @@ public static class DynamicModuli
     /// <param name="youngs">Young's modulus, Pa.</param>
     /// <param name="poisson">Poisson's ratio.</param>
     /// <exception cref="ArgumentException">Lengths differ.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Fill(
         ReadOnlySpan<double> vp, ReadOnlySpan<double> vs, ReadOnlySpan<double> density, Span<double> youngs, Span<double> poisson)
     {
         var n = vp.Length;
         if (vs.Length != n || density.Length != n || youngs.Length != n || poisson.Length != n)
             throw new ArgumentException("Lengths differ.", nameof(vp));
-        for (var i = 0; i < n; i++)
+        var i = 0;
+        for (; i <= n - Vector<double>.Count; i += Vector<double>.Count)
         {
-            var nu = Poisson(vp[i], vs[i]);
-            poisson[i] = nu;
-            youngs[i] = 2 * Shear(vs[i], density[i]) * (1 + nu);
+            // The scalar formulas in the same order of operations: equal to the last bit.
+            Vector<double> s = new(vs[i..]), pp = new(vp[i..]);
+            var (p2, s2) = (pp * pp, s * s);
+            var nu = (p2 - (2 * s2)) / (2 * (p2 - s2));
+            nu.CopyTo(poisson[i..]);
+            (2 * (new Vector<double>(density[i..]) * s * s) * (Vector<double>.One + nu)).CopyTo(youngs[i..]);
+        }
+
+        for (; i < n; i++)
+        {
+            youngs[i] = Youngs(vp[i], vs[i], density[i]);
+            poisson[i] = Poisson(vp[i], vs[i]);
         }
     }
 }

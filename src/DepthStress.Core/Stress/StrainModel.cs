@@ -1,3 +1,6 @@
+using System.Numerics;
+using System.Runtime.CompilerServices;
+
 namespace DepthStress.Core.Stress;
 
 /// <summary>
@@ -25,6 +28,7 @@ public static class StrainModel
 
     /// <summary>Fills both horizontal stresses; a missing input gives missing results.</summary>
     /// <exception cref="ArgumentException">Lengths differ.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Fill(
         ReadOnlySpan<double> youngs,
         ReadOnlySpan<double> poisson,
@@ -39,14 +43,22 @@ public static class StrainModel
         var n = youngs.Length;
         if (poisson.Length != n || biot.Length != n || vertical.Length != n || pore.Length != n || shmin.Length != n || shmax.Length != n)
             throw new ArgumentException("Lengths differ.", nameof(youngs));
-        for (var i = 0; i < n; i++)
+        var i = 0;
+        for (; i <= n - Vector<double>.Count; i += Vector<double>.Count)
         {
-            var nu = poisson[i];
-            var pressure = biot[i] * pore[i];
-            var uniaxial = (nu / (1 - nu) * (vertical[i] - pressure)) + pressure;
-            var plane = youngs[i] / (1 - (nu * nu));
-            shmin[i] = uniaxial + (plane * (strainAlongShmin + (nu * strainAlongShmax)));
-            shmax[i] = uniaxial + (plane * (strainAlongShmax + (nu * strainAlongShmin)));
+            // The scalar formula in the same order of operations: equal to the last bit.
+            Vector<double> nu = new(poisson[i..]), one = Vector<double>.One;
+            var pressure = new Vector<double>(biot[i..]) * new Vector<double>(pore[i..]);
+            var uniaxial = (nu / (one - nu) * (new Vector<double>(vertical[i..]) - pressure)) + pressure;
+            var plane = new Vector<double>(youngs[i..]) / (one - (nu * nu));
+            (uniaxial + (plane * (new Vector<double>(strainAlongShmin) + (nu * strainAlongShmax)))).CopyTo(shmin[i..]);
+            (uniaxial + (plane * (new Vector<double>(strainAlongShmax) + (nu * strainAlongShmin)))).CopyTo(shmax[i..]);
+        }
+
+        for (; i < n; i++)
+        {
+            shmin[i] = Of(youngs[i], poisson[i], biot[i], vertical[i], pore[i], strainAlongShmin, strainAlongShmax);
+            shmax[i] = Of(youngs[i], poisson[i], biot[i], vertical[i], pore[i], strainAlongShmax, strainAlongShmin);
         }
     }
 }

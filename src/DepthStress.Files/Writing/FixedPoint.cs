@@ -21,6 +21,12 @@ public static class FixedPoint
 
     private static readonly double[] Scales = [1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12];
 
+    private static ReadOnlySpan<ulong> Powers =>
+    [
+        1, 10, 100, 1_000, 10_000, 100_000, 1_000_000, 10_000_000, 100_000_000, 1_000_000_000, 10_000_000_000, 100_000_000_000,
+        1_000_000_000_000, 10_000_000_000_000,
+    ];
+
     private static readonly string[] Formats =
         [.. Enumerable.Range(0, Scales.Length).Select(d => "F" + d.ToString(CultureInfo.InvariantCulture))];
 
@@ -104,7 +110,7 @@ public static class FixedPoint
     private static int CountDigits(ulong digits)
     {
         var guess = ((BitOperations.Log2(digits | 1) + 1) * 1233) >> 12;
-        return digits >= Scales[guess] ? guess + 1 : Math.Max(guess, 1);
+        return digits >= Powers[guess] ? guess + 1 : Math.Max(guess, 1);
     }
 
     private static bool TryLibrary(double value, int decimals, Span<byte> destination, out int written)

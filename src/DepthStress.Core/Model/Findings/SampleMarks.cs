@@ -17,7 +17,7 @@ internal static class SampleMarks
     /// <summary>A column as an array that lambdas can hold; all missing when the model has no such column.</summary>
     public static double[] Column(EarthModel model, Property property)
     {
-        if (model.Values.Has(property)) return model.Values.Read(property).ToArray();
+        if (model.Values.Held(property) is { } held) return held;
         var missing = new double[model.Count];
         Array.Fill(missing, double.NaN);
         return missing;
