@@ -14,6 +14,7 @@ public static class SetupCheck
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(diagnostics);
         ZoneCheck.Report(setup, diagnostics);
+        ConditioningCheck.ReportOwners(setup, diagnostics);
         foreach (var (rule, overrides) in setup.Lithologies)
         {
             if (overrides.Shale != new ShaleSettings())
@@ -51,6 +52,7 @@ public static class SetupCheck
     {
         foreach (var slot in LawSlots.All) ReportLaw(scope, slot);
         ReportShale(scope);
+        ConditioningCheck.Report(scope);
         PorePressureCheck.Report(scope);
         ReportStrains(scope);
     }
