@@ -22,10 +22,10 @@ public static class NullSmear
         var marks = new bool[values.Length];
         var current = values.ToArray();
         Span<double> steps = stackalloc double[Reach];
-        var usual = UsualStep(values);
         for (var found = true; found;)
         {
             found = false;
+            var usual = UsualStep(current);
             for (var i = 0; i < current.Length; i++)
             {
                 if (double.IsNaN(current[i])) continue;
@@ -61,14 +61,14 @@ public static class NullSmear
         return fall > Math.Max(Math.Max(greatest, usual), median + (Threshold * scale));
     }
 
-    /// <summary>The step that ninety-nine in a hundred samples of the curve do not exceed.</summary>
+    /// <summary>The step that ninety-nine in a hundred samples away from the gaps do not exceed.</summary>
     private static double UsualStep(ReadOnlySpan<double> values)
     {
         var steps = new List<double>(values.Length);
-        for (var i = 1; i < values.Length; i++)
+        for (var i = 2; i + 1 < values.Length; i++)
         {
             var step = Math.Abs(values[i] - values[i - 1]);
-            if (!double.IsNaN(step)) steps.Add(step);
+            if (!double.IsNaN(step + values[i - 2] + values[i + 1])) steps.Add(step);
         }
 
         if (steps.Count == 0) return double.PositiveInfinity;

@@ -74,7 +74,7 @@ public static class SpikeFilter
     {
         var before = values[start - 1];
         var entry = values[start] - before;
-        if (!(entry != 0)) return 0;
+        if (double.IsNaN(entry) || entry == 0) return 0;
         var sign = Math.Sign(entry);
         for (var length = 1; length <= LongestRun && start + length < values.Length; length++)
         {

@@ -32,8 +32,10 @@ internal static class ConditioningCheck
         foreach (var shift in settings.Shifts.Value) ReportName(scope, shift.Curve, settings.Shifts.Source.Position, "shifts");
         foreach (var twice in settings.Shifts.Value.GroupBy(s => s.Curve).Where(g => g.Key.Length > 0 && g.Count() > 1))
             scope.Error(settings.Shifts.Source.Position, $"[conditioning] shifts: found the curve \"{twice.Key}\" twice, expected each once");
-        if (settings.Shifts.Value.Any(s => double.IsNaN(s.By) || s.Curve.Length == 0))
-            scope.Error(settings.Shifts.Source.Position, "[conditioning] shifts: expected each with curve and by");
+        if (settings.Shifts.Value.Any(s => s.Curve.Length == 0))
+            scope.Error(settings.Shifts.Source.Position, "[shifts] curve is not set; expected the name of a curve in each shift");
+        if (settings.Shifts.Value.Any(s => double.IsNaN(s.By)))
+            scope.Error(settings.Shifts.Source.Position, "[shifts] by is not set; expected a length in each shift, positive downwards");
     }
 
     private static void ReportSpikes(CheckScope scope, SpikeSettings spikes)
@@ -45,19 +47,19 @@ internal static class ConditioningCheck
         }
 
         if (!spikes.Curves.IsSet && !spikes.Window.IsSet && !spikes.Threshold.IsSet) return;
-        if (!spikes.Window.IsSet) scope.Missing("[conditioning.spikes] window", "the depth over which usual steps are taken, such as \"3 m\"");
-        if (!spikes.Threshold.IsSet) scope.Missing("[conditioning.spikes] threshold", "a number of robust standard deviations");
-        if (!spikes.Curves.IsSet) scope.Missing("[conditioning.spikes] curves", "the curves to filter");
+        if (!spikes.Window.IsSet) scope.Missing("[spikes] window", "the depth over which usual steps are taken, such as \"3 m\"");
+        if (!spikes.Threshold.IsSet) scope.Missing("[spikes] threshold", "a number of robust standard deviations");
+        if (!spikes.Curves.IsSet) scope.Missing("[spikes] curves", "the curves to filter");
     }
 
     private static void ReportWashout(CheckScope scope, WashoutSettings washout)
     {
         var (large, corrected) = (washout.CaliperExcess.IsSet, washout.DensityCorrection.IsSet);
         if (!large && !corrected && !washout.Rule.IsSet || washout.Rule is { IsSet: true, Value: WashoutRule.None }) return;
-        if (!washout.Rule.IsSet) scope.Missing("[conditioning.washout] rule", "\"either\", \"both\" or \"none\"");
-        if (!large && !corrected) scope.Missing("[conditioning.washout] caliper_excess", "it, density_correction, or both");
+        if (!washout.Rule.IsSet) scope.Missing("[washout] rule", "\"either\", \"both\" or \"none\"");
+        if (!large && !corrected) scope.Missing("[washout] caliper_excess", "it, density_correction, or both");
         else if (washout.Rule is { IsSet: true, Value: WashoutRule.Both } && !(large && corrected))
-            scope.Error(washout.Rule.Source.Position, $"[conditioning.washout] rule = \"both\" needs caliper_excess and density_correction{scope.Owner}");
+            scope.Error(washout.Rule.Source.Position, $"[washout] rule = \"both\" needs caliper_excess and density_correction{scope.Owner}");
     }
 
     private static void ReportName(CheckScope scope, string name, SourcePosition position, string key)
