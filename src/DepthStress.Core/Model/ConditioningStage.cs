@@ -1,3 +1,4 @@
+using System.Globalization;
 using DepthStress.Core.Conditioning;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
@@ -20,10 +21,15 @@ internal static class ConditioningStage
             if (Finding.About(Severity.Warning, $"{removal.Reason}: taken out", logs.Depths, removal.Samples) is { } finding) findings.Add(finding);
         }
 
-        foreach (var step in conditioned.Steps)
+        foreach (var step in conditioned.Steps.GroupBy(s => s.Name))
         {
-            var curve = CurveRoles.Of(step.Property)!.Id;
-            if (Finding.About(Severity.Note, $"conditioning, {curve}: {step.Name}", logs.Depths, step.Samples) is { } finding) findings.Add(finding);
+            var touched = new bool[logs.Count];
+            foreach (var curve in step)
+            {
+                for (var i = 0; i < touched.Length; i++) touched[i] |= curve.Samples[i];
+            }
+
+            if (Finding.About(Severity.Note, $"conditioning, {step.Key}: {Counts(step)}", logs.Depths, touched) is { } finding) findings.Add(finding);
         }
 
         foreach (var wash in runs.Select(r => r.Settings.Washout).Where(w => w.Rule.IsSet && w.Rule.Value != WashoutRule.None).Distinct())
@@ -37,4 +43,7 @@ internal static class ConditioningStage
 
         return conditioned.Logs;
     }
+
+    private static string Counts(IEnumerable<ConditioningStep> steps) =>
+        string.Join(", ", steps.Select(s => string.Create(CultureInfo.InvariantCulture, $"{CurveRoles.Of(s.Property)!.Id} {s.Samples.Count(m => m)}")));
 }

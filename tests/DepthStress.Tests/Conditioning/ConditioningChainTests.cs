@@ -12,7 +12,9 @@ public class ConditioningChainTests
 {
     private static readonly SpikeSettings Spikes = new()
     {
-        Window = Chosen(3.0), Threshold = Chosen(5.0), Curves = Chosen<IReadOnlyList<string>>(["shear", "density"]),
+        Window = Chosen(3.0),
+        Threshold = Chosen(5.0),
+        Curves = Chosen<IReadOnlyList<string>>(["shear", "density"]),
     };
 
     [Fact]
@@ -29,7 +31,7 @@ public class ConditioningChainTests
         var vs = model.Logs[Property.Vs]!;
         Assert.Equal([30, 70], Enumerable.Range(0, vs.Values.Length).Where(i => double.IsNaN(vs.Values[i])));
         Assert.Contains(new OriginRun(30, 31, SampleOrigin.Edited, "taken out: spike"), vs.Origins.Runs);
-        Assert.Contains("conditioning, shear: spike", model.Texts());
+        Assert.Contains("conditioning, spike: shear 2", model.Texts());
         Assert.Equal(Severity.Note, model.Findings.First(f => f.Text.Format.StartsWith("conditioning", StringComparison.Ordinal)).Severity);
     }
 
@@ -61,7 +63,7 @@ public class ConditioningChainTests
         var off = new StageSettings { Conditioning = new ConditioningSettings { Spikes = new SpikeSettings { Curves = Chosen<IReadOnlyList<string>>([], kind: SettingKind.Zone) } } };
         var setup = With(new ConditioningSettings { Spikes = Spikes }) with
         {
-            Zones = [new Zone("upper", 1000, null, DepthKind.Measured, new StageSettings(), WellFile), new Zone("coal", 1007.5, null, DepthKind.Measured, off, WellFile)],
+            Zones = [new Zone("upper", 0, null, DepthKind.Measured, new StageSettings(), WellFile), new Zone("coal", 7.5, null, DepthKind.Measured, off, WellFile)],
         };
         var vs = Run(setup, Spiky()).Logs[Property.Vs]!.Values;
         Assert.True(double.IsNaN(vs[30]));
@@ -90,7 +92,7 @@ public class ConditioningChainTests
     private static WellSetup With(ConditioningSettings settings) => Setup with { Settings = Settings with { Conditioning = settings } };
 
     private static LogTable Logs(params Curve[] replaced) => Table(
-        Waves.Depths(100),
+        [.. Waves.Depths(100).Select(d => d - 1000)],
         Curve(Property.Vp, Same(4000, 100)),
         Curve(Property.Vs, [.. Waves.Curve(100).Select(v => 1000 * v)]),
         Curve(Property.Density, Same(2500, 100))).With(replaced);
