@@ -66,10 +66,9 @@ public sealed class Conditioner
             if (_logs.Curves.FirstOrDefault(c => c.Role.Id == role) is not { } curve) continue;
             var property = curve.Role.Property;
             var moved = MeasuredScale.Convert(property, DepthShift.Move(_logs.Depths, MeasuredScale.Convert(property, curve.Values), by));
-            const string Name = "depth shift";
-            var origins = OriginTrack.Of(moved, SampleOrigin.Edited, Name);
+            var origins = OriginTrack.Of(moved, SampleOrigin.Edited, DepthShift.Name);
             _logs = _logs.With(curve with { Values = moved, Origins = origins });
-            _steps.Add(new ConditioningStep(Name, property, Array.ConvertAll(moved, v => !double.IsNaN(v))));
+            _steps.Add(new ConditioningStep(DepthShift.Name, property, Array.ConvertAll(moved, v => !double.IsNaN(v))));
         }
     }
 

@@ -5,6 +5,9 @@ namespace DepthStress.Core.Conditioning;
 /// <summary>Moves a whole curve along the hole; values between samples come by straight lines, never across a gap.</summary>
 public static class DepthShift
 {
+    /// <summary>The step's name in origins and findings.</summary>
+    public const string Name = "depth shift";
+
     /// <summary>The curve moved down by a distance.</summary>
     /// <param name="depths">Measured depths, m, strictly increasing.</param>
     /// <param name="values">The curve; NaN means missing.</param>

@@ -22,7 +22,7 @@ public static class ParkedTool
         ArgumentNullException.ThrowIfNull(origins);
         if (origins.Count != values.Length) throw new ArgumentException("The origins' length differs from the curve's.", nameof(origins));
         var marks = new bool[values.Length];
-        var logged = origins.Runs.Where(r => r.Origin is SampleOrigin.Measured or SampleOrigin.Spliced).ToArray();
+        var logged = origins.Runs.Where(r => r.Origin is SampleOrigin.Measured or SampleOrigin.Spliced || r.Step == DepthShift.Name).ToArray();
         for (var first = 0; first < logged.Length;)
         {
             var last = first;

@@ -81,6 +81,16 @@ public class ConditioningChainTests
     }
 
     [Fact]
+    public void A_parked_end_is_found_on_a_moved_curve_too()
+    {
+        var logs = Logs();
+        Array.Fill(logs[Property.Vs]!.Values, 1500, 90, 10);
+        var shift = Chosen<IReadOnlyList<CurveShift>>([new CurveShift("shear", -0.15)]);
+        var vs = Run(With(new ConditioningSettings { Shifts = shift, Parked = Chosen(true) }), logs).Logs[Property.Vs]!;
+        Assert.Contains(new OriginRun(89, 99, SampleOrigin.Edited, "taken out: parked tool"), vs.Origins.Runs);
+    }
+
+    [Fact]
     public void A_washout_without_the_curves_it_needs_is_said_to_have_no_effect()
     {
         var washout = new WashoutSettings { CaliperExcess = Chosen(0.025), DensityCorrection = Chosen(50.0), Rule = Chosen(WashoutRule.Either) };
