@@ -25,12 +25,20 @@ public static class SampleLogs
     /// <returns>The hidden truth and what was spoiled.</returns>
     public static SampleResult Write(string folder, ulong seed) => Write(folder, WellPlans.Drawn(seed));
 
+    /// <summary>The hidden truth and what sound tools read of it in both runs.</summary>
+    internal static (Truth Truth, LogRun Upper, LogRun Lower) Record(WellPlan plan)
+    {
+        var truth = new Truth(plan);
+        return (
+            truth,
+            Tools.Record(truth, "quillback-4-run1.csv", plan.FirstMd, UpperEnd, _ => UpperBit),
+            Tools.Record(truth, "quillback-4-run2.csv", LowerStart, plan.LastMd, md => md < UpperEnd ? UpperBit : LowerBit));
+    }
+
     private static SampleResult Write(string folder, WellPlan plan)
     {
         Directory.CreateDirectory(folder);
-        var truth = new Truth(plan);
-        var upper = Tools.Record(truth, "quillback-4-run1.csv", plan.FirstMd, UpperEnd, _ => UpperBit);
-        var lower = Tools.Record(truth, "quillback-4-run2.csv", LowerStart, plan.LastMd, md => md < UpperEnd ? UpperBit : LowerBit);
+        var (truth, upper, lower) = Record(plan);
         var damage = Damage.Apply(upper, lower, UpperEnd, md => truth.Grid.At(truth.Rock.ShaleVolume, md), plan.Seed);
         RunCsv.Write(folder, upper);
         RunCsv.Write(folder, lower);

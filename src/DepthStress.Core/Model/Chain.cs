@@ -1,4 +1,3 @@
-using DepthStress.Core.Conditioning;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
@@ -7,7 +6,7 @@ using DepthStress.Core.Rock;
 namespace DepthStress.Core.Model;
 
 /// <summary>
-/// The ordered stages from logs to stresses: depth, impossible samples, shale and lithology, rock, overburden, pore
+/// The ordered stages from logs to stresses: conditioning, depth, shale and lithology, rock, overburden, pore
 /// pressure, horizontal stress. One code path for every kind of run.
 /// </summary>
 public static class Chain
@@ -25,20 +24,15 @@ public static class Chain
         var findings = new List<Finding>();
         var uses = new List<LawUse>();
 
-        (logs, var removals) = ImpossibleSamples.Remove(logs);
-        foreach (var removal in removals)
-        {
-            if (Finding.About(Severity.Warning, $"{removal.Reason}: taken out", logs.Depths, removal.Samples) is { } finding) findings.Add(finding);
-        }
-
         if (CurvePath.Resolve(setup, logs, diagnostics, findings) is not { } resolved) return null;
         setup = resolved;
+        var zones = new short[logs.Count];
+        ZoneIndex.Fill(setup, logs.Depths, zones);
+        logs = ConditioningStage.Apply(setup, logs, zones, findings);
         var table = Adopt(logs);
         var usable = DepthStage.Apply(setup, table, findings);
         findings.AddRange(DepthCrossCheck.Of(setup, logs, table));
-        var zones = new short[logs.Count];
         var lithologies = new short[logs.Count];
-        ZoneIndex.Fill(setup, logs.Depths, zones);
         Array.Fill(lithologies, LithologyIndex.None);
         var runs = SettingsRun.Resolve(setup, zones, lithologies);
         ShaleStage.Apply(table, runs, uses, findings);

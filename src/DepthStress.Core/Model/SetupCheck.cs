@@ -15,6 +15,7 @@ public static class SetupCheck
         ArgumentNullException.ThrowIfNull(diagnostics);
         // Where the path comes from a curve, zones are checked once it is known.
         if (!setup.PathCurve.IsSet) ZoneCheck.Report(setup, diagnostics);
+        ConditioningCheck.ReportOwners(setup, diagnostics);
         foreach (var (rule, overrides) in setup.Lithologies)
         {
             if (overrides.Shale != new ShaleSettings())
@@ -55,6 +56,7 @@ public static class SetupCheck
     {
         foreach (var slot in LawSlots.All) ReportLaw(scope, slot);
         ReportShale(scope);
+        ConditioningCheck.Report(scope);
         PorePressureCheck.Report(scope);
         ReportStrains(scope);
     }

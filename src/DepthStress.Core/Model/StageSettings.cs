@@ -1,3 +1,4 @@
+using DepthStress.Core.Conditioning;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
@@ -8,6 +9,9 @@ namespace DepthStress.Core.Model;
 /// <summary>Everything that a zone or a lithology rule may decide for its samples.</summary>
 public sealed record StageSettings
 {
+    /// <summary>Log conditioning; a lithology rule cannot decide it.</summary>
+    public ConditioningSettings Conditioning { get; init; } = new();
+
     /// <summary>Shale volume.</summary>
     public ShaleSettings Shale { get; init; } = new();
 
@@ -35,6 +39,7 @@ public sealed record StageSettings
         ArgumentNullException.ThrowIfNull(below);
         return new StageSettings
         {
+            Conditioning = Conditioning.Over(below.Conditioning),
             Shale = Shale.Over(below.Shale),
             Porosity = Porosity.Over(below.Porosity),
             Moduli = Moduli.Over(below.Moduli),

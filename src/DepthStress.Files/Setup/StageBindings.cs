@@ -14,6 +14,7 @@ internal static class StageBindings
     /// <summary>All of them.</summary>
     public static StageSettings All(ISection s, StageSettings c) => c with
     {
+        Conditioning = s.Table("conditioning", c.Conditioning, ConditioningBindings.All, "log conditioning: what is taken out, moved or bridged"),
         Shale = s.Table("shale", c.Shale, Shale, "shale volume from gamma ray"),
         Porosity = s.Table("porosity", c.Porosity, Porosity, "porosity"),
         Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),

@@ -57,6 +57,13 @@ internal static class WellFile
     private const string Choices = """
         # What holds wherever a zone above does not say otherwise.
 
+        [conditioning]
+        parked = true                        # the recorder ran on while the tools stood still
+        null_smear = true                    # the curves were resampled across gaps
+        spikes = { window = "3 m", threshold = 5, curves = ["compressional", "shear", "density", "gamma_ray"] }
+        washout = { caliper_excess = "1 in", density_correction = "0.025 g/cm3", rule = "both" }   # shale is a little enlarged everywhere
+        fill_gaps = "1 m"
+
         [shale]
         volume = "linear-gamma-ray"          # straight between the cleanest sand and limestone and the purest shale seen
         clean = "28 gAPI"
