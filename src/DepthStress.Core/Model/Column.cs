@@ -31,6 +31,9 @@ public sealed record NumberColumn<TSource>(
     string Id, string Title, string Symbol, ColumnUnit Metric, ColumnUnit Field, string Formula, ColumnReader<TSource> Read)
     : Column<TSource>(Id, Title, Formula)
 {
+    /// <summary>False when LAS results leave it out: their lines have at most 256 characters.</summary>
+    public bool InLas { get; init; } = true;
+
     /// <summary>How results of a unit system write it.</summary>
     public ColumnUnit In(UnitSystem system) => system == UnitSystem.Metric ? Metric : Field;
 

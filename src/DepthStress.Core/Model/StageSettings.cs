@@ -1,4 +1,5 @@
 using DepthStress.Core.Lithology;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
 using DepthStress.Core.Stress;
@@ -10,6 +11,9 @@ public sealed record StageSettings
 {
     /// <summary>Shale volume.</summary>
     public ShaleSettings Shale { get; init; } = new();
+
+    /// <summary>Shear velocity and density where they are not logged.</summary>
+    public PredictionSettings Prediction { get; init; } = new();
 
     /// <summary>Porosity.</summary>
     public PorositySettings Porosity { get; init; } = new();
@@ -36,6 +40,7 @@ public sealed record StageSettings
         return new StageSettings
         {
             Shale = Shale.Over(below.Shale),
+            Prediction = Prediction.Over(below.Prediction),
             Porosity = Porosity.Over(below.Porosity),
             Moduli = Moduli.Over(below.Moduli),
             Strength = Strength.Over(below.Strength),

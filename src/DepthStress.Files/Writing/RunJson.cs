@@ -52,6 +52,7 @@ public static class RunJson
             ["curves"] = Array(logs.Logs.Curves.Select(Curve)),
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
+            ["predictions"] = Array(model.Predictions.Select(Predicted)),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(Method)),
         };
@@ -100,12 +101,28 @@ public static class RunJson
                 Standing.Confirmed => "coefficients read in the source",
                 Standing.Identity => "identity",
                 Standing.FromMemory => "coefficients recalled, not read",
+                Standing.Trained => "fitted to the well's own samples",
                 _ => "given by the user",
             },
             ["samples"] = total.Evaluated,
             ["input_missing"] = total.InputMissing,
             ["outside_domain"] = total.OutsideDomain,
             ["outside_range"] = total.OutsideRange,
+        };
+    }
+
+    private static JsonObject Predicted(Prediction prediction)
+    {
+        var (unit, error) = (prediction.Law.Unit, prediction.Error);
+        return new JsonObject
+        {
+            ["property"] = Core.Logs.PropertyNames.Name(prediction.Property),
+            ["method"] = prediction.Words,
+            ["formula"] = prediction.Law.Text,
+            ["unit"] = unit.Symbol,
+            ["standard_error"] = double.IsNaN(error) ? null : Math.Round(error / unit.Factor, 6),
+            ["samples"] = prediction.Samples.Count(s => s),
+            ["beyond_training"] = prediction.Beyond.Count(b => b),
         };
     }
 
