@@ -1,4 +1,5 @@
 using DepthStress.Core.Catalogue;
+using DepthStress.Core.Logs;
 
 namespace DepthStress.Core.Prediction;
 
@@ -21,6 +22,14 @@ public sealed record TrainedFit(Law Law, double Error, string Scope, int[] Sampl
 /// </summary>
 public sealed class Trainer
 {
+    /// <summary>A sample this many robust standard deviations off the line is a spike, not rock.</summary>
+    private const double SpikeLimit = 6;
+
+    /// <summary>Standard deviation of normal errors over the median of their sizes.</summary>
+    private const double DeviationOverMedian = 1.4826;
+
+    private const int TrimRounds = 10;
+
     private readonly Law _choice;
     private readonly LawInput[] _candidates;
     private readonly double[][] _columns;
@@ -30,7 +39,7 @@ public sealed class Trainer
     /// <summary>Takes the columns to learn from.</summary>
     /// <param name="choice">The choice to train.</param>
     /// <param name="candidates">What the relation may start from.</param>
-    /// <param name="columns">The logged values of each candidate, SI.</param>
+    /// <param name="columns">The logged values of each candidate, SI; what no rock has is not looked at.</param>
     /// <param name="target">The logged values of what is predicted, SI.</param>
     /// <param name="step">The usual distance between samples, m.</param>
     public Trainer(Law choice, LawInput[] candidates, double[][] columns, double[] target, double step)
@@ -38,8 +47,9 @@ public sealed class Trainer
         ArgumentNullException.ThrowIfNull(choice);
         ArgumentNullException.ThrowIfNull(candidates);
         ArgumentNullException.ThrowIfNull(columns);
-        (_choice, _candidates, _target, _step) = (choice, candidates, target, step);
-        _columns = [.. columns.Select((c, k) => Array.ConvertAll(c, candidates[k].Unit.FromSi))];
+        (_choice, _candidates, _step) = (choice, candidates, step);
+        _target = Array.ConvertAll(Credible(target, choice.Predicts), choice.Unit.FromSi);
+        _columns = [.. columns.Select((c, k) => Array.ConvertAll(Credible(c, candidates[k].Property), candidates[k].Unit.FromSi))];
     }
 
     /// <summary>Trains what the missing samples need; samples without compressional velocity, or with too little to learn from, are left out.</summary>
@@ -66,10 +76,10 @@ public sealed class Trainer
         // A predictor that does not vary or repeats another tells nothing: the last goes first.
         for (; chosen.Length > 0; chosen = chosen[..^1])
         {
-            var kept = Enumerable.Range(0, set.Rows.Length).Where(i => chosen.All(k => !double.IsNaN(_columns[k][set.Rows[i]]))).ToArray();
+            var kept = Enumerable.Range(0, set.Rows.Length).Where(i => !double.IsNaN(_target[set.Rows[i]]) && chosen.All(k => !double.IsNaN(_columns[k][set.Rows[i]]))).ToArray();
+            kept = WithoutSpikes(kept, chosen, set.Rows);
             if (Folds(set, kept) is not { } folds) continue;
-            var columns = chosen.Select(k => Array.ConvertAll(kept, i => _columns[k][set.Rows[i]])).ToArray();
-            var target = Array.ConvertAll(kept, i => _choice.Unit.FromSi(_target[set.Rows[i]]));
+            var (columns, target) = Gather(kept, chosen, set.Rows);
             if (LinearRegression.Fit(columns, target) is not { } line) continue;
             var error = BlockedValidation.Error(columns, target, folds);
             if (double.IsNaN(error)) continue;
@@ -79,6 +89,30 @@ public sealed class Trainer
 
         return null;
     }
+
+    /// <summary>Leaves out rows far off the line, again and again until none is: least squares would follow a spike anywhere.</summary>
+    private int[] WithoutSpikes(int[] kept, int[] chosen, int[] rows)
+    {
+        for (var round = 0; round < TrimRounds; round++)
+        {
+            var (columns, target) = Gather(kept, chosen, rows);
+            if (LinearRegression.Fit(columns, target) is not { } line) return kept;
+            var misses = target.Select((t, i) => Math.Abs(t - line.At(columns, i))).ToArray();
+            var limit = SpikeLimit * DeviationOverMedian * MathNet.Numerics.Statistics.ArrayStatistics.MedianInplace([.. misses]);
+            var near = kept.Where((_, i) => !(misses[i] > limit)).ToArray();
+            if (near.Length == kept.Length) return kept;
+            kept = near;
+        }
+
+        return kept;
+    }
+
+    private (double[][] Columns, double[] Target) Gather(int[] kept, int[] chosen, int[] rows) =>
+        ([.. chosen.Select(k => Array.ConvertAll(kept, i => _columns[k][rows[i]]))], Array.ConvertAll(kept, i => _target[rows[i]]));
+
+    /// <summary>The values that rock can have.</summary>
+    private static double[] Credible(double[] values, Property property) =>
+        CurveRoles.Of(property) is { } role ? Array.ConvertAll(values, v => v >= role.TypicalLow && v <= role.TypicalHigh ? v : double.NaN) : values;
 
     /// <summary>Whole zones where there are at least three of some length and the set asks for it, else blocks of depth; null when rows are too few.</summary>
     private int[]? Folds(TrainingSet set, int[] kept)

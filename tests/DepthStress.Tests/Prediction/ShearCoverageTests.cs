@@ -14,17 +14,19 @@ namespace DepthStress.Tests.Prediction;
 /// </summary>
 public sealed class ShearCoverageTests(ITestOutputHelper output)
 {
-    // Seeds 1 to 20 were looked at while the method was built, 9001 to 9005 were not.
+    // Seeds 1 to 20 were looked at while the method was built, 7001 to 7005 were not.
     [Theory]
     [InlineData(1, 20)]
-    [InlineData(9001, 5)]
+    [InlineData(7001, 5)]
     public void The_hidden_shear_lies_within_the_stated_error(int first, int count)
     {
         int predicted = 0, one = 0, two = 0;
+        var stated = 0.0;
         for (var seed = first; seed < first + count; seed++)
         {
             var well = Of((ulong)seed);
             output.WriteLine(FormattableString.Invariant($"seed {seed}: {well.Predicted} predicted, {100.0 * well.One / well.Predicted:F0} % within one and {100.0 * well.Two / well.Predicted:F0} % within two standard errors of {well.Error:F0} m/s on average"));
+            stated += well.Error / count;
             (predicted, one, two) = (predicted + well.Predicted, one + well.One, two + well.Two);
         }
 
@@ -32,6 +34,7 @@ public sealed class ShearCoverageTests(ITestOutputHelper output)
         Assert.True(predicted > 400 * count, "each well lacks 590 samples in one stretch");
         Assert.True(one >= 0.60 * predicted);
         Assert.True(two >= 0.90 * predicted);
+        Assert.InRange(stated, 1, 150); // m/s: an error so wide that anything lies within it would say nothing
     }
 
     private static (int Predicted, int One, int Two, double Error) Of(ulong seed)

@@ -34,6 +34,7 @@ internal static class PredictionFindings
         var dimension = PropertyNames.Dimension(property);
         var (low, high) = (new Quantity(errors.Min(), dimension), new Quantity(errors.Max(), dimension));
         if (double.IsNaN(low.Si)) return $"standard error not known, since nothing logged is there to compare with";
-        return low == high ? $"standard error {low}" : (FormattableString)$"standard error {low} to {high}";
+        // Metric rounding: errors that would read the same are one.
+        return UnitSystem.Metric.Show(low) == UnitSystem.Metric.Show(high) ? $"standard error {high}" : (FormattableString)$"standard error {low} to {high}";
     }
 }
