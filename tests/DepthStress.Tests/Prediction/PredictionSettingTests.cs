@@ -52,7 +52,7 @@ public class PredictionSettingTests
     [Fact]
     public void The_schema_offers_trained()
     {
-        var shear = JsonNode.Parse(WellFileSchema.Text)!["properties"]!["prediction"]!["properties"]!["shear"]!;
+        var shear = JsonNode.Parse(WellFileSchema.Json())!["properties"]!["prediction"]!["properties"]!["shear"]!;
         Assert.Equal("trained", shear["anyOf"]![0]!["enum"]![0]!.GetValue<string>());
     }
 }

@@ -34,7 +34,7 @@ public sealed class ShearCoverageTests(ITestOutputHelper output)
         Assert.True(predicted > 400 * count, "each well lacks 590 samples in one stretch");
         Assert.True(one >= 0.60 * predicted);
         Assert.True(two >= 0.90 * predicted);
-        Assert.InRange(stated, 1, 150); // m/s: an error so wide that anything lies within it would say nothing
+        Assert.InRange(stated, 1, 40); // m/s, a tenth of what the velocity spans: an error so wide that anything lies within it would say nothing
     }
 
     private static (int Predicted, int One, int Two, double Error) Of(ulong seed)
