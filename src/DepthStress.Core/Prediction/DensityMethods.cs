@@ -50,10 +50,10 @@ public static class DensityMethods
         string rock, RockKinds kind, double[] power, double[] quadratic, double low, double high, double v, double byPower, double byQuadratic) =>
     [
         PredictionEntry.Density(
-            $"castagna-1993-{rock}-density", $"Density of {rock} from velocity", kind, Kilometres.Within(low, high), "{a} V^{b}", LawForms.Power, power,
+            $"castagna-1993-{rock}-power", $"Density of {rock} from velocity", kind, Kilometres.Within(low, high), "{a} V^{b}", LawForms.Power, power,
             rock, Castagna1993, FromMemory, WorkedExample.Computed(byPower, 5, v)),
         PredictionEntry.Density(
-            $"castagna-1993-{rock}-density-quadratic", $"Density of {rock} from velocity, quadratic form", kind, Kilometres.Within(low, high), "{a} V^2 + {b} V + {c}",
+            $"castagna-1993-{rock}-quadratic", $"Density of {rock} from velocity, quadratic form", kind, Kilometres.Within(low, high), "{a} V^2 + {b} V + {c}",
             (x, c) => (((c[0] * x[0]) + c[1]) * x[0]) + c[2], quadratic, rock, Castagna1993, FromMemory, WorkedExample.Computed(byQuadratic, 5, v)),
     ];
 }

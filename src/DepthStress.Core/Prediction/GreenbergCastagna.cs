@@ -30,8 +30,7 @@ public static class GreenbergCastagna
         Pure("dolomite", Dolomite, Dolostone, 3.42151, 6),
         Mixed("greenberg-castagna-1992", "sandstone", Sandstone | Shale, Sand, new(
             [3.0, 0.4], 1.509583, 7, ExampleBasis.SelfComputed, "the formula as written; a handbook example recalled from memory gives 1.5095")),
-        Mixed("greenberg-castagna-1992-shaly-limestone", "limestone", Limestone | Shale, Lime, WorkedExample.Computed(2.171989, 7, 4, 0.3)),
-        Mixed("greenberg-castagna-1992-shaly-dolomite", "dolomite", Dolomite | Shale, Dolostone, WorkedExample.Computed(2.866307, 7, 5, 0.2)),
+        Mixed("greenberg-castagna-1992-marl", "limestone", Limestone | Shale, Lime, WorkedExample.Computed(2.171989, 7, 4, 0.3)),
     ];
 
     /// <summary>Half the sum of the arithmetic and the harmonic mean of the pure rocks' shear velocities.</summary>

@@ -174,7 +174,7 @@ public static class StarterFile
         var (compressional, shear) = (Values(log, Property.Vp), Values(log, Property.Vs));
         var (there, lacking) = (compressional.Count(double.IsFinite), compressional.Where((v, i) => double.IsFinite(v) && !(shear.Length > 0 && double.IsFinite(shear[i]))).Count());
         if (lacking == 0) return;
-        var choice = lacking == there ? "castagna-1985-mudrock" : TrainedRelation.Id;
+        var choice = 2 * lacking > there ? "castagna-1985-mudrock" : TrainedRelation.Id;
         text.AppendLine(CultureInfo.InvariantCulture, $"""
 
             # [prediction]                        # <- shear is missing at {lacking} of {there} samples that have compressional: no stress there unless predicted
