@@ -18,6 +18,7 @@ internal static class FeedPrinter
             var laws = MethodCatalogue.For(slot.Property).Select(l => (Law: l, Missing: MethodNeeds.Missing(l, model))).ToList();
             terminal.Output.WriteLine($"  {slot.Key}");
             var fed = chosen.Where(l => l.Standing == Standing.UserGiven).Select(l => l.Id).Distinct().Select(id => $">{id} (your own)")
+                .Concat(chosen.Exists(l => l.Standing == Standing.Trained) ? [">trained (on this well)"] : [])
                 .Concat(laws.Where(l => l.Missing.Count == 0).Select(l => Name(l.Law, chosen))).ToList();
             HangingText.Write(terminal, "", Column, fed.Count > 0 ? string.Join(", ", fed) : "none");
             var lacking = laws.Where(l => l.Missing.Count > 0).GroupBy(l => string.Join(" and ", l.Missing)).OrderByDescending(g => g.Count()).ToList();

@@ -16,6 +16,7 @@ internal static class MethodWords
     [
         ("sandstone", RockKinds.Sandstone), ("shale", RockKinds.Shale), ("limestone", RockKinds.Limestone),
         ("dolomite", RockKinds.Dolomite), ("crystalline", RockKinds.Crystalline),
+        ("evaporite", RockKinds.Evaporite),
     ];
 
     /// <summary>Rocks in words.</summary>

@@ -14,6 +14,9 @@ public enum Standing
 
     /// <summary>The user gave the coefficients.</summary>
     UserGiven,
+
+    /// <summary>The coefficients were fitted to the well's own samples.</summary>
+    Trained,
 }
 
 /// <summary>The rocks a method was made for.</summary>
@@ -37,6 +40,9 @@ public enum RockKinds
 
     /// <summary>Igneous and metamorphic rock.</summary>
     Crystalline = 16,
+
+    /// <summary>Anhydrite and salt.</summary>
+    Evaporite = 32,
 }
 
 /// <summary>What the expected number of a worked example rests on.</summary>

@@ -156,6 +156,12 @@ public enum Property
     /// <summary>Parameter: shear velocity of the rock's matrix, m/s.</summary>
     MatrixShearVelocity,
 
+    /// <summary>Standard error of shear velocity where it is predicted, m/s.</summary>
+    ShearError,
+
+    /// <summary>Standard error of bulk density where it is predicted, kg/m3.</summary>
+    DensityError,
+
     /// <summary>Parameter: porosity at which the grains of the rock part, v/v.</summary>
     CriticalPorosity,
 }

@@ -63,8 +63,13 @@ public static class PropertyNames
     public static Dimension Dimension(Property property) => Of(property).Dimension;
 
     /// <summary>The properties that the chain knows before it computes this one.</summary>
-    public static IEnumerable<Property> LawInputsBefore(Property property) =>
-        Known.TakeWhile(k => k.Property != property).Select(k => k.Property);
+    public static IEnumerable<Property> LawInputsBefore(Property property) => property switch
+    {
+        // Logs are known from the start, but what is predicted starts from nothing that rests on it: density before porosity, shear after it.
+        Property.Density => Before(Property.MatrixDensity).Except([Property.Density, Property.Vs, Property.ShearSlowness]),
+        Property.Vs => Before(Property.YoungsDynamic).Except([Property.Vs, Property.ShearSlowness]).Append(Property.MatrixShearVelocity),
+        _ => Before(property),
+    };
 
     /// <summary>What a user's own law for the property starts from when the well file does not say.</summary>
     public static Property UsualInput(Property property) => property switch
@@ -78,6 +83,8 @@ public static class PropertyNames
         Property.Biot => Property.Porosity,
         _ => Property.Vp,
     };
+
+    private static IEnumerable<Property> Before(Property property) => Known.TakeWhile(k => k.Property != property).Select(k => k.Property);
 
     private static (Property Property, string Name, string Title, Dimension Dimension) Of(Property property) =>
         Array.Find(Known, k => k.Property == property) is { Name: not null } known

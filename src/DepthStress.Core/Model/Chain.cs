@@ -6,8 +6,8 @@ using DepthStress.Core.Rock;
 namespace DepthStress.Core.Model;
 
 /// <summary>
-/// The ordered stages from logs to stresses: conditioning, depth, shale and lithology, rock, overburden, pore
-/// pressure, horizontal stress. One code path for every kind of run.
+/// The ordered stages from logs to stresses: conditioning, depth, shale and lithology, missing density and shear,
+/// overburden, pore pressure, rock, horizontal stress. One code path for every kind of run.
 /// </summary>
 public static class Chain
 {
@@ -42,6 +42,7 @@ public static class Chain
             runs = SettingsRun.Resolve(setup, zones, lithologies);
         }
 
+        (logs, var predictions) = PredictionStage.Apply(setup, logs, table, runs, uses, findings);
         LawColumns.Derive(table, runs);
         if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings, uses) is not { } densityOrigins) return null;
         PressureStage.PorePressure(setup, table, runs, uses);
@@ -60,6 +61,7 @@ public static class Chain
             DensityOrigins = densityOrigins,
             StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, lithologies),
             LawUses = uses,
+            Predictions = predictions,
             Findings = findings,
         };
         return model with { Findings = FindingRules.Sort(findings.Concat(FindingRules.All.SelectMany(rule => rule(model)))) };

@@ -64,8 +64,10 @@ public static class DepthColumns
         Origin("vs_origin", "origin of the shear velocity", Property.Vs),
         Origin("density_origin", "origin of the density", Property.Density),
         Words("stress_basis", "weakest origin the stresses rest on", "weakest of the three origins", (m, i) => m.StressBasis[i].Name()),
-        Stored("sv_unlogged_share", "share of the vertical stress from depths without a density log", "", Fractions, Property.UnloggedShare, "weight assumed or filled / sv"),
+        Stored("sv_unlogged_share", "share of the vertical stress from depths without a density log", "", Fractions, Property.UnloggedShare, "weight assumed, filled or predicted / sv"),
         Stored("bedding_angle", "angle between the hole and the normal of the beds", "", Angles, Property.BeddingAngle, "[survey] bedding_dip, dip_azimuth") with { InLas = false },
+        Stored("vs_error", "standard error of the shear velocity where it is predicted", "", Velocities, Property.ShearError, "[prediction] shear") with { InLas = false },
+        Stored("density_error", "standard error of the density where it is predicted", "", Densities, Property.DensityError, "[prediction] density") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>

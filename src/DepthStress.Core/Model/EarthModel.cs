@@ -44,6 +44,9 @@ public sealed record EarthModel
     /// <summary>How the laws served.</summary>
     public required IReadOnlyList<LawUse> LawUses { get; init; }
 
+    /// <summary>What was predicted because it was not logged.</summary>
+    public IReadOnlyList<Prediction> Predictions { get; init; } = [];
+
     /// <summary>What a reader should know, most important first.</summary>
     public IReadOnlyList<Finding> Findings { get; init; } = [];
 

@@ -17,6 +17,27 @@ internal static class LawColumns
         return inputs;
     }
 
+    /// <summary>The inputs of a law for some samples of a run.</summary>
+    public static LawInputs At(Law law, PropertyTable table, SettingsRun run, int[] samples)
+    {
+        var inputs = default(LawInputs);
+        foreach (var input in law.Inputs)
+        {
+            var column = Column(input.Property, table, run);
+            if (column.Length != run.Length || LawParameters.Of(input.Property) is not null)
+            {
+                inputs.Add(column);
+                continue;
+            }
+
+            var gathered = new double[samples.Length];
+            for (var k = 0; k < gathered.Length; k++) gathered[k] = column[samples[k] - run.Start];
+            inputs.Add(gathered);
+        }
+
+        return inputs;
+    }
+
     /// <summary>Makes the slowness columns that a law of these runs asks for.</summary>
     public static void Derive(PropertyTable table, IReadOnlyList<SettingsRun> runs)
     {

@@ -17,10 +17,22 @@ public static class LawSlots
     /// <summary>Shale volume, which the lithology rules need before everything else.</summary>
     public static LawSlot ShaleVolume { get; } = new(Property.ShaleVolume, "[shale] volume", false, s => s.Shale.Volume);
 
+    /// <summary>Density where it is not logged.</summary>
+    public static LawSlot Density { get; } = new(Property.Density, "[prediction] density", false, s => s.Prediction.Density);
+
+    /// <summary>Porosity.</summary>
+    public static LawSlot Porosity { get; } = new(Property.Porosity, "[porosity] porosity", false, s => s.Porosity.Porosity);
+
+    /// <summary>Shear velocity where it is not logged.</summary>
+    public static LawSlot Shear { get; } = new(Property.Vs, "[prediction] shear", false, s => s.Prediction.Shear);
+
+    /// <summary>What is predicted where it is not logged, in the order in which it is.</summary>
+    public static IReadOnlyList<LawSlot> Prediction { get; } = [Density, Shear];
+
     /// <summary>The rock properties.</summary>
     public static IReadOnlyList<LawSlot> Rock { get; } =
     [
-        new(Property.Porosity, "[porosity] porosity", false, s => s.Porosity.Porosity),
+        Porosity,
         new(Property.YoungsStatic, "[moduli] static_youngs", true, s => s.Moduli.StaticYoungs),
         new(Property.PoissonStatic, "[moduli] static_poisson", true, s => s.Moduli.StaticPoisson),
         new(Property.Ucs, "[strength] ucs", false, s => s.Strength.Ucs),
@@ -36,7 +48,7 @@ public static class LawSlots
     public static LawSlot AboveLog { get; } = new(Property.ShallowDensity, "[overburden] above_log", false, _ => default);
 
     /// <summary>All whose choice is a law.</summary>
-    public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, .. Rock];
+    public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, Density, Porosity, Shear, .. Rock.Skip(1)];
 
     /// <summary>Every place of the well file that takes an entry of the catalogue.</summary>
     public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure];

@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
 
@@ -15,7 +16,9 @@ public static class MethodCatalogue
     public static IReadOnlyList<Law> All { get; } =
     [
         .. ShaleMethods.All,
+        .. DensityMethods.All,
         .. PorosityMethods.All,
+        .. ShearMethods.All,
         .. StaticYoungsMethods.All,
         .. StaticPoissonMethods.All,
         .. StrengthMethods.All,
@@ -36,6 +39,7 @@ public static class MethodCatalogue
     public static string Choices(Property property)
     {
         var ids = For(property).Select(l => l.Id).ToList();
+        if (TrainedRelation.For(property) is { } trained) ids.Insert(0, trained.Id);
         return ids.Count <= MostListed
             ? string.Join(", ", ids)
             : $"{string.Join(", ", ids.Take(MostListed - 2))} and others, see \"depthstress methods --for {PropertyNames.Name(property)}\"";

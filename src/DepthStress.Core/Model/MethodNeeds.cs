@@ -29,7 +29,7 @@ public static class MethodNeeds
             Property.YoungsDynamic or Property.PoissonDynamic =>
                 Missing(Property.Vp, model).Concat(Missing(Property.Vs, model)),
             Property.GammaRayIndex => IndexMissing(model),
-            _ when LawSlots.All.FirstOrDefault(s => s.Property == property) is { } slot => [slot.Key],
+            _ when LawSlots.All.Except(LawSlots.Prediction).FirstOrDefault(s => s.Property == property) is { } slot => [slot.Key],
             _ => [PropertyNames.Title(property)],
         };
     }

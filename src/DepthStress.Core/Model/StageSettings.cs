@@ -1,5 +1,6 @@
 using DepthStress.Core.Conditioning;
 using DepthStress.Core.Lithology;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
 using DepthStress.Core.Stress;
@@ -14,6 +15,9 @@ public sealed record StageSettings
 
     /// <summary>Shale volume.</summary>
     public ShaleSettings Shale { get; init; } = new();
+
+    /// <summary>Shear velocity and density where they are not logged.</summary>
+    public PredictionSettings Prediction { get; init; } = new();
 
     /// <summary>Porosity.</summary>
     public PorositySettings Porosity { get; init; } = new();
@@ -41,6 +45,7 @@ public sealed record StageSettings
         {
             Conditioning = Conditioning.Over(below.Conditioning),
             Shale = Shale.Over(below.Shale),
+            Prediction = Prediction.Over(below.Prediction),
             Porosity = Porosity.Over(below.Porosity),
             Moduli = Moduli.Over(below.Moduli),
             Strength = Strength.Over(below.Strength),

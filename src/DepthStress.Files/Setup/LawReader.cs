@@ -2,6 +2,7 @@ using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Setup;
@@ -68,7 +69,8 @@ internal static class LawReader
 
     private static Law? FromCatalogue(TomlText text, string key, Property predicts, DiagnosticBag diagnostics)
     {
-        var ids = MethodCatalogue.For(predicts).Select(l => l.Id).ToList();
+        if (TrainedRelation.For(predicts) is { } trained && text.Value == trained.Id) return trained;
+        var ids = MethodCatalogue.For(predicts).Select(l => l.Id).Append(TrainedRelation.For(predicts)?.Id).OfType<string>().ToList();
         if (MethodCatalogue.Find(text.Value) is { } law)
         {
             if (law.Predicts == predicts) return law;

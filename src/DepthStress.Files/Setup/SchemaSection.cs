@@ -3,6 +3,7 @@ using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 
@@ -95,7 +96,7 @@ internal sealed class SchemaSection : ISection
         return Add(key, current, new JsonObject
         {
             ["description"] = doc,
-            ["anyOf"] = new JsonArray(new JsonObject { ["enum"] = List(MethodCatalogue.For(predicts).Select(l => l.Id)) }, constant, own),
+            ["anyOf"] = new JsonArray(new JsonObject { ["enum"] = List(MethodCatalogue.For(predicts).Select(l => l.Id).Prepend(TrainedRelation.For(predicts)?.Id).OfType<string>()) }, constant, own),
         });
     }
 

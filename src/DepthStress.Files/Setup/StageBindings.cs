@@ -2,6 +2,7 @@ using DepthStress.Core.Catalogue;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Quantities;
 using DepthStress.Core.Rock;
 using DepthStress.Core.Stress;
@@ -16,6 +17,7 @@ internal static class StageBindings
     {
         Conditioning = s.Table("conditioning", c.Conditioning, ConditioningBindings.All, "log conditioning: what is taken out, moved or bridged"),
         Shale = s.Table("shale", c.Shale, Shale, "shale volume from gamma ray"),
+        Prediction = s.Table("prediction", c.Prediction, Prediction, "shear velocity and density where they are not logged"),
         Porosity = s.Table("porosity", c.Porosity, Porosity, "porosity"),
         Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),
         Strength = s.Table("strength", c.Strength, Strength, "rock strength"),
@@ -29,6 +31,12 @@ internal static class StageBindings
         Volume = s.Law("volume", c.Volume, Property.ShaleVolume, "relation between gamma-ray index and shale volume"),
         Clean = s.Quantity("clean", c.Clean, Sign.NotNegative, Dimension.GammaRay, "gamma ray of clean rock"),
         Shale = s.Quantity("shale", c.Shale, Sign.NotNegative, Dimension.GammaRay, "gamma ray of shale"),
+    };
+
+    private static PredictionSettings Prediction(ISection s, PredictionSettings c) => c with
+    {
+        Shear = s.Law("shear", c.Shear, Property.Vs, "relation that gives shear velocity where it is not logged, or \"trained\" on the well's own samples"),
+        Density = s.Law("density", c.Density, Property.Density, "relation that gives density where it is not logged, or \"trained\" on the well's own samples"),
     };
 
     private static PorositySettings Porosity(ISection s, PorositySettings c) => c with

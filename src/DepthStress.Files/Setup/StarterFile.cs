@@ -3,6 +3,7 @@ using System.Text;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
+using DepthStress.Core.Prediction;
 using DepthStress.Core.Quantities;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Reading;
@@ -64,6 +65,7 @@ public static class StarterFile
 
             """);
         AppendShale(text, log);
+        AppendPrediction(text, log);
         text.Append("""
 
             [porosity]
@@ -179,6 +181,23 @@ public static class StarterFile
             {$"shale = \"{shale} gAPI\"",-38}# the log's 95th percentile, a starting point
             """);
     }
+
+    /// <summary>A section for shear, as a comment, where the compressional log is there and the shear log is not.</summary>
+    private static void AppendPrediction(StringBuilder text, LogFile log)
+    {
+        var (compressional, shear) = (Values(log, Property.Vp), Values(log, Property.Vs));
+        var (there, lacking) = (compressional.Count(double.IsFinite), compressional.Where((v, i) => double.IsFinite(v) && !(shear.Length > 0 && double.IsFinite(shear[i]))).Count());
+        if (lacking == 0) return;
+        var choice = 2 * lacking > there ? "castagna-1985-mudrock" : TrainedRelation.Id;
+        text.AppendLine(CultureInfo.InvariantCulture, $"""
+
+            # [prediction]                        # <- shear is missing at {lacking} of {there} samples that have compressional: no stress there unless predicted
+            {$"# shear = \"{choice}\"",-38}# trained (on this well's own samples), or a published relation: depthstress methods --for vs
+            """);
+    }
+
+    private static double[] Values(LogFile log, Property property) =>
+        RoleAssignment.Candidates(CurveRoles.Of(property)!, [log]) is [var first, ..] ? first.Column.Values : [];
 
     private static string Stated(LogColumn column) => column.Unit is { Length: > 0 } unit ? Plain(unit) : "no unit";
 

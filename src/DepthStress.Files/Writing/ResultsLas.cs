@@ -5,7 +5,7 @@ using DepthStress.Core.Quantities;
 namespace DepthStress.Files.Writing;
 
 /// <summary>
-/// <c>results.las</c>: the columns of numbers that fit its lines as LAS 2.0 (Canadian Well Logging Society, LAS Version 2.0), one line per sample, ASCII,
+/// <c>results.las</c>: the columns of numbers that its lines have room for as LAS 2.0 (Canadian Well Logging Society, LAS Version 2.0), one line per sample, ASCII,
 /// missing = -999.25. Mnemonics are the column ids in capitals; measured depth is DEPT, the index.
 /// </summary>
 public static class ResultsLas

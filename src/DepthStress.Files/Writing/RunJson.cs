@@ -54,6 +54,7 @@ public static class RunJson
             ["plausibility"] = Array(Plausibility.Of(model).Select(s => (JsonNode)units.Show(s))),
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
+            ["predictions"] = Array(model.Predictions.Select(Predicted)),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
         };
@@ -106,6 +107,7 @@ public static class RunJson
                 Standing.Confirmed => "coefficients read in the source",
                 Standing.Identity => "identity",
                 Standing.FromMemory => "coefficients recalled, not read",
+                Standing.Trained => "fitted to the well's own samples",
                 _ => "given by the user",
             },
             ["samples"] = total.Evaluated,
@@ -118,6 +120,21 @@ public static class RunJson
                 ["lithology"] = model.LithologyName(g.Key.Lithology),
                 ["samples"] = g.Sum(u => u.Outcome.Evaluated),
             })),
+        };
+    }
+
+    private static JsonObject Predicted(Prediction prediction)
+    {
+        var (unit, error) = (prediction.Law.Unit, prediction.Error);
+        return new JsonObject
+        {
+            ["property"] = Core.Logs.PropertyNames.Name(prediction.Property),
+            ["method"] = prediction.Words,
+            ["formula"] = prediction.Law.Text,
+            ["unit"] = unit.Symbol,
+            ["standard_error"] = double.IsNaN(error) ? null : Math.Round(error / unit.Factor, 6),
+            ["samples"] = prediction.Samples.Count(s => s),
+            ["beyond_training"] = prediction.Beyond.Count(b => b),
         };
     }
 

@@ -5,7 +5,7 @@ namespace DepthStress.Tests.Cli;
 
 public class CliMethodsTests
 {
-    private const string Results = "shale_volume, porosity, youngs_static, poisson_static, ucs, friction_angle, tensile_strength, biot, mean_density_above, shallow_density, pp";
+    private const string Results = "shale_volume, density, porosity, vs, youngs_static, poisson_static, ucs, friction_angle, tensile_strength, biot, mean_density_above, shallow_density, pp";
 
     private static (int Code, string Output, string Error) Run(int width, params string[] args)
     {
@@ -73,8 +73,8 @@ public class CliMethodsTests
     [Fact]
     public void Wrong_words_are_refused_with_the_nearest_right_one()
     {
-        Assert.Equal($"error: found \"usc\", expected --for one of {Results}; did you mean \"ucs\"?\n", Refused("--for", "usc"));
-        Assert.Equal("error: found \"shales\", expected --rock one of sandstone, shale, limestone, dolomite, crystalline; did you mean \"shale\"?\n", Refused("--rock", "shales"));
+        Assert.Equal($"error: found \"ucss\", expected --for one of {Results}; did you mean \"ucs\"?\n", Refused("--for", "ucss"));
+        Assert.Equal("error: found \"shales\", expected --rock one of sandstone, shale, limestone, dolomite, crystalline, evaporite; did you mean \"shale\"?\n", Refused("--rock", "shales"));
         Assert.Equal("error: found the unknown method \"lal-1999-shales\", expected one of the list that \"depthstress methods\" prints; did you mean \"lal-1999-shale\"?\n", Refused("lal-1999-shales"));
         Assert.Equal("error: found a method ID beside --for or --rock, expected one or the other\n", Refused("lal-1999-shale", "--for", "ucs"));
     }

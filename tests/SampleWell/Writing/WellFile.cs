@@ -69,6 +69,9 @@ internal static class WellFile
         clean = "28 gAPI"
         shale = "128 gAPI"
 
+        [prediction]
+        shear = "trained"                    # where the shear arrival was not found: from the other logs, as learnt where it was
+
         [porosity]
         porosity = "density-porosity"
         matrix_density = "2.66 g/cm3"

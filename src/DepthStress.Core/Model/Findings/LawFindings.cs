@@ -25,7 +25,8 @@ internal static class LawFindings
                     Severity.Warning, $"{slot.Key}: {law.Id} has no meaning for these samples, the result is missing", total.OutsideDomain, []);
             }
 
-            if (total.OutsideRange > 0)
+            // Of a trained relation, where it went beyond its range is known sample by sample and said elsewhere.
+            if (total.OutsideRange > 0 && law.Standing != Standing.Trained)
             {
                 yield return new Finding(
                     Severity.Note, $"{slot.Key}: {law.Id} was used beyond the range it was fitted in", total.OutsideRange, []);
