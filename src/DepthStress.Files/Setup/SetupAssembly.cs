@@ -3,6 +3,7 @@ using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Model;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -28,11 +29,13 @@ internal static class SetupAssembly
             diagnostics.Error(file, "[logs] files is not set; expected the names of the log files");
         else
             CheckFiles(sections.Logs.Files, diagnostics);
+        if (sections.Logs.Csv.HeaderLine is { IsSet: true } line && line.Value != Math.Floor(line.Value))
+            diagnostics.Error(line.Source.Position, "found a fraction, expected header_line = a whole number");
         if (sections.Logs.DepthColumns is [_, var second, ..])
             diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
         var frame = Frame(well, file, wrong, diagnostics);
-        var trajectory = Trajectory(sections.Survey, file, folder, inputs, wrong, diagnostics);
+        var trajectory = Trajectory(sections.Survey, sections.Logs.Csv.Options(), file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
@@ -106,7 +109,7 @@ internal static class SetupAssembly
     }
 
     private static Trajectory? Trajectory(
-        SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
+        SurveySection survey, CsvOptions csv, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         if (survey.File.IsSet && survey.Vertical is { IsSet: true, Value: true })
         {
@@ -118,7 +121,7 @@ internal static class SetupAssembly
         {
             if (!survey.North.IsSet)
                 diagnostics.Error(file, "[survey] north is not set; expected \"true\", \"grid\" or \"magnetic\", what the survey's azimuths count from");
-            return SurveyFile.Read(Path.GetFullPath(survey.File.Value, folder), survey.File.Value, inputs, diagnostics);
+            return SurveyFile.Read(Path.GetFullPath(survey.File.Value, folder), survey.File.Value, csv, inputs, diagnostics);
         }
 
         if (survey.Vertical is { IsSet: true, Value: true }) return Core.Depth.Trajectory.Vertical;
