@@ -12,7 +12,7 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
     private readonly HashSet<string> _seen = [];
     private char _section;
     private bool _bad, _foreign, _strayReported;
-    private int _warnings;
+    private int _warnings, _passed;
     private LasHeaderLine? _well;
 
     /// <summary>Reads up to and with the title of the data section; null when the file cannot be used.</summary>
@@ -43,7 +43,7 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
         _section = LasSections.Kind(title, _header.Version);
         if (_section == ' ')
         {
-            source.Diagnostics.Note(source.At(lines.Line, 1), $"section \"{Cut(title)}\" is not read");
+            if (++_passed <= ProblemTally.Limit) source.Diagnostics.Note(source.At(lines.Line, 1), $"section \"{Cut(title)}\" is not read");
         }
         else if (!_sections.Add(_section))
         {
@@ -160,6 +160,12 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
 
     private void AddCurve(LasHeaderLine parts, string text)
     {
+        if (_header.Curves.Count == LogSource.MaxCurves)
+        {
+            Error(0, "found more than 100000 curves, expected fewer");
+            return;
+        }
+
         var column = text.Length - text.AsSpan().TrimStart().Length + 1;
         var unit = parts.Unit.Length > 0 ? parts.Unit : null;
         _header.Curves.Add(new ColumnHeader(parts.Mnemonic, unit, parts.Description, source.At(lines.Line, column)));

@@ -1,3 +1,5 @@
+using System.Globalization;
+
 namespace DepthStress.Files.Reading;
 
 /// <summary>
@@ -36,6 +38,7 @@ internal static class LasLogReader
     /// <summary>Passes over the sections after the data; false, with an error, at one that the data would have needed.</summary>
     public static bool PassTrailers(LogSource source, LineReader lines, ReadOnlySpan<byte> title, double version)
     {
+        var passed = 0;
         do
         {
             if (title.TrimStart(" \t"u8) is not [(byte)'~', ..]) continue;
@@ -51,11 +54,12 @@ internal static class LasLogReader
                     source.Diagnostics.Error(position, $"found \"{TextCleaner.Quote(title)}\" after the data, expected the data to come last");
                     return false;
                 default:
-                    source.Diagnostics.Note(position, $"section \"{TextCleaner.Quote(title)}\" after the data is not read");
+                    if (++passed <= ProblemTally.Limit) source.Diagnostics.Note(position, $"section \"{TextCleaner.Quote(title)}\" after the data is not read");
                     break;
             }
         }
         while (lines.TryRead(out title));
+        if (passed > ProblemTally.Limit) source.Diagnostics.Note(source.At(), string.Create(CultureInfo.InvariantCulture, $"and {passed - ProblemTally.Limit} more sections are not read"));
         return true;
     }
 }

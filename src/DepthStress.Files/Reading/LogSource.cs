@@ -15,6 +15,9 @@ internal sealed record LogSource(
     /// <summary>The longest line that is read, in bytes: room for 10,000 columns of 100 characters.</summary>
     public const int MaxLine = 1 << 20;
 
+    /// <summary>The most curves that a LAS file may list.</summary>
+    public const int MaxCurves = 100_000;
+
     /// <summary>A place in the file.</summary>
     public SourcePosition At(int line = 0, int column = 0) => new(Name, line, column);
 
