@@ -3,11 +3,11 @@ namespace DepthStress.Tests.Reading;
 /// <summary>Spoils files in the ways that matter to a reader of tables.</summary>
 internal static class FuzzBytes
 {
-    public static byte[] Spoil(byte[] bytes, Random random)
+    public static byte[] Spoil(byte[] bytes, Random random, int most)
     {
         ReadOnlySpan<byte> spices = "\0\r\n\t \",;:.~#-+eE0199xN\u00b5\u001b[]()"u8;
         var spoilt = bytes.ToList();
-        for (var times = random.Next(1, 5); times > 0 && spoilt.Count > 0; times--)
+        for (var times = random.Next(1, most + 1); times > 0 && spoilt.Count > 0; times--)
         {
             var at = random.Next(spoilt.Count);
             var length = Math.Min(random.Next(1, 20), spoilt.Count - at);
