@@ -60,6 +60,7 @@ internal sealed class LasWrappedRows(LogSource source, LineReader lines, LasHead
         _good &= found > 0;
         _count += Math.Abs(found);
         if (_count < table.Row.Length) return;
+        table.LinesPerRow = lines.Line - _firstLine + 1;
         if (_count > table.Row.Length) table.WrongCount(_firstLine, _count);
         else if (_good) table.AddRow(_firstLine);
         else table.Depth.Skip();

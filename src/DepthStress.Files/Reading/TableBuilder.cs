@@ -46,6 +46,9 @@ internal sealed class TableBuilder
     /// <summary>True where the decimal mark is a comma.</summary>
     public bool DecimalComma { get; }
 
+    /// <summary>How many lines a row takes, as far as is known: so that arrays are allocated once.</summary>
+    public int LinesPerRow { get; set; } = 1;
+
     /// <summary>Words for no value.</summary>
     public NullTextTally NullTexts { get; }
 
@@ -152,7 +155,7 @@ internal sealed class TableBuilder
     private void Grow(int line)
     {
         // As many rows as lines are left, but no more than the bytes can hold (a blank or a comma and one character for each cell).
-        var lines = _source.Scan.Lines - line + 1;
+        var lines = ((_source.Scan.Lines - line) / LinesPerRow) + 1;
         var most = (_source.Scan.Bytes / (2L * _headers.Count)) + 1;
         _capacity = _rows == 0 ? (int)Math.Clamp(lines, 1, Math.Min(most, Array.MaxLength)) : (int)Math.Min(2L * _capacity, Array.MaxLength);
         for (var c = 0; c < _values.Length; c++) Array.Resize(ref _values[c], _capacity);
