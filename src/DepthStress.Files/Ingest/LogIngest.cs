@@ -52,6 +52,8 @@ public static class LogIngest
 
     private static LogReadOptions Options(LogsSection section, string file) => new()
     {
+        Csv = section.Csv.Options(),
+        RepeatedDepth = section.RepeatedDepth.Value,
         DepthColumn = section.Depth is { Column.IsSet: true } depth ? depth.Column.Value : null,
         MissingByColumn = section.Curves
             .SelectMany(c => c.Sources)

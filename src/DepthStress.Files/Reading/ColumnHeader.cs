@@ -6,14 +6,15 @@ namespace DepthStress.Files.Reading;
 /// <summary>What a file says of a column before its values.</summary>
 internal sealed record ColumnHeader(string Name, string? Unit, string Description, SourcePosition Position)
 {
-    /// <summary>Names blank columns UNKNOWN and numbers equal names (without regard to case) <c>:1</c>, <c>:2</c>, each with a note.</summary>
+    /// <summary>Names blank columns UNKNOWN and numbers equal names (without regard to case) <c>:1</c>, <c>:2</c>, each with a note, up to a limit.</summary>
     public static void MakeUnique(List<ColumnHeader> headers, DiagnosticBag diagnostics)
     {
+        var notes = 0;
         for (var i = 0; i < headers.Count; i++)
         {
             if (headers[i].Name.Length > 0) continue;
             headers[i] = headers[i] with { Name = "UNKNOWN" };
-            diagnostics.Note(headers[i].Position, "found a column without a name, called it UNKNOWN");
+            if (++notes <= ProblemTally.Limit) diagnostics.Note(headers[i].Position, "found a column without a name, called it UNKNOWN");
         }
 
         var taken = headers.Select(h => h.Name).ToHashSet(StringComparer.OrdinalIgnoreCase);
@@ -29,8 +30,10 @@ internal sealed record ColumnHeader(string Name, string? Unit, string Descriptio
             while (!taken.Add(unique));
             uses[name] = number;
             headers[i] = headers[i] with { Name = unique };
-            diagnostics.Note(headers[i].Position, $"found the name \"{name}\" more than once, called this column \"{unique}\"");
+            if (++notes <= ProblemTally.Limit) diagnostics.Note(headers[i].Position, $"found the name \"{name}\" more than once, called this column \"{unique}\"");
         }
+
+        if (notes > ProblemTally.Limit) diagnostics.Note(headers[0].Position, string.Create(CultureInfo.InvariantCulture, $"and {notes - ProblemTally.Limit} more names of columns were made or changed"));
     }
 
     /// <summary>Finds a column by the name the user gave; -1 and an error when there is none.</summary>
@@ -47,19 +50,29 @@ internal sealed record ColumnHeader(string Name, string? Unit, string Descriptio
         return index;
     }
 
-    /// <summary>Finds the depth column by the usual names; -1 and an error when there is none.</summary>
-    public static int FindDepth(List<ColumnHeader> headers, LogSource source)
+    /// <summary>Finds the depth column of a CSV file by the usual names; -1 and an error when there is none.</summary>
+    public static int FindDepth(List<ColumnHeader> headers, int line, LogSource source)
     {
         var names = source.Options.DepthNames;
         foreach (var name in names)
         {
-            var index = headers.FindIndex(h => h.Name.Replace(' ', '_').Equals(name, StringComparison.OrdinalIgnoreCase));
-            if (index < 0) continue;
-            return index;
+            var index = headers.FindIndex(h => Matches(h.Name, name));
+            if (index >= 0) return index;
         }
 
-        source.Diagnostics.Error(
-            source.At(1), $"found no depth column, expected one named {string.Join(", ", names.SkipLast(1))} or {names[^1]}");
+        if (!TimeIndex.Refuse(headers[0], source))
+        {
+            source.Diagnostics.Error(
+                source.At(line), $"found no depth column, expected one named {string.Join(", ", names.SkipLast(1))} or {names[^1]}");
+        }
+
         return -1;
     }
+
+    /// <summary>True where a column of that name would be the depth column.</summary>
+    public static bool IsDepth(string name, LogReadOptions options) => options.DepthColumn is { } named
+        ? named.Equals(name, StringComparison.OrdinalIgnoreCase)
+        : options.DepthNames.Any(n => Matches(name, n));
+
+    private static bool Matches(string found, string usual) => found.Replace(' ', '_').Equals(usual, StringComparison.OrdinalIgnoreCase);
 }

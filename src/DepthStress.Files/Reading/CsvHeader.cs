@@ -1,5 +1,3 @@
-using System.Text;
-using CsvHelper;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Files.Reading;
@@ -7,28 +5,21 @@ namespace DepthStress.Files.Reading;
 /// <summary>Reads the header row of a CSV file, and the unit row that may follow it.</summary>
 internal static class CsvHeader
 {
-    /// <summary>Reads the record at hand as names with units: <c>NAME</c>, <c>NAME[unit]</c> or <c>NAME (unit)</c>; null when it is none.</summary>
-    public static List<ColumnHeader>? Read(CsvReader csv, LogSource source)
+    /// <summary>Reads a row as names with units: <c>NAME</c>, <c>NAME[unit]</c> or <c>NAME (unit)</c>; null when it is none.</summary>
+    public static List<ColumnHeader>? Read(List<HeaderCell> cells, int line, char delimiter, LogSource source)
     {
-        var headers = new List<ColumnHeader>(csv.FieldCount);
-        var (latin, numbers) = (false, 0);
-        var line = (int)csv.LineNumber;
-        for (int c = 0, column = 1; c < csv.FieldCount; column += RawLength(csv, c) + 1, c++)
+        var headers = cells.ConvertAll(cell =>
         {
-            var cell = csv.GetSpan(c);
-            if (!cell.IsEmpty && NumberText.TryParse(cell, out _)) numbers++;
-            var (name, unit) = SplitUnit(TextCleaner.Clean(TextCleaner.Decode(cell, ref latin)), source.Options.UnitSuffixes);
-            headers.Add(new ColumnHeader(name, unit, "", source.At(line, column)));
-        }
-
-        if (latin) source.Diagnostics.Note(source.At(line), "found bytes that are not UTF-8, read them as Latin-1");
+            var (name, unit) = SplitUnit(cell.Text, source.Options.UnitSuffixes);
+            return new ColumnHeader(name, unit, "", source.At(line, cell.Column));
+        });
         if (headers.Count < 2)
         {
-            source.Diagnostics.Error(source.At(line), "found 1 column in the header row, expected at least 2 separated by ','");
+            source.Diagnostics.Error(source.At(line), $"found 1 column in the header row, expected at least 2 separated by {CsvDialect.Name(delimiter)}");
             return null;
         }
 
-        if (2 * numbers > headers.Count)
+        if (2 * cells.Count(c => c.IsNumber) > headers.Count)
         {
             source.Diagnostics.Error(source.At(line), "found numbers in the first row, expected the names of the columns");
             return null;
@@ -38,30 +29,29 @@ internal static class CsvHeader
         return headers;
     }
 
-    /// <summary>
-    /// Takes the record at hand as a unit row where it is one: as many cells as columns, none a number, and a length
-    /// unit under the depth column.
-    /// </summary>
-    public static bool TakeUnitRow(CsvReader csv, List<ColumnHeader> headers, int depthColumn, LogSource source)
+    /// <summary>Finds the depth column; -1, with an error, when there is none or it is a time.</summary>
+    public static int FindDepth(List<ColumnHeader> headers, int line, LogSource source)
     {
-        if (csv.FieldCount != headers.Count) return false;
-        var units = new string[headers.Count];
-        var latin = false;
-        for (var c = 0; c < units.Length; c++)
-        {
-            var cell = csv.GetSpan(c);
-            if (!cell.IsEmpty && NumberText.TryParse(cell, out _)) return false;
-            units[c] = TextCleaner.Clean(TextCleaner.Decode(cell, ref latin)).Trim('[', ']', '(', ')');
-        }
+        var depth = source.Options.DepthColumn is { } named ? ColumnHeader.FindNamed(headers, named, source) : ColumnHeader.FindDepth(headers, line, source);
+        return depth >= 0 && TimeIndex.Refuse(headers[depth], source) ? -1 : depth;
+    }
 
+    /// <summary>
+    /// Takes a row as a unit row where it is one: as many cells as columns, none a number, and a length unit under the
+    /// depth column.
+    /// </summary>
+    public static bool TakeUnitRow(List<HeaderCell> cells, int line, List<ColumnHeader> headers, int depthColumn, LogSource source)
+    {
+        if (cells.Count != headers.Count || cells.Exists(c => c.IsNumber)) return false;
+        var units = cells.ConvertAll(c => c.Text.Trim('[', ']', '(', ')'));
         if (Units.Find(units[depthColumn], Dimension.Length) is null) return false;
-        for (var c = 0; c < units.Length; c++)
+        for (var c = 0; c < units.Count; c++)
         {
             if (units[c].Length == 0) continue;
             if (headers[c].Unit is { } stated && !stated.Equals(units[c], StringComparison.OrdinalIgnoreCase))
             {
                 source.Diagnostics.Warning(
-                    source.At((int)csv.LineNumber),
+                    source.At(line),
                     $"column \"{headers[c].Name}\": found the unit \"{units[c]}\" below \"{stated}\" in the header row, took \"{stated}\"");
                 continue;
             }
@@ -72,11 +62,8 @@ internal static class CsvHeader
         return true;
     }
 
-    /// <summary>Length of a cell in the file in characters, quotes and blanks included.</summary>
-    public static int RawLength(CsvReader csv, int index) => Encoding.UTF8.GetCharCount(csv.GetRawSpan(index));
-
-    // A number in brackets is an index and belongs to the name.
-    private static (string Name, string? Unit) SplitUnit(string text, bool suffixes)
+    /// <summary>Parts a name from its unit. A number in brackets is an index and belongs to the name.</summary>
+    public static (string Name, string? Unit) SplitUnit(string text, bool suffixes)
     {
         if (suffixes && Units.All.FirstOrDefault(u => u.Suffix.Length > 0 && text.EndsWith("_" + u.Suffix, StringComparison.OrdinalIgnoreCase)) is { } suffixed)
             return (text[..^(suffixed.Suffix.Length + 1)], suffixed.Symbol);

@@ -9,6 +9,12 @@ internal sealed class LasHeader
     /// <summary>Version of the standard, 2 where the file does not say.</summary>
     public double Version { get; set; } = 2;
 
+    /// <summary>True where a depth step may take several lines.</summary>
+    public bool Wrapped { get; set; }
+
+    /// <summary>The stated delimiter of the data, or null.</summary>
+    public char? Delimiter { get; set; }
+
     /// <summary>Name of the well, or null.</summary>
     public string? Well { get; set; }
 
@@ -27,7 +33,7 @@ internal sealed class LasHeader
     /// <summary>The curves in the order of the data.</summary>
     public List<ColumnHeader> Curves { get; } = [];
 
-    /// <summary>Notes where the data do not bear out the stated first depth, last depth and step.</summary>
+    /// <summary>Notes where the data, in the order of the file, do not bear out the stated first depth, last depth and step.</summary>
     public void Compare(DepthTrack depth, DiagnosticBag diagnostics)
     {
         var tolerance = 0.01 * Math.Abs(Step?.Value ?? 0);
@@ -45,12 +51,12 @@ internal sealed class LasHeader
         }
 
         // Depths are often printed with too few digits for the step: half a step is a gap, less is rounding.
-        if (Step is { Value: not 0 } step && depth.MaxStep > 0
-            && (depth.MinStep < 0.5 * step.Value || depth.MaxStep > 1.5 * step.Value))
+        var (low, high) = depth.Descends ? (-depth.MaxStep, -depth.MinStep) : (depth.MinStep, depth.MaxStep);
+        if (Step is { Value: not 0 } step && depth.MaxStep > 0 && !(low / step.Value is >= 0.5 and <= 1.5 && high / step.Value is >= 0.5 and <= 1.5))
         {
             diagnostics.Note(step.Position, string.Create(
                 CultureInfo.InvariantCulture,
-                $"STEP says {step.Value}, the data have steps from {depth.MinStep:G6} to {depth.MaxStep:G6}"));
+                $"STEP says {step.Value}, the data have steps from {low:G6} to {high:G6}"));
         }
     }
 }

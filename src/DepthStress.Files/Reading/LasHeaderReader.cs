@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Text;
 using DepthStress.Core.Quantities;
 
@@ -10,14 +11,16 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
     private readonly HashSet<char> _sections = [];
     private readonly HashSet<string> _seen = [];
     private char _section;
-    private bool _bad, _latin, _strayReported;
+    private bool _bad, _foreign, _strayReported;
+    private int _warnings, _passed;
+    private LasHeaderLine? _well;
 
     /// <summary>Reads up to and with the title of the data section; null when the file cannot be used.</summary>
     public LasHeader? Read()
     {
         while (!_bad && _section != 'A' && lines.TryRead(out var bytes))
         {
-            var text = TextCleaner.Decode(bytes, ref _latin);
+            var text = TextCleaner.Decode(bytes, ref _foreign);
             var trimmed = text.AsSpan().Trim();
             if (trimmed.IsEmpty || trimmed[0] == '#') continue;
             if (trimmed[0] == '~') OpenSection(TextCleaner.Clean(text));
@@ -37,10 +40,10 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
 
     private void OpenSection(string title)
     {
-        _section = title.Length > 1 ? char.ToUpperInvariant(title[1]) : ' ';
-        if (!"VWCPOA".Contains(_section, StringComparison.Ordinal))
+        _section = LasSections.Kind(title, _header.Version);
+        if (_section == ' ')
         {
-            source.Diagnostics.Note(source.At(lines.Line, 1), $"section \"{Cut(title)}\" is not read");
+            if (++_passed <= ProblemTally.Limit) source.Diagnostics.Note(source.At(lines.Line, 1), $"section \"{Cut(title)}\" is not read");
         }
         else if (!_sections.Add(_section))
         {
@@ -82,13 +85,13 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
                 ReadVersionNumber(parts.Data);
                 break;
             case "WRAP" when parts.Data.Equals("YES", StringComparison.OrdinalIgnoreCase):
-                Error(0, "found WRAP YES, expected WRAP NO (wrapped files are not read yet)");
+                _header.Wrapped = true;
                 break;
             case "WRAP" when !parts.Data.Equals("NO", StringComparison.OrdinalIgnoreCase):
-                Error(0, $"found WRAP \"{Cut(parts.Data)}\", expected NO");
+                Error(0, $"found WRAP \"{Cut(parts.Data)}\", expected YES or NO");
                 break;
-            case "DLM" when parts.Data.ToUpperInvariant() is not ("" or "SPACE" or "TAB"):
-                Error(0, $"found DLM {Cut(parts.Data)}, expected SPACE or TAB (other delimiters are not read yet)");
+            case "DLM":
+                ReadDelimiter(parts.Data);
                 break;
             default:
                 break;
@@ -103,14 +106,36 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
         {
             Warn($"found the version \"{Cut(text)}\", read as LAS 2.0");
         }
-        else if (version >= 3)
+        else if (version is < 1 or >= 4)
         {
-            Error(0, $"found LAS {Cut(text)}, expected LAS 2.0 (LAS 3.0 is not read yet)");
+            Error(0, $"found LAS {Cut(text)}, expected a version from 1.2 to 3.0");
         }
         else
         {
             _header.Version = version;
-            if (version != 2) source.Diagnostics.Note(source.At(lines.Line), $"found LAS {Cut(text)}, read by the rules of LAS 2.0");
+            if (version == 2) return;
+            source.Diagnostics.Note(source.At(lines.Line), $"found LAS {Cut(text)}, {(version >= 3 ? "its log data are read" : "read")} by the rules of LAS 2.0");
+        }
+    }
+
+    private void ReadDelimiter(string text)
+    {
+        switch (text.ToUpperInvariant())
+        {
+            case "":
+                break;
+            case "SPACE":
+                _header.Delimiter = CsvOptions.Blanks;
+                break;
+            case "TAB":
+                _header.Delimiter = '\t';
+                break;
+            case "COMMA":
+                _header.Delimiter = ',';
+                break;
+            default:
+                Error(0, $"found DLM {Cut(text)}, expected SPACE, TAB or COMMA");
+                break;
         }
     }
 
@@ -118,15 +143,9 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
     {
         var name = parts.Mnemonic.ToUpperInvariant();
         _seen.Add(name);
-        if (name == "WELL")
-        {
-            // Before version 2 the value stood behind the colon.
-            var well = _header.Version < 2 ? parts.Description : parts.Data;
-            _header.Well = well.Length > 0 ? well : null;
-        }
-
+        if (name == "WELL") _well = parts;
         if (name is not ("STRT" or "STOP" or "STEP" or "NULL") || parts.Data.Length == 0) return;
-        if (!QuantityText.TryNumber(parts.Data, out var value))
+        if (!QuantityText.TryNumber(parts.Data, out var value) && !IsDecimalComma(parts.Data, out value))
         {
             Warn($"found {name} \"{Cut(parts.Data)}\", expected a number");
             return;
@@ -141,6 +160,12 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
 
     private void AddCurve(LasHeaderLine parts, string text)
     {
+        if (_header.Curves.Count == LogSource.MaxCurves)
+        {
+            Error(0, "found more than 100000 curves, expected fewer");
+            return;
+        }
+
         var column = text.Length - text.AsSpan().TrimStart().Length + 1;
         var unit = parts.Unit.Length > 0 ? parts.Unit : null;
         _header.Curves.Add(new ColumnHeader(parts.Mnemonic, unit, parts.Description, source.At(lines.Line, column)));
@@ -149,6 +174,13 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
     private void Close()
     {
         _bad |= _strayReported;
+        if (_warnings > ProblemTally.Limit)
+        {
+            source.Diagnostics.Warning(source.At(), string.Create(CultureInfo.InvariantCulture, $"and {_warnings - ProblemTally.Limit} more odd lines in the header"));
+        }
+
+        // Before version 2 the value stood behind the colon.
+        if (_well is { } well && (_header.Version < 2 ? well.Description : well.Data) is { Length: > 0 } name) _header.Well = name;
         if (_bad && _sections.Count == 0) return;
         if (!_seen.Contains("VERS")) source.Diagnostics.Warning(source.At(), "found no VERS line, expected LAS 2.0; read as LAS 2.0");
         if (!_seen.Contains("WRAP")) source.Diagnostics.Warning(source.At(), "found no WRAP line, expected WRAP NO; read as not wrapped");
@@ -159,7 +191,7 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
 
         if (_header.Curves.Count == 0) Error(-1, "found no curves, expected a ~C section that lists them");
         if (!_sections.Contains('A')) Error(-1, "found no ~A section, expected the data in it");
-        if (_latin) source.Diagnostics.Note(source.At(), "found bytes that are not UTF-8, read them as Latin-1");
+        if (_foreign) source.ReportForeignBytes(source.At());
         ColumnHeader.MakeUnique(_header.Curves, source.Diagnostics);
     }
 
@@ -169,7 +201,17 @@ internal sealed class LasHeaderReader(LogSource source, LineReader lines)
         source.Diagnostics.Error(column < 0 ? source.At() : source.At(lines.Line, column), text);
     }
 
-    private void Warn(string text) => source.Diagnostics.Warning(source.At(lines.Line), text);
+    private void Warn(string text)
+    {
+        if (++_warnings <= ProblemTally.Limit) source.Diagnostics.Warning(source.At(lines.Line), text);
+    }
+
+    // A decimal comma that cannot be a thousands separator.
+    private static bool IsDecimalComma(string text, out double value)
+    {
+        var bytes = Encoding.UTF8.GetBytes(text);
+        return NumberMarks.TryParseComma(bytes, out value) && !NumberMarks.IsGrouped(bytes, ',');
+    }
 
     private static string Cut(string text) => TextCleaner.Quote(Encoding.UTF8.GetBytes(text));
 }

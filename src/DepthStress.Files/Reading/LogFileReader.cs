@@ -3,7 +3,7 @@ using DepthStress.Core.Diagnostics;
 
 namespace DepthStress.Files.Reading;
 
-/// <summary>Reads depth-indexed log files (CSV, LAS 2.0) as they are, without converting units.</summary>
+/// <summary>Reads depth-indexed log files (CSV; LAS 1.2, 2.0 and the log data of 3.0) as they are, without converting units.</summary>
 public static class LogFileReader
 {
     /// <summary>
@@ -71,15 +71,44 @@ public static class LogFileReader
             return null;
         }
 
-        if (FileScan.Read(stream, name, diagnostics) is not { } scan) return null;
+        var head = new byte[FileScan.HeadSize];
+        head = head[..stream.ReadAtLeast(head, head.Length, throwOnEndOfStream: false)];
+        var found = TextEncoding.Detect(head);
+        var encoding = options.Csv.Encoding is { } stated && !IsLas(Start(head, found), name) ? stated : found;
+        if (encoding != found && found != LogEncoding.Utf8)
+        {
+            diagnostics.Error(new SourcePosition(name, 1, 1), $"found {TextEncoding.Name(found)}, expected {TextEncoding.Name(encoding)} as the well file says");
+            return null;
+        }
+
+        if (Scan(stream, encoding, name, diagnostics) is not { } scan) return null;
         stream.Position = 0;
         using var hashing = new HashingStream(stream);
-        var source = new LogSource(name, hashing, scan, options, diagnostics);
-        return IsLas(scan.Head, name) ? LasLogReader.Read(source) : CsvLogReader.Read(source);
+        var source = new LogSource(name, hashing, TextEncoding.AsUtf8(hashing, encoding), scan, options, diagnostics);
+        if (encoding is LogEncoding.Utf16LittleEndian or LogEncoding.Utf16BigEndian && options.Csv.Encoding != encoding)
+            diagnostics.Note(source.At(1), $"found {TextEncoding.Name(encoding)}, read as such");
+        var file = IsLas(scan.Head, name) ? LasLogReader.Read(source) : CsvLogReader.Read(source);
+        if (file is not null) SecondDepth.Report(file, source);
+        return file;
+    }
+
+    private static FileScan? Scan(Stream stream, LogEncoding encoding, string name, DiagnosticBag diagnostics)
+    {
+        stream.Position = 0;
+        var text = TextEncoding.AsUtf8(stream, encoding);
+        return FileScan.Read(text, name, diagnostics);
+    }
+
+    private static byte[] Start(byte[] head, LogEncoding encoding)
+    {
+        var start = new byte[1024];
+        using var text = new MemoryStream(head);
+        return start[..TextEncoding.AsUtf8(text, encoding).ReadAtLeast(start, start.Length, throwOnEndOfStream: false)];
     }
 
     private static bool IsLas(ReadOnlySpan<byte> head, string name)
     {
+        if (head.StartsWith((ReadOnlySpan<byte>)[0xEF, 0xBB, 0xBF])) head = head[3..];
         foreach (var range in head.SplitAny((byte)'\n', (byte)'\r'))
         {
             var line = head[range].Trim(" \t"u8);

@@ -22,4 +22,10 @@ public sealed record LogReadOptions
 
     /// <summary>True when a CSV column's name may end in its unit, as in <c>md_m</c> or <c>inclination_deg</c>.</summary>
     public bool UnitSuffixes { get; init; }
+
+    /// <summary>The form of the file, where it is CSV.</summary>
+    public CsvOptions Csv { get; init; } = new();
+
+    /// <summary>What to do with neighbouring rows of the same depth.</summary>
+    public RepeatedDepth RepeatedDepth { get; init; }
 }

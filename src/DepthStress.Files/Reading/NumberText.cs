@@ -69,17 +69,6 @@ internal static class NumberText
     public static bool IsMissing(ReadOnlySpan<byte> cell) =>
         cell.IsEmpty || (cell.Length == 3 && (cell[0] | 0x20) == 'n' && (cell[1] | 0x20) == 'a' && (cell[2] | 0x20) == 'n');
 
-    /// <summary>True where the cell would be a number if its only comma were a point.</summary>
-    public static bool HasDecimalComma(ReadOnlySpan<byte> cell)
-    {
-        cell = cell.Trim(" \t"u8);
-        var comma = cell.IndexOf((byte)',');
-        if (comma <= 0 || cell.Length > 64 || cell.Contains((byte)'.')) return false;
-        var copy = cell.ToArray();
-        copy[comma] = (byte)'.';
-        return Read(copy, out _) == copy.Length && char.IsAsciiDigit((char)cell[comma - 1]);
-    }
-
     private static int ReadExponent(ReadOnlySpan<byte> text, int letter, ref int power)
     {
         var i = letter + 1;

@@ -16,9 +16,11 @@ internal sealed class TableBuilder
     private int _rows, _capacity;
 
     /// <summary>Prepares a table; nothing is allocated for the values before the first row.</summary>
-    public TableBuilder(LogSource source, List<ColumnHeader> headers, int depthColumn, double? nullValue)
+    public TableBuilder(LogSource source, List<ColumnHeader> headers, int depthColumn, double? nullValue, bool decimalComma)
     {
         (_source, _headers, _depth, _null) = (source, headers, depthColumn, nullValue);
+        DecimalComma = decimalComma;
+        NullTexts = new NullTextTally(headers);
         Tally = new ProblemTally(source.Diagnostics);
         Depth = new DepthTrack(source, Tally);
         Row = new double[headers.Count];
@@ -40,6 +42,15 @@ internal sealed class TableBuilder
 
     /// <summary>The numbers of the row being read, NaN where the cell is empty; <see cref="AddRow"/> takes them.</summary>
     public double[] Row { get; }
+
+    /// <summary>True where the decimal mark is a comma.</summary>
+    public bool DecimalComma { get; }
+
+    /// <summary>How many lines a row takes, as far as is known: so that arrays are allocated once.</summary>
+    public int LinesPerRow { get; set; } = 1;
+
+    /// <summary>Words for no value.</summary>
+    public NullTextTally NullTexts { get; }
 
     /// <summary>Problems of rows.</summary>
     public ProblemTally Tally { get; }
@@ -78,33 +89,32 @@ internal sealed class TableBuilder
     /// <summary>Reports a cell that is no number and that the tally admits.</summary>
     public void BadCell(int line, int column, int index, ReadOnlySpan<byte> text)
     {
-        var position = _source.At(line, column);
-        var quoted = TextCleaner.Quote(text);
-        _source.Diagnostics.Error(position, NumberText.HasDecimalComma(text)
-            ? $"column \"{_headers[index].Name}\": found the decimal comma in \"{quoted}\", expected a decimal point"
-            : $"column \"{_headers[index].Name}\": found \"{quoted}\", expected a number");
+        var problem = NumberMarks.Problem(text, DecimalComma ? ',' : '.') ?? $"\"{TextCleaner.Quote(text)}\", expected a number";
+        _source.Diagnostics.Error(_source.At(line, column), $"column \"{_headers[index].Name}\": found {problem}");
     }
 
-    /// <summary>Reports a row with too few or too many values, and leaves it out.</summary>
-    public void WrongCount(int line, int found)
+    /// <summary>Reports a row with too few or too many values, and leaves it out; the hint goes to the end of the message.</summary>
+    public void WrongCount(int line, int found, string hint = "")
     {
         Depth.Skip();
         if (!Tally.Admit(RowProblem.Count, _source.At(line))) return;
         _source.Diagnostics.Error(_source.At(line), string.Create(
-            CultureInfo.InvariantCulture, $"found {found} {(found == 1 ? "value" : "values")}, expected {Row.Length} (one for each column)"));
+            CultureInfo.InvariantCulture, $"found {found} {(found == 1 ? "value" : "values")}, expected {Row.Length} (one for each column){hint}"));
     }
 
     /// <summary>Closes the table; null when it cannot be used.</summary>
     public LogFile? Finish(LogFormat format, string? wellName)
     {
         Tally.Close();
-        if (!Depth.Close() || Tally.Any) return null;
+        if (!Depth.Close(_source.Options.RepeatedDepth) || Tally.Any) return null;
         if (_rows == 0)
         {
             _source.Diagnostics.Error(_source.At(), "found no data rows, expected at least one");
             return null;
         }
 
+        NullTexts.Report(_source.Diagnostics);
+        PutInOrder();
         var columns = new LogColumn[_headers.Count];
         for (var c = 0; c < columns.Length; c++)
         {
@@ -115,7 +125,26 @@ internal sealed class TableBuilder
         }
 
         return new LogFile(
-            _source.Name, format, wellName, _null, columns, _depth, _rows, _source.Stream.BytesRead, _source.Stream.Sha256());
+            _source.Name, format, wellName, _null, columns, _depth, _rows, _source.File.BytesRead, _source.File.Sha256());
+    }
+
+    private void PutInOrder()
+    {
+        if (Depth.Repeats)
+        {
+            _rows = RowOrder.Join(_values, _depth, _rows, _source.Options.RepeatedDepth == RepeatedDepth.Mean);
+            for (var c = 0; c < _values.Length; c++) _missing[c] = CountMissing(_values[c].AsSpan(0, _rows));
+        }
+
+        Depth.ReportDescent();
+        if (Depth.Descends) RowOrder.Reverse(_values, _rows);
+    }
+
+    private static int CountMissing(ReadOnlySpan<double> values)
+    {
+        var count = 0;
+        foreach (var value in values) count += double.IsNaN(value) ? 1 : 0;
+        return count;
     }
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
@@ -126,7 +155,7 @@ internal sealed class TableBuilder
     private void Grow(int line)
     {
         // As many rows as lines are left, but no more than the bytes can hold (a blank or a comma and one character for each cell).
-        var lines = _source.Scan.Lines - line + 1;
+        var lines = ((_source.Scan.Lines - line) / LinesPerRow) + 1;
         var most = (_source.Scan.Bytes / (2L * _headers.Count)) + 1;
         _capacity = _rows == 0 ? (int)Math.Clamp(lines, 1, Math.Min(most, Array.MaxLength)) : (int)Math.Min(2L * _capacity, Array.MaxLength);
         for (var c = 0; c < _values.Length; c++) Array.Resize(ref _values[c], _capacity);

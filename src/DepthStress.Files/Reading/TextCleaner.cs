@@ -12,20 +12,20 @@ internal static class TextCleaner
     public static string Clean(string text) =>
         (text.Any(char.IsControl) ? string.Concat(text.Where(c => !char.IsControl(c))) : text).Trim();
 
-    /// <summary>Decodes UTF-8, or Latin-1 where the bytes are no UTF-8; tells which.</summary>
-    public static string Decode(ReadOnlySpan<byte> bytes, ref bool latin)
+    /// <summary>Decodes UTF-8, or code page 1252 where the bytes are no UTF-8; tells which.</summary>
+    public static string Decode(ReadOnlySpan<byte> bytes, ref bool foreign)
     {
         if (System.Text.Unicode.Utf8.IsValid(bytes)) return Strict.GetString(bytes);
-        latin = true;
-        return Encoding.Latin1.GetString(bytes);
+        foreign = true;
+        return TextEncoding.Windows.GetString(bytes);
     }
 
     /// <summary>Text of a cell for a message: cleaned, and cut where it is long.</summary>
     public static string Quote(ReadOnlySpan<byte> bytes)
     {
-        var latin = false;
+        var foreign = false;
         var cut = bytes.Length > 4 * LongestQuote ? bytes[..(4 * LongestQuote)] : bytes;
-        var text = Clean(Decode(cut, ref latin));
+        var text = Clean(Decode(cut, ref foreign));
         return text.Length <= LongestQuote && cut.Length == bytes.Length ? text : $"{text[..Math.Min(text.Length, LongestQuote)]}...";
     }
 }

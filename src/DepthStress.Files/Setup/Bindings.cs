@@ -5,6 +5,7 @@ using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -32,6 +33,19 @@ internal static class Bindings
         [("true_vertical_depth", Property.LoggedVerticalDepth), ("vertical_position", Property.LoggedVerticalPosition)];
 
     private static readonly (string, UnitSystem)[] UnitSystems = [("metric", UnitSystem.Metric), ("field", UnitSystem.Field)];
+
+    private static readonly (string, char)[] Delimiters = [(",", ','), (";", ';'), ("|", '|'), ("tab", '\t'), ("blank", CsvOptions.Blanks)];
+
+    private static readonly (string, char)[] DecimalMarks = [(".", '.'), (",", ',')];
+
+    private static readonly (string, LogEncoding)[] Encodings =
+    [
+        ("utf-8", LogEncoding.Utf8), ("utf-16le", LogEncoding.Utf16LittleEndian),
+        ("utf-16be", LogEncoding.Utf16BigEndian), ("windows-1252", LogEncoding.Windows1252),
+    ];
+
+    private static readonly (string, RepeatedDepth)[] RepeatedDepths =
+        [("error", RepeatedDepth.Error), ("first", RepeatedDepth.First), ("mean", RepeatedDepth.Mean)];
 
     private static readonly (string, PorePressureMethod)[] PressureWords =
     [
@@ -76,9 +90,22 @@ internal static class Bindings
 
     private static LogsSection Logs(ISection s, LogsSection l) => s.Table(
         "curves",
-        l with { Files = s.Texts("files", l.Files, "the log files (CSV or LAS 2.0), relative to the well file") },
+        l with
+        {
+            Files = s.Texts("files", l.Files, "the log files (CSV or LAS), relative to the well file"),
+            Csv = s.Table("csv", l.Csv, Csv, "how CSV files are written; what is not stated is detected"),
+            RepeatedDepth = s.Choice("repeated_depth", l.RepeatedDepth, RepeatedDepths, "what neighbouring rows of the same depth are: an error, or one row: the first of them or their mean"),
+        },
         Curves,
         "the column of each role; roles not named here are found by the usual mnemonics");
+
+    private static CsvSection Csv(ISection s, CsvSection c) => c with
+    {
+        Delimiter = s.Choice("delimiter", c.Delimiter, Delimiters, "what parts the columns; blank stands for runs of blanks"),
+        Decimal = s.Choice("decimal", c.Decimal, DecimalMarks, "the decimal mark"),
+        HeaderLine = s.Number("header_line", c.HeaderLine, new Interval(1, CsvSection.LastHeaderLine), "the line of the column names, from 1"),
+        Encoding = s.Choice("encoding", c.Encoding, Encodings, "how letters are stored"),
+    };
 
     private static LogsSection Curves(ISection s, LogsSection l)
     {

@@ -5,6 +5,7 @@ using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -62,6 +63,12 @@ public sealed record LogsSection
 {
     /// <summary>The log files, relative to the well file.</summary>
     public Setting<IReadOnlyList<string>> Files { get; init; }
+
+    /// <summary>How CSV files are written.</summary>
+    public CsvSection Csv { get; init; } = new();
+
+    /// <summary>What to do with neighbouring rows of the same depth.</summary>
+    public Setting<RepeatedDepth> RepeatedDepth { get; init; } = Setting.Default(Reading.RepeatedDepth.Error);
 
     /// <summary>The column that holds measured depth, when it is not the usual one; one at most in a sound file.</summary>
     public IReadOnlyList<CurveSource> DepthColumns { get; init; } = [];

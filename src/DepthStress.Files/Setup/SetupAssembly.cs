@@ -28,11 +28,13 @@ internal static class SetupAssembly
             diagnostics.Error(file, "[logs] files is not set; expected the names of the log files");
         else
             CheckFiles(sections.Logs.Files, diagnostics);
+        if (sections.Logs.Csv.HeaderLine is { IsSet: true } line && line.Value != Math.Floor(line.Value))
+            diagnostics.Error(line.Source.Position, "found a fraction, expected header_line = a whole number");
         if (sections.Logs.DepthColumns is [_, var second, ..])
             diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
         var frame = Frame(well, file, wrong, diagnostics);
-        var trajectory = SurveyAssembly.Path(sections.Survey, file, folder, inputs, wrong, diagnostics);
+        var trajectory = SurveyAssembly.Path(sections.Survey, sections.Logs.Csv.Options(), file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);

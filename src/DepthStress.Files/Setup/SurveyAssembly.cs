@@ -1,5 +1,6 @@
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Files.Reading;
 using static System.FormattableString;
 
 namespace DepthStress.Files.Setup;
@@ -9,7 +10,7 @@ internal static class SurveyAssembly
 {
     /// <summary>The path, or null with the reason reported.</summary>
     public static Trajectory? Path(
-        SurveySection survey, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
+        SurveySection survey, CsvOptions csv, SourcePosition file, string folder, List<InputFile> inputs, WrongKeys wrong, DiagnosticBag diagnostics)
     {
         var vertical = survey.Vertical is { IsSet: true, Value: true };
         if (survey.File.IsSet && vertical)
@@ -36,7 +37,7 @@ internal static class SurveyAssembly
             diagnostics.Error(file, "[survey] north is not set; expected \"true\", \"grid\" or \"magnetic\", what the survey's azimuths count from");
         var tieIn = TieIn(survey.TieIn, wrong, diagnostics);
         if (tieIn is null && survey.TieIn.Position is not null) return null;
-        var path = SurveyFile.Read(System.IO.Path.GetFullPath(survey.File.Value, folder), survey.File.Value, tieIn, inputs, diagnostics);
+        var path = SurveyFile.Read(System.IO.Path.GetFullPath(survey.File.Value, folder), survey.File.Value, csv, tieIn, inputs, diagnostics);
         if (path is not null && tieIn is not null) Note(tieIn, survey.TieIn.Position ?? file, diagnostics);
         return path;
     }

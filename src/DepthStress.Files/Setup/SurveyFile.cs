@@ -18,12 +18,14 @@ internal static class SurveyFile
     /// <summary>Reads a survey; null when it cannot be used.</summary>
     /// <param name="path">Full path.</param>
     /// <param name="name">The file as the well file names it.</param>
+    /// <param name="csv">How CSV files are written.</param>
     /// <param name="tieIn">The point from which the survey counts, or null.</param>
     /// <param name="inputs">Gets the file with its hash.</param>
     /// <param name="diagnostics">Gets every problem.</param>
-    public static Trajectory? Read(string path, string name, TieIn? tieIn, List<InputFile> inputs, DiagnosticBag diagnostics)
+    public static Trajectory? Read(
+        string path, string name, CsvOptions csv, TieIn? tieIn, List<InputFile> inputs, DiagnosticBag diagnostics)
     {
-        var options = new LogReadOptions { DepthNames = DepthNames, UnitSuffixes = true };
+        var options = new LogReadOptions { DepthNames = DepthNames, UnitSuffixes = true, Csv = csv };
         if (LogFileReader.Read(path, name, options, diagnostics) is not { } file) return null;
         inputs.Add(new InputFile(name, file.Sha256));
         var lines = SurveyLines.Of(path, file);

@@ -20,23 +20,31 @@ public sealed class CliBadInputTests : IDisposable
     [InlineData("DEPT[m]\n1\n", "logs.csv(1): error: found 1 column in the header row, expected at least 2 separated by ','")]
     [InlineData(
         "TIME[s],DTC[us/ft]\n1,90\n",
+        "logs.csv(1,1): error: found the index \"TIME\" in s, a time; expected a depth (logs over time are not read)")]
+    [InlineData(
+        "X[s],DTC[us/ft]\n1,90\n",
+        "logs.csv(1,1): error: found the index \"X\" in s, a time; expected a depth (logs over time are not read)")]
+    [InlineData(
+        "X[m],DTC[us/ft]\n1,90\n",
         "logs.csv(1): error: found no depth column, expected one named DEPT, DEPTH, MD, MEASURED_DEPTH, DEPTH_MD, TDEP, MD_DEPTH, MEASDEPTH or MEASUREDDEPTH")]
-    [InlineData("DEPT[m];DTC[us/ft]\n1000,0;90,1\n1001,0;91,2\n", "logs.csv(1): error: found ';' as delimiter and decimal commas, expected ',' and decimal points")]
+    [InlineData(
+        "DEPT[m],DTC[us/ft]\n1000,90,1\n",
+        "logs.csv(2): error: found 3 values, expected 2 (one for each column); \"1000,90\" is two values where ',' is the delimiter, or 1000.90 where it is the decimal mark")]
     public async Task A_log_file_without_usable_content(string logs, string expected) => Assert.Equal([expected], await _cli.CheckAsync(WellText.Sound, logs));
 
     [Fact]
     public async Task A_binary_file()
     {
         File.WriteAllBytes(_cli.Folder.Of("logs.csv"), [.. Enumerable.Range(0, 2560).Select(i => (byte)i)]);
-        Assert.Equal(["logs.csv(1): error: found a NUL byte (binary data), expected UTF-8 text"], await _cli.CheckAsync(WellText.Sound, null));
+        Assert.Equal(["logs.csv(1): error: found a NUL byte (binary data), expected text"], await _cli.CheckAsync(WellText.Sound, null));
     }
 
     [Theory]
     [InlineData("1000.5,91", "1000.5,x91", "logs.csv(3,8): error: column \"DTC\": found \"x91\", expected a number")]
     [InlineData("1000.5,91", "1000.5,\"91,5\"", "logs.csv(3,8): error: column \"DTC\": found the decimal comma in \"91,5\", expected a decimal point")]
-    [InlineData("1000.5,91", "1000.5,91,5", "logs.csv(3): error: found 6 values, expected 5 (one for each column)")]
+    [InlineData("1000.5,91", "1000.5,91,5", "logs.csv(3): error: found 6 values, expected 5 (one for each column); \"91,5\" is two values where ',' is the delimiter, or 91.5 where it is the decimal mark")]
     [InlineData("1000.5,91", "999.5,91", "logs.csv(3): error: depth decreases in 1 row, first from 1000 to 999.5, expected increasing")]
-    [InlineData("1000.5,91", "1000.0,91", "logs.csv(3): error: depth repeats in 1 row, first 1000, expected increasing")]
+    [InlineData("1000.5,91", "1000.0,91", "logs.csv(3): error: depth repeats in 1 row, first 1000, expected increasing (or repeated_depth = \"first\" or \"mean\" in [logs])")]
     [InlineData("1000.5,91", ",91", "logs.csv(3): error: found no depth in data row 2, expected a number")]
     public async Task A_cell_or_a_depth_that_cannot_be(string old, string replacement, string expected) =>
         Assert.Equal([expected], await _cli.CheckAsync(WellText.Sound, WellText.Logs.Exchange(old, replacement)));

@@ -5,15 +5,6 @@ namespace DepthStress.Tests.Reading;
 
 public class CsvLogErrorTests
 {
-    [Theory]
-    [InlineData("DEPT;GR\n1;2\n", "found ';' as delimiter, expected ','")]
-    [InlineData("DEPT\tGR\n1\t2\n", "found a tab as delimiter, expected ','")]
-    [InlineData("DEPT|GR\n1|2\n", "found '|' as delimiter, expected ','")]
-    [InlineData("DEPT;GR\n1,5;85,3\n", "found ';' as delimiter and decimal commas, expected ',' and decimal points")]
-    [InlineData("DEPT\tGR\nm\tgAPI\n1,5\t85,3\n", "found a tab as delimiter and decimal commas, expected ',' and decimal points")]
-    public void Other_delimiters_are_refused_by_name(string text, string problem) =>
-        LogReading.Csv(text).IsRefusedWith($"a.csv(1): error: {problem}");
-
     [Fact]
     public void A_delimiter_inside_quotes_is_none() =>
         Assert.Equal("A;B;C", LogReading.Csv("DEPT,\"A;B;C\"\n1,2\n").Clean().Columns[1].Name);
@@ -24,14 +15,13 @@ public class CsvLogErrorTests
             "a.csv(2,3): error: column \"GR\": found the decimal comma in \"85,3\", expected a decimal point");
 
     [Theory]
-    [InlineData("\"1,234.5\"", "1,234.5")]
-    [InlineData("\"1,234,567\"", "1,234,567")]
     [InlineData("abc", "abc")]
     [InlineData("1.2.3", "1.2.3")]
     [InlineData("12 13", "12 13")]
     [InlineData("1e", "1e")]
     [InlineData("0x1F", "0x1F")]
-    [InlineData("-", "-")]
+    [InlineData("=1+1", "=1+1")]
+    [InlineData("<b>1</b>", "<b>1</b>")]
     [InlineData("Infinity", "Infinity")]
     [InlineData("1e999", "1e999")]
     [InlineData("1\u0007x", "1x")]
@@ -49,7 +39,7 @@ public class CsvLogErrorTests
 
     [Fact]
     public void Ragged_rows_tell_line_found_and_expected() =>
-        LogReading.Csv("DEPT,GR,DT\n1,2,3\n2,3\n3,4,5,6\n4\n").IsRefusedWith(
+        LogReading.Csv("DEPT,GR,DT\n1,2,3\n2,3\n3.5,4.5,5.5,6.5\n4\n").IsRefusedWith(
             "a.csv(3): error: found 2 values, expected 3 (one for each column)",
             "a.csv(4): error: found 4 values, expected 3 (one for each column)",
             "a.csv(5): error: found 1 value, expected 3 (one for each column)");

@@ -191,6 +191,6 @@ public class CsvLogReaderTests
     {
         var read = LogReading.Bytes([.. "DEPT,DT["u8, 0xB5, .. "s/ft]\n1,2\n"u8], "a.csv");
         Assert.Equal("\u00b5s/ft", read.File!.Columns[1].Unit);
-        Assert.Equal(["a.csv(1): note: found bytes that are not UTF-8, read them as Latin-1"], read.Messages);
+        Assert.Equal(["a.csv(1): note: found bytes that are not UTF-8, read them by code page 1252"], read.Messages);
     }
 }

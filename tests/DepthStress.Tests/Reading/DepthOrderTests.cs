@@ -4,6 +4,8 @@ namespace DepthStress.Tests.Reading;
 
 public class DepthOrderTests
 {
+    private const string Wish = " (or repeated_depth = \"first\" or \"mean\" in [logs])";
+
     private static LogReading Read(bool las, params string[] depths) => las
         ? LogReading.Las($"{LogReading.LasHead}~C\nDEPT.m :\nGR.gAPI :\n~A\n{string.Concat(depths.Select(d => $"{d} 5\n"))}")
         : LogReading.Csv($"DEPT,GR\n{string.Concat(depths.Select(d => $"{d},5\n"))}");
@@ -21,8 +23,8 @@ public class DepthOrderTests
     public void Repeats_name_the_first_line_and_the_count(bool las)
     {
         Read(las, "1", "2", "2", "3", "3", "4").IsRefusedWith(
-            $"{Place(las, 3)}: error: depth repeats in 2 rows, first 2, expected increasing");
-        Read(las, "1", "2", "2", "3").IsRefusedWith($"{Place(las, 3)}: error: depth repeats in 1 row, first 2, expected increasing");
+            $"{Place(las, 3)}: error: depth repeats in 2 rows, first 2, expected increasing{Wish}");
+        Read(las, "1", "2", "2", "3").IsRefusedWith($"{Place(las, 3)}: error: depth repeats in 1 row, first 2, expected increasing{Wish}");
     }
 
     [Theory]
@@ -35,14 +37,33 @@ public class DepthOrderTests
     [InlineData(true)]
     [InlineData(false)]
     public void Repeats_and_falls_are_told_apart(bool las) => Read(las, "1", "1", "0.5", "2").IsRefusedWith(
-        $"{Place(las, 2)}: error: depth repeats in 1 row, first 1, expected increasing",
+        $"{Place(las, 2)}: error: depth repeats in 1 row, first 1, expected increasing{Wish}",
         $"{Place(las, 3)}: error: depth decreases in 1 row, first from 1 to 0.5, expected increasing");
 
     [Theory]
     [InlineData(true)]
     [InlineData(false)]
-    public void A_file_that_descends_throughout_is_refused_as_such(bool las) => Read(las, "30", "20", "10").IsRefusedWith(
-        $"{Place(las, 2)}: error: depth decreases, expected increasing (from 30 to 10)");
+    public void A_file_that_descends_throughout_is_turned_round_with_a_note(bool las)
+    {
+        var read = Read(las, "30", "20", "10");
+        Assert.Equal([10, 20, 30], read.Column("DEPT").Values);
+        Assert.Equal([$"{Place(las, 2)}: note: depth decreases throughout (from 30 to 10), the rows are turned round"], read.Messages);
+    }
+
+    [Fact]
+    public void Turning_round_takes_every_column_along_with_its_missing_values()
+    {
+        var read = LogReading.Csv("DEPT,GR,DT\n3,30,\n2,20,5\n1,,6\n");
+        Assert.Equal([double.NaN, 20, 30], read.Column("GR").Values);
+        Assert.Equal([6, 5, double.NaN], read.Column("DT").Values);
+        Assert.Equal((1, 1), (read.Column("GR").Missing, read.Column("DT").Missing));
+    }
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void A_rise_in_a_file_that_else_descends_is_what_is_wrong(bool las) => Read(las, "30", "20", "25", "10", "5").IsRefusedWith(
+        $"{Place(las, 3)}: error: depth increases in 1 row, first from 20 to 25, expected decreasing as in the other rows");
 
     [Theory]
     [InlineData(true, "-999.25")]

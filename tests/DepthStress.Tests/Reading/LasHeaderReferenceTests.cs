@@ -67,7 +67,7 @@ public class LasHeaderReferenceTests
     // Rule "index": the first curve is the index.
     [Fact]
     public void The_first_curve_is_the_depth_whatever_its_name() =>
-        Assert.Equal(0, LogReading.Las($"{LogReading.LasHead}~C\nX.m:\nDEPT.m:\n~A\n1 9\n2 8\n").Clean().DepthColumn);
+        Assert.Equal(0, LogReading.Las($"{LogReading.LasHead}~C\nX.m:\nGR.m:\n~A\n1 9\n2 8\n").Clean().DepthColumn);
 
     // Rule "null": NULL in ~W is the missing-value code of the data.
     [Fact]

@@ -46,11 +46,11 @@ public class LasLogReaderTests
         Assert.Equal(1, LogReading.Las($"\ufeff{LogReading.LasHead}{Curves}~A\n1 10\n").Clean().Rows);
 
     [Fact]
-    public void Text_that_is_not_utf8_is_read_as_latin_with_a_note()
+    public void Text_that_is_not_utf8_is_read_by_code_page_1252_with_a_note()
     {
         var read = LogReading.Bytes([.. "~V\nVERS. 2.0:\nWRAP. NO:\n~W\nNULL. -1:\n~C\nDEPT.m:\nDT."u8, 0xB5, .. "s/m:\n~A\n1 2\n"u8], "a.las");
         Assert.Equal("\u00b5s/m", read.File!.Columns[1].Unit);
-        Assert.Equal(["a.las: note: found bytes that are not UTF-8, read them as Latin-1"], read.Messages);
+        Assert.Equal(["a.las: note: found bytes that are not UTF-8, read them by code page 1252"], read.Messages);
     }
 
     [Fact]

@@ -11,56 +11,54 @@ namespace DepthStress.Tests.Reading;
 /// </summary>
 public class OpenDataTests
 {
-    private const string Descending = "depth decreases, expected increasing (from 1670 to 1669.75)";
-
-    /// <summary>The first error of every sample, or rows x columns where it can be read.</summary>
+    /// <summary>Of every sample: rows x columns, depths as they are given on, missing cells; or the first error where it is refused.</summary>
     private static readonly Dictionary<string, string> Samples = new(StringComparer.Ordinal)
     {
-        ["comma_decimal_mark.las"] = "(45,39): error: column \"SFLU\": found the decimal comma in \"123,420\", expected a decimal point",
-        ["encodings_cp1252.las"] = $"(45): error: {Descending}",
-        ["encodings_utf16le.las"] = "(1,1): error: found UTF-16 text, expected UTF-8",
-        ["encodings_utf16lebom.las"] = "(1,1): error: found UTF-16 text, expected UTF-8",
-        ["encodings_utf8wbom.las"] = $"(45): error: {Descending}",
+        ["comma_decimal_mark.las"] = "(45,39): error: column \"SFLU\": found \"123,420\", which is 123.420 with a decimal comma or 123420 with a thousands separator; expected a decimal point",
+        ["encodings_cp1252.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["encodings_utf16le.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["encodings_utf16lebom.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["encodings_utf8wbom.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
         ["excess_curves.las"] = "(27): error: found 4 values, expected 6 (one for each column)",
         ["header_only.las"] = ": error: found no ~A section, expected the data in it",
-        ["index_null.las"] = ": 3 x 4",
+        ["index_null.las"] = ": 3 x 4, 999 to 999.5 M, 2 missing",
         ["missing_a_section.las"] = ": error: found no data rows, expected at least one",
-        ["missing_null.las"] = $"(44): error: {Descending}",
-        ["missing_vers.las"] = $"(44): error: {Descending}",
-        ["missing_wrap.las"] = $"(44): error: {Descending}",
-        ["mnemonic_case.las"] = $"(44): error: {Descending}",
-        ["mnemonic_duplicate.las"] = $"(45): error: {Descending}",
-        ["mnemonic_duplicate2.las"] = $"(43): error: {Descending}",
-        ["mnemonic_good.las"] = $"(45): error: {Descending}",
-        ["mnemonic_leading_period.las"] = $"(45): error: {Descending}",
-        ["mnemonic_missing.las"] = $"(45): error: {Descending}",
-        ["mnemonic_missing_multiple.las"] = $"(45): error: {Descending}",
+        ["missing_null.las"] = ": 3 x 8, 1669.75 to 1670 M, 2 missing",
+        ["missing_vers.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["missing_wrap.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_case.las"] = ": 3 x 7, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_duplicate.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_duplicate2.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_good.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_leading_period.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_missing.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["mnemonic_missing_multiple.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
         ["not_a_las_file.las"] = "(1,1): error: found \"100.0,  0.6300,  302.1900\" before the first section, expected a line that starts with ~",
-        ["null_policy_(null).las"] = "(46,18): error: column \"RHOB\": found \"(null)\", expected a number",
-        ["null_policy_-999.25.las"] = $"(45): error: {Descending}",
-        ["null_policy_9999.las"] = $"(45): error: {Descending}",
-        ["null_policy_ERR.las"] = "(46,24): error: column \"RHOB\": found \"ERR\", expected a number",
-        ["null_policy_dashes.las"] = "(44,18): error: column \"RHOB\": found \"-\", expected a number",
-        ["null_policy_ind.las"] = "(21,31): error: column \"CN\": found \"-1.#IND0000\", expected a number",
-        ["null_policy_runon.las"] = "(33): error: found 6 values, expected 7 (one for each column)",
-        ["sample_2.0-small-neg-values.las"] = $"(46): error: {Descending}",
-        ["sample_2.0.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_based.las"] = ": 6 x 3",
-        ["sample_2.0_empty_other_section.las"] = $"(44): error: {Descending}",
-        ["sample_2.0_inf_api_leading_zero.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_inf_uwi.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_inf_uwi_leading_zero.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_minimal.las"] = "(28): error: depth decreases, expected increasing (from 635 to 634.875)",
-        ["sample_2.0_tab_dlm.las"] = $"(47): error: {Descending}",
-        ["sample_2.0_universal_newline.las"] = $"(46): error: {Descending}",
-        ["sample_2.0_wrapped.las"] = "(3): error: found WRAP YES, expected WRAP NO (wrapped files are not read yet)",
-        ["sample_2.0_wrong_stop_value.las"] = $"(46): error: {Descending}",
-        ["sample_null.las"] = $"(45): error: {Descending}",
-        ["sample_rev.las"] = "(45): error: depth decreases, expected increasing (from 1670 to 1660)",
-        ["sample.las_units-brackets.csv"] = $"(3): error: {Descending}",
-        ["sample.las_units-line.csv"] = $"(4): error: {Descending}",
-        ["sample.las_units-none.csv"] = $"(3): error: {Descending}",
-        ["sample.las_units-parentheses.csv"] = $"(3): error: {Descending}",
+        ["null_policy_(null).las"] = ": 3 x 8, 1669.75 to 1670 M, 2 missing",
+        ["null_policy_-999.25.las"] = ": 3 x 8, 1669.75 to 1670 M, 3 missing",
+        ["null_policy_9999.las"] = ": 3 x 8, 1669.75 to 1670 M, 1 missing",
+        ["null_policy_ERR.las"] = ": 3 x 8, 1669.75 to 1670 M, 2 missing",
+        ["null_policy_dashes.las"] = ": 3 x 8, 1669.75 to 1670 M, 3 missing",
+        ["null_policy_ind.las"] = ": 10 x 4, 2450 to 2454.5 FT, 20 missing",
+        ["null_policy_runon.las"] = "(33): error: found 6 values, expected 7 (one for each column); \"7.020101130.188\" may be two numbers that run together, which cannot be told apart",
+        ["sample.las_units-brackets.csv"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample.las_units-line.csv"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample.las_units-none.csv"] = ": 3 x 8, 1669.75 to 1670 (no unit), 0 missing",
+        ["sample.las_units-parentheses.csv"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0-small-neg-values.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_based.las"] = "(20,2): error: found the index \"ETIM\" in S, a time; expected a depth (logs over time are not read)",
+        ["sample_2.0_empty_other_section.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_inf_api_leading_zero.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_inf_uwi.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_inf_uwi_leading_zero.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_minimal.las"] = ": 2 x 8, 634.875 to 635 M, 0 missing",
+        ["sample_2.0_tab_dlm.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_universal_newline.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_2.0_wrapped.las"] = ": 2 x 36, 909.875 to 910 M, 8 missing",
+        ["sample_2.0_wrong_stop_value.las"] = ": 3 x 8, 1669.75 to 1670 M, 0 missing",
+        ["sample_null.las"] = ": 3 x 8, 1669.75 to 1670 M, 2 missing",
+        ["sample_rev.las"] = ": 11 x 8, 1660 to 1670 M, 0 missing",
     };
 
     [OpenDataFact]
@@ -118,8 +116,10 @@ public class OpenDataTests
     {
         var bag = new DiagnosticBag();
         var file = LogFileReader.Read(Path.Combine(folder, name), name, new LogReadOptions(), bag);
-        return file is not null
-            ? string.Create(CultureInfo.InvariantCulture, $"{name}: {file.Rows} x {file.Columns.Count}")
-            : bag.Items.First(d => d.Severity == Severity.Error).ToString();
+        if (file is null) return bag.Items.First(d => d.Severity == Severity.Error).ToString();
+        var depth = file.Columns[file.DepthColumn];
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"{name}: {file.Rows} x {file.Columns.Count}, {depth.Values[0]} to {depth.Values[^1]} {depth.Unit ?? "(no unit)"}, {file.Columns.Sum(c => c.Missing)} missing");
     }
 }
