@@ -44,7 +44,7 @@ public class CsvDialectTests
 
     [Fact]
     public void A_word_like_depth_in_a_sentence_is_no_header() =>
-        LogReading.Csv("GR,X\n1,2\n").IsRefusedWith(
+        LogReading.Csv("the depth, in metres\nGR,X\n1,2\n").IsRefusedWith(
             "a.csv(1): error: found no depth column, expected one named DEPT, DEPTH, MD, MEASURED_DEPTH, DEPTH_MD, TDEP, MD_DEPTH, MEASDEPTH or MEASUREDDEPTH");
 
     [Fact]
