@@ -28,6 +28,22 @@ public static class ShallowDensityMethods
         },
         new()
         {
+            Id = "barker-wood-1997",
+            Title = "Barker and Wood's mean density of sediment below the mudline",
+            Predicts = Property.MeanDensityAbove,
+            Unit = Units.PoundPerGallon,
+            Rocks = RockKinds.Any,
+            Inputs = [new("d", Property.DepthBelowSurface, Units.Foot, Interval.NotNegative, Interval.All)],
+            Coefficients = [new("a", 5.3, "lb/gal"), new("b", 0.1356)],
+            Template = "rho_mean = {a} d^{b}",
+            Formula = LawForms.Power,
+            Validity = "deep-water Gulf of Mexico; mean from the mudline to d",
+            Source = "Barker and Wood 1997, coefficients recalled; the citation is listed in Zhang 2019, Applied Petroleum Geomechanics, p. 190",
+            Standing = Standing.FromMemory,
+            Example = new([8000], 17.9281, 6, ExampleBasis.SelfComputed, "the formula at 8000 ft"),
+        },
+        new()
+        {
             Id = "miller-gulf",
             Title = "Miller's density of sediment near the mudline",
             Predicts = Property.ShallowDensity,

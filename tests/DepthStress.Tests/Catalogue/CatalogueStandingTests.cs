@@ -145,6 +145,7 @@ public class CatalogueStandingTests
         ["gardner-1974"] = Standing.Confirmed, // Gardner, Gardner and Gregory 1974
         ["gardner-1974-feet"] = Standing.Confirmed, // likewise, and Zhang 2019 p. 33
         ["traugott-1997"] = Standing.Confirmed, // Zhang 2019 p. 190 eqs 6.4-6.6
+        ["barker-wood-1997"] = Standing.FromMemory, // coefficients recalled
         ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
         ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
     };

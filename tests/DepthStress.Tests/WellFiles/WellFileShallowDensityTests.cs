@@ -34,9 +34,9 @@ public sealed class WellFileShallowDensityTests
     [InlineData("\"2.0 m\"", "(22,13): error: above_log: found \"2.0 m\", a length; expected a density in one of g/cm3, kg/m3, lb/ft3, lb/gal, sg")]
     [InlineData("\"-2.0 g/cm3\"", "(22,13): error: found the text \"-2.0 g/cm3\", expected above_log above zero")]
     [InlineData("\"0 g/cm3\"", "(22,13): error: found the text \"0 g/cm3\", expected above_log above zero")]
-    [InlineData("\"traugot-1997\"", "(22,13): error: found the unknown method \"traugot-1997\", expected above_log = one of traugott-1997, miller-gulf; did you mean \"traugott-1997\"?")]
-    [InlineData("\"krief-1990-biot\"", "(22,13): error: found the unknown method \"krief-1990-biot\", expected above_log = one of traugott-1997, miller-gulf")]
-    [InlineData("\"\"", "(22,13): error: found the unknown method \"\", expected above_log = one of traugott-1997, miller-gulf")]
+    [InlineData("\"traugot-1997\"", "(22,13): error: found the unknown method \"traugot-1997\", expected above_log = one of traugott-1997, barker-wood-1997, miller-gulf; did you mean \"traugott-1997\"?")]
+    [InlineData("\"krief-1990-biot\"", "(22,13): error: found the unknown method \"krief-1990-biot\", expected above_log = one of traugott-1997, barker-wood-1997, miller-gulf")]
+    [InlineData("\"\"", "(22,13): error: found the unknown method \"\", expected above_log = one of traugott-1997, barker-wood-1997, miller-gulf")]
     [InlineData("{ method = \"exponential\" }", "(22,13): error: above_log: expected method = \"exponential\", surface_density and matrix_density")]
     [InlineData(
         "{ method = \"exponentiel\", surface_density = \"1.9 g/cm3\", matrix_density = \"2.7 g/cm3\" }",
