@@ -20,7 +20,8 @@ public static class ImpossibleSamples
     /// <summary>The greatest credible bulk density, kg/m3.</summary>
     public const double HighestDensity = 4000;
 
-    private static readonly double SmallestRatio = Math.Sqrt(4.0 / 3.0);
+    /// <summary>The smallest Vp/Vs; above it the bulk modulus is positive.</summary>
+    public static readonly double SmallestRatio = Math.Sqrt(4.0 / 3.0);
 
     /// <summary>Gives the logs without impossible samples, marked as edited, and what was taken out.</summary>
     public static (LogTable Logs, IReadOnlyList<SampleRemoval> Removals) Remove(LogTable logs)

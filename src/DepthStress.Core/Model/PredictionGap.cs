@@ -14,8 +14,6 @@ internal sealed record MissingSamples(SettingsRun Run, Law Law, int[] Samples);
 /// <summary>Where a property is not logged but to be predicted, and what has been put there so far.</summary>
 internal sealed class PredictionGap
 {
-    private static readonly double SmallestRatio = Math.Sqrt(4.0 / 3.0);
-
     private readonly WellSetup _setup;
     private readonly LawSlot _slot;
     private readonly Curve? _curve;
@@ -136,6 +134,6 @@ internal sealed class PredictionGap
     }
 
     private bool CanBe(double value, int sample) => Property == Property.Vs
-        ? value > 0 && !(_vp is { } vp && vp[sample] <= SmallestRatio * value)
+        ? value > 0 && !(_vp is { } vp && vp[sample] <= ImpossibleSamples.SmallestRatio * value)
         : value is >= ImpossibleSamples.LowestDensity and <= ImpossibleSamples.HighestDensity;
 }

@@ -10,9 +10,6 @@ namespace DepthStress.Core.Rock;
 /// </summary>
 public static class DynamicModuli
 {
-    /// <summary>The smallest Vp/Vs with a positive bulk modulus.</summary>
-    public static readonly double SmallestRatio = Math.Sqrt(4.0 / 3.0);
-
     /// <summary>Shear modulus, Pa: <c>rho Vs^2</c>.</summary>
     public static double Shear(double vs, double density) => density * vs * vs;
 
