@@ -41,6 +41,9 @@ public sealed record WellSetup
     /// <summary>How the vertical stress is had where density is not logged.</summary>
     public OverburdenSettings Overburden { get; init; } = new();
 
+    /// <summary>What was observed in the well, in the order of its rows.</summary>
+    public IReadOnlyList<Observation> Observations { get; init; } = [];
+
     /// <summary>True when the user accepts methods whose coefficients were recalled, not read.</summary>
     public bool AcceptUnverified { get; init; }
 }
