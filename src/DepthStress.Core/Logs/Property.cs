@@ -164,4 +164,19 @@ public enum Property
 
     /// <summary>Parameter: porosity at which the grains of the rock part, v/v.</summary>
     CriticalPorosity,
+
+    /// <summary>Velocity of the faster of the two shear waves of a crossed-dipole tool, m/s.</summary>
+    FastShear,
+
+    /// <summary>Velocity of the slower of the two shear waves of a crossed-dipole tool, m/s.</summary>
+    SlowShear,
+
+    /// <summary>Velocity of the Stoneley wave at low frequency, m/s.</summary>
+    Stoneley,
+
+    /// <summary>Shallow resistivity, ohm.m.</summary>
+    ShallowResistivity,
+
+    /// <summary>Medium resistivity, ohm.m.</summary>
+    MediumResistivity,
 }

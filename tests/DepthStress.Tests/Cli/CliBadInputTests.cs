@@ -58,7 +58,7 @@ public sealed class CliBadInputTests : IDisposable
         Assert.EndsWith(expected, Assert.Single(await _cli.CheckAsync(WellText.Sound, WellText.Logs.Exchange(old, replacement))), StringComparison.Ordinal);
 
     [Theory]
-    [InlineData("shaer = \"DTS\"", "well.toml(12,1): error: found the unknown key \"shaer\" in [logs.curves], expected one of depth, compressional, shear, density, gamma_ray, caliper, bit_size, density_correction, neutron, photoelectric, deep_resistivity, temperature, porosity, shale_volume, facies, true_vertical_depth, vertical_position; did you mean \"shear\"?")]
+    [InlineData("shaer = \"DTS\"", "well.toml(12,1): error: found the unknown key \"shaer\" in [logs.curves], expected one of depth, compressional, shear, fast_shear, slow_shear, stoneley, density, gamma_ray, caliper, bit_size, density_correction, neutron, photoelectric, deep_resistivity, medium_resistivity, shallow_resistivity, temperature, porosity, shale_volume, facies, true_vertical_depth, vertical_position; did you mean \"shear\"?")]
     [InlineData("shear = [\"DTS\", \"GR\"]", "well.toml(12,10): error: shear: expected base = the measured depth where the next column takes over")]
     public async Task A_role_that_is_not_known_or_has_no_order(string curves, string expected) =>
         Assert.Contains(expected, await _cli.CheckAsync(WellText.With("[survey]", $"[logs.curves]\n{curves}\n[survey]"), WellText.Logs));

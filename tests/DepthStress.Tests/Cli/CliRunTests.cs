@@ -132,7 +132,7 @@ public sealed class CliRunTests : IDisposable
         Assert.Equal(["logs.csv", "well.toml"], _cli.Files(".").Keys);
         Assert.Empty(Directory.EnumerateDirectories(_cli.Folder.Path));
         Assert.Contains("compressional  DTC     us/ft", result.Output, StringComparison.Ordinal);
-        Assert.Contains("no curve for: caliper, bit_size,", result.Output, StringComparison.Ordinal);
+        Assert.Contains("no curve for: fast_shear, slow_shear, stoneley, caliper, bit_size,", result.Output, StringComparison.Ordinal);
     }
 
     [Fact]

@@ -20,7 +20,7 @@ public sealed class WellFileValueTests
         "well.toml(23,8): error: found \"linar\", expected gaps = one of \"none\", \"linear\", \"hold\"; did you mean \"linear\"?")]
     [InlineData(
         "[survey]", "[logs.curves]\ncompresional = \"DTC\"\n[survey]",
-        "well.toml(12,1): error: found the unknown key \"compresional\" in [logs.curves], expected one of depth, compressional, shear, density, gamma_ray, caliper, bit_size, density_correction, neutron, photoelectric, deep_resistivity, temperature, porosity, shale_volume, facies, true_vertical_depth, vertical_position; did you mean \"compressional\"?")]
+        "well.toml(12,1): error: found the unknown key \"compresional\" in [logs.curves], expected one of depth, compressional, shear, fast_shear, slow_shear, stoneley, density, gamma_ray, caliper, bit_size, density_correction, neutron, photoelectric, deep_resistivity, medium_resistivity, shallow_resistivity, temperature, porosity, shale_volume, facies, true_vertical_depth, vertical_position; did you mean \"compressional\"?")]
     public void Unknown_names_come_with_the_nearest_known_one(string old, string replacement, params string[] expected) =>
         Assert.Equal(expected, WellText.Messages(WellText.With(old, replacement)));
 
