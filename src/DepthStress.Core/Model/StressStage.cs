@@ -1,5 +1,4 @@
 using DepthStress.Core.Logs;
-using DepthStress.Core.Stress;
 
 namespace DepthStress.Core.Model;
 
@@ -19,10 +18,9 @@ internal static class StressStage
     {
         var shmin = table.Write(Property.MinHorizontalStress);
         var shmax = table.Write(Property.MaxHorizontalStress);
-        var elastic = table.Has(Property.YoungsStatic) && table.Has(Property.PoissonStatic) && table.Has(Property.Biot);
         foreach (var run in runs)
         {
-            var (settings, start, n) = (run.Settings.HorizontalStress, run.Start, run.Length);
+            var (start, n) = (run.Start, run.Length);
             if (IsSalt(setup, run.Lithology))
             {
                 table.Read(Property.VerticalStress).Slice(start, n).CopyTo(shmin.Slice(start, n));
@@ -30,19 +28,8 @@ internal static class StressStage
                 continue;
             }
 
-            if (!elastic) continue;
-            var strains = settings.BothStrains();
-            StrainModel.Fill(
-                table.Read(Property.YoungsStatic).Slice(start, n),
-                table.Read(Property.PoissonStatic).Slice(start, n),
-                table.Read(Property.Biot).Slice(start, n),
-                table.Read(Property.VerticalStress).Slice(start, n),
-                table.Read(Property.PorePressure).Slice(start, n),
-                strains?.AlongShmin ?? 0,
-                strains?.AlongShmax ?? 0,
-                shmin.Slice(start, n),
-                shmax.Slice(start, n));
-            if (strains is null) shmax.Slice(start, n).Fill(double.NaN);
+            HorizontalStress.Fill(
+                table, run.Settings, start, n, run.Settings.HorizontalStress.BothStrains(), shmin.Slice(start, n), shmax.Slice(start, n));
         }
     }
 
