@@ -46,6 +46,7 @@ public static class TrackTable
         new("youngs", "Young's modulus",
         [
             new(Column("youngs_dynamic"), "dynamic", new(Gold), new(0, 80), new(0, 12)),
+            new(Column("youngs_static_horizontal"), "along beds", new(Rust), new(0, 80), new(0, 12)),
             new(Column("youngs_static"), "static", new(Ink), new(0, 80), new(0, 12)),
         ]),
         new("poisson", "Poisson's ratio, Biot",

@@ -20,6 +20,7 @@ public readonly record struct Interval(double Low, double High)
         Property.Biot or Property.Porosity or Property.ShaleVolume => new(0, 1),
         // The ends are left out: at one the shear modulus is infinite, at the other the bulk modulus.
         Property.PoissonStatic or Property.PoissonDynamic => new(Math.BitIncrement(-1.0), Math.BitDecrement(0.5)),
+        Property.CrossStiffness => All,
         _ => NotNegative,
     };
 

@@ -179,4 +179,40 @@ public enum Property
 
     /// <summary>Medium resistivity, ohm.m.</summary>
     MediumResistivity,
+
+    /// <summary>Parameter: density of the mud that the Stoneley wave runs in, kg/m3.</summary>
+    MudDensity,
+
+    /// <summary>Parameter: velocity of sound in the mud, m/s.</summary>
+    MudVelocity,
+
+    /// <summary>Parameter: factor of the stiffness along the beds in the modified three-parameter shale.</summary>
+    C11Factor,
+
+    /// <summary>Parameter: C12 over C13 in the modified three-parameter shale.</summary>
+    C12Factor,
+
+    /// <summary>Dynamic shear stiffness in the plane of the beds, C66, Pa.</summary>
+    BedShearStiffness,
+
+    /// <summary>Dynamic stiffness along the beds, C11, Pa; only laws give it.</summary>
+    BedStiffness,
+
+    /// <summary>Dynamic stiffness between along and across the beds, C13, Pa; only laws give it.</summary>
+    CrossStiffness,
+
+    /// <summary>Dynamic Young's modulus along the beds, Pa; missing in isotropic rock, where the other one holds both ways.</summary>
+    YoungsDynamicHorizontal,
+
+    /// <summary>Dynamic Poisson's ratio in the plane of the beds; missing in isotropic rock.</summary>
+    PoissonDynamicHorizontal,
+
+    /// <summary>Static Young's modulus along the beds, Pa; missing in isotropic rock.</summary>
+    YoungsStaticHorizontal,
+
+    /// <summary>Static Poisson's ratio in the plane of the beds; missing in isotropic rock.</summary>
+    PoissonStaticHorizontal,
+
+    /// <summary>Biot's coefficient along the beds; missing in isotropic rock.</summary>
+    BiotHorizontal,
 }

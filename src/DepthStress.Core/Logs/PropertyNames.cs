@@ -47,6 +47,14 @@ public static class PropertyNames
         (Property.DepthBelowSurface, "depth_below_surface", "depth below ground or mudline", Quantities.Dimension.Length),
         (Property.MeanDensityAbove, "mean_density_above", "mean density above the log", Quantities.Dimension.Density),
         (Property.ShallowDensity, "shallow_density", "density above the log", Quantities.Dimension.Density),
+        (Property.Stoneley, "stoneley", "velocity of the Stoneley wave", Quantities.Dimension.Velocity),
+        (Property.MudDensity, "mud_density", "mud density", Quantities.Dimension.Density),
+        (Property.MudVelocity, "mud_velocity", "velocity of sound in the mud", Quantities.Dimension.Velocity),
+        (Property.BedShearStiffness, "c66", "shear stiffness in the plane of the beds", Quantities.Dimension.Pressure),
+        (Property.C11Factor, "c11_factor", "factor of the stiffness along the beds", Quantities.Dimension.None),
+        (Property.BedStiffness, "c11", "stiffness along the beds", Quantities.Dimension.Pressure),
+        (Property.C12Factor, "c12_factor", "C12 over C13", Quantities.Dimension.None),
+        (Property.CrossStiffness, "c13", "stiffness between along and across the beds", Quantities.Dimension.Pressure),
     ];
 
     /// <summary>The property of a name in well files, or null.</summary>

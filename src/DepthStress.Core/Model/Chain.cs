@@ -7,7 +7,7 @@ namespace DepthStress.Core.Model;
 
 /// <summary>
 /// The ordered stages from logs to stresses: conditioning, depth, shale and lithology, missing density and shear,
-/// overburden, pore pressure, rock, horizontal stress. One code path for every kind of run.
+/// overburden, anisotropy, pore pressure, rock, temperature, horizontal stress. One code path for every kind of run.
 /// </summary>
 public static class Chain
 {
@@ -43,10 +43,12 @@ public static class Chain
         }
 
         (logs, var predictions) = PredictionStage.Apply(setup, logs, table, runs, uses, findings);
-        LawColumns.Derive(table, runs);
         if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings, uses) is not { } densityOrigins) return null;
+        logs = AnisotropyStage.Apply(setup, logs, table, runs, uses, findings);
+        LawColumns.Derive(table, runs);
         PressureStage.PorePressure(setup, table, runs, uses);
-        RockStage(table, runs, uses);
+        RockStage(table, runs, uses, findings);
+        TemperatureStage.Apply(setup, table, runs);
         StressStage.Apply(setup, table, runs);
 
         var model = new EarthModel
@@ -59,7 +61,7 @@ public static class Chain
             Lithologies = lithologies,
             Runs = runs,
             DensityOrigins = densityOrigins,
-            StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, lithologies),
+            StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, runs, lithologies),
             LawUses = uses,
             Predictions = predictions,
             Findings = findings,
@@ -81,15 +83,28 @@ public static class Chain
         return table;
     }
 
-    private static void RockStage(PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses)
+    private static void RockStage(PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses, List<Finding> findings)
     {
         if (table.Has(Property.Vp) && table.Has(Property.Vs))
         {
-            DynamicModuli.Fill(
-                table.Read(Property.Vp), table.Read(Property.Vs), table.Read(Property.Density),
-                table.Write(Property.YoungsDynamic), table.Write(Property.PoissonDynamic));
+            var youngs = table.Write(Property.YoungsDynamic);
+            var poisson = table.Write(Property.PoissonDynamic);
+            var vp = table.Read(Property.Vp);
+            var vs = table.Read(Property.Vs);
+            var density = table.Read(Property.Density);
+            foreach (var run in runs.Where(r => !r.Settings.Anisotropy.IsOn))
+            {
+                var (start, n) = (run.Start, run.Length);
+                DynamicModuli.Fill(vp.Slice(start, n), vs.Slice(start, n), density.Slice(start, n), youngs.Slice(start, n), poisson.Slice(start, n));
+            }
         }
 
-        foreach (var slot in LawSlots.Rock) LawStage.Apply(slot, table, runs, uses);
+        foreach (var slot in LawSlots.Rock)
+        {
+            LawStage.Apply(slot, table, runs, uses);
+            if (slot.Property == Property.PoissonStatic) VtiStaticStage.Moduli(table, runs, findings);
+        }
+
+        VtiStaticStage.Biot(table, runs, findings);
     }
 }

@@ -41,6 +41,9 @@ public static class ColumnUnits
     /// <summary>Pressure gradients.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Gradients { get; } = (new(Units.KilopascalPerMetre, 4), new(Units.PsiPerFoot, 5));
 
+    /// <summary>Temperatures.</summary>
+    public static (ColumnUnit Metric, ColumnUnit Field) Temperatures { get; } = (new(Units.Celsius, 2), new(Units.Fahrenheit, 2));
+
     /// <summary>Angles.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Angles { get; } = (new(Units.Degree, 3), new(Units.Degree, 3));
 }

@@ -68,6 +68,13 @@ public static class DepthColumns
         Stored("bedding_angle", "angle between the hole and the normal of the beds", "", Angles, Property.BeddingAngle, "[survey] bedding_dip, dip_azimuth") with { InLas = false },
         Stored("vs_error", "standard error of the shear velocity where it is predicted", "", Velocities, Property.ShearError, "[prediction] shear") with { InLas = false },
         Stored("density_error", "standard error of the density where it is predicted", "", Densities, Property.DensityError, "[prediction] density") with { InLas = false },
+        Layered("youngs_static_vertical", "static Young's modulus across the beds of layered rock", "Es_v", Moduli, Property.YoungsStatic, "[anisotropy]; youngs_static where [anisotropy] is chosen"),
+        Layered("youngs_static_horizontal", "static Young's modulus along the beds of layered rock", "Es_h", Moduli, Property.YoungsStaticHorizontal, "[anisotropy], [moduli] static_youngs"),
+        Layered("poisson_static_vh", "static Poisson's ratio, horizontal strain under vertical load", "nu_v", ColumnUnits.Numbers, Property.PoissonStatic, "[anisotropy]; poisson_static where [anisotropy] is chosen"),
+        Layered("poisson_static_hh", "static Poisson's ratio in the plane of the beds", "nu_hh", ColumnUnits.Numbers, Property.PoissonStaticHorizontal, "[anisotropy], [moduli] static_poisson"),
+        Layered("biot_vertical", "Biot's coefficient across the beds of layered rock", "alpha_v", ColumnUnits.Numbers, Property.Biot, "[anisotropy]; biot where [anisotropy] is chosen"),
+        Layered("biot_horizontal", "Biot's coefficient along the beds of layered rock", "alpha_h", ColumnUnits.Numbers, Property.BiotHorizontal, "[anisotropy], [biot] coefficient"),
+        Stored("temperature", "temperature of the rock", "T", Temperatures, Property.Temperature, "log or [temperature]") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>
@@ -94,6 +101,19 @@ public static class DepthColumns
         string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, Property property, string formula) =>
         new(id, title, symbol, units.Metric, units.Field, formula, (model, start, destination) =>
             Of(model, property, start, destination.Length).CopyTo(destination));
+
+    /// <summary>A property of layered rock; missing where the rock is isotropic.</summary>
+    private static NumberColumn<EarthModel> Layered(
+        string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, Property property, string formula) =>
+        new(id, title, symbol, units.Metric, units.Field, formula, (model, start, destination) =>
+        {
+            Of(model, property, start, destination.Length).CopyTo(destination);
+            var horizontal = Of(model, Property.YoungsStaticHorizontal, start, destination.Length);
+            for (var i = 0; i < destination.Length; i++) destination[i] = double.IsNaN(horizontal[i]) ? double.NaN : destination[i];
+        })
+        {
+            InLas = false,
+        };
 
     private static NumberColumn<EarthModel> Number(
         string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, string formula, ColumnReader<EarthModel> read) =>

@@ -10,10 +10,13 @@ internal static class LawColumns
     private static readonly double[] Missing = [double.NaN];
 
     /// <summary>The inputs of a law for one run of samples.</summary>
-    public static LawInputs For(Law law, PropertyTable table, SettingsRun run)
+    public static LawInputs For(Law law, PropertyTable table, SettingsRun run) => For(law, table, run, p => p);
+
+    /// <summary>The inputs of a law for one run of samples, each from the column that stands in for its own.</summary>
+    public static LawInputs For(Law law, PropertyTable table, SettingsRun run, Func<Property, Property> standIn)
     {
         var inputs = default(LawInputs);
-        foreach (var input in law.Inputs) inputs.Add(Column(input.Property, table, run));
+        foreach (var input in law.Inputs) inputs.Add(Column(standIn(input.Property), table, run));
         return inputs;
     }
 

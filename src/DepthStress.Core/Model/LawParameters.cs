@@ -35,6 +35,10 @@ public static class LawParameters
         new(Property.MineralShearModulus, "[biot] mineral_shear_modulus", s => s.Biot.MineralShearModulus),
         new(Property.MatrixShearVelocity, "[biot] matrix_shear_velocity", s => s.Biot.MatrixShearVelocity),
         new(Property.CriticalPorosity, "[biot] critical_porosity", s => s.Biot.CriticalPorosity),
+        new(Property.MudDensity, "[anisotropy] mud_density", s => s.Anisotropy.MudDensity),
+        new(Property.MudVelocity, "[anisotropy] mud_velocity", s => s.Anisotropy.MudVelocity),
+        new(Property.C11Factor, "[anisotropy] c11_factor", s => s.Anisotropy.C11Factor),
+        new(Property.C12Factor, "[anisotropy] c12_factor", s => s.Anisotropy.C12Factor),
     }.ToDictionary(p => p.Property);
 
     /// <summary>The parameter behind a property, or null when the property is a column of samples.</summary>

@@ -47,9 +47,15 @@ public static class LawSlots
     /// <summary>Where a method of density above the log is recorded; the choice itself may be more than a law.</summary>
     public static LawSlot AboveLog { get; } = new(Property.ShallowDensity, "[overburden] above_log", false, _ => default);
 
+    /// <summary>Where the shear stiffness in the plane of the beds is recorded; the choice itself is a word.</summary>
+    public static LawSlot BedShear { get; } = new(Property.BedShearStiffness, "[anisotropy] c66", false, _ => default);
+
+    /// <summary>Where a model of anisotropy is recorded; the choice itself is a word.</summary>
+    public static LawSlot Anisotropy { get; } = new(Property.BedStiffness, "[anisotropy] model", false, _ => default);
+
     /// <summary>All whose choice is a law.</summary>
     public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, Density, Porosity, Shear, .. Rock.Skip(1)];
 
     /// <summary>Every place of the well file that takes an entry of the catalogue.</summary>
-    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure];
+    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure, BedShear, Anisotropy, Anisotropy with { Property = Property.CrossStiffness }];
 }

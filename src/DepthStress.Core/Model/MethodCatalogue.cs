@@ -27,6 +27,7 @@ public static class MethodCatalogue
         .. BiotMethods.All,
         .. ShallowDensityMethods.All,
         .. PressureMethods.All,
+        .. AnisotropyMethods.All,
     ];
 
     /// <summary>The entry of an id, or null.</summary>

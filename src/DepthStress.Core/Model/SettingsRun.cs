@@ -26,6 +26,8 @@ public readonly record struct SettingsRun(int Start, int End, short Zone, short 
             {
                 settings = zone < 0 ? setup.Settings : setup.Zones[zone].Overrides.Over(setup.Settings);
                 if (lithology >= 0) settings = setup.Lithologies[lithology].Overrides.Over(settings);
+                // Salt has no beds that matter: its stresses are equal.
+                if (StressStage.IsSalt(setup, lithology)) settings = settings with { Anisotropy = new() };
                 resolved.Add((zone, lithology), settings);
             }
 

@@ -58,7 +58,14 @@ public static class SetupCheck
         ReportShale(scope);
         ConditioningCheck.Report(scope);
         PorePressureCheck.Report(scope);
-        ReportStrains(scope);
+        AnisotropyCheck.Report(scope);
+        foreach (var (slot, law) in AnisotropyTally.LawsOf(scope.Settings.Anisotropy))
+        {
+            var source = slot == LawSlots.BedShear ? scope.Settings.Anisotropy.C66.Source : scope.Settings.Anisotropy.Model.Source;
+            ReportRecalled(scope.Setup, slot, law, source.Position, scope.Error);
+        }
+
+        HorizontalStressCheck.Report(scope);
     }
 
     private static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
@@ -96,22 +103,6 @@ public static class SetupCheck
             scope.Error(
                 shale.Shale.Source.Position,
                 UnitSystem.Metric.Show($"found a shale line of {new Quantity(shale.Shale.Value, Dimension.GammaRay)}, expected it above the clean line of {new Quantity(shale.Clean.Value, Dimension.GammaRay)}"));
-        }
-    }
-
-    private static void ReportStrains(CheckScope scope)
-    {
-        var stress = scope.Settings.HorizontalStress;
-        var (along, across) = (stress.StrainAlongShmin, stress.StrainAlongShmax);
-        if (along.IsSet != across.IsSet)
-        {
-            scope.Missing(
-                along.IsSet ? "[horizontal_stress] strain_along_shmax" : "[horizontal_stress] strain_along_shmin",
-                "both strains or neither");
-        }
-        else if (along.IsSet && across.Value < along.Value)
-        {
-            scope.Error(across.Source.Position, "strain_along_shmax is below strain_along_shmin: exchange them and turn shmax_azimuth by 90 deg");
         }
     }
 }

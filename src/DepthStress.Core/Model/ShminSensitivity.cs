@@ -1,11 +1,10 @@
 using DepthStress.Core.Logs;
-using DepthStress.Core.Stress;
 
 namespace DepthStress.Core.Model;
 
 /// <summary>
 /// How much a zone's mean Shmin moves when static Poisson's ratio or Biot's coefficient is chosen otherwise, all else as in
-/// the run: the two choices that logs cannot settle.
+/// the run: the two choices that logs cannot settle. In layered rock both directions are shifted alike.
 /// </summary>
 /// <param name="Zone">Index of the zone, or -1.</param>
 /// <param name="Shmin">Mean Shmin, Pa, over the samples that have one outside salt.</param>
@@ -24,7 +23,7 @@ public sealed record ShminSensitivity(
 
     /// <summary>
     /// Samples where a shifted value would leave its physical range (Poisson's ratio up to 1/2, Biot's coefficient from 0 to
-    /// 1) and was held at the end of it.
+    /// 1) and was held at the end of it, or where layered rock would not be stable with it and Poisson's ratios stayed.
     /// </summary>
     public int Held { get; private init; }
 
@@ -46,12 +45,7 @@ public sealed record ShminSensitivity(
     private static void Add(EarthModel model, in SettingsRun run, Sum sum)
     {
         var shmin = model.Values.Read(Property.MinHorizontalStress);
-        var (along, across) = run.Settings.HorizontalStress.BothStrains() ?? (0, 0);
-        var e = model.Values.Read(Property.YoungsStatic);
-        var nu = model.Values.Read(Property.PoissonStatic);
-        var biot = model.Values.Read(Property.Biot);
-        var sv = model.Values.Read(Property.VerticalStress);
-        var pp = model.Values.Read(Property.PorePressure);
+        var sample = new ShminSample(model, run);
         ReadOnlySpan<(double Poisson, double Biot)> tries = [(-PoissonStep, 0), (PoissonStep, 0), (0, -BiotStep), (0, BiotStep)];
         for (var i = run.Start; i < run.End; i++)
         {
@@ -61,21 +55,11 @@ public sealed record ShminSensitivity(
             var held = false;
             for (var k = 0; k < tries.Length; k++)
             {
-                var (poisson, coefficient) = (nu[i] + tries[k].Poisson, biot[i] + tries[k].Biot);
-                if (tries[k].Poisson != 0) held |= Hold(ref poisson, -1 + PoissonStep, 0.5);
-                else held |= Hold(ref coefficient, 0, 1);
-                sum.Other[k] += StrainModel.Of(e[i], poisson, coefficient, sv[i], pp[i], along, across);
+                sum.Other[k] += sample.With(i, tries[k].Poisson, tries[k].Biot, ref held);
             }
 
             if (held) sum.Held++;
         }
-    }
-
-    private static bool Hold(ref double value, double low, double high)
-    {
-        if (value >= low && value <= high) return false;
-        value = Math.Clamp(value, low, high);
-        return true;
     }
 
     private sealed class Sum

@@ -22,6 +22,9 @@ public sealed record StageSettings
     /// <summary>Porosity.</summary>
     public PorositySettings Porosity { get; init; } = new();
 
+    /// <summary>Anisotropy.</summary>
+    public AnisotropySettings Anisotropy { get; init; } = new();
+
     /// <summary>Static elastic constants.</summary>
     public ModuliSettings Moduli { get; init; } = new();
 
@@ -33,6 +36,9 @@ public sealed record StageSettings
 
     /// <summary>Pore pressure.</summary>
     public PorePressureSettings PorePressure { get; init; } = new();
+
+    /// <summary>Temperature.</summary>
+    public TemperatureSettings Temperature { get; init; } = new();
 
     /// <summary>Horizontal stresses.</summary>
     public HorizontalStressSettings HorizontalStress { get; init; } = new();
@@ -47,10 +53,12 @@ public sealed record StageSettings
             Shale = Shale.Over(below.Shale),
             Prediction = Prediction.Over(below.Prediction),
             Porosity = Porosity.Over(below.Porosity),
+            Anisotropy = Anisotropy.Over(below.Anisotropy),
             Moduli = Moduli.Over(below.Moduli),
             Strength = Strength.Over(below.Strength),
             Biot = Biot.Over(below.Biot),
             PorePressure = PorePressure.Over(below.PorePressure),
+            Temperature = Temperature.Over(below.Temperature),
             HorizontalStress = HorizontalStress.Over(below.HorizontalStress),
         };
     }

@@ -33,8 +33,8 @@ internal static class StressStage
         }
     }
 
-    /// <summary>The weakest origin of the curves each sample's stresses rest on; density alone where only Sv is there.</summary>
-    public static SampleOrigin[] Basis(WellSetup setup, LogTable logs, OriginTrack density, PropertyTable table, ReadOnlySpan<short> lithologies)
+    /// <summary>The weakest origin of the curves each sample's stresses rest on; density alone where only Sv is there or a ratio gives the others.</summary>
+    public static SampleOrigin[] Basis(WellSetup setup, LogTable logs, OriginTrack density, PropertyTable table, IReadOnlyList<SettingsRun> runs, ReadOnlySpan<short> lithologies)
     {
         var basis = new SampleOrigin[table.Count];
         density.Weaken(basis);
@@ -46,6 +46,7 @@ internal static class StressStage
 
         var sv = table.Read(Property.VerticalStress);
         var shmin = table.Read(Property.MinHorizontalStress);
+        foreach (var run in runs.Where(r => r.Settings.HorizontalStress.ByRatio)) vertical.AsSpan(run.Start, run.Length).CopyTo(basis.AsSpan(run.Start));
         for (var i = 0; i < basis.Length; i++)
         {
             if (double.IsNaN(sv[i])) basis[i] = SampleOrigin.None;

@@ -53,4 +53,7 @@ public enum Dimension
 
     /// <summary>Strain, m/m.</summary>
     Strain,
+
+    /// <summary>Linear thermal expansion, 1/K.</summary>
+    ThermalExpansion,
 }

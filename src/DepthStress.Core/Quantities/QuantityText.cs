@@ -85,6 +85,7 @@ public static class QuantityText
         Dimension.GammaRay => "gamma-ray value",
         Dimension.Photoelectric => "photoelectric factor",
         Dimension.TemperatureGradient => "temperature gradient",
+        Dimension.ThermalExpansion => "thermal expansion",
         _ => dimension.ToString().ToLowerInvariant(),
     };
 

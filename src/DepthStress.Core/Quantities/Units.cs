@@ -155,6 +155,12 @@ public static class Units
     /// <summary>Strain as a plain ratio.</summary>
     public static readonly Unit Strain = new("m/m", Dimension.Strain, 1, "m_m", 0, "strain");
 
+    /// <summary>Linear expansion per kelvin, which is per degree Celsius.</summary>
+    public static readonly Unit PerKelvin = new("1/K", Dimension.ThermalExpansion, 1, "per_k", 0, "/K", "1/degC", "/degC", "1/C");
+
+    /// <summary>Linear expansion per degree Fahrenheit.</summary>
+    public static readonly Unit PerFahrenheit = new("1/degF", Dimension.ThermalExpansion, 9.0 / 5, "per_degf", 0, "/degF", "1/F");
+
     /// <summary>Every unit, in the order messages list them.</summary>
     public static IReadOnlyList<Unit> All { get; } =
     [
@@ -163,7 +169,7 @@ public static class Units
         PoundPerGallon, SpecificGravity, Megapascal, Gigapascal, Kilopascal, Pascal, Bar, Psi, Ksi, Mpsi,
         KilopascalPerMetre, MegapascalPerKilometre, PsiPerFoot, BarPerMetre, GammaApi, BarnPerElectron, OhmMetre,
         Celsius, Fahrenheit, Kelvin, CelsiusPer100Metre, FahrenheitPer100Foot, Fraction, Percent, PorosityUnit, Degree,
-        Radian, Millidarcy, MegapascalRootMetre, PsiRootInch, Microstrain, Strain,
+        Radian, Millidarcy, MegapascalRootMetre, PsiRootInch, Microstrain, Strain, PerKelvin, PerFahrenheit,
     ];
 
     /// <summary>The units of a dimension, in table order.</summary>

@@ -11,6 +11,9 @@ public static class BiotMethods
 
     private static readonly LawInput[] Porosity = [InputOf.Porosity.Only(0, 0.99)];
 
+    /// <summary>The coefficient from drained static moduli, which in layered rock is had in both directions.</summary>
+    public static Law Static => BiotModulusMethods.Static;
+
     /// <summary>The entries.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [

@@ -15,15 +15,18 @@ internal static class BiotModulusMethods
 
     private static readonly LawInput MatrixDensity = new("rho_m", Property.MatrixDensity, Units.KilogramPerCubicMetre, new(double.Epsilon, double.PositiveInfinity), Interval.All);
 
+    /// <summary>From drained static moduli.</summary>
+    public static Law Static { get; } = Read("biot-willis-1957-static", "Biot's coefficient from the static bulk modulus",
+        [InputOf.StaticModulus, new("nu_s", Property.PoissonStatic, Units.One, new(-1, 0.499), Interval.All), BulkModulus],
+        "1 - K / Ks, K = Es / (3 (1 - 2 nu_s))", (x, _) => 1 - (ElasticConstants.Bulk(x[0], x[1]) / x[2]),
+        "needs the drained static modulus: a static Poisson's ratio taken from the sonic is undrained and makes the coefficient too low; compare with a law from porosity",
+        "Biot and Willis 1957; Geertsma 1957; Nur and Byerlee 1971; used in Zhang 2019, Applied Petroleum Geomechanics, p. 75",
+        WorkedExample.Computed(0.59459, 5, 22.5, 0.25, 37));
+
     /// <summary>The entries.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [
-        Read("biot-willis-1957-static", "Biot's coefficient from the static bulk modulus",
-            [InputOf.StaticModulus, new("nu_s", Property.PoissonStatic, Units.One, new(-1, 0.499), Interval.All), BulkModulus],
-            "1 - K / Ks, K = Es / (3 (1 - 2 nu_s))", (x, _) => 1 - (ElasticConstants.Bulk(x[0], x[1]) / x[2]),
-            "needs the drained static modulus: a static Poisson's ratio taken from the sonic is undrained and makes the coefficient too low; compare with a law from porosity",
-            "Biot and Willis 1957; Geertsma 1957; Nur and Byerlee 1971; used in Zhang 2019, Applied Petroleum Geomechanics, p. 75",
-            WorkedExample.Computed(0.59459, 5, 22.5, 0.25, 37)),
+        Static,
         Read("dry-rock-sonic-biot", "Biot's coefficient from the sonic of dry rock",
             [InputOf.Density, InputOf.VpMetre, InputOf.VsMetre, BulkModulus],
             "1 - rho (Vp^2 - 4 Vs^2 / 3) / Ks, the modulus in GPa", (x, _) => 1 - (x[0] * ((x[1] * x[1]) - (4 * x[2] * x[2] / 3)) / (1e9 * x[3])),

@@ -74,7 +74,7 @@ internal static class Bindings
             Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
-        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
+        foreach (var key in (ReadOnlySpan<string>)["fluids", "mud", "casing", "observations", "core"]) s.Later(key);
         return bound;
     }
 

@@ -12,6 +12,9 @@ namespace DepthStress.Files.Setup;
 /// <summary>Declares the keys of the sections that a zone or a lithology rule may override.</summary>
 internal static class StageBindings
 {
+    private static readonly (string, HorizontalStressMethod)[] StressMethods =
+        [("strain", HorizontalStressMethod.Strain), ("effective-stress-ratio", HorizontalStressMethod.EffectiveStressRatio)];
+
     /// <summary>All of them.</summary>
     public static StageSettings All(ISection s, StageSettings c) => c with
     {
@@ -19,10 +22,12 @@ internal static class StageBindings
         Shale = s.Table("shale", c.Shale, Shale, "shale volume from gamma ray"),
         Prediction = s.Table("prediction", c.Prediction, Prediction, "shear velocity and density where they are not logged"),
         Porosity = s.Table("porosity", c.Porosity, Porosity, "porosity"),
+        Anisotropy = s.Table("anisotropy", c.Anisotropy, AnisotropyBindings.Anisotropy, "how layered rock differs along and across its beds; without it rock is isotropic"),
         Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),
         Strength = s.Table("strength", c.Strength, Strength, "rock strength"),
         Biot = s.Table("biot", c.Biot, Biot, "Biot's coefficient"),
         PorePressure = s.Table("pore_pressure", c.PorePressure, Bindings.PorePressure, "pore pressure"),
+        Temperature = s.Table("temperature", c.Temperature, AnisotropyBindings.Temperature, "temperature of the rock, for thermal stress"),
         HorizontalStress = s.Table("horizontal_stress", c.HorizontalStress, HorizontalStress, "horizontal stresses"),
     };
 
@@ -73,6 +78,10 @@ internal static class StageBindings
 
     private static HorizontalStressSettings HorizontalStress(ISection s, HorizontalStressSettings c) => c with
     {
+        Method = s.Choice("method", c.Method, StressMethods, "strain: elastic rock between strained sides; effective-stress-ratio: Shmin = Pp + ratio (Sv - Pp), where strains and elastic constants do not enter"),
+        Ratio = s.Number("ratio", c.Ratio, new Interval(0, 5), "effective-stress-ratio: effective Shmin over effective vertical stress"),
+        RatioShmax = s.Number("ratio_shmax", c.RatioShmax, new Interval(0, 10), "effective-stress-ratio: the same for SHmax, which stays empty without"),
+        ThermalExpansion = s.Quantity("thermal_expansion", c.ThermalExpansion, Sign.Positive, Dimension.ThermalExpansion, "strain: linear thermal expansion along the beds; rock warmer than [temperature] reference gains horizontal stress, cooler rock loses it"),
         StrainAlongShmin = s.Quantity("strain_along_shmin", c.StrainAlongShmin, Sign.Any, Dimension.Strain, "tectonic strain along Shmin, compression positive"),
         StrainAlongShmax = s.Quantity("strain_along_shmax", c.StrainAlongShmax, Sign.Any, Dimension.Strain, "tectonic strain along SHmax, compression positive"),
         ShmaxAzimuth = s.Quantity("shmax_azimuth", c.ShmaxAzimuth, Sign.Any, Dimension.Angle, "azimuth of SHmax from north"),

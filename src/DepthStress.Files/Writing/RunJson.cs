@@ -54,6 +54,7 @@ public static class RunJson
             ["plausibility"] = Array(Plausibility.Of(model).Select(s => (JsonNode)units.Show(s))),
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
+            ["layered_rock"] = Array(VtiZone.Of(model).Select(z => Layered(model, z))),
             ["predictions"] = Array(model.Predictions.Select(Predicted)),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
@@ -122,6 +123,16 @@ public static class RunJson
             })),
         };
     }
+
+    private static JsonObject Layered(EarthModel model, VtiZone zone) => new()
+    {
+        ["zone"] = model.ZoneName(zone.Zone),
+        ["samples"] = zone.Samples,
+        ["youngs_static_vertical_gpa"] = Number(Units.Gigapascal.FromSi(zone.Vertical)),
+        ["youngs_static_horizontal_gpa"] = Number(Units.Gigapascal.FromSi(zone.Horizontal)),
+        ["c13_over_c33_dynamic"] = Number(zone.DynamicRatio),
+        ["c13_over_c33_static"] = Number(zone.StaticRatio),
+    };
 
     private static JsonObject Predicted(Prediction prediction)
     {

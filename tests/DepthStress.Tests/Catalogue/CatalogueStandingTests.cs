@@ -148,6 +148,10 @@ public class CatalogueStandingTests
         ["barker-wood-1997"] = Standing.FromMemory, // coefficients recalled
         ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
         ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
+        ["white-stoneley-c66"] = Standing.FromMemory,
+        ["annie-1996-shale"] = Standing.FromMemory, // delta = 0 read in the abstract, the second link recalled
+        ["modified-annie-c11"] = Standing.FromMemory,
+        ["modified-annie-c13"] = Standing.FromMemory,
     };
 
     [Fact]

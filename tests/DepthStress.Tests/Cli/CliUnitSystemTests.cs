@@ -14,6 +14,7 @@ public sealed class CliUnitSystemTests : IDisposable
         ("_mpa", "_psi", 1e6 / 6894.757293168361),
         ("_gpa", "_mpsi", 1e3 / 6894.757293168361),
         ("_kpa_m", "_psi_ft", 1e3 * 0.3048 / 6894.757293168361),
+        ("_degc", "_degf", 1.8),
         ("_emw_g_cm3", "_emw_lb_gal", 1e3 * 231 * Inch * Inch * Inch / 0.45359237),
     ];
 
@@ -49,6 +50,7 @@ public sealed class CliUnitSystemTests : IDisposable
         var unit = Factors.Where(f => from.EndsWith(f.Metric, StringComparison.Ordinal) && to.EndsWith(f.Field, StringComparison.Ordinal)).ToList();
         if (from != to) Assert.NotEmpty(unit);
         var factor = from == to ? 1 : unit.MaxBy(f => f.Metric.Length).Factor;
+        var zero = to.EndsWith("_degf", StringComparison.Ordinal) ? 32 : 0;
         for (var r = 1; r < metric.Length; r++)
         {
             var (a, b) = (metric[r][column], field[r][column]);
@@ -59,7 +61,7 @@ public sealed class CliUnitSystemTests : IDisposable
             }
 
             var room = 0.5000001 * ((factor * Last(a)) + Last(b));
-            Assert.True(Math.Abs((x * factor) - y) <= room, $"{from} {a} is not {to} {b} at {metric[r][0]}");
+            Assert.True(Math.Abs((x * factor) + zero - y) <= room, $"{from} {a} is not {to} {b} at {metric[r][0]}");
         }
     }
 

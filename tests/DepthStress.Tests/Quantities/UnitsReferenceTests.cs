@@ -57,6 +57,8 @@ public class UnitsReferenceTests
         { "psi.in0.5", Toughness, 1098.8434941, "root of the 1207457.0245 Pa2.m that units 2.22 prints for psi2.in" },
         { "microstrain", Strain, 1.000000e-06, "SI prefix" },
         { "m/m", Strain, 1.000000, "trivial" },
+        { "1/K", ThermalExpansion, 1.000000, "trivial" },
+        { "1/degF", ThermalExpansion, 1.800000, "a degree Fahrenheit is 5/9 K, SP 811 B.8" },
     };
 
     // Tolerance: the sources above carry ten digits or are exact.

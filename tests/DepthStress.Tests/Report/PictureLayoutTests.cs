@@ -49,7 +49,7 @@ public class PictureLayoutTests
     [InlineData(UnitSystem.Field)]
     public void All_tracks_fit_on_A4_without_a_shortened_text(UnitSystem units)
     {
-        using var sheet = TracksPicture.Draw(PictureModels.Full(), units, TrackTable.All);
+        using var sheet = TracksPicture.Draw(PictureModels.Full(layered: true), units, TrackTable.All);
         Assert.Equal(PageFrame.LongSide, sheet.Width, 0.1); // placed to a tenth of 1/96 inch
         Assert.Equal(PageFrame.ShortSide, sheet.Height);
         Assert.DoesNotContain(sheet.Texts, t => t.Text.Contains('\u2026', StringComparison.Ordinal));

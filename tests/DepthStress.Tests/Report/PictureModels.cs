@@ -4,6 +4,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
+using DepthStress.Core.Rock;
 
 namespace DepthStress.Tests.Report;
 
@@ -13,10 +14,10 @@ internal static class PictureModels
     private static readonly SettingSource Here = new(SettingKind.WellFile, SourcePosition.None);
 
     /// <summary>A deviated well with every curve, gaps, filled density and zones.</summary>
-    public static EarthModel Full(int samples = 3000, string name = "Example 1", IReadOnlyList<Zone>? zones = null, bool strains = true)
+    public static EarthModel Full(int samples = 3000, string name = "Example 1", IReadOnlyList<Zone>? zones = null, bool strains = true, bool layered = false)
     {
         var md = Depths(samples, 900, 3400);
-        return Run(name, md, zones ?? Zones(), strains, Deviated(),
+        return Run(name, md, zones ?? (layered ? [.. Zones().Select(Layered)] : Zones()), strains, Deviated(),
             ("gamma_ray", Shape(md, i => 75 + (45 * Wave(md[i], 260)) + (22 * Noise(i)))),
             ("caliper", Shape(md, i => 0.0254 * (8.6 + (Wave(md[i], 400) > 0.8 ? 9 * Math.Abs(Noise(i)) : 0.15 * Noise(i))))),
             ("bit_size", Shape(md, i => 0.0254 * (md[i] < 1500 ? 12.25 : 8.5))),
@@ -42,6 +43,15 @@ internal static class PictureModels
         Zone("apricot shale", 900), Zone("bracken sand", 1420), Zone("cinder marl", 1610), Zone("thin streak", 1622),
         Zone("dapple shale", 1630), Zone("elm limestone", 2450), Zone("fern shale", 2900),
     ];
+
+    /// <summary>The zone with beds whose parameters are invented.</summary>
+    private static Zone Layered(Zone zone) => zone with
+    {
+        Overrides = zone.Overrides with
+        {
+            Anisotropy = new() { Model = Set(AnisotropyModel.Thomsen), Epsilon = Set(0.1), Gamma = Set(0.1), Delta = Set(0.05), AlongHole = Set(false) },
+        },
+    };
 
     private static EarthModel Run(
         string name, double[] md, IReadOnlyList<Zone> zones, bool strains, Trajectory path, params (string Role, double[] Values)[] curves)

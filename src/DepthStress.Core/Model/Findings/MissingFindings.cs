@@ -17,7 +17,7 @@ internal static class MissingFindings
         var usable = model.Usable;
         var trend = Lacks(model, s => s.PorePressure.Method is not { IsSet: true, Value: PorePressureMethod.EatonSonic });
         var unsettled = Lacks(model, s => s.PorePressure.Method.IsSet);
-        Finding[] free = model.Runs.Any(r => !r.Settings.HorizontalStress.StrainAlongShmax.IsSet)
+        Finding[] free = model.Runs.Any(r => !r.Settings.HorizontalStress.ConstrainsShmax)
             ? [Finding.General(Severity.Note, $"SHmax is empty where nothing constrains it: set strain_along_shmin and strain_along_shmax")]
             : [];
         return
