@@ -35,6 +35,17 @@ public sealed class HorizontalStressTests
         Assert.All(shmin.Concat(shmax), s => Assert.True(double.IsNaN(s)));
     }
 
+    [Fact]
+    public void Filling_allocates_nothing()
+    {
+        var (table, settings) = (Table(9), new StageSettings());
+        var (shmin, shmax) = (new double[9], new double[9]);
+        HorizontalStress.Fill(table, settings, 0, 9, (1e-4, 3e-4), shmin, shmax); // compiled now
+        var before = GC.GetAllocatedBytesForCurrentThread();
+        for (var k = 0; k < 100; k++) HorizontalStress.Fill(table, settings, 0, 9, (1e-4 * k, 3e-4 * k), shmin, shmax);
+        Assert.Equal(0, GC.GetAllocatedBytesForCurrentThread() - before);
+    }
+
     private static PropertyTable Table(int n)
     {
         var table = new PropertyTable(n);
