@@ -13,8 +13,13 @@ public static class SetupCheck
     {
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(diagnostics);
-        // Where the path comes from a curve, zones are checked once it is known.
-        if (!setup.PathCurve.IsSet) ZoneCheck.Report(setup, diagnostics);
+        // Where the path comes from a curve, what lies along it is checked once it is known.
+        if (!setup.PathCurve.IsSet)
+        {
+            ZoneCheck.Report(setup, diagnostics);
+            ObservationCheck.Report(setup, diagnostics);
+        }
+
         ConditioningCheck.ReportOwners(setup, diagnostics);
         foreach (var (rule, overrides) in setup.Lithologies)
         {

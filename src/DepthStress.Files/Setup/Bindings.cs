@@ -14,7 +14,7 @@ internal static class Bindings
 {
     private static readonly Interval FractionRange = new(0, 1);
 
-    private static readonly (string, DepthKind)[] DepthKinds =
+    public static readonly (string, DepthKind)[] DepthKinds =
         [("md", DepthKind.Measured), ("tvd", DepthKind.TrueVertical), ("tvdss", DepthKind.TrueVerticalSubsea)];
 
     private static readonly (string, DatumKind)[] Datums =
@@ -71,10 +71,13 @@ internal static class Bindings
             Lithologies = s.Tables("lithology", w.Lithologies, Lithology, new(), "rules that choose settings by rock inside zones; the first that holds decides"),
             Settings = StageBindings.All(s, w.Settings),
             Overburden = s.Table("overburden", w.Overburden, Overburden, "vertical stress where density is not logged"),
+            Mud = s.Table("mud", w.Mud, HoleBindings.Mud, "the mud the hole was drilled with"),
+            Casing = s.Table("casing", w.Casing, HoleBindings.Casing, "the casing strings"),
+            Observations = s.Table("observations", w.Observations, HoleBindings.Observations, "tests made in the hole"),
             Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
-        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
+        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "temperature", "core"]) s.Later(key);
         return bound;
     }
 
@@ -249,7 +252,7 @@ internal static class Bindings
         return new PressurePoint(depth.IsSet ? depth.Value : double.NaN, pressure.IsSet ? pressure.Value : double.NaN);
     }
 
-    private static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
+    public static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
 
     private static TrendPoint TrendPoint(ISection s, TrendPoint p, SettingSource source)
     {

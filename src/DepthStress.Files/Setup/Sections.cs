@@ -1,3 +1,4 @@
+using DepthStress.Core.Borehole;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
@@ -222,6 +223,16 @@ public sealed record OutputSection
     public Setting<UnitSystem> Units { get; init; } = Setting.Default(UnitSystem.Metric);
 }
 
+/// <summary>The [observations] section.</summary>
+public sealed record ObservationsSection
+{
+    /// <summary>The files, relative to the well file.</summary>
+    public Setting<IReadOnlyList<string>> Files { get; init; }
+
+    /// <summary>How they are understood.</summary>
+    public ObservationSettings Settings { get; init; } = new();
+}
+
 /// <summary>A whole well file as it was bound, before it is put together.</summary>
 public sealed record WellFileSections
 {
@@ -248,6 +259,15 @@ public sealed record WellFileSections
 
     /// <summary>The [overburden] section.</summary>
     public OverburdenSettings Overburden { get; init; } = new();
+
+    /// <summary>The [mud] section.</summary>
+    public MudSettings Mud { get; init; } = new();
+
+    /// <summary>The [casing] section.</summary>
+    public CasingSettings Casing { get; init; } = new();
+
+    /// <summary>The [observations] section.</summary>
+    public ObservationsSection Observations { get; init; } = new();
 
     /// <summary>The [layers] section.</summary>
     public LayerSettings Layers { get; init; } = new();

@@ -38,6 +38,7 @@ internal static class SetupAssembly
         CheckPoints(sections, wrong, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
+        HoleAssembly.Check(sections, wrong, diagnostics);
         return new WellSetup
         {
             Position = file,
@@ -51,6 +52,10 @@ internal static class SetupAssembly
             Lithologies = lithologies,
             Settings = sections.Settings,
             Overburden = sections.Overburden,
+            Observations = HoleAssembly.Observations(sections, folder, inputs, wrong, file, diagnostics),
+            ObservationSettings = sections.Observations.Settings,
+            Mud = HoleAssembly.Whole(sections.Mud),
+            Casing = HoleAssembly.Whole(sections.Casing),
             AcceptUnverified = sections.AcceptUnverified.Value,
         };
     }

@@ -46,7 +46,29 @@ internal static class WellFile
             text.Add(WellFileZones.Zone(formation));
         text.Add(Choices);
         text.Add(PressureTable(truth));
+        text.Add(Hole(plan));
         text.Add(Guesses);
+    }
+
+    /// <summary>The casing, and the mud that was made heavier on the way down.</summary>
+    private static string Hole(WellPlan plan)
+    {
+        string Md(double depth) => Quantity(Math.Round(depth), 0, "m");
+        return $$"""
+            [mud]
+            depth_kind = "md"
+            density = [
+                { top = "0 m", density = "1.06 g/cm3" },
+                { top = "{{Md(plan.Formations[3].Top)}}", density = "1.25 g/cm3" },     # gas in the dapple shale
+                { top = "{{Md(plan.Formations[5].Top)}}", density = "1.40 g/cm3" },
+            ]
+
+            [casing]
+            depth_kind = "md"
+            shoes = [{ depth = "{{Md(plan.FirstMd)}}" }, { depth = "2105 m" }]
+
+
+            """;
     }
 
     private static string Spliced(Curve curve, string upper, string lower, string splice) => $$"""
@@ -131,7 +153,11 @@ internal static class WellFile
         [layers]
         max_thickness = "150 m"
 
-        # The tests made in the well are in quillback-4-observations.csv, the laboratory table of the plugs in quillback-4-core.csv.
+        [observations]
+        files = ["quillback-4-observations.csv"]
+        breakdown_fluid = "non-penetrating"  # small volumes of mud between packers, through its filter cake
+
+        # The laboratory table of the plugs is in quillback-4-core.csv.
 
         """;
 }
