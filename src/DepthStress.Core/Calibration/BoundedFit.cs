@@ -21,6 +21,9 @@ public static class BoundedFit
     /// <summary>Changes of the sum of squares below this share of it are rounding.</summary>
     private const double Rounding = 1e-13;
 
+    /// <summary>So are changes below this: residuals are in standard deviations.</summary>
+    private const double Nothing = 1e-16;
+
     private const double FirstDamping = 1e-4, LeastDamping = 1e-9, MostDamping = 1e12;
 
     /// <summary>Finds the parameters within bounds with the least sum of squared residuals, from the start downhill.</summary>
@@ -87,8 +90,8 @@ public static class BoundedFit
             problem.Residuals(moved, trial);
             var reached = Sum(trial, roots);
             var promised = sum - left;
-            var isRounding = promised <= Rounding * sum;
-            if (!(isRounding ? reached <= sum * (1 + Rounding) : sum - reached >= 1e-4 * promised))
+            var isRounding = promised <= (Rounding * sum) + Nothing;
+            if (!(isRounding ? reached <= (sum * (1 + Rounding)) + Nothing : sum - reached >= 1e-4 * promised))
             {
                 // Nothing more to gain that is not rounding: the point stays.
                 if (isRounding && damping == 0) converged = true;

@@ -53,9 +53,10 @@ public sealed record ProfileInterval(double Low, double High, bool OpenBelow, bo
             if (reachesBound) outer = bound;
             if (Excess(outer) >= 0)
             {
-                // The ends are known to a hundred-thousandth of the last step, far below what an interval means.
-                var found = Brent.TryFindRoot(Excess, Math.Min(inner, outer), Math.Max(inner, outer), 1e-7 * Math.Abs(outer - middle), 200, out var root);
-                return (found ? root : outer, false);
+                // In shares of the last step, whose size depends on the parameter's unit.
+                var from = inner;
+                var found = Brent.TryFindRoot(share => Excess(from + (share * (outer - from))), 0, 1, 1e-9, 200, out var root);
+                return (found ? from + (root * (outer - from)) : outer, false);
             }
 
             if (reachesBound) return (bound, true);
