@@ -45,7 +45,10 @@ public static class Chain
         (logs, var predictions) = PredictionStage.Apply(setup, logs, table, runs, uses, findings);
         LawColumns.Derive(table, runs);
         if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings, uses) is not { } densityOrigins) return null;
-        PressureStage.PorePressure(setup, table, runs, uses);
+        LawStage.Apply(LawSlots.Porosity, table, runs, uses);
+        var pressure = PressureStage.PorePressure(setup, table, runs, uses);
+        if (!pressure.Report(diagnostics, setup.Position)) return null;
+        findings.AddRange(pressure.Findings);
         RockStage(table, runs, uses);
         StressStage.Apply(setup, table, runs);
 
@@ -62,6 +65,7 @@ public static class Chain
             StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, lithologies),
             LawUses = uses,
             Predictions = predictions,
+            Trends = pressure.Trends,
             Findings = findings,
         };
         return model with { Findings = FindingRules.Sort(findings.Concat(FindingRules.All.SelectMany(rule => rule(model)))) };
@@ -90,6 +94,6 @@ public static class Chain
                 table.Write(Property.YoungsDynamic), table.Write(Property.PoissonDynamic));
         }
 
-        foreach (var slot in LawSlots.Rock) LawStage.Apply(slot, table, runs, uses);
+        foreach (var slot in LawSlots.Rock.Skip(1)) LawStage.Apply(slot, table, runs, uses);
     }
 }

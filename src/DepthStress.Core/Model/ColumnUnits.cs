@@ -26,6 +26,9 @@ public static class ColumnUnits
     /// <summary>Fractions of volume.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 4), new(Units.Fraction, 4));
 
+    /// <summary>Resistivities.</summary>
+    public static (ColumnUnit Metric, ColumnUnit Field) Resistivities { get; } = (new(Units.OhmMetre, 4), new(Units.OhmMetre, 4));
+
     /// <summary>Pure numbers.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Numbers { get; } = (new(Units.One, 5), new(Units.One, 5));
 

@@ -68,6 +68,9 @@ public static class DepthColumns
         Stored("bedding_angle", "angle between the hole and the normal of the beds", "", Angles, Property.BeddingAngle, "[survey] bedding_dip, dip_azimuth") with { InLas = false },
         Stored("vs_error", "standard error of the shear velocity where it is predicted", "", Velocities, Property.ShearError, "[prediction] shear") with { InLas = false },
         Stored("density_error", "standard error of the density where it is predicted", "", Densities, Property.DensityError, "[prediction] density") with { InLas = false },
+        Stored("normal_slowness", "compressional slowness of the normal trend", "dt_n", Slownesses, Property.NormalSlowness, "[pore_pressure] trend or normal_trend") with { InLas = false },
+        Stored("normal_resistivity", "resistivity of the normal trend", "R_n", Resistivities, Property.NormalResistivity, "[pore_pressure.normal_trend]") with { InLas = false },
+        Stored("normal_porosity", "porosity of the normal trend", "phi_n", Fractions, Property.NormalPorosity, "[pore_pressure.normal_trend]") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>

@@ -35,6 +35,15 @@ public static class LawParameters
         new(Property.MineralShearModulus, "[biot] mineral_shear_modulus", s => s.Biot.MineralShearModulus),
         new(Property.MatrixShearVelocity, "[biot] matrix_shear_velocity", s => s.Biot.MatrixShearVelocity),
         new(Property.CriticalPorosity, "[biot] critical_porosity", s => s.Biot.CriticalPorosity),
+        new(Property.TrendSurfaceSlowness, "[pore_pressure.normal_trend] surface_slowness", s => s.PorePressure.NormalTrend.SurfaceSlowness),
+        new(Property.TrendMatrixSlowness, "[pore_pressure.normal_trend] matrix_slowness", s => s.PorePressure.NormalTrend.MatrixSlowness),
+        new(Property.TrendSurfacePorosity, "[pore_pressure.normal_trend] surface_porosity", s => s.PorePressure.NormalTrend.SurfacePorosity),
+        new(Property.TrendScaleLength, "[pore_pressure.normal_trend] scale_length", s => s.PorePressure.NormalTrend.ScaleLength),
+        new(Property.BowersFactor, "[pore_pressure] bowers_a", s => s.PorePressure.BowersFactor),
+        new(Property.BowersExponent, "[pore_pressure] bowers_b", s => s.PorePressure.BowersExponent),
+        new(Property.BowersUnloading, "[pore_pressure] bowers_u", s => s.PorePressure.BowersUnloading),
+        new(Property.BowersMaxVelocity, "[pore_pressure] maximum_velocity", s => s.PorePressure.BowersMaxVelocity),
+        new(Property.CompactionStress, "[pore_pressure] compaction_stress", s => s.PorePressure.CompactionStress),
     }.ToDictionary(p => p.Property);
 
     /// <summary>The parameter behind a property, or null when the property is a column of samples.</summary>

@@ -29,7 +29,7 @@ public static class LawSlots
     /// <summary>What is predicted where it is not logged, in the order in which it is.</summary>
     public static IReadOnlyList<LawSlot> Prediction { get; } = [Density, Shear];
 
-    /// <summary>The rock properties.</summary>
+    /// <summary>The rock properties; the first, porosity, is had before pore pressure, which may rest on it.</summary>
     public static IReadOnlyList<LawSlot> Rock { get; } =
     [
         Porosity,

@@ -34,6 +34,9 @@ public sealed record StageSettings
     /// <summary>Pore pressure.</summary>
     public PorePressureSettings PorePressure { get; init; } = new();
 
+    /// <summary>Fluids and their contacts.</summary>
+    public FluidSettings Fluids { get; init; } = new();
+
     /// <summary>Horizontal stresses.</summary>
     public HorizontalStressSettings HorizontalStress { get; init; } = new();
 
@@ -51,6 +54,7 @@ public sealed record StageSettings
             Strength = Strength.Over(below.Strength),
             Biot = Biot.Over(below.Biot),
             PorePressure = PorePressure.Over(below.PorePressure),
+            Fluids = Fluids.Over(below.Fluids),
             HorizontalStress = HorizontalStress.Over(below.HorizontalStress),
         };
     }

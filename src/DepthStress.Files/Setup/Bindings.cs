@@ -14,13 +14,15 @@ internal static class Bindings
 {
     private static readonly Interval FractionRange = new(0, 1);
 
-    private static readonly (string, DepthKind)[] DepthKinds =
+    /// <summary>The words for kinds of depth.</summary>
+    public static readonly (string, DepthKind)[] DepthKinds =
         [("md", DepthKind.Measured), ("tvd", DepthKind.TrueVertical), ("tvdss", DepthKind.TrueVerticalSubsea)];
 
     private static readonly (string, DatumKind)[] Datums =
         [("rotary table", DatumKind.RotaryTable), ("ground", DatumKind.Ground), ("sea level", DatumKind.SeaLevel)];
 
-    private static readonly (string, DepthReference)[] References =
+    /// <summary>The words for reference levels.</summary>
+    public static readonly (string, DepthReference)[] References =
     [
         ("rotary table", DepthReference.Datum), ("ground", DepthReference.Ground),
         ("sea surface", DepthReference.SeaSurface), ("mudline", DepthReference.Mudline),
@@ -47,12 +49,6 @@ internal static class Bindings
     private static readonly (string, RepeatedDepth)[] RepeatedDepths =
         [("error", RepeatedDepth.Error), ("first", RepeatedDepth.First), ("mean", RepeatedDepth.Mean)];
 
-    private static readonly (string, PorePressureMethod)[] PressureWords =
-    [
-        ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
-        (PressureMethods.EatonSonic.Id, PorePressureMethod.EatonSonic),
-    ];
-
     private static readonly (string, DensityFill)[] GapFills =
         [("none", new(DensityFillKind.None)), ("linear", new(DensityFillKind.Linear)), ("hold", new(DensityFillKind.Hold))];
 
@@ -74,7 +70,7 @@ internal static class Bindings
             Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
-        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
+        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
         return bound;
     }
 
@@ -221,42 +217,6 @@ internal static class Bindings
         Right = s.Text("right", c.Right, "value at the right edge of the track, with its unit"),
         Position = s.Position,
     };
-
-    /// <summary>The [pore_pressure] section.</summary>
-    public static PorePressureSettings PorePressure(ISection s, PorePressureSettings p)
-    {
-        var points = s.Tables(
-            "points", p.Points.IsSet ? p.Points.Value : [], (t, point) => Point(t, point, p.Points.Source), new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
-        var trend = s.Tables(
-            "trend", p.Trend.IsSet ? p.Trend.Value : [], (t, point) => TrendPoint(t, point, p.Trend.Source), new(double.NaN, double.NaN), "trend methods: slowness of normally compacted shale at depths below the ground or mudline");
-        return p with
-        {
-            Method = s.Choice("method", p.Method, PressureWords, "how pore pressure is had"),
-            FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic and trend methods: density of the pore fluid"),
-            Gradient = s.FluidDensity("gradient", p.Gradient, "gradient: pressure per depth, or the density of such a fluid"),
-            Reference = s.Choice("reference", p.Reference, References, "gradient: what depth counts from"),
-            Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, s.SourceOf("points")) : p.Points,
-            DepthKind = s.Choice("depth_kind", p.DepthKind, DepthKinds, "table: the kind of depth of its points"),
-            Trend = trend.Count > 0 ? new Setting<IReadOnlyList<TrendPoint>>(trend, s.SourceOf("trend")) : p.Trend,
-            Exponent = s.Number("exponent", p.Exponent, new Interval(0.1, 10), "trend methods: exponent, when it is not the published one"),
-        };
-    }
-
-    private static PressurePoint Point(ISection s, PressurePoint p, SettingSource source)
-    {
-        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth of the point");
-        var pressure = s.Quantity("pressure", Known(p.Pressure, source), Sign.NotNegative, Dimension.Pressure, "pore pressure there");
-        return new PressurePoint(depth.IsSet ? depth.Value : double.NaN, pressure.IsSet ? pressure.Value : double.NaN);
-    }
-
-    private static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
-
-    private static TrendPoint TrendPoint(ISection s, TrendPoint p, SettingSource source)
-    {
-        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth below the ground or mudline");
-        var slowness = s.Quantity("slowness", Known(p.Slowness, source), Sign.Positive, Dimension.Slowness, "slowness of normally compacted shale there");
-        return new TrendPoint(depth.IsSet ? depth.Value : double.NaN, slowness.IsSet ? slowness.Value : double.NaN);
-    }
 
     private static DensityFill Stated(double density) => new(DensityFillKind.Stated, density);
 

@@ -22,7 +22,8 @@ internal static class StageBindings
         Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),
         Strength = s.Table("strength", c.Strength, Strength, "rock strength"),
         Biot = s.Table("biot", c.Biot, Biot, "Biot's coefficient"),
-        PorePressure = s.Table("pore_pressure", c.PorePressure, Bindings.PorePressure, "pore pressure"),
+        PorePressure = s.Table("pore_pressure", c.PorePressure, PressureBindings.PorePressure, "pore pressure"),
+        Fluids = s.Table("fluids", c.Fluids, PressureBindings.Fluids, "fluids in the pores and their contacts, for method or sands = \"fluid line\""),
         HorizontalStress = s.Table("horizontal_stress", c.HorizontalStress, HorizontalStress, "horizontal stresses"),
     };
 

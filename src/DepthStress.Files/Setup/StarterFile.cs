@@ -94,8 +94,17 @@ public static class StarterFile
             below_log = "hold"                    # below the last density its value is held
 
             [pore_pressure]
-            # method = "hydrostatic"              # <- hydrostatic, gradient (with gradient, reference) or table (with points, depth_kind)
+            # method = "hydrostatic"              # <- hydrostatic, gradient (with gradient, reference), table (with points, depth_kind), fluid line (with [fluids]) or one of: depthstress methods --for pp
             fluid_density = "1.03 g/cm3"
+            # shale_cutoff = 0.5                  # methods of shale: least shale volume of shale
+            # sands = "shale"                     # and what other rock takes: shale (from the shale around), table or fluid line
+            # honour_tests = true                 # moves each zone to its measured formation pressures
+
+            # [pore_pressure.normal_trend]        # trend methods: where shale is normally compacted; parameters not given here are fitted there
+            # top = "1000 m"
+            # base = "2000 m"
+            # depth_kind = "tvd"
+            # matrix_slowness = "65 us/ft"
 
             [horizontal_stress]
             # strain_along_shmin = "0 microstrain"     # tectonic strains, compression positive; without them SHmax stays empty

@@ -148,6 +148,13 @@ public class CatalogueStandingTests
         ["barker-wood-1997"] = Standing.FromMemory, // coefficients recalled
         ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
         ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
+        ["eaton-1975-resistivity"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
+        ["bowers-1995-loading"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.15; A and B are the user's
+        ["bowers-1995-unloading"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.16; A, B, U and V_max are the user's
+        ["zhang-2011-porosity"] = Standing.Confirmed, // abstract of Zhang 2013
+        ["zhang-2011-sonic"] = Standing.Confirmed, // abstract of Zhang 2013
+        ["equivalent-depth-sonic"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.14
+        ["compaction-porosity"] = Standing.Identity, // algebra
     };
 
     [Fact]

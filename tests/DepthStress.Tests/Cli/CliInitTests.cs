@@ -37,7 +37,7 @@ public sealed class CliInitTests : IDisposable
             [
                 "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level",
                 "well.toml: error: [well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them",
-                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
+                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table, fluid line, eaton-1975-sonic, eaton-1975-resistivity, bowers-1995-loading, bowers-1995-unloading and others, see \"depthstress methods --for pp\"",
             ],
             check.Error.Split('\n', StringSplitOptions.RemoveEmptyEntries));
     }

@@ -10,7 +10,7 @@ public sealed class WellFileValueTests
         "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level")]
     [InlineData(
         "[biot]", "[bito]",
-        "well.toml(18,2): error: found the unknown section [bito], expected one of accept_unverified, well, logs, survey, zones, lithology, conditioning, shale, prediction, porosity, moduli, strength, biot, pore_pressure, horizontal_stress, overburden, layers, output; did you mean \"biot\"?",
+        "well.toml(18,2): error: found the unknown section [bito], expected one of accept_unverified, well, logs, survey, zones, lithology, conditioning, shale, prediction, porosity, moduli, strength, biot, pore_pressure, fluids, horizontal_stress, overburden, layers, output; did you mean \"biot\"?",
         "well.toml: error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"")]
     [InlineData(
         "\"rotary table\"", "\"rotary tabel\"",
