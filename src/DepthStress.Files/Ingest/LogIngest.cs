@@ -36,7 +36,7 @@ public static class LogIngest
         }
 
         if (diagnostics.HasErrors) return null;
-        var roles = RoleAssignment.Assign(section, files, diagnostics);
+        var roles = RoleAssignment.Assign(section, files, diagnostics).ToList();
         var depths = files.ConvertAll(f => Depths(f, section, diagnostics));
         if (diagnostics.HasErrors) return null;
 
@@ -47,6 +47,7 @@ public static class LogIngest
             if (Curve(role, files, depths, grid, diagnostics) is { } curve) curves.Add(curve);
         }
 
+        ShearServing.Choose(section, roles, curves, diagnostics);
         return diagnostics.HasErrors ? null : new IngestedLogs(new LogTable(grid, curves), files, roles);
     }
 

@@ -47,6 +47,9 @@ internal static class Bindings
     private static readonly (string, RepeatedDepth)[] RepeatedDepths =
         [("error", RepeatedDepth.Error), ("first", RepeatedDepth.First), ("mean", RepeatedDepth.Mean)];
 
+    private static readonly (string, ShearChoice)[] ShearChoices =
+        [("fast", ShearChoice.Fast), ("slow", ShearChoice.Slow), ("mean", ShearChoice.Mean)];
+
     private static readonly (string, PorePressureMethod)[] PressureWords =
     [
         ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
@@ -95,6 +98,7 @@ internal static class Bindings
             Files = s.Texts("files", l.Files, "the log files (CSV or LAS), relative to the well file"),
             Csv = s.Table("csv", l.Csv, Csv, "how CSV files are written; what is not stated is detected"),
             RepeatedDepth = s.Choice("repeated_depth", l.RepeatedDepth, RepeatedDepths, "what neighbouring rows of the same depth are: an error, or one row: the first of them or their mean"),
+            ShearFrom = s.Choice("shear_from", l.ShearFrom, ShearChoices, "which wave serves as shear where there are a fast and a slow one but no plain shear; mean is that of the slownesses"),
         },
         Curves,
         "the column of each role; roles not named here are found by the usual mnemonics");

@@ -58,6 +58,19 @@ public sealed record CurveSource
 /// <param name="Sources">Its sources from top to bottom.</param>
 public sealed record CurveChoice(string Role, IReadOnlyList<CurveSource> Sources);
 
+/// <summary>Which of two shear waves the isotropic chain takes.</summary>
+public enum ShearChoice
+{
+    /// <summary>The faster one.</summary>
+    Fast,
+
+    /// <summary>The slower one.</summary>
+    Slow,
+
+    /// <summary>The mean of the two slownesses, sample by sample.</summary>
+    Mean,
+}
+
 /// <summary>The [logs] section.</summary>
 public sealed record LogsSection
 {
@@ -69,6 +82,9 @@ public sealed record LogsSection
 
     /// <summary>What to do with neighbouring rows of the same depth.</summary>
     public Setting<RepeatedDepth> RepeatedDepth { get; init; } = Setting.Default(Reading.RepeatedDepth.Error);
+
+    /// <summary>Which of a fast and a slow shear wave serves as shear, when no plain shear column does.</summary>
+    public Setting<ShearChoice> ShearFrom { get; init; }
 
     /// <summary>The column that holds measured depth, when it is not the usual one; one at most in a sound file.</summary>
     public IReadOnlyList<CurveSource> DepthColumns { get; init; } = [];

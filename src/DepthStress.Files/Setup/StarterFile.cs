@@ -34,6 +34,10 @@ public static class StarterFile
             [logs]
             files = [{Quoted(log.Name)}]
 
+            """);
+        StarterShear.Append(text, log);
+        text.Append("""
+
             [logs.curves]
 
             """);
@@ -123,7 +127,7 @@ public static class StarterFile
             if (candidates.Count == 0) continue;
             var column = candidates[0].Column;
             var known = role.Dimensions is [Dimension.None] || Units.Find(column.Unit ?? "", role.Dimensions) is not null;
-            var rivals = candidates.Count == 1 ? "" : $"; also there: {string.Join(", ", candidates.Skip(1).Select(c => c.Column.Name))}";
+            var rivals = candidates.Count == 1 ? "" : $"; also there: {string.Join(", ", candidates.Skip(1).Select(c => c.Column.Name))} ({column.Name} is the more specific name)";
             var value = known
                 ? Quoted(column.Name)
                 : $"{{ column = {Quoted(column.Name)}, unit = {Quoted(Units.Of(role.Dimensions[0]).First().Symbol)} }}";
@@ -187,7 +191,7 @@ public static class StarterFile
     {
         var (compressional, shear) = (Values(log, Property.Vp), Values(log, Property.Vs));
         var (there, lacking) = (compressional.Count(double.IsFinite), compressional.Where((v, i) => double.IsFinite(v) && !(shear.Length > 0 && double.IsFinite(shear[i]))).Count());
-        if (lacking == 0) return;
+        if (lacking == 0 || (shear.Length == 0 && StarterShear.HasWave(log))) return;
         var choice = 2 * lacking > there ? "castagna-1985-mudrock" : TrainedRelation.Id;
         text.AppendLine(CultureInfo.InvariantCulture, $"""
 

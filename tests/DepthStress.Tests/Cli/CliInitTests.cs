@@ -63,8 +63,50 @@ public sealed class CliInitTests : IDisposable
         var text = _cli.Folder.Read("well.toml");
         Assert.Contains("depth = { column = \"MD\", unit = \"m\" }   # <- the file states no unit: confirm\n", text, StringComparison.Ordinal);
         Assert.Contains(
-            "compressional = { column = \"DTC\", unit = \"us/ft\" }# <- confirm the unit; compressional slowness or velocity, no unit, 1000.0 to 1001.0; also there: DT\n",
+            "compressional = { column = \"DTC\", unit = \"us/ft\" }# <- confirm the unit; compressional slowness or velocity, no unit, 1000.0 to 1001.0; also there: DT (DTC is the more specific name)\n",
             text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task Rivals_for_the_further_roles_are_named_with_the_reason()
+    {
+        _cli.Folder.Write("well.csv", "DEPT[m],DTS_FAST[us/ft],DTSF[us/ft],DTSS[us/ft],DTST[us/ft],STONELEY[us/ft],ILM[ohm.m],RMED[ohm.m],LLS[ohm.m],SFLU[ohm.m]\n1000,150,150,160,220,221,2,3,4,5\n");
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        foreach (var (role, column, rival) in new[] { ("fast_shear", "DTSF", "DTS_FAST"), ("stoneley", "DTST", "STONELEY"), ("medium_resistivity", "RMED", "ILM"), ("shallow_resistivity", "LLS", "SFLU") })
+        {
+            var line = Assert.Single(text.Split('\n'), l => l.StartsWith($"{role} = \"{column}\"", StringComparison.Ordinal));
+            Assert.EndsWith($"; also there: {rival} ({column} is the more specific name)", line, StringComparison.Ordinal);
+        }
+    }
+
+    [Theory]
+    [InlineData("DTSF[us/ft],DTSS[us/ft]\n1000,150,160\n", "# shear_from = \"fast\"                 # <- fast (DTSF), slow (DTSS) or mean: stress or bedding parts the two waves, the isotropic chain takes one; the choice moves Vs by 6.5 % on average\n")]
+    [InlineData("DTSF[m/s],DTSS[us/m]\n1000,2000,525\n", "the choice moves Vs by 4.9 % on average\n")]
+    [InlineData("DTSF,DTSS\n1000,160,150\n", "the choice moves Vs by 6.5 % on average; the fast one is slower: are they exchanged?\n")]
+    [InlineData("DTSS[us/ft]\n1000,150\n", "# shear_from = \"slow\"                 # <- of the two shear waves only the slow one is there (DTSS)\n")]
+    [InlineData("DTSM[us/ft],DTSF[us/ft]\n1000,150,160\n", "# shear_from = \"fast\"                 # DTSM serves below; to take another, remove shear there: of the two shear waves only the fast one is there (DTSF)\n")]
+    public async Task Where_shear_comes_in_two_waves_the_user_is_asked_which_one_serves(string log, string expected)
+    {
+        _cli.Folder.Write("well.csv", "DEPT[m]," + log);
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains(expected, text, StringComparison.Ordinal);
+        Assert.DoesNotContain("[prediction]", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task The_run_says_which_shear_wave_served()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs.Replace("DTS[us/ft]", "DTSF[us/ft],DTSS[us/ft]", StringComparison.Ordinal).Replace(",2.", ",170,2.", StringComparison.Ordinal));
+        await _cli.RunAsync("init", "well.csv");
+        Fill("well.toml");
+        Assert.Contains("[logs]\nfiles = [\"well.csv\"]\nshear_from = \"fast\"", _cli.Folder.Read("well.toml"), StringComparison.Ordinal);
+        var result = await _cli.RunAsync("run", "well.toml");
+        Assert.Equal(0, result.Code);
+        const string Served = "note: shear: fast_shear (DTSF in well.csv) serves; the fast one is 5.3 % faster on average over 5 samples than the slow one";
+        Assert.Contains(Served, result.Error, StringComparison.Ordinal);
+        Assert.Contains(Served, _cli.Folder.Read("well-results/run.json"), StringComparison.Ordinal);
     }
 
     [Fact]
