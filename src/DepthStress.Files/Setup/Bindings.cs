@@ -50,6 +50,8 @@ internal static class Bindings
     private static readonly (string, ShearChoice)[] ShearChoices =
         [("fast", ShearChoice.Fast), ("slow", ShearChoice.Slow), ("mean", ShearChoice.Mean)];
 
+    private static readonly (string, ResampleMethod)[] ResampleMethods = [("linear", ResampleMethod.Linear), ("mean", ResampleMethod.Mean)];
+
     private static readonly (string, PorePressureMethod)[] PressureWords =
     [
         ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
@@ -98,10 +100,19 @@ internal static class Bindings
             Files = s.Texts("files", l.Files, "the log files (CSV or LAS), relative to the well file"),
             Csv = s.Table("csv", l.Csv, Csv, "how CSV files are written; what is not stated is detected"),
             RepeatedDepth = s.Choice("repeated_depth", l.RepeatedDepth, RepeatedDepths, "what neighbouring rows of the same depth are: an error, or one row: the first of them or their mean"),
+            Resample = s.Table("resample", l.Resample, Resample, "one regular depth grid for all curves, at whole multiples of its step; without it the depths of the first file lead"),
             ShearFrom = s.Choice("shear_from", l.ShearFrom, ShearChoices, "which wave serves as shear where there are a fast and a slow one but no plain shear; mean is that of the slownesses"),
         },
         Curves,
         "the column of each role; roles not named here are found by the usual mnemonics");
+
+    private static ResampleSection Resample(ISection s, ResampleSection r) => r with
+    {
+        Step = s.Quantity("step", r.Step, Sign.Positive, Dimension.Length, "distance between depths"),
+        Method = s.Choice("method", r.Method, ResampleMethods, "a straight line between samples, or the mean over the step where it holds two or more; codes and bit sizes take the nearest sample"),
+        MaxGap = s.Quantity("max_gap", r.MaxGap, Sign.Positive, Dimension.Length, "samples further apart than this are not joined: missing between them"),
+        Position = s.Position,
+    };
 
     private static CsvSection Csv(ISection s, CsvSection c) => c with
     {

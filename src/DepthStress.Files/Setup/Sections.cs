@@ -83,6 +83,9 @@ public sealed record LogsSection
     /// <summary>What to do with neighbouring rows of the same depth.</summary>
     public Setting<RepeatedDepth> RepeatedDepth { get; init; } = Setting.Default(Reading.RepeatedDepth.Error);
 
+    /// <summary>The regular depth grid that all curves are brought onto.</summary>
+    public ResampleSection Resample { get; init; } = new();
+
     /// <summary>Which of a fast and a slow shear wave serves as shear, when no plain shear column does.</summary>
     public Setting<ShearChoice> ShearFrom { get; init; }
 

@@ -33,6 +33,7 @@ internal static class SetupAssembly
         if (sections.Logs.DepthColumns is [_, var second, ..])
             diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
+        sections.Logs.Resample.Check(diagnostics);
         var frame = Frame(well, file, wrong, diagnostics);
         var trajectory = SurveyAssembly.Path(sections.Survey, sections.Logs.Csv.Options(), file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);

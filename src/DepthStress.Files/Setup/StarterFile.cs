@@ -35,6 +35,7 @@ public static class StarterFile
             files = [{Quoted(log.Name)}]
 
             """);
+        StarterResample.Append(text, log);
         StarterShear.Append(text, log);
         text.Append("""
 

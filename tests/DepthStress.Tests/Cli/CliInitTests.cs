@@ -81,6 +81,19 @@ public sealed class CliInitTests : IDisposable
     }
 
     [Theory]
+    [InlineData("DEPT[ft],DTC[us/ft]\n1000,90\n1000.5,91\n1001,91\n", "# resample = { step = \"0.5 ft\", method = \"linear\", max_gap = \"1 m\" }   # or \"mean\"; one regular depth grid for all curves: the log's depths are even\n")]
+    [InlineData("DEPT[m],DTC[us/ft]\n1000,90\n1002,91\n1004,91\n1007.5,91\n", "# resample = { step = \"2 m\", method = \"linear\", max_gap = \"4 m\" }   # or \"mean\"; one regular depth grid for all curves: the log's depths run in steps of 2 to 3.5 m\n")]
+    public async Task A_regular_grid_is_offered_with_the_logs_own_step_and_taken_by_check(string log, string expected)
+    {
+        _cli.Folder.Write("well.csv", log);
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains(expected, text, StringComparison.Ordinal);
+        _cli.Folder.Write("well.toml", text.Replace("# resample", "resample", StringComparison.Ordinal));
+        Assert.DoesNotContain("resample", (await _cli.RunAsync("check", "well.toml")).Error, StringComparison.Ordinal);
+    }
+
+    [Theory]
     [InlineData("DTSF[us/ft],DTSS[us/ft]\n1000,150,160\n", "# shear_from = \"fast\"                 # <- fast (DTSF), slow (DTSS) or mean: stress or bedding parts the two waves, the isotropic chain takes one; the choice moves Vs by 6.5 % on average\n")]
     [InlineData("DTSF[m/s],DTSS[us/m]\n1000,2000,525\n", "the choice moves Vs by 4.9 % on average\n")]
     [InlineData("DTSF,DTSS\n1000,160,150\n", "the choice moves Vs by 6.5 % on average; the fast one is slower: are they exchanged?\n")]
@@ -101,7 +114,7 @@ public sealed class CliInitTests : IDisposable
         _cli.Folder.Write("well.csv", WellText.Logs.Replace("DTS[us/ft]", "DTSF[us/ft],DTSS[us/ft]", StringComparison.Ordinal).Replace(",2.", ",170,2.", StringComparison.Ordinal));
         await _cli.RunAsync("init", "well.csv");
         Fill("well.toml");
-        Assert.Contains("[logs]\nfiles = [\"well.csv\"]\nshear_from = \"fast\"", _cli.Folder.Read("well.toml"), StringComparison.Ordinal);
+        Assert.Contains("\nshear_from = \"fast\" ", _cli.Folder.Read("well.toml").Split("[logs.curves]")[0], StringComparison.Ordinal);
         var result = await _cli.RunAsync("run", "well.toml");
         Assert.Equal(0, result.Code);
         const string Served = "note: shear: fast_shear (DTSF in well.csv) serves; the fast one is 5.3 % faster on average over 5 samples than the slow one";
