@@ -142,7 +142,7 @@ internal static class Bindings
         Column = s.Text("column", c.Column, "name of the column"),
         File = s.Text("file", c.File, "the file, when several have the column"),
         Unit = s.Text("unit", c.Unit, "the unit, when the file states none or a wrong one"),
-        Missing = s.Number("missing", c.Missing, Interval.All, "a further value that means missing"),
+        Missing = s.Codes("missing", c.Missing, "further values that mean missing"),
         Base = s.Quantity("base", c.Base, Sign.Any, Dimension.Length, "measured depth down to which this column is used"),
         Position = s.Position,
     };

@@ -3,6 +3,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -44,6 +45,9 @@ internal interface ISection
 
     /// <summary>A list of pure numbers; one number is a list of one.</summary>
     Setting<IReadOnlyList<double>> Numbers(string key, Setting<IReadOnlyList<double>> current, string doc);
+
+    /// <summary>Numbers and texts that mean missing; one stands for a list of one.</summary>
+    Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc);
 
     /// <summary>A quantity with a unit, in SI.</summary>
     Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc);

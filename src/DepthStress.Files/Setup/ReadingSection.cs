@@ -3,6 +3,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -88,6 +89,15 @@ internal sealed class ReadingSection : ISection
             TomlArray array when array.Items.TrueForAll(i => i is TomlNumber) => array.Items.ConvertAll(i => ((TomlNumber)i).Value),
             _ => Wrong<IReadOnlyList<double>>(node, $"{key} = a number or a list of numbers"),
         });
+
+    /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) => Read(key, current, node =>
+    {
+        List<TomlNode> items = node is TomlArray array ? array.Items : [node];
+        return items.TrueForAll(i => i is TomlNumber || (i is TomlText text && !string.IsNullOrWhiteSpace(text.Value)))
+            ? new MissingCodes([.. items.OfType<TomlNumber>().Select(n => n.Value)], [.. items.OfType<TomlText>().Select(t => t.Value)])
+            : Wrong<MissingCodes>(node, $"{key} = a number, a text, or a list of numbers and texts");
+    });
 
     /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>

@@ -5,6 +5,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -42,6 +43,13 @@ internal sealed class RecordingSection : ISection
     /// <inheritdoc/>
     public Setting<IReadOnlyList<double>> Numbers(string key, Setting<IReadOnlyList<double>> current, string doc) =>
         Add(key, current, v => new JsonArray([.. v.Select(n => (JsonNode)n)]));
+
+    /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) => Add(key, current, codes =>
+    {
+        JsonNode[] items = [.. codes.Numbers.Select(n => (JsonNode)n), .. codes.Texts.Select(t => (JsonNode)t)];
+        return items is [var one] ? one : new JsonArray(items);
+    });
 
     /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>

@@ -6,6 +6,7 @@ using DepthStress.Core.Model;
 using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -54,6 +55,10 @@ internal sealed class SchemaSection : ISection
     /// <inheritdoc/>
     public Setting<IReadOnlyList<double>> Numbers(string key, Setting<IReadOnlyList<double>> current, string doc) =>
         Add(key, current, OneOrMany(doc, new JsonObject { ["type"] = "number" }));
+
+    /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) =>
+        Add(key, current, OneOrMany(doc, new JsonObject { ["type"] = List(["number", "string"]) }));
 
     /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>

@@ -43,8 +43,8 @@ public sealed record CurveSource
     /// <summary>The unit, when the file states none or a wrong one.</summary>
     public Setting<string> Unit { get; init; }
 
-    /// <summary>A further value that means missing.</summary>
-    public Setting<double> Missing { get; init; }
+    /// <summary>Further values that mean missing.</summary>
+    public Setting<MissingCodes> Missing { get; init; }
 
     /// <summary>Measured depth down to which the column is used, m; the next source goes on from there.</summary>
     public Setting<double> Base { get; init; }

@@ -137,6 +137,26 @@ public sealed class CurveUnitTests
         Assert.Equal(["0-1 Measured DTC in a.csv", "1-3 None", "3-4 Measured DTC in a.csv"], logs![Property.Vp]!.Origins());
     }
 
+    [Theory]
+    [InlineData("missing = \"off\"", "60,off,60", 60)]
+    [InlineData("missing = [0, \"off\", \"-\"]", "0,off,-", double.NaN)]
+    public void Texts_can_mean_missing(string missing, string cells, double first)
+    {
+        var (logs, messages) = Ingesting.One(
+            "DEPT[m],GR[gAPI]\n999,61\n" + string.Concat(cells.Split(',').Select((c, i) => FormattableString.Invariant($"{1000 + i},{c}\n"))), $"gamma_ray = {{ column = \"GR\", {missing} }}");
+        Assert.Empty(messages);
+        Assert.Equal([61, first, double.NaN, first], logs![Property.GammaRay]!.Values);
+    }
+
+    [Theory]
+    [InlineData("true", "found true")]
+    [InlineData("\"\"", "found the text \"\"")]
+    [InlineData("[0, [1]]", "found a list")]
+    [InlineData("2020-01-01", "found a date")]
+    public void Nothing_else_can(string missing, string found) => Assert.Equal(
+        [$"well.toml(28,40): error: {found}, expected missing = a number, a text, or a list of numbers and texts"],
+        Ingesting.One(Ingesting.Csv("GR[gAPI]", 1000, 1, 60), $"gamma_ray = {{ column = \"GR\", missing = {missing} }}").Messages);
+
     [Fact]
     public void A_missing_code_holds_for_its_column_in_its_file_only()
     {
