@@ -30,7 +30,7 @@ public static class LogIngest
     {
         var section = well.Sections.Logs;
         var files = new List<LogFile>();
-        foreach (var name in section.Files.Value.Distinct(StringComparer.Ordinal))
+        foreach (var name in section.Files.Value.Distinct(StringComparer.Ordinal).Where(f => !string.IsNullOrWhiteSpace(f)))
         {
             if (LogFileReader.Read(well.Resolve(name), name, Options(section, name), diagnostics) is { } file) files.Add(file);
         }

@@ -106,6 +106,7 @@ internal static class SetupAssembly
 
     private static void CheckFiles(Setting<IReadOnlyList<string>> files, DiagnosticBag diagnostics)
     {
+        if (files.Value.Any(string.IsNullOrWhiteSpace)) diagnostics.Error(files.Source.Position, "found an empty name in [logs] files, expected the names of the log files");
         foreach (var twice in files.Value.GroupBy(f => f, StringComparer.Ordinal).Where(g => g.Count() > 1))
             diagnostics.Error(files.Source.Position, $"found the file \"{twice.Key}\" twice in [logs] files, expected each once");
     }
