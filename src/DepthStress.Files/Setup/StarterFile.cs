@@ -63,7 +63,7 @@ public static class StarterFile
             # parked = true                       # take out the constant ends that a parked tool leaves
             # null_smear = true                   # take out edges of gaps that were averaged with the missing-value code
             # spikes = { window = "3 m", threshold = 5, curves = ["compressional", "shear", "density", "gamma_ray"] }
-            # washout = { caliper_excess = "1 in", density_correction = "0.025 g/cm3", rule = "both" }   # density out; "either" takes out more
+            # washout = { caliper_excess = "1 in", density_correction = "0.025 g/cm3", rule = "both" }   # density out, to be bridged by [overburden] gaps; "either" takes out more
             # fill_gaps = "1 m"                   # bridge gaps up to this length by a straight line
             # shifts = [{ curve = "density", by = "-0.4 m" }]   # positive downwards
 

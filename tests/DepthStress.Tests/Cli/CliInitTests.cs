@@ -169,6 +169,47 @@ public sealed class CliInitTests : IDisposable
         Assert.Contains("whole log", result.Output, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public async Task The_sections_that_the_starter_offers_are_taken_by_check_as_they_stand()
+    {
+        SampleLogs.Write(_cli.Folder.Of("logs"));
+        Assert.Equal(0, (await _cli.RunAsync("init", "logs/quillback-4.las")).Code);
+        var text = Open(Open(Fill("quillback-4.toml"), "[conditioning]"), "[prediction]");
+        Assert.Contains("\nshifts = [{ curve = \"density\"", text, StringComparison.Ordinal);
+        Assert.Contains("\nshear = \"trained\"", text, StringComparison.Ordinal);
+        _cli.Folder.Write("quillback-4.toml", text);
+        var result = await _cli.RunAsync("check", "quillback-4.toml");
+        Assert.Equal(0, result.Code);
+        Assert.DoesNotContain(": error: ", result.Error, StringComparison.Ordinal);
+        Assert.Matches(@"\n *density +RHOB .* edited [0-9.]+ *\n", result.Output); // all of it is shifted
+        var lines = result.Output.Split('\n').Select(l => l.Trim()).ToList();
+        Assert.StartsWith(">trained (on this well), ", lines[lines.IndexOf("[prediction] shear") + 1], StringComparison.Ordinal);
+        Assert.DoesNotContain("trained", lines[lines.IndexOf("[prediction] density") + 1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_published_relation_is_offered_where_most_of_the_shear_is_missing_and_check_takes_it()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs.Replace("DTS[us/ft]", "ODD", StringComparison.Ordinal));
+        await _cli.RunAsync("init", "well.csv");
+        var text = Open(Fill("well.toml"), "[prediction]");
+        Assert.Contains("\nshear = \"castagna-1985-mudrock\"", text, StringComparison.Ordinal);
+        _cli.Folder.Write("well.toml", text);
+        var check = await _cli.RunAsync("check", "well.toml");
+        Assert.Equal(0, check.Code);
+        Assert.Matches(@"\n *shear .* predicted 100\.0 *\n", check.Output); // a curve without a column
+    }
+
+    /// <summary>Takes the comment signs from a section that the starter offers, down to the next empty line.</summary>
+    private static string Open(string text, string section)
+    {
+        var lines = text.Split('\n');
+        var first = Array.FindIndex(lines, l => l.TrimStart('#', ' ').StartsWith(section, StringComparison.Ordinal));
+        Assert.True(first >= 0, $"no {section} in the starter");
+        for (var i = first; i < lines.Length && lines[i].Length > 0; i++) lines[i] = lines[i].TrimStart('#', ' ');
+        return string.Join('\n', lines);
+    }
+
     /// <summary>Takes the comment sign from the marked lines, as a user would; onshore.</summary>
     private string Fill(string name)
     {
