@@ -1,6 +1,7 @@
 using System.Runtime.ExceptionServices;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
+using DepthStress.Core.Model;
 using DepthStress.Files.Writing;
 using DepthStress.Report;
 
@@ -19,7 +20,7 @@ internal static class ResultWriter
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
         var layers = LayerBuilder.Build(model, file.Sections.Layers);
-        (string Name, Action<Stream> Write)[] results =
+        List<(string Name, Action<Stream> Write)> results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
             ("results.las", s => ResultsLas.Write(model, units, s)),
@@ -27,9 +28,11 @@ internal static class ResultWriter
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
-            ("README.txt", s => ResultGuide.Write(file.Setup, units, s)),
+            ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
         ];
+
+        if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
 
         using var target = ResultFolder.Begin(folder);
         try

@@ -179,4 +179,13 @@ public enum Property
 
     /// <summary>Medium resistivity, ohm.m.</summary>
     MediumResistivity,
+
+    /// <summary>True vertical depth below the ground, offshore below the sea surface, m; only comparison relations take it.</summary>
+    DepthBelowGroundOrSea,
+
+    /// <summary>Parameter of comparison relations: ratio of effective stresses, or the ratio it is made from.</summary>
+    MatrixStressRatio,
+
+    /// <summary>Least horizontal stress by a relation that the model is compared with, Pa; it never enters the model.</summary>
+    ComparisonShmin,
 }

@@ -47,6 +47,9 @@ public static class PropertyNames
         (Property.DepthBelowSurface, "depth_below_surface", "depth below ground or mudline", Quantities.Dimension.Length),
         (Property.MeanDensityAbove, "mean_density_above", "mean density above the log", Quantities.Dimension.Density),
         (Property.ShallowDensity, "shallow_density", "density above the log", Quantities.Dimension.Density),
+        (Property.DepthBelowGroundOrSea, "depth_below_ground_or_sea", "depth below ground, offshore below the sea surface", Quantities.Dimension.Length),
+        (Property.MatrixStressRatio, "matrix_stress_ratio", "ratio stated beside the method", Quantities.Dimension.None),
+        (Property.ComparisonShmin, "comparison_shmin", "Shmin for comparison", Quantities.Dimension.Pressure),
     ];
 
     /// <summary>The property of a name in well files, or null.</summary>

@@ -48,6 +48,7 @@ public static class Chain
         PressureStage.PorePressure(setup, table, runs, uses);
         RockStage(table, runs, uses);
         StressStage.Apply(setup, table, runs);
+        var comparisons = ComparisonStage.Apply(setup, table, runs, uses);
 
         var model = new EarthModel
         {
@@ -62,6 +63,7 @@ public static class Chain
             StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, lithologies),
             LawUses = uses,
             Predictions = predictions,
+            Comparisons = comparisons,
             Findings = findings,
         };
         return model with { Findings = FindingRules.Sort(findings.Concat(FindingRules.All.SelectMany(rule => rule(model)))) };

@@ -47,6 +47,9 @@ public sealed record EarthModel
     /// <summary>What was predicted because it was not logged.</summary>
     public IReadOnlyList<Prediction> Predictions { get; init; } = [];
 
+    /// <summary>Curves that the model's least stress is compared with.</summary>
+    public IReadOnlyList<ComparisonCurve> Comparisons { get; init; } = [];
+
     /// <summary>What a reader should know, most important first.</summary>
     public IReadOnlyList<Finding> Findings { get; init; } = [];
 

@@ -49,7 +49,8 @@ internal static class LawColumns
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }
 
-    private static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
+    /// <summary>The column of a property for one run of samples, or the one value of a parameter; missing when there is none.</summary>
+    public static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
     {
         if (LawParameters.Of(property) is { } parameter) return new[] { parameter.Value(run.Settings) };
         return table.Has(property) ? table.Read(property).Slice(run.Start, run.Length) : Missing;

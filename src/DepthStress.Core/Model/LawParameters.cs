@@ -35,6 +35,7 @@ public static class LawParameters
         new(Property.MineralShearModulus, "[biot] mineral_shear_modulus", s => s.Biot.MineralShearModulus),
         new(Property.MatrixShearVelocity, "[biot] matrix_shear_velocity", s => s.Biot.MatrixShearVelocity),
         new(Property.CriticalPorosity, "[biot] critical_porosity", s => s.Biot.CriticalPorosity),
+        new(Property.MatrixStressRatio, "ratio in [horizontal_stress] compare", _ => default),
     }.ToDictionary(p => p.Property);
 
     /// <summary>The parameter behind a property, or null when the property is a column of samples.</summary>

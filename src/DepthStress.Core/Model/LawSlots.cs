@@ -47,9 +47,12 @@ public static class LawSlots
     /// <summary>Where a method of density above the log is recorded; the choice itself may be more than a law.</summary>
     public static LawSlot AboveLog { get; } = new(Property.ShallowDensity, "[overburden] above_log", false, _ => default);
 
+    /// <summary>Where comparison relations are recorded; the choice itself is a list.</summary>
+    public static LawSlot Comparison { get; } = new(Property.ComparisonShmin, "[horizontal_stress] compare", false, _ => default);
+
     /// <summary>All whose choice is a law.</summary>
     public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, Density, Porosity, Shear, .. Rock.Skip(1)];
 
     /// <summary>Every place of the well file that takes an entry of the catalogue.</summary>
-    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure];
+    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure, Comparison];
 }

@@ -4,6 +4,7 @@ using DepthStress.Core.Logs;
 using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
+using DepthStress.Core.Stress;
 
 namespace DepthStress.Core.Model;
 
@@ -27,6 +28,7 @@ public static class MethodCatalogue
         .. BiotMethods.All,
         .. ShallowDensityMethods.All,
         .. PressureMethods.All,
+        .. ComparisonMethods.All,
     ];
 
     /// <summary>The entry of an id, or null.</summary>

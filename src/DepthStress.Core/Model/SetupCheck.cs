@@ -59,9 +59,11 @@ public static class SetupCheck
         ConditioningCheck.Report(scope);
         PorePressureCheck.Report(scope);
         ReportStrains(scope);
+        ComparisonCheck.Report(scope);
     }
 
-    private static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
+    /// <summary>Reports a law whose coefficients were recalled where the well does not accept them.</summary>
+    internal static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
     {
         if (law.Standing == Standing.FromMemory && !setup.AcceptUnverified)
             error(position, $"{slot.Key} = \"{law.Id}\": its coefficients were recalled, not read in the source; set accept_unverified = true to use it");

@@ -17,6 +17,9 @@ public sealed record HorizontalStressSettings
     /// <summary>Coefficient of friction of existing faults for the frictional limit; the default is common practice.</summary>
     public Setting<double> FrictionCoefficient { get; init; } = Setting.Default(0.6);
 
+    /// <summary>Relations whose curves stand beside the model's least stress; they never enter it.</summary>
+    public Setting<IReadOnlyList<ComparisonChoice>> Compare { get; init; }
+
     /// <summary>The strains along Shmin and SHmax; null where they are not both chosen, which counts as none.</summary>
     public (double AlongShmin, double AlongShmax)? BothStrains() =>
         StrainAlongShmin.IsSet && StrainAlongShmax.IsSet ? (StrainAlongShmin.Value, StrainAlongShmax.Value) : null;
@@ -31,6 +34,7 @@ public sealed record HorizontalStressSettings
             StrainAlongShmax = StrainAlongShmax.Over(below.StrainAlongShmax),
             ShmaxAzimuth = ShmaxAzimuth.Over(below.ShmaxAzimuth),
             FrictionCoefficient = FrictionCoefficient.Over(below.FrictionCoefficient),
+            Compare = Compare.Over(below.Compare),
         };
     }
 }

@@ -144,7 +144,11 @@ internal sealed class SchemaSection : ISection
                 ["anyOf"] = new JsonArray(
                     new JsonObject { ["type"] = "string", ["description"] = $"the {shorthand}'s name" },
                     table.DeepClone(),
-                    new JsonObject { ["type"] = "array", ["items"] = table }),
+                    new JsonObject
+                    {
+                        ["type"] = "array",
+                        ["items"] = new JsonObject { ["anyOf"] = new JsonArray(new JsonObject { ["type"] = "string" }, table) },
+                    }),
             };
         return current;
     }

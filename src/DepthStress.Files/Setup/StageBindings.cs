@@ -1,4 +1,5 @@
 using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
@@ -73,9 +74,25 @@ internal static class StageBindings
 
     private static HorizontalStressSettings HorizontalStress(ISection s, HorizontalStressSettings c) => c with
     {
+        Compare = Compare(s, c.Compare),
         StrainAlongShmin = s.Quantity("strain_along_shmin", c.StrainAlongShmin, Sign.Any, Dimension.Strain, "tectonic strain along Shmin, compression positive"),
         StrainAlongShmax = s.Quantity("strain_along_shmax", c.StrainAlongShmax, Sign.Any, Dimension.Strain, "tectonic strain along SHmax, compression positive"),
         ShmaxAzimuth = s.Quantity("shmax_azimuth", c.ShmaxAzimuth, Sign.Any, Dimension.Angle, "azimuth of SHmax from north"),
         FrictionCoefficient = s.Number("friction_coefficient", c.FrictionCoefficient, new Interval(0, 2), "friction of existing faults, for the frictional limit"),
+    };
+
+    private static Setting<IReadOnlyList<ComparisonChoice>> Compare(ISection s, Setting<IReadOnlyList<ComparisonChoice>> current)
+    {
+        var choices = s.Tables(
+            "compare", current.IsSet ? current.Value : [], Comparison, new ComparisonChoice(), "relations whose curves stand beside the model's Shmin; they never enter it", "method");
+        var source = s.SourceOf("compare");
+        return source.Kind == SettingKind.NotSet ? current : new(choices, source);
+    }
+
+    private static ComparisonChoice Comparison(ISection s, ComparisonChoice c) => c with
+    {
+        Method = s.Choice("method", c.Method, [.. ComparisonMethods.All.Select(l => (l.Id, l))], "the relation"),
+        Ratio = s.Number("ratio", c.Ratio, new Interval(0, 1), "the ratio that matthews-kelly-1967 and eaton-1969 take: yours, from leak-offs of the region"),
+        Position = s.Position,
     };
 }

@@ -15,7 +15,8 @@ public static class ResultGuide
     /// <param name="setup">The well.</param>
     /// <param name="units">The units of the results.</param>
     /// <param name="destination">Gets the bytes; stays open.</param>
-    public static void Write(WellSetup setup, UnitSystem units, Stream destination)
+    /// <param name="comparison">The columns of comparison.csv; null or empty where it is not written.</param>
+    public static void Write(WellSetup setup, UnitSystem units, Stream destination, IReadOnlyList<Column<EarthModel>>? comparison = null)
     {
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(destination);
@@ -25,6 +26,7 @@ public static class ResultGuide
         Conventions(text, units);
         Columns(text, "Columns of depth.csv", DepthColumns.All, units);
         Columns(text, "Columns of layers.csv and layers.json", LayerColumns.All, units);
+        if (comparison is { Count: > 0 }) Columns(text, "Columns of comparison.csv", comparison, units);
         destination.Write(Encoding.UTF8.GetBytes(text.ToString()));
     }
 

@@ -147,6 +147,17 @@ public class CatalogueStandingTests
         ["traugott-1997"] = Standing.Confirmed, // Zhang 2019 p. 190 eqs 6.4-6.6
         ["barker-wood-1997"] = Standing.FromMemory, // coefficients recalled
         ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
+        ["hubbert-willis-1957-least"] = Standing.Confirmed, // exercise after Bourgoyne and others 1986
+        ["hubbert-willis-1957-greatest"] = Standing.Confirmed, // likewise
+        ["matthews-kelly-1967"] = Standing.Confirmed, // likewise
+        ["eaton-1969"] = Standing.Confirmed, // likewise, and Lapeyrouse
+        ["breckels-1982-gulf-coast"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-gulf-coast-deep"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-venezuela"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-brunei"] = Standing.FromMemory, // Zhang 2019 p. 209, its normal gradient recalled
+        ["holbrook-1993"] = Standing.FromMemory,
+        ["petrel-field-depth"] = Standing.Confirmed, // Zhang 2019 pp. 209-210
+        ["ekofisk-field-depth"] = Standing.Confirmed, // Zhang 2019 pp. 209-210
         ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
     };
 

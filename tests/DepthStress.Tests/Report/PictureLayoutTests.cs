@@ -14,7 +14,7 @@ public class PictureLayoutTests
     public static TheoryData<string, UnitSystem> Cases()
     {
         var cases = new TheoryData<string, UnitSystem>();
-        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only" })
+        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only", "comparisons" })
         {
             cases.Add(name, UnitSystem.Metric);
             cases.Add(name, UnitSystem.Field);
@@ -116,6 +116,7 @@ public class PictureLayoutTests
         "long names" => PictureModels.Full(800, LongName, [PictureModels.Zone(LongName, 900), PictureModels.Zone("Unbreakablenamewithoutanyblankinit", 920)]),
         "two samples" => PictureModels.Small([1000, 1000.5], "two", [PictureModels.Zone("one", 900)], ("density", [2300, 2310])),
         "density only" => PictureModels.Small(PictureModels.Depths(300, 10, 3000), "density", [], ("density", [.. Enumerable.Range(0, 300).Select(i => 2000.0 + i)])),
+        "comparisons" => PictureModels.Full(800, comparisons: true),
         _ => PictureModels.Full(800),
     };
 

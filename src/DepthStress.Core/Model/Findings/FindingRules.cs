@@ -7,6 +7,7 @@ public static class FindingRules
     public static IReadOnlyList<Func<EarthModel, IEnumerable<Finding>>> All { get; } =
     [
         MissingFindings.Of, LawFindings.Of, LithologyFindings.Of, PredictionFindings.Of, PhysicalFindings.Of, FrictionFindings.Of, BeddingFindings.Of,
+        ComparisonFindings.Of,
     ];
 
     /// <summary>Most important first: by severity, then what concerns the well as a whole, then by the number of samples.</summary>
