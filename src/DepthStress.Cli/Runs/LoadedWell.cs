@@ -29,6 +29,8 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
         if (logs is null || diagnostics.HasErrors) return null;
         cancellation.ThrowIfCancellationRequested();
         stage("computing");
-        return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model, pictures) : null;
+        if (Chain.Run(file.Setup, logs.Logs, diagnostics) is not { } model) return null;
+        PictureChoice.Check(pictures, file.Sections.Output, model, diagnostics);
+        return new LoadedWell(file, logs, model, pictures);
     }
 }

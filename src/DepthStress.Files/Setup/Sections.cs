@@ -218,6 +218,12 @@ public sealed record OutputSection
     /// <summary>Scales of single curves.</summary>
     public IReadOnlyList<ScaleSection> Scales { get; init; } = [];
 
+    /// <summary>The depths of the stress polygons, as text with their units; not set means that the picture chooses.</summary>
+    public Setting<IReadOnlyList<string>> PolygonDepths { get; init; }
+
+    /// <summary>The kind of these depths.</summary>
+    public Setting<DepthKind> PolygonDepthKind { get; init; }
+
     /// <summary>The units of the results.</summary>
     public Setting<UnitSystem> Units { get; init; } = Setting.Default(UnitSystem.Metric);
 }

@@ -1,4 +1,6 @@
 using System.Globalization;
+using DepthStress.Core.Depth;
+using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report;
@@ -106,6 +108,12 @@ public class PictureLayoutTests
         yield return TracksPicture.Draw(model, units, [TrackTable.All[1]]);
         yield return TracksPicture.Draw(model, units, [.. TrackTable.All, .. TrackTable.All]);
         yield return StressPicture.Draw(model, units);
+        yield return PolygonPicture.Draw(model, new PictureOptions(units));
+        foreach (var count in new[] { 1, 2, 3, 4, 5, 6 })
+        {
+            var (top, bottom) = (model.Values.Read(Property.MeasuredDepth)[0], model.Values.Read(Property.MeasuredDepth)[^1]);
+            yield return PolygonPicture.Draw(model, new PictureOptions(units, Depths: [.. Enumerable.Range(0, count).Select(i => (top + ((bottom - top) * (i + 0.3) / count), DepthKind.Measured))]));
+        }
     }
 
     private static EarthModel Model(string name) => name switch
