@@ -17,6 +17,9 @@ public sealed record HorizontalStressSettings
     /// <summary>Coefficient of friction of existing faults for the frictional limit; the default is common practice.</summary>
     public Setting<double> FrictionCoefficient { get; init; } = Setting.Default(0.6);
 
+    /// <summary>A later change of pore pressure, Pa, negative in depletion; the profile states the stresses before it.</summary>
+    public Setting<double> PressureChange { get; init; }
+
     /// <summary>Relations whose curves stand beside the model's least stress; they never enter it.</summary>
     public Setting<IReadOnlyList<ComparisonChoice>> Compare { get; init; }
 
@@ -34,6 +37,7 @@ public sealed record HorizontalStressSettings
             StrainAlongShmax = StrainAlongShmax.Over(below.StrainAlongShmax),
             ShmaxAzimuth = ShmaxAzimuth.Over(below.ShmaxAzimuth),
             FrictionCoefficient = FrictionCoefficient.Over(below.FrictionCoefficient),
+            PressureChange = PressureChange.Over(below.PressureChange),
             Compare = Compare.Over(below.Compare),
         };
     }

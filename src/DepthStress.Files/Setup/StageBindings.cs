@@ -75,6 +75,7 @@ internal static class StageBindings
     private static HorizontalStressSettings HorizontalStress(ISection s, HorizontalStressSettings c) => c with
     {
         Compare = Compare(s, c.Compare),
+        PressureChange = s.Quantity("pressure_change", c.PressureChange, Sign.Any, Dimension.Pressure, "a later change of pore pressure, negative in depletion: the summary says what Shmin becomes; the profile stays"),
         StrainAlongShmin = s.Quantity("strain_along_shmin", c.StrainAlongShmin, Sign.Any, Dimension.Strain, "tectonic strain along Shmin, compression positive"),
         StrainAlongShmax = s.Quantity("strain_along_shmax", c.StrainAlongShmax, Sign.Any, Dimension.Strain, "tectonic strain along SHmax, compression positive"),
         ShmaxAzimuth = s.Quantity("shmax_azimuth", c.ShmaxAzimuth, Sign.Any, Dimension.Angle, "azimuth of SHmax from north"),

@@ -55,6 +55,7 @@ public static class RunJson
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
             ["predictions"] = Array(model.Predictions.Select(Predicted)),
+            ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
         };
