@@ -1,4 +1,5 @@
 using System.Runtime.ExceptionServices;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
@@ -34,6 +35,7 @@ internal static class ResultWriter
         ];
 
         if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
+        if (CoreComparison.Of(model) is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));
 
         using var target = ResultFolder.Begin(folder);
         try

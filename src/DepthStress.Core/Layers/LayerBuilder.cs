@@ -9,7 +9,7 @@ public static class LayerBuilder
     private static readonly Property[] Averaged =
     [
         Property.Density, Property.YoungsStatic, Property.PoissonStatic, Property.Biot, Property.Porosity, Property.ShaleVolume,
-        Property.Ucs, Property.FrictionAngle, Property.TensileStrength, Property.YoungsDynamic, Property.PoissonDynamic,
+        Property.Ucs, Property.FrictionAngle, Property.TensileStrength, Property.Toughness, Property.YoungsDynamic, Property.PoissonDynamic,
     ];
 
     private static readonly Property[] Profiled =

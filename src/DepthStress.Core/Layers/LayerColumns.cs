@@ -41,6 +41,7 @@ public static class LayerColumns
         Number("shmin_contrast_below", "mean Shmin of the layer below minus this one's", "", Stresses, "difference of means", l => l.ContrastBelow),
         Number("samples", "number of samples", "", Counts, "count", l => l.Samples),
         Number("share_not_measured", "share of the thickness that has no Shmin or one that does not rest on measured logs alone", "", Fractions, "stress_basis", l => l.NotMeasured),
+        Mean("toughness", "mode-I fracture toughness", "KIC", Toughnesses, Property.Toughness),
     ];
 
     private static NumberColumn<LayerTable> Number(

@@ -180,6 +180,12 @@ public enum Property
     /// <summary>Medium resistivity, ohm.m.</summary>
     MediumResistivity,
 
+    /// <summary>Mode-I fracture toughness, Pa.m^0.5.</summary>
+    Toughness,
+
+    /// <summary>A brittleness index, a number that compares only within one index.</summary>
+    Brittleness,
+
     /// <summary>True vertical depth below the ground, offshore below the sea surface, m; only comparison relations take it.</summary>
     DepthBelowGroundOrSea,
 

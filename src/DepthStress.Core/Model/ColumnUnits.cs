@@ -38,6 +38,9 @@ public static class ColumnUnits
     /// <summary>Stresses, pressures and strengths.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Stresses { get; } = (new(Units.Megapascal, 4), new(Units.Psi, 1));
 
+    /// <summary>Fracture toughness.</summary>
+    public static (ColumnUnit Metric, ColumnUnit Field) Toughnesses { get; } = (new(Units.MegapascalRootMetre, 4), new(Units.PsiRootInch, 1));
+
     /// <summary>Pressure gradients.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Gradients { get; } = (new(Units.KilopascalPerMetre, 4), new(Units.PsiPerFoot, 5));
 

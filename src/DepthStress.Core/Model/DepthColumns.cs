@@ -68,6 +68,8 @@ public static class DepthColumns
         Stored("bedding_angle", "angle between the hole and the normal of the beds", "", Angles, Property.BeddingAngle, "[survey] bedding_dip, dip_azimuth") with { InLas = false },
         Stored("vs_error", "standard error of the shear velocity where it is predicted", "", Velocities, Property.ShearError, "[prediction] shear") with { InLas = false },
         Stored("density_error", "standard error of the density where it is predicted", "", Densities, Property.DensityError, "[prediction] density") with { InLas = false },
+        Stored("toughness", "mode-I fracture toughness", "KIC", Toughnesses, Property.Toughness, "[strength] toughness") with { InLas = false },
+        Stored("brittleness", "brittleness index", "B", ColumnUnits.Numbers, Property.Brittleness, "[strength] brittleness") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>

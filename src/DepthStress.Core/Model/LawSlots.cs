@@ -38,6 +38,8 @@ public static class LawSlots
         new(Property.Ucs, "[strength] ucs", false, s => s.Strength.Ucs),
         new(Property.FrictionAngle, "[strength] friction_angle", false, s => s.Strength.FrictionAngle),
         new(Property.TensileStrength, "[strength] tensile_strength", false, s => s.Strength.TensileStrength),
+        new(Property.Toughness, "[strength] toughness", false, s => s.Strength.Toughness),
+        new(Property.Brittleness, "[strength] brittleness", false, s => s.Strength.Brittleness),
         new(Property.Biot, "[biot] coefficient", true, s => s.Biot.Coefficient),
     ];
 

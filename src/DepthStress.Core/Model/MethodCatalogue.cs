@@ -25,6 +25,8 @@ public static class MethodCatalogue
         .. StrengthMethods.All,
         .. FrictionMethods.All,
         .. TensileMethods.All,
+        .. ToughnessMethods.All,
+        .. BrittlenessMethods.All,
         .. BiotMethods.All,
         .. ShallowDensityMethods.All,
         .. PressureMethods.All,

@@ -44,6 +44,9 @@ public sealed record WellSetup
     /// <summary>What was observed in the well, in the order of its rows.</summary>
     public IReadOnlyList<Observation> Observations { get; init; } = [];
 
+    /// <summary>The core plugs, which the model is compared with.</summary>
+    public CoreData Core { get; init; } = new();
+
     /// <summary>True when the user accepts methods whose coefficients were recalled, not read.</summary>
     public bool AcceptUnverified { get; init; }
 }

@@ -71,10 +71,11 @@ internal static class Bindings
             Lithologies = s.Tables("lithology", w.Lithologies, Lithology, new(), "rules that choose settings by rock inside zones; the first that holds decides"),
             Settings = StageBindings.All(s, w.Settings),
             Overburden = s.Table("overburden", w.Overburden, Overburden, "vertical stress where density is not logged"),
+            Core = s.Table("core", w.Core, CoreSection.Bind, "core plugs that the model is compared with; they never change it"),
             Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
-        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
+        foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations"]) s.Later(key);
         return bound;
     }
 

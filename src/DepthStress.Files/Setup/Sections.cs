@@ -255,6 +255,9 @@ public sealed record WellFileSections
     /// <summary>The [overburden] section.</summary>
     public OverburdenSettings Overburden { get; init; } = new();
 
+    /// <summary>The [core] section.</summary>
+    public CoreSection Core { get; init; } = new();
+
     /// <summary>The [layers] section.</summary>
     public LayerSettings Layers { get; init; } = new();
 

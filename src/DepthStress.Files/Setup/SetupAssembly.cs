@@ -51,6 +51,7 @@ internal static class SetupAssembly
             Lithologies = lithologies,
             Settings = sections.Settings,
             Overburden = sections.Overburden,
+            Core = sections.Core.Read(sections.Logs.Csv.Options(), folder, inputs, diagnostics),
             AcceptUnverified = sections.AcceptUnverified.Value,
         };
     }

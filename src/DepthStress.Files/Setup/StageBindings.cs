@@ -53,6 +53,7 @@ internal static class StageBindings
     private static ModuliSettings Moduli(ISection s, ModuliSettings c) => c with
     {
         StaticYoungs = s.Law("static_youngs", c.StaticYoungs, Property.YoungsStatic, "relation that gives static Young's modulus"),
+        StaticYoungsFactor = s.Number("static_youngs_factor", c.StaticYoungsFactor, new Interval(0.05, 20), "what the relation's static Young's modulus is multiplied with, as core plugs ask for it"),
         StaticPoisson = s.Law("static_poisson", c.StaticPoisson, Property.PoissonStatic, "choice that gives static Poisson's ratio"),
     };
 
@@ -61,6 +62,8 @@ internal static class StageBindings
         Ucs = s.Law("ucs", c.Ucs, Property.Ucs, "relation that gives unconfined compressive strength"),
         FrictionAngle = s.Law("friction_angle", c.FrictionAngle, Property.FrictionAngle, "relation that gives the angle of internal friction"),
         TensileStrength = s.Law("tensile_strength", c.TensileStrength, Property.TensileStrength, "relation that gives tensile strength"),
+        Toughness = s.Law("toughness", c.Toughness, Property.Toughness, "relation that gives mode-I fracture toughness"),
+        Brittleness = s.Law("brittleness", c.Brittleness, Property.Brittleness, "brittleness index"),
     };
 
     private static BiotSettings Biot(ISection s, BiotSettings c) => c with

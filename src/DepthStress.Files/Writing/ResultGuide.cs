@@ -1,4 +1,5 @@
 using System.Text;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -26,6 +27,7 @@ public static class ResultGuide
         Conventions(text, units);
         Columns(text, "Columns of depth.csv", DepthColumns.All, units);
         Columns(text, "Columns of layers.csv and layers.json", LayerColumns.All, units);
+        if (setup.Core.Plugs.Count > 0) Columns(text, "Columns of core.csv", CoreColumns.All, units);
         if (comparison is { Count: > 0 }) Columns(text, "Columns of comparison.csv", comparison, units);
         destination.Write(Encoding.UTF8.GetBytes(text.ToString()));
     }

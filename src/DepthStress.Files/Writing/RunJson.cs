@@ -2,6 +2,7 @@ using System.Reflection;
 using System.Text.Encodings.Web;
 using System.Text.Json;
 using System.Text.Json.Nodes;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
@@ -55,6 +56,7 @@ public static class RunJson
             ["setup"] = setup.Json,
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
             ["predictions"] = Array(model.Predictions.Select(Predicted)),
+            ["core"] = CoreComparison.Of(model) is { } core ? CoreJson.Of(core) : null,
             ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),

@@ -61,6 +61,14 @@ public class CatalogueStandingTests
         ["krief-1990-shear-modulus"] = Standing.Confirmed, // Zhang 2019 p. 78 eqs 2.90-2.91
         ["krief-1990-shear-porosity"] = Standing.Confirmed, // Zhang 2019 p. 79 eq. 2.94
         ["density-porosity"] = Standing.Identity, // mass balance
+        ["zhang-2002-tensile-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-tensile-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-ucs-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-modulus-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-velocity-toughness"] = Standing.FromMemory,
+        ["rickman-2008"] = Standing.FromMemory,
+        ["strength-ratio-brittleness"] = Standing.Identity, // definition
+        ["strength-contrast-brittleness"] = Standing.Identity, // definition
         ["griffith-tensile"] = Standing.Identity, // from Griffith's criterion
         ["hashin-shtrikman-bound"] = Standing.Identity, // from the bound on the bulk modulus
 

@@ -14,6 +14,7 @@ public sealed class CliUnitSystemTests : IDisposable
         ("_mpa", "_psi", 1e6 / 6894.757293168361),
         ("_gpa", "_mpsi", 1e3 / 6894.757293168361),
         ("_kpa_m", "_psi_ft", 1e3 * 0.3048 / 6894.757293168361),
+        ("_mpa_m05", "_psi_in05", 1e6 / 6894.757293168361 / 0.15937377450509227), // root of 0.0254 m
         ("_emw_g_cm3", "_emw_lb_gal", 1e3 * 231 * Inch * Inch * Inch / 0.45359237),
     ];
 

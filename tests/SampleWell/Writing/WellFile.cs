@@ -131,7 +131,11 @@ internal static class WellFile
         [layers]
         max_thickness = "150 m"
 
-        # The tests made in the well are in quillback-4-observations.csv, the laboratory table of the plugs in quillback-4-core.csv.
+        [core]
+        files = ["quillback-4-core.csv"]
+        depth_shift_limit = "3 m"            # the summary says whether another depth would fit better
+
+        # The tests made in the well are in quillback-4-observations.csv.
 
         """;
 }
