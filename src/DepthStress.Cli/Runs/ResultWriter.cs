@@ -1,6 +1,5 @@
 using System.Runtime.ExceptionServices;
 using DepthStress.Core.Diagnostics;
-using DepthStress.Core.Layers;
 using DepthStress.Files.Writing;
 using DepthStress.Report;
 
@@ -18,7 +17,7 @@ internal static class ResultWriter
     {
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
-        var layers = LayerBuilder.Build(model, file.Sections.Layers);
+        var layers = well.Layers;
         (string Name, Action<Stream> Write)[] results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),

@@ -1,7 +1,6 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
-using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
@@ -14,7 +13,7 @@ internal static class Bindings
 {
     private static readonly Interval FractionRange = new(0, 1);
 
-    private static readonly (string, DepthKind)[] DepthKinds =
+    internal static readonly (string, DepthKind)[] DepthKinds =
         [("md", DepthKind.Measured), ("tvd", DepthKind.TrueVertical), ("tvdss", DepthKind.TrueVerticalSubsea)];
 
     private static readonly (string, DatumKind)[] Datums =
@@ -71,7 +70,7 @@ internal static class Bindings
             Lithologies = s.Tables("lithology", w.Lithologies, Lithology, new(), "rules that choose settings by rock inside zones; the first that holds decides"),
             Settings = StageBindings.All(s, w.Settings),
             Overburden = s.Table("overburden", w.Overburden, Overburden, "vertical stress where density is not logged"),
-            Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
+            Layers = s.Table("layers", w.Layers, LayerBindings.All, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
         foreach (var key in (ReadOnlySpan<string>)["anisotropy", "fluids", "mud", "temperature", "casing", "observations", "core"]) s.Later(key);
@@ -199,12 +198,6 @@ internal static class Bindings
         Gaps = s.ChoiceOrQuantity("gaps", o.Gaps, GapFills, Dimension.Density, Stated, Density, "what bridges gaps in the density log"),
         BelowLog = s.ChoiceOrQuantity("below_log", o.BelowLog, BelowFills, Dimension.Density, Stated, Density, "what continues density below its last value"),
         WaterDensity = s.FluidDensity("water_density", o.WaterDensity, "density of sea water"),
-    };
-
-    private static LayerSettings Layers(ISection s, LayerSettings l) => l with
-    {
-        BarrierContrast = s.Quantity("barrier_contrast", l.BarrierContrast, Sign.Positive, Dimension.Pressure, "how much a layer's Shmin must exceed a target's to count as a barrier"),
-        MaxThickness = s.Quantity("max_thickness", l.MaxThickness, Sign.Positive, Dimension.Length, "greatest true vertical thickness of a layer"),
     };
 
     private static OutputSection Output(ISection s, OutputSection o) => o with

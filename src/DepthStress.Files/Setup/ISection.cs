@@ -48,6 +48,9 @@ internal interface ISection
     /// <summary>A quantity with a unit, in SI.</summary>
     Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc);
 
+    /// <summary>A list of quantities with units, in SI; one quantity is a list of one.</summary>
+    Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc);
+
     /// <summary>A fluid density or the pressure gradient of such a fluid, in kg/m3.</summary>
     Setting<double> FluidDensity(string key, Setting<double> current, string doc);
 

@@ -94,6 +94,15 @@ internal sealed class ReadingSection : ISection
         Read(key, current, node => Quantity(node, key, sign, dimension));
 
     /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Read<IReadOnlyList<double>>(key, current, node =>
+        {
+            List<TomlNode> items = node is TomlArray array ? array.Items : [node];
+            var values = items.ConvertAll(item => Quantity(item, key, Sign.Any, dimension));
+            return values.TrueForAll(v => v.HasValue) ? values.ConvertAll(v => v!.Value) : null;
+        });
+
+    /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) => Read<double>(key, current, node =>
     {
         if (node is not TomlText text) return NoUnit(node, key, [Dimension.Density, Dimension.PressureGradient]);

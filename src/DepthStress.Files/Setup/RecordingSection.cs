@@ -48,6 +48,10 @@ internal sealed class RecordingSection : ISection
         Add(key, current, v => Show(v, dimension));
 
     /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Add(key, current, v => new JsonArray([.. v.Select(n => (JsonNode)Show(n, dimension))]));
+
+    /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) => Add(key, current, v => Show(v, Dimension.Density));
 
     /// <inheritdoc/>

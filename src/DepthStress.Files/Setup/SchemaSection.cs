@@ -60,6 +60,10 @@ internal sealed class SchemaSection : ISection
         Add(key, current, QuantitySchema(doc, dimension));
 
     /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Add(key, current, OneOrMany(doc, QuantitySchema(doc, dimension)));
+
+    /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) =>
         Add(key, current, QuantitySchema(doc, Dimension.Density, Dimension.PressureGradient));
 

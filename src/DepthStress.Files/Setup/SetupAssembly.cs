@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Model;
 
@@ -36,6 +37,7 @@ internal static class SetupAssembly
         var frame = Frame(well, file, wrong, diagnostics);
         var trajectory = SurveyAssembly.Path(sections.Survey, sections.Logs.Csv.Options(), file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);
+        LayerCheck.Report(sections.Layers, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
         return new WellSetup
