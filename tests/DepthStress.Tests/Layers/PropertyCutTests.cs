@@ -222,6 +222,14 @@ public class PropertyCutTests
         },
         Logs(vp));
 
+    [Fact]
+    public void A_change_of_a_constant_is_what_the_user_says_of_the_rock()
+    {
+        var below = Zone("B", 80) with { Overrides = new StageSettings { Moduli = new ModuliSettings { StaticPoisson = Chosen(ConstantPoisson(0.35)) } } };
+        var above = Zone("A", 0) with { Overrides = new StageSettings { Moduli = new ModuliSettings { StaticPoisson = Chosen(ConstantPoisson(0.2)) } } };
+        Assert.Empty(Artefacts(Run(Setup with { Zones = [above, below] }, Logs(_ => 4000))));
+    }
+
     private static IEnumerable<string> Artefacts(EarthModel model) => Texts(Layered(model, Change)).Where(t => t.Contains("artefact", StringComparison.Ordinal));
 
     // The zone above takes half the dynamic modulus. The stiff rock has (5/4)^2 = 1.56 times the modulus: of a step from 0.5 to

@@ -10,8 +10,8 @@ internal static class PropertyCut
     /// <summary>The greatest number of cells; longer logs are averaged down first.</summary>
     public const int MostCells = 20_000;
 
-    /// <summary>About how many sums of costs a wanted number of layers may take, a second or two of work.</summary>
-    private const double MostWork = 1e9;
+    /// <summary>About how many sums of costs a wanted number of layers may take: one or two seconds of work.</summary>
+    private const double MostWork = 4e9;
 
     /// <summary>Work on what a segment costs, in terms of one sum of costs.</summary>
     private const int CostWork = 6;
