@@ -55,6 +55,7 @@ public static class Application
         new InitCommand(terminal),
         new CheckCommand(terminal),
         new RunCommand(terminal),
+        new CalibrateCommand(terminal),
         new MethodsCommand(terminal),
         new SchemaCommand(terminal),
     };

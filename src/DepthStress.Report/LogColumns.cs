@@ -24,6 +24,10 @@ internal static class LogColumns
 
     public static NumberColumn<EarthModel> ShearSlowness { get; } = Slowness("shear_slowness", "shear slowness", "dt_s", Property.Vs);
 
+    public static NumberColumn<EarthModel> PickedSlowness { get; } = new(
+        "trend_shale", "slowness of the shale that the normal trend was fitted to", "dt_sh", ColumnUnits.Slownesses.Metric, ColumnUnits.Slownesses.Field, "smoothed log",
+        (model, start, destination) => Copy(model, Property.PickedSlowness, start, destination));
+
     private static NumberColumn<EarthModel> Stored(string id, string title, string symbol, ColumnUnit unit, Property property) =>
         new(id, title, symbol, unit, unit, "log", (model, start, destination) => Copy(model, property, start, destination));
 

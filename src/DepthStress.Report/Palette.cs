@@ -14,6 +14,7 @@ internal static class Palette
     public const int Sky = 0x3E95D6;
     public const int Grey = 0x8A9199;
 
+    public const int Paper = 0xFFFFFF;
     public const int Text = 0x1E2A33;
     public const int FaintText = 0x5A666F;
     public const int Grid = 0xD9DEDF;

@@ -38,18 +38,22 @@ public static class StressPicture
         var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
 
         var legendTop = PageFrame.Margin + PageFrame.TitleHeight;
-        var plotTop = legendTop + (2 * LegendLine) + AxisHeight + 6;
-        var axis = new DepthAxis(finite.Min(), finite.Max(), plotTop, PageFrame.LongSide - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 16);
+        var comparisons = ComparisonCurves.Of(model);
         var (left, right, names) = (PageFrame.Margin + AxisWidth, sheet.Width - PageFrame.Margin, ZoneStrip.Width(zones));
+        var keys = ComparisonCurves.Keys(comparisons, right - left);
+        var plotTop = legendTop + ((2 + keys.Count) * LegendLine) + AxisHeight + 6;
+        var axis = new DepthAxis(finite.Min(), finite.Max(), plotTop, PageFrame.LongSide - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 16);
         var middle = left + ((right - names - left) * 0.58);
-        var views = new[] { TrackTable.StressPanels.Stress, TrackTable.StressPanels.Gradient }
+        var views = new[] { TrackTable.StressPanels.Stress with { Curves = [.. comparisons, .. TrackTable.StressPanels.Stress.Curves] }, TrackTable.StressPanels.Gradient }
             .Select(d => TrackView.Read(model, d, units, tvds, axis)).ToArray();
 
         DrawFrame(sheet, model, units, axis, zones, left, right - names - 8, right);
         if (views[0] is { } stress)
         {
             DrawLegend(sheet, model, units, stress, left, right, legendTop);
+            ComparisonCurves.DrawKeys(sheet, keys, left, legendTop + (2.5 * LegendLine), LegendLine);
             DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle);
+            ComparisonCurves.DrawLetters(sheet, stress, comparisons, new Panel(left, middle, stress.Scales[0], axis));
         }
 
         if (views[1] is { } gradient)
@@ -74,7 +78,7 @@ public static class StressPicture
     private static void DrawLegend(Sheet sheet, EarthModel model, UnitSystem units, TrackView stress, double left, double right, double top)
     {
         var (x, y) = (left, top + (LegendLine / 2));
-        foreach (var curve in stress.Traces.Select(t => t.Curve).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure))
+        foreach (var curve in stress.Traces.Select(t => t.Curve).Where(c => !ComparisonCurves.Has(model, c)).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure))
         {
             var text = curve.Column == HydrostaticColumns.Pressure ? Hydrostatic(model, units) : $"{curve.Column.Symbol}, {curve.Column.Title}";
             var width = 28 + PlainText.Width(text, Small.Size, false);
@@ -108,7 +112,7 @@ public static class StressPicture
 
         for (var i = 0; i < view.Traces.Count; i++) CurveDrawing.Draw(sheet, new Panel(left, right, scale, axis), view.Traces[i], i);
         sheet.Outline(new OxyRect(left, axis.ScreenTop, right - left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
-        var off = view.Traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Column.Symbol}: {PageTexts.OffScale(t.OffScale)}");
+        var off = view.Traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Label.Split(',')[0]}: {PageTexts.OffScale(t.OffScale)}");
         sheet.Write(new ScreenPoint(left, axis.ScreenBase + 9), string.Join(", ", off), Small);
     }
 }

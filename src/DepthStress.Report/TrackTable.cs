@@ -36,13 +36,19 @@ public static class TrackTable
         [
             Same(LogColumns.ShearSlowness, "shear", new(Rust), new(440, 40), Property.Vs),
             Same(LogColumns.CompressionalSlowness, "compressional", new(Ink), new(240, 40), Property.Vp),
+            Same(LogColumns.PickedSlowness, "shale of the trend", new(Gold, 1.6), new(240, 40)),
+            Same(Column("normal_slowness"), "normal trend", new(Teal, 1.2, Dashed), new(240, 40)),
         ]),
         new("density", "Density, neutron",
         [
             Same(LogColumns.Neutron, "neutron", new(Sky, 0.7), new(0.45, -0.15)),
             Same(Column("density"), "bulk density", new(Plum), new(1.95, 2.95), Property.Density),
         ]),
-        new("porosity", "Porosity", [Same(Column("porosity"), "porosity", new(Teal), new(0.5, 0, 5))]),
+        new("porosity", "Porosity",
+        [
+            Same(Column("porosity"), "porosity", new(Teal), new(0.5, 0, 5)),
+            Same(Column("normal_porosity"), "normal trend", new(Rust, 1.2, Dashed), new(0.5, 0, 5)),
+        ]),
         new("youngs", "Young's modulus",
         [
             new(Column("youngs_dynamic"), "dynamic", new(Gold), new(0, 80), new(0, 12)),

@@ -25,6 +25,10 @@ public static class SampleLogs
     /// <returns>The hidden truth and what was spoiled.</returns>
     public static SampleResult Write(string folder, ulong seed) => Write(folder, WellPlans.Drawn(seed));
 
+    /// <summary>Writes the tests of a well that was written, made again with other errors, as large as their rows state.</summary>
+    public static void WriteTestsAgain(string path, SampleResult well, ulong seed) =>
+        Observation.Write(path, new Observations(well.Truth, new TestIntervals(well.Truth, well.Damage), seed, asStated: true).All());
+
     /// <summary>The hidden truth and what sound tools read of it in both runs.</summary>
     internal static (Truth Truth, LogRun Upper, LogRun Lower) Record(WellPlan plan)
     {
@@ -44,7 +48,7 @@ public static class SampleLogs
         RunCsv.Write(folder, lower);
         LasFile.Write(Path.Combine(folder, "quillback-4.las"), "Quillback 4", plan, upper, lower);
         SurveyCsv.WriteMeasured(Path.Combine(folder, "quillback-4-survey.csv"), plan);
-        Observation.Write(Path.Combine(folder, "quillback-4-observations.csv"), new Observations(truth, new TestIntervals(truth, damage)).All());
+        Observation.Write(Path.Combine(folder, "quillback-4-observations.csv"), new Observations(truth, new TestIntervals(truth, damage), plan.Seed).All());
         CoreCsv.Write(Path.Combine(folder, "quillback-4-core.csv"), truth);
         WellFile.Write(Path.Combine(folder, "quillback-4.toml"), truth, upper, lower);
         return new SampleResult(truth, damage);

@@ -13,7 +13,7 @@ internal static class BarrierPrinter
     {
         var (file, _, model, _) = well;
         var (units, settings) = (file.Sections.Output.Units.Value, file.Sections.Layers);
-        var targets = StressTarget.Find(model, LayerBuilder.Build(model, settings), settings);
+        var targets = StressTarget.Find(model, well.Layers, settings);
         foreach (var target in targets) terminal.Output.WriteLine(Line(target, units, settings));
         if (targets.Count > 0) terminal.Output.WriteLine();
     }

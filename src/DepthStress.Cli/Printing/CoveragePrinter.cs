@@ -22,7 +22,8 @@ internal static class CoveragePrinter
         foreach (var column in table.Columns) column.Padding(0, 0, 1, 0);
         foreach (var quality in CurveQuality.Of(model))
         {
-            var columns = ingested.Roles.First(r => r.Role == quality.Role).Columns;
+            // A curve that is wholly predicted has no column.
+            var columns = ingested.Roles.FirstOrDefault(r => r.Role == quality.Role)?.Columns ?? [];
             table.AddRow(
                 quality.Role.Id,
                 Markup.Escape(Source(ingested, columns)),

@@ -1,4 +1,5 @@
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Setup;
@@ -13,6 +14,9 @@ namespace DepthStress.Cli.Runs;
 /// <param name="Pictures">How its pictures are drawn.</param>
 internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel Model, PictureOptions Pictures)
 {
+    /// <summary>The layers that the model is cut into; what is found about them is among the model's findings.</summary>
+    public required LayerTable Layers { get; init; }
+
     /// <summary>Reads and computes a well; null when its input cannot be used.</summary>
     /// <param name="path">Full path of the well file.</param>
     /// <param name="diagnostics">Gets every message.</param>
@@ -29,6 +33,9 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
         if (logs is null || diagnostics.HasErrors) return null;
         cancellation.ThrowIfCancellationRequested();
         stage("computing");
-        return Chain.Run(file.Setup, logs.Logs, diagnostics) is { } model ? new LoadedWell(file, logs, model, pictures) : null;
+        if (Chain.Run(file.Setup, logs.Logs, diagnostics) is not { } model) return null;
+        PictureChoice.Check(pictures, file.Sections.Output, model, diagnostics);
+        if (LayerBuilder.Build(model, file.Sections.Layers, diagnostics) is not { } layers) return null;
+        return new LoadedWell(file, logs, model with { Findings = FindingRules.Sort(model.Findings.Concat(layers.Findings)) }, pictures) { Layers = layers };
     }
 }

@@ -1,4 +1,6 @@
+using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Files.Setup;
 using DepthStress.Report;
@@ -21,7 +23,39 @@ internal static class PictureChoice
 
         var scales = new Dictionary<string, CurveScale>();
         foreach (var scale in output.Scales) Add(scale, units, scales, diagnostics);
-        return new PictureOptions(units, output.Tracks.IsSet ? output.Tracks.Value : null, scales);
+        return new PictureOptions(units, output.Tracks.IsSet ? output.Tracks.Value : null, scales, PolygonDepths(output, diagnostics));
+    }
+
+    /// <summary>Warns of depths of stress polygons that the well does not have.</summary>
+    public static void Check(PictureOptions pictures, OutputSection output, EarthModel model, DiagnosticBag diagnostics)
+    {
+        foreach (var (depth, kind) in pictures.Depths ?? [])
+        {
+            if (StressState.At(model, depth, kind) is null)
+                diagnostics.Warning(output.PolygonDepths.Source.Position, $"[output] polygon_depths: found {pictures.Units.Show(Quantity.Length(depth))}, expected a depth within the logs; it is left out");
+        }
+    }
+
+    private static List<(double Depth, DepthKind Kind)>? PolygonDepths(OutputSection output, DiagnosticBag diagnostics)
+    {
+        var (depths, kind) = (output.PolygonDepths, output.PolygonDepthKind);
+        if (!depths.IsSet)
+        {
+            if (kind.IsSet) diagnostics.Error(kind.Source.Position, "[output] polygon_depth_kind is set without polygon_depths, expected both or neither");
+            return null;
+        }
+
+        if (!kind.IsSet) diagnostics.Error(depths.Source.Position, "[output] polygon_depth_kind is not set; expected \"md\", \"tvd\" or \"tvdss\"");
+        if (depths.Value.Count is 0 or > StressState.MostChosen)
+            diagnostics.Error(depths.Source.Position, FormattableString.Invariant($"[output] polygon_depths: found {depths.Value.Count} depths, expected 1 to {StressState.MostChosen}"));
+        var known = new List<(double, DepthKind)>();
+        foreach (var text in depths.Value)
+        {
+            if (QuantityText.TryParse(text, [Dimension.Length], out var si, out _, out var problem)) known.Add((si, kind.Value));
+            else diagnostics.Error(depths.Source.Position, $"[output] polygon_depths: {problem}");
+        }
+
+        return known;
     }
 
     private static void Add(ScaleSection scale, UnitSystem units, Dictionary<string, CurveScale> scales, DiagnosticBag diagnostics)

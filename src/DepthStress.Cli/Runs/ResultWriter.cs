@@ -1,6 +1,7 @@
 using System.Runtime.ExceptionServices;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
-using DepthStress.Core.Layers;
+using DepthStress.Core.Model;
 using DepthStress.Files.Writing;
 using DepthStress.Report;
 
@@ -18,8 +19,8 @@ internal static class ResultWriter
     {
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
-        var layers = LayerBuilder.Build(model, file.Sections.Layers);
-        (string Name, Action<Stream> Write)[] results =
+        var layers = well.Layers;
+        List<(string Name, Action<Stream> Write)> results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
             ("results.las", s => ResultsLas.Write(model, units, s)),
@@ -27,9 +28,14 @@ internal static class ResultWriter
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
-            ("README.txt", s => ResultGuide.Write(file.Setup, units, s)),
+            ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
+            ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
         ];
+
+        if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
+        if (model.Setup.Observations.Count > 0) results.Add(("observations.csv", s => ObservationsCsv.Write(Comparison.Of(model), units, s)));
+        if (CoreComparison.Of(model) is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));
 
         using var target = ResultFolder.Begin(folder);
         try

@@ -7,9 +7,9 @@ namespace DepthStress.Core.Catalogue;
 public ref struct LawInputs
 {
     /// <summary>The most inputs a law may have.</summary>
-    public const int Most = 6;
+    public const int Most = 7;
 
-    private ReadOnlySpan<double> _a, _b, _c, _d, _e, _f;
+    private ReadOnlySpan<double> _a, _b, _c, _d, _e, _f, _g;
 
     /// <summary>Number of columns.</summary>
     public int Count { get; private set; }
@@ -23,6 +23,7 @@ public ref struct LawInputs
         3 => _d,
         4 => _e,
         5 => _f,
+        6 => _g,
         _ => throw new ArgumentOutOfRangeException(nameof(index)),
     };
 
@@ -37,7 +38,8 @@ public ref struct LawInputs
             case 3: _d = column; break;
             case 4: _e = column; break;
             case 5: _f = column; break;
-            default: throw new InvalidOperationException("A law has at most six inputs.");
+            case 6: _g = column; break;
+            default: throw new InvalidOperationException("A law has at most seven inputs.");
         }
     }
 }

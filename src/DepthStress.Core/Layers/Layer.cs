@@ -1,4 +1,5 @@
 using DepthStress.Core.Logs;
+using DepthStress.Core.Model;
 
 namespace DepthStress.Core.Layers;
 
@@ -43,6 +44,18 @@ public sealed record Layer
     /// <summary>Share of its thickness that has no Shmin or one that does not rest on measured logs alone, 0 to 1.</summary>
     public required double NotMeasured { get; init; }
 
+    /// <summary>Share of its thickness without static moduli or Shmin, 0 to 1; NaN when it is not known.</summary>
+    public double Missing { get; init; } = double.NaN;
+
+    /// <summary>How far the horizontal stresses at log scale lie from a straight line over the layer.</summary>
+    public IReadOnlyDictionary<Property, StressMisfit> Misfits { get; init; } = new Dictionary<Property, StressMisfit>();
+
+    /// <summary>True vertical thickness of the nearest stress barrier above, m; NaN when there is none or nobody knows.</summary>
+    public double BarrierAbove { get; init; } = double.NaN;
+
+    /// <summary>True vertical thickness of the nearest stress barrier below, m; NaN when there is none or nobody knows.</summary>
+    public double BarrierBelow { get; init; } = double.NaN;
+
     /// <summary>Means over true vertical thickness by property; NaN when no sample has a value.</summary>
     public required IReadOnlyDictionary<Property, double> Means { get; init; }
 
@@ -60,8 +73,15 @@ public sealed record Layer
 
     /// <summary>Top, base and mean of a stress; NaN when there is none.</summary>
     public LayerProfile Profile(Property property) => Profiles.TryGetValue(property, out var profile) ? profile : LayerProfile.None;
+
+    /// <summary>Misfit of a stress; NaN when it has none.</summary>
+    public StressMisfit Misfit(Property property) => Misfits.TryGetValue(property, out var misfit) ? misfit : StressMisfit.None;
 }
 
 /// <summary>The layers of a well, from top to bottom.</summary>
 /// <param name="Layers">The layers.</param>
-public sealed record LayerTable(IReadOnlyList<Layer> Layers);
+public sealed record LayerTable(IReadOnlyList<Layer> Layers)
+{
+    /// <summary>What a reader should know about the cut.</summary>
+    public IReadOnlyList<Finding> Findings { get; init; } = [];
+}

@@ -1,3 +1,4 @@
+using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 
@@ -9,26 +10,42 @@ public static class LayerBuilder
     private static readonly Property[] Averaged =
     [
         Property.Density, Property.YoungsStatic, Property.PoissonStatic, Property.Biot, Property.Porosity, Property.ShaleVolume,
-        Property.Ucs, Property.FrictionAngle, Property.TensileStrength, Property.YoungsDynamic, Property.PoissonDynamic,
+        Property.Ucs, Property.FrictionAngle, Property.TensileStrength, Property.Toughness, Property.YoungsDynamic, Property.PoissonDynamic,
     ];
 
     private static readonly Property[] Profiled =
         [Property.PorePressure, Property.VerticalStress, Property.MinHorizontalStress, Property.MaxHorizontalStress];
 
+    private static readonly Property[] Horizontal = [Property.MinHorizontalStress, Property.MaxHorizontalStress];
+
     /// <summary>Makes the layer table of a model.</summary>
-    public static LayerTable Build(EarthModel model, LayerSettings settings)
+    /// <param name="model">The model.</param>
+    /// <param name="settings">How it is cut, already checked by <see cref="LayerCheck"/>.</param>
+    /// <param name="diagnostics">Gets what makes the cut impossible.</param>
+    /// <returns>The table, or null when there is none; the reason is then among the diagnostics.</returns>
+    public static LayerTable? Build(EarthModel model, LayerSettings settings, DiagnosticBag diagnostics)
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(settings);
+        ArgumentNullException.ThrowIfNull(diagnostics);
         var cells = new SampleCells(model);
+        var findings = new List<Finding>();
+        if (LayerCutter.Of(model, cells, settings, diagnostics, findings) is not { } bounds) return null;
         var weights = new double[model.Count];
         for (var i = 0; i < weights.Length; i++) weights[i] = cells.Thickness(i);
-        var layers = LayerBounds.Of(model, cells, settings).Select((b, k) => Make(model, k, b, cells, weights)).ToList();
+        var layers = bounds.Select((b, k) => Make(model, k, b, cells, weights)).ToList();
+        if (!MissingShare.Accepts(layers, settings.LargestMissingShare, diagnostics)) return null;
+        var (surface, contrast) = (model.Setup.Frame.SurfaceTvd, settings.BarrierContrast.Value);
         return new LayerTable([.. layers.Select((layer, k) => layer with
         {
             ContrastAbove = Contrast(layers, k, k - 1),
             ContrastBelow = Contrast(layers, k, k + 1),
-        })]);
+            BarrierAbove = StressTarget.BarrierThickness(layers, k, -1, surface, contrast),
+            BarrierBelow = StressTarget.BarrierThickness(layers, k, 1, surface, contrast),
+        })])
+        {
+            Findings = findings,
+        };
     }
 
     private static Layer Make(EarthModel model, int number, LayerBounds bounds, SampleCells cells, double[] weights)
@@ -46,6 +63,8 @@ public static class LayerBuilder
             Lithology = model.LithologyName(MostOf(model, bounds, weights)),
             Samples = Enumerable.Range(bounds.Start, bounds.End - bounds.Start).Count(i => model.Usable[i]),
             NotMeasured = NotMeasured(model, bounds, weights),
+            Missing = MissingShare.Of(model, bounds, weights),
+            Misfits = Horizontal.Where(model.Values.Has).ToDictionary(p => p, p => StressMisfit.Of(Column(model, Property.TrueVerticalDepth, bounds), Column(model, p, bounds), weights.AsSpan(bounds.Start))),
             Means = Averaged.Where(model.Values.Has).ToDictionary(p => p, p => Mean(Column(model, p, bounds), weights.AsSpan(bounds.Start))),
             Profiles = Profiled.Where(model.Values.Has).ToDictionary(p => p, p => Profile(Column(model, p, bounds), weights.AsSpan(bounds.Start), Column(model, Property.TrueVerticalDepth, bounds))),
         };
@@ -61,7 +80,8 @@ public static class LayerBuilder
     private static ReadOnlySpan<double> Column(EarthModel model, Property property, LayerBounds bounds) =>
         model.Values.Read(property)[bounds.Start..bounds.End];
 
-    private static double Mean(ReadOnlySpan<double> values, ReadOnlySpan<double> weights)
+    /// <summary>Weighted mean of the values that are there; NaN when none is.</summary>
+    internal static double Mean(ReadOnlySpan<double> values, ReadOnlySpan<double> weights)
     {
         double sum = 0, total = 0;
         for (var i = 0; i < values.Length; i++)

@@ -41,6 +41,12 @@ public static class LayerColumns
         Number("shmin_contrast_below", "mean Shmin of the layer below minus this one's", "", Stresses, "difference of means", l => l.ContrastBelow),
         Number("samples", "number of samples", "", Counts, "count", l => l.Samples),
         Number("share_not_measured", "share of the thickness that has no Shmin or one that does not rest on measured logs alone", "", Fractions, "stress_basis", l => l.NotMeasured),
+        Mean("toughness", "mode-I fracture toughness", "KIC", Toughnesses, Property.Toughness),
+        Number("share_missing", "share of the thickness without static moduli or Shmin", "", Fractions, "missing samples", l => l.Missing),
+        .. Misfits("shmin", "Shmin", Property.MinHorizontalStress),
+        .. Misfits("shmax", "SHmax", Property.MaxHorizontalStress),
+        Number("barrier_thickness_above", "true vertical thickness of the nearest stress barrier above", "", Depths, "[layers] barrier_contrast", l => l.BarrierAbove),
+        Number("barrier_thickness_below", "true vertical thickness of the nearest stress barrier below", "", Depths, "[layers] barrier_contrast", l => l.BarrierBelow),
     ];
 
     private static NumberColumn<LayerTable> Number(
@@ -62,6 +68,12 @@ public static class LayerColumns
         Number(id + "_top", title + " at the top", symbol, Stresses, "first sample that has one", l => l.Profile(property).Top),
         Number(id + "_base", title + " at the base", symbol, Stresses, "last sample that has one", l => l.Profile(property).Base),
         Number(id + "_mean", title, symbol, Stresses, "mean over true vertical thickness", l => l.Profile(property).Mean),
+    ];
+
+    private static IEnumerable<NumberColumn<LayerTable>> Misfits(string id, string name, Property property) =>
+    [
+        Number(id + "_misfit_mean", $"mean distance of {name} from a straight line in depth over the layer", "", Stresses, "least squares over true vertical thickness", l => l.Misfit(property).Mean),
+        Number(id + "_misfit_max", $"greatest distance of {name} from that line", "", Stresses, "least squares over true vertical thickness", l => l.Misfit(property).Greatest),
     ];
 
     private static TextColumn<LayerTable> Words(string id, string title, string formula, Func<Layer, string> word) =>

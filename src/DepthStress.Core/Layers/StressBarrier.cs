@@ -44,6 +44,14 @@ public sealed record StressTarget(string Zone, double Shmin, StressBarrier? Abov
         return [.. model.Setup.Zones.Where(z => z.Target).Select(z => Find(z.Name, model, table.Layers, settings.BarrierContrast.Value))];
     }
 
+    /// <summary>True vertical thickness of the nearest barrier above (step -1) or below (step 1) a single layer, m; NaN when there is none or nobody knows.</summary>
+    internal static double BarrierThickness(IReadOnlyList<Layer> layers, int layer, int step, double surface, double least)
+    {
+        double Below(Layer l) => l.Profile(Property.MinHorizontalStress).Depth - surface;
+        var gradient = Least(layers[layer]) / Below(layers[layer]);
+        return Nearest(layers, layer, step, l => Least(l) - (gradient * Below(l)), least, out _)?.Thickness ?? double.NaN;
+    }
+
     private static StressTarget Find(string name, EarthModel model, IReadOnlyList<Layer> layers, double least)
     {
         var inside = Enumerable.Range(0, layers.Count).Where(k => layers[k].Zone == name).ToList();

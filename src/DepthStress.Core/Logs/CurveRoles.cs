@@ -40,7 +40,7 @@ public static class CurveRoles
         new("medium_resistivity", "medium resistivity", Property.MediumResistivity, [Resistivity], 0.02, 20000,
             "RMED", "ILM", "RESM", "RM", "AT30"),
         new("shallow_resistivity", "shallow resistivity", Property.ShallowResistivity, [Resistivity], 0.02, 20000,
-            "RSHAL", "LLS", "SFL", "SFLU", "RESS", "RS", "AT10"),
+            "RSHAL", "RSHA", "LLS", "SFL", "SFLU", "RESS", "RS", "AT10"),
         new("temperature", "formation temperature", Property.Temperature, [Temperature], 250, 600,
             "TEMP", "BHT", "FTEMP"),
         new("porosity", "porosity", Property.Porosity, [Fraction], 0, 0.7,

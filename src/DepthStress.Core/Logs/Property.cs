@@ -215,4 +215,58 @@ public enum Property
 
     /// <summary>Biot's coefficient along the beds; missing in isotropic rock.</summary>
     BiotHorizontal,
+
+    /// <summary>Deep resistivity of normally compacted shale, ohm.m.</summary>
+    NormalResistivity,
+
+    /// <summary>Porosity of normally compacted shale, v/v.</summary>
+    NormalPorosity,
+
+    /// <summary>Slowness of the shale samples a normal trend was fitted to, smoothed as they were, s/m; missing elsewhere.</summary>
+    PickedSlowness,
+
+    /// <summary>Effective stress where normally compacted shale has the sample's slowness, Pa.</summary>
+    EquivalentStress,
+
+    /// <summary>Parameter: slowness of the normal trend at the ground or mudline, s/m.</summary>
+    TrendSurfaceSlowness,
+
+    /// <summary>Parameter: slowness that the normal trend tends to at great depth, s/m.</summary>
+    TrendMatrixSlowness,
+
+    /// <summary>Parameter: porosity of the normal trend at the ground or mudline, v/v.</summary>
+    TrendSurfacePorosity,
+
+    /// <summary>Parameter: depth over which the exponential of the normal trend changes by a factor e, m.</summary>
+    TrendScaleLength,
+
+    /// <summary>Parameter: factor A of velocity against effective stress, ft/s/psi^B.</summary>
+    BowersFactor,
+
+    /// <summary>Parameter: exponent B of velocity against effective stress.</summary>
+    BowersExponent,
+
+    /// <summary>Parameter: unloading exponent U, 1 or more.</summary>
+    BowersUnloading,
+
+    /// <summary>Parameter: velocity where unloading began, m/s.</summary>
+    BowersMaxVelocity,
+
+    /// <summary>Parameter: effective stress that reduces porosity by a factor e, Pa.</summary>
+    CompactionStress,
+
+    /// <summary>Mode-I fracture toughness, Pa.m^0.5.</summary>
+    Toughness,
+
+    /// <summary>A brittleness index, a number that compares only within one index.</summary>
+    Brittleness,
+
+    /// <summary>True vertical depth below the ground, offshore below the sea surface, m; only comparison relations take it.</summary>
+    DepthBelowGroundOrSea,
+
+    /// <summary>Parameter of comparison relations: ratio of effective stresses, or the ratio it is made from.</summary>
+    MatrixStressRatio,
+
+    /// <summary>Least horizontal stress by a relation that the model is compared with, Pa; it never enters the model.</summary>
+    ComparisonShmin,
 }

@@ -41,4 +41,13 @@ public sealed class PropertyTable
         if (values.Length != Count) throw new ArgumentException("The column's length differs from the table's.", nameof(values));
         _columns[(int)property] = values;
     }
+
+    /// <summary>A table that shares every column but some, which it lacks: what is written there stays its own.</summary>
+    internal PropertyTable Sharing(params ReadOnlySpan<Property> without)
+    {
+        var table = new PropertyTable(Count);
+        _columns.CopyTo(table._columns, 0);
+        foreach (var property in without) table._columns[(int)property] = null;
+        return table;
+    }
 }

@@ -46,10 +46,14 @@ public static class Chain
         if (PressureStage.Overburden(setup, logs[Property.Density], table, usable, diagnostics, findings, uses) is not { } densityOrigins) return null;
         logs = AnisotropyStage.Apply(setup, logs, table, runs, uses, findings);
         LawColumns.Derive(table, runs);
-        PressureStage.PorePressure(setup, table, runs, uses);
+        LawStage.Apply(LawSlots.Porosity, table, runs, uses);
+        var pressure = PressureStage.PorePressure(setup, table, runs, uses);
+        if (!pressure.Report(diagnostics, setup.Position)) return null;
+        findings.AddRange(pressure.Findings);
         RockStage(table, runs, uses, findings);
         TemperatureStage.Apply(setup, table, runs);
         StressStage.Apply(setup, table, runs);
+        var comparisons = ComparisonStage.Apply(setup, table, runs, uses);
 
         var model = new EarthModel
         {
@@ -64,6 +68,8 @@ public static class Chain
             StressBasis = StressStage.Basis(setup, logs, densityOrigins, table, runs, lithologies),
             LawUses = uses,
             Predictions = predictions,
+            Trends = pressure.Trends,
+            Comparisons = comparisons,
             Findings = findings,
         };
         return model with { Findings = FindingRules.Sort(findings.Concat(FindingRules.All.SelectMany(rule => rule(model)))) };
@@ -99,7 +105,7 @@ public static class Chain
             }
         }
 
-        foreach (var slot in LawSlots.Rock)
+        foreach (var slot in LawSlots.Rock.Skip(1))
         {
             LawStage.Apply(slot, table, runs, uses);
             if (slot.Property == Property.PoissonStatic) VtiStaticStage.Moduli(table, runs, findings);

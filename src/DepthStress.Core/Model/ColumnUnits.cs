@@ -26,6 +26,9 @@ public static class ColumnUnits
     /// <summary>Fractions of volume.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Fractions { get; } = (new(Units.Fraction, 4), new(Units.Fraction, 4));
 
+    /// <summary>Resistivities.</summary>
+    public static (ColumnUnit Metric, ColumnUnit Field) Resistivities { get; } = (new(Units.OhmMetre, 4), new(Units.OhmMetre, 4));
+
     /// <summary>Pure numbers.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Numbers { get; } = (new(Units.One, 5), new(Units.One, 5));
 
@@ -37,6 +40,9 @@ public static class ColumnUnits
 
     /// <summary>Stresses, pressures and strengths.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Stresses { get; } = (new(Units.Megapascal, 4), new(Units.Psi, 1));
+
+    /// <summary>Fracture toughness.</summary>
+    public static (ColumnUnit Metric, ColumnUnit Field) Toughnesses { get; } = (new(Units.MegapascalRootMetre, 4), new(Units.PsiRootInch, 1));
 
     /// <summary>Pressure gradients.</summary>
     public static (ColumnUnit Metric, ColumnUnit Field) Gradients { get; } = (new(Units.KilopascalPerMetre, 4), new(Units.PsiPerFoot, 5));

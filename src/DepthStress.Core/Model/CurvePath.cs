@@ -49,6 +49,7 @@ internal static class CurvePath
             $"the path of the hole follows the curve {curve.Source}, read as {depth.Reading}; above its first value at {Quantity.Length(md[0])} measured depth the hole is taken as straight from the datum"));
         var followed = setup with { Trajectory = path };
         ZoneCheck.Report(followed, diagnostics);
+        ObservationCheck.Report(followed, diagnostics);
         return diagnostics.HasErrors ? null : followed;
     }
 

@@ -75,6 +75,11 @@ public static class DepthColumns
         Layered("biot_vertical", "Biot's coefficient across the beds of layered rock", "alpha_v", ColumnUnits.Numbers, Property.Biot, "[anisotropy]; biot where [anisotropy] is chosen"),
         Layered("biot_horizontal", "Biot's coefficient along the beds of layered rock", "alpha_h", ColumnUnits.Numbers, Property.BiotHorizontal, "[anisotropy], [biot] coefficient"),
         Stored("temperature", "temperature of the rock", "T", Temperatures, Property.Temperature, "log or [temperature]") with { InLas = false },
+        Stored("normal_slowness", "compressional slowness of the normal trend", "dt_n", Slownesses, Property.NormalSlowness, "[pore_pressure] trend or normal_trend") with { InLas = false },
+        Stored("normal_resistivity", "resistivity of the normal trend", "R_n", Resistivities, Property.NormalResistivity, "[pore_pressure.normal_trend]") with { InLas = false },
+        Stored("normal_porosity", "porosity of the normal trend", "phi_n", Fractions, Property.NormalPorosity, "[pore_pressure.normal_trend]") with { InLas = false },
+        Stored("toughness", "mode-I fracture toughness", "KIC", Toughnesses, Property.Toughness, "[strength] toughness") with { InLas = false },
+        Stored("brittleness", "brittleness index", "B", ColumnUnits.Numbers, Property.Brittleness, "[strength] brittleness") with { InLas = false },
     ];
 
     /// <summary>The columns of numbers.</summary>

@@ -1,5 +1,6 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Logs;
+using DepthStress.Core.Pressure;
 
 namespace DepthStress.Core.Model;
 
@@ -46,6 +47,12 @@ public sealed record EarthModel
 
     /// <summary>What was predicted because it was not logged.</summary>
     public IReadOnlyList<Prediction> Predictions { get; init; } = [];
+
+    /// <summary>The exponential normal trends that pore pressure rests on, from top to bottom; those given as points are settings.</summary>
+    public IReadOnlyList<FittedTrend> Trends { get; init; } = [];
+
+    /// <summary>Curves that the model's least stress is compared with.</summary>
+    public IReadOnlyList<ComparisonCurve> Comparisons { get; init; } = [];
 
     /// <summary>What a reader should know, most important first.</summary>
     public IReadOnlyList<Finding> Findings { get; init; } = [];

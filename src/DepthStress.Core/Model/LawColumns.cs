@@ -47,12 +47,17 @@ internal static class LawColumns
         var wanted = runs.Select(r => r.Settings).Distinct<StageSettings>(ReferenceEqualityComparer.Instance)
             .SelectMany(s => LawSlots.All.Select(slot => slot.Choice(s)).Where(c => c.IsSet))
             .SelectMany(c => c.Value.Inputs).Select(i => i.Property).ToHashSet();
-        if (runs.Any(r => r.Settings.PorePressure.Method is { IsSet: true, Value: PorePressureMethod.EatonSonic })) wanted.Add(Property.CompressionalSlowness);
+        foreach (var settings in runs.Select(r => r.Settings.PorePressure).Distinct(ReferenceEqualityComparer.Instance).Cast<PorePressureSettings>())
+        {
+            if (settings.Method.IsSet && ShaleMethod.Of(settings.Method.Value) is { } method) wanted.Add(method.Log);
+        }
+
         Invert(table, Property.Vp, Property.CompressionalSlowness, wanted);
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }
 
-    private static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
+    /// <summary>The column of a property for one run of samples, or the one value of a parameter; missing when there is none.</summary>
+    public static ReadOnlySpan<double> Column(Property property, PropertyTable table, SettingsRun run)
     {
         if (LawParameters.Of(property) is { } parameter) return new[] { parameter.Value(run.Settings) };
         return table.Has(property) ? table.Read(property).Slice(run.Start, run.Length) : Missing;

@@ -39,6 +39,16 @@ public static class LawParameters
         new(Property.MudVelocity, "[anisotropy] mud_velocity", s => s.Anisotropy.MudVelocity),
         new(Property.C11Factor, "[anisotropy] c11_factor", s => s.Anisotropy.C11Factor),
         new(Property.C12Factor, "[anisotropy] c12_factor", s => s.Anisotropy.C12Factor),
+        new(Property.TrendSurfaceSlowness, "[pore_pressure.normal_trend] surface_slowness", s => s.PorePressure.NormalTrend.SurfaceSlowness),
+        new(Property.TrendMatrixSlowness, "[pore_pressure.normal_trend] matrix_slowness", s => s.PorePressure.NormalTrend.MatrixSlowness),
+        new(Property.TrendSurfacePorosity, "[pore_pressure.normal_trend] surface_porosity", s => s.PorePressure.NormalTrend.SurfacePorosity),
+        new(Property.TrendScaleLength, "[pore_pressure.normal_trend] scale_length", s => s.PorePressure.NormalTrend.ScaleLength),
+        new(Property.BowersFactor, "[pore_pressure] bowers_a", s => s.PorePressure.BowersFactor),
+        new(Property.BowersExponent, "[pore_pressure] bowers_b", s => s.PorePressure.BowersExponent),
+        new(Property.BowersUnloading, "[pore_pressure] bowers_u", s => s.PorePressure.BowersUnloading),
+        new(Property.BowersMaxVelocity, "[pore_pressure] maximum_velocity", s => s.PorePressure.BowersMaxVelocity),
+        new(Property.CompactionStress, "[pore_pressure] compaction_stress", s => s.PorePressure.CompactionStress),
+        new(Property.MatrixStressRatio, "ratio in [horizontal_stress] compare", _ => default),
     }.ToDictionary(p => p.Property);
 
     /// <summary>The parameter behind a property, or null when the property is a column of samples.</summary>

@@ -29,7 +29,7 @@ public static class LawSlots
     /// <summary>What is predicted where it is not logged, in the order in which it is.</summary>
     public static IReadOnlyList<LawSlot> Prediction { get; } = [Density, Shear];
 
-    /// <summary>The rock properties.</summary>
+    /// <summary>The rock properties; the first, porosity, is had before pore pressure, which may rest on it.</summary>
     public static IReadOnlyList<LawSlot> Rock { get; } =
     [
         Porosity,
@@ -38,6 +38,8 @@ public static class LawSlots
         new(Property.Ucs, "[strength] ucs", false, s => s.Strength.Ucs),
         new(Property.FrictionAngle, "[strength] friction_angle", false, s => s.Strength.FrictionAngle),
         new(Property.TensileStrength, "[strength] tensile_strength", false, s => s.Strength.TensileStrength),
+        new(Property.Toughness, "[strength] toughness", false, s => s.Strength.Toughness),
+        new(Property.Brittleness, "[strength] brittleness", false, s => s.Strength.Brittleness),
         new(Property.Biot, "[biot] coefficient", true, s => s.Biot.Coefficient),
     ];
 
@@ -53,9 +55,12 @@ public static class LawSlots
     /// <summary>Where a model of anisotropy is recorded; the choice itself is a word.</summary>
     public static LawSlot Anisotropy { get; } = new(Property.BedStiffness, "[anisotropy] model", false, _ => default);
 
+    /// <summary>Where comparison relations are recorded; the choice itself is a list.</summary>
+    public static LawSlot Comparison { get; } = new(Property.ComparisonShmin, "[horizontal_stress] compare", false, _ => default);
+
     /// <summary>All whose choice is a law.</summary>
     public static IReadOnlyList<LawSlot> All { get; } = [ShaleVolume, Density, Porosity, Shear, .. Rock.Skip(1)];
 
     /// <summary>Every place of the well file that takes an entry of the catalogue.</summary>
-    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure, BedShear, Anisotropy, Anisotropy with { Property = Property.CrossStiffness }];
+    public static IReadOnlyList<LawSlot> OfCatalogue { get; } = [.. All, AboveLog with { Property = Property.MeanDensityAbove }, AboveLog, PorePressure, BedShear, Anisotropy, Anisotropy with { Property = Property.CrossStiffness }, Comparison];
 }

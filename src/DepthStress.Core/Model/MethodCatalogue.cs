@@ -4,6 +4,7 @@ using DepthStress.Core.Logs;
 using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
+using DepthStress.Core.Stress;
 
 namespace DepthStress.Core.Model;
 
@@ -24,10 +25,13 @@ public static class MethodCatalogue
         .. StrengthMethods.All,
         .. FrictionMethods.All,
         .. TensileMethods.All,
+        .. ToughnessMethods.All,
+        .. BrittlenessMethods.All,
         .. BiotMethods.All,
         .. ShallowDensityMethods.All,
         .. PressureMethods.All,
         .. AnisotropyMethods.All,
+        .. ComparisonMethods.All,
     ];
 
     /// <summary>The entry of an id, or null.</summary>

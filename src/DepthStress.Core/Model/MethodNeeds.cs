@@ -24,6 +24,7 @@ public static class MethodNeeds
         return property switch
         {
             _ when HasValues(model, property) => [],
+            Property.DepthBelowSurface or Property.DepthBelowGroundOrSea => [],
             Property.CompressionalSlowness => Missing(Property.Vp, model),
             Property.ShearSlowness => Missing(Property.Vs, model),
             Property.YoungsDynamic or Property.PoissonDynamic =>

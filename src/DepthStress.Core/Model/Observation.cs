@@ -61,6 +61,12 @@ public sealed record Observation
     /// <summary>True when the pressure was read at the surface and lacks the column of fluid in the hole.</summary>
     public bool AtSurface { get; init; }
 
+    /// <summary>
+    /// True when the pressure is stated as the density of a fluid, kg/m3, that would reach it from the datum, and its standard
+    /// deviation likewise; <see cref="ObservedInterval"/> makes a pressure of it.
+    /// </summary>
+    public bool AsDensity { get; init; }
+
     /// <summary>Density of the fluid in the hole, kg/m3; null where the row states none.</summary>
     public double? FluidDensity { get; init; }
 

@@ -58,43 +58,31 @@ internal static class PressureStage
         return profile.Origins;
     }
 
-    /// <summary>Fills pore pressure, run by run.</summary>
-    public static void PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses)
+    /// <summary>
+    /// Fills pore pressure: shale and plain lines run by run, then sands, then shifts to measured pressures. It depends on the settings of
+    /// the runs and on earlier columns alone, and may be called again with other settings.
+    /// </summary>
+    /// <param name="setup">The setup.</param>
+    /// <param name="table">The columns.</param>
+    /// <param name="runs">Samples that share their settings.</param>
+    /// <param name="uses">Gets how the laws served.</param>
+    /// <returns>The trends that were fitted, what a reader should know, and what makes the input unusable.</returns>
+    public static PressureOutcome PorePressure(WellSetup setup, PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses)
     {
-        var plans = new Dictionary<PorePressureSettings, PorePressurePlan>(ReferenceEqualityComparer.Instance);
-        var tvd = table.Read(Property.TrueVerticalDepth);
-        var pressure = table.Write(Property.PorePressure);
+        var outcome = new PressureOutcome();
+        table.Write(Property.PorePressure).Fill(double.NaN);
+        var shale = ShaleSamples.Mark(setup, table, runs, outcome);
+        var plans = PressurePlans.Prepare(setup, table, runs, shale, outcome);
+        if (outcome.Problems.Count > 0) return outcome;
         foreach (var run in runs)
         {
-            var settings = run.Settings.PorePressure;
-            if (!settings.Method.IsSet) continue;
-            if (!plans.TryGetValue(settings, out var plan)) plans.Add(settings, plan = PorePressurePlan.Prepare(setup, settings));
-            var depths = tvd.Slice(run.Start, run.Length);
-            var result = pressure.Slice(run.Start, run.Length);
-            if (plan.Law is not { } law || plan.Trend is not { } trend)
-            {
-                plan.Line.Fill(depths, result);
-                continue;
-            }
-
-            plan.Line.Fill(depths, table.Write(Property.NormalPressure).Slice(run.Start, run.Length));
-            trend.Fill(depths, setup.Frame.SolidTopTvd, table.Write(Property.NormalSlowness).Slice(run.Start, run.Length));
-            uses.Add(new LawUse(LawSlots.PorePressure, law, run.Zone, run.Lithology, LawKernel.Apply(law, LawColumns.For(law, table, run), result)));
+            if (plans.TryGetValue(run.Settings, out var plan)) plan.Fill(setup, table, run, shale, uses);
         }
-    }
 
-    /// <summary>What a pore-pressure method needs: its line, or normal pressure, trend and law.</summary>
-    private sealed record PorePressurePlan(PressureLine Line, TrendLine? Trend, Law? Law)
-    {
-        public static PorePressurePlan Prepare(WellSetup setup, PorePressureSettings settings)
-        {
-            var line = PressureLine.Prepare(
-                settings, setup.Frame, setup.Overburden.WaterDensity.Value, (depth, kind) => ZoneIndex.ToVertical(setup, depth, kind));
-            if (settings.Method.Value != PorePressureMethod.EatonSonic) return new PorePressurePlan(line, null, null);
-            var law = PressureMethods.EatonSonic;
-            if (settings.Exponent.IsSet) law = law with { Coefficients = [new Coefficient("n", settings.Exponent.Value)] };
-            return new PorePressurePlan(line, new TrendLine(settings.Trend.Value), law);
-        }
+        LeastPressure.Apply(table, runs, shale, outcome);
+        SandStage.Fill(setup, table, runs, plans, shale, outcome);
+        TestShift.Apply(setup, table, runs, outcome);
+        return outcome;
     }
 
     private static bool[] Logged(OriginTrack origins)

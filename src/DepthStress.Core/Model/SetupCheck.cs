@@ -13,8 +13,13 @@ public static class SetupCheck
     {
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(diagnostics);
-        // Where the path comes from a curve, zones are checked once it is known.
-        if (!setup.PathCurve.IsSet) ZoneCheck.Report(setup, diagnostics);
+        // Where the path comes from a curve, what lies along it is checked once it is known.
+        if (!setup.PathCurve.IsSet)
+        {
+            ZoneCheck.Report(setup, diagnostics);
+            ObservationCheck.Report(setup, diagnostics);
+        }
+
         ConditioningCheck.ReportOwners(setup, diagnostics);
         foreach (var (rule, overrides) in setup.Lithologies)
         {
@@ -66,9 +71,11 @@ public static class SetupCheck
         }
 
         HorizontalStressCheck.Report(scope);
+        ComparisonCheck.Report(scope);
     }
 
-    private static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
+    /// <summary>Reports a law whose coefficients were recalled where the well does not accept them.</summary>
+    internal static void ReportRecalled(WellSetup setup, LawSlot slot, Law law, SourcePosition position, Action<SourcePosition, string> error)
     {
         if (law.Standing == Standing.FromMemory && !setup.AcceptUnverified)
             error(position, $"{slot.Key} = \"{law.Id}\": its coefficients were recalled, not read in the source; set accept_unverified = true to use it");

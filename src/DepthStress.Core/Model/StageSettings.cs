@@ -37,6 +37,9 @@ public sealed record StageSettings
     /// <summary>Pore pressure.</summary>
     public PorePressureSettings PorePressure { get; init; } = new();
 
+    /// <summary>Fluids and their contacts.</summary>
+    public FluidSettings Fluids { get; init; } = new();
+
     /// <summary>Temperature.</summary>
     public TemperatureSettings Temperature { get; init; } = new();
 
@@ -58,6 +61,7 @@ public sealed record StageSettings
             Strength = Strength.Over(below.Strength),
             Biot = Biot.Over(below.Biot),
             PorePressure = PorePressure.Over(below.PorePressure),
+            Fluids = Fluids.Over(below.Fluids),
             Temperature = Temperature.Over(below.Temperature),
             HorizontalStress = HorizontalStress.Over(below.HorizontalStress),
         };

@@ -1,3 +1,4 @@
+using DepthStress.Core.Borehole;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
@@ -43,6 +44,18 @@ public sealed record WellSetup
 
     /// <summary>What was observed in the well, in the order of its rows.</summary>
     public IReadOnlyList<Observation> Observations { get; init; } = [];
+
+    /// <summary>How the observations are understood.</summary>
+    public ObservationSettings ObservationSettings { get; init; } = new();
+
+    /// <summary>The mud the hole was drilled with.</summary>
+    public MudSettings Mud { get; init; } = new();
+
+    /// <summary>The casing strings.</summary>
+    public CasingSettings Casing { get; init; } = new();
+
+    /// <summary>The core plugs, which the model is compared with.</summary>
+    public CoreData Core { get; init; } = new();
 
     /// <summary>True when the user accepts methods whose coefficients were recalled, not read.</summary>
     public bool AcceptUnverified { get; init; }

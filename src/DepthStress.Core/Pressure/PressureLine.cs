@@ -20,7 +20,7 @@ public sealed class PressureLine
         _gradientBelow = gradientBelow;
     }
 
-    /// <summary>Makes the plan; for a trend method, that of the normal pressure.</summary>
+    /// <summary>Makes the plan of a method that needs no log.</summary>
     /// <param name="settings">Complete settings of one method.</param>
     /// <param name="frame">The well's reference levels.</param>
     /// <param name="waterDensity">Density of sea water, kg/m3, for the pressure at the mudline.</param>
@@ -33,19 +33,36 @@ public sealed class PressureLine
         ArgumentNullException.ThrowIfNull(toVertical);
         switch (settings.Method.Value)
         {
-            case PorePressureMethod.Hydrostatic or PorePressureMethod.EatonSonic:
-                return new PressureLine([frame.HydrostaticTopTvd], [0], settings.FluidDensity.Value * Constants.StandardGravity);
             case PorePressureMethod.Gradient:
                 var reference = settings.Reference.Value;
                 var start = reference == DepthReference.Mudline ? waterDensity * Constants.StandardGravity * (frame.WaterDepth ?? 0) : 0;
                 return new PressureLine([frame.TvdOf(reference)], [start], settings.Gradient.Value * Constants.StandardGravity);
+            case PorePressureMethod.Table:
+                return Table(settings, toVertical);
             default:
-                var points = settings.Points.Value;
-                return new PressureLine(
-                    [.. points.Select(p => toVertical(p.Depth, settings.DepthKind.Value))],
-                    [.. points.Select(p => p.Pressure)],
-                    double.NaN);
+                return Hydrostatic(frame, settings.FluidDensity.Value);
         }
+    }
+
+    /// <summary>The weight of a fluid from sea level or the water table down.</summary>
+    /// <param name="frame">The well's reference levels.</param>
+    /// <param name="density">Density of the fluid, kg/m3.</param>
+    public static PressureLine Hydrostatic(DepthFrame frame, double density)
+    {
+        ArgumentNullException.ThrowIfNull(frame);
+        return new PressureLine([frame.HydrostaticTopTvd], [0], density * Constants.StandardGravity);
+    }
+
+    /// <summary>Straight lines between the points of the settings.</summary>
+    /// <param name="settings">Settings with points and their kind of depth.</param>
+    /// <param name="toVertical">Turns a table depth of the stated kind into true vertical depth, m.</param>
+    public static PressureLine Table(PorePressureSettings settings, Func<double, DepthKind, double> toVertical)
+    {
+        ArgumentNullException.ThrowIfNull(settings);
+        ArgumentNullException.ThrowIfNull(toVertical);
+        var points = settings.Points.Value;
+        return new PressureLine(
+            [.. points.Select(p => toVertical(p.Depth, settings.DepthKind.Value))], [.. points.Select(p => p.Pressure)], double.NaN);
     }
 
     /// <summary>Pore pressure at a depth, Pa; NaN above the first point of a table and below its last.</summary>

@@ -9,7 +9,7 @@ public readonly record struct TrendPoint(double Depth, double Slowness);
 /// A normal trend of slowness against depth: straight lines of the logarithm of slowness between the given points, the first
 /// and last of them carried on beyond the points (common practice: a straight line on a semilogarithmic plot).
 /// </summary>
-public sealed class TrendLine
+public sealed class TrendLine : NormalTrend
 {
     private readonly double[] _depths;
     private readonly double[] _logs;
@@ -29,8 +29,11 @@ public sealed class TrendLine
         }
     }
 
-    /// <summary>Slowness of the trend at a depth below the ground or mudline, s/m; NaN for NaN.</summary>
-    public double At(double depth)
+    /// <inheritdoc/>
+    public override TrendQuantity Quantity => TrendQuantity.Slowness;
+
+    /// <inheritdoc/>
+    public override double At(double depth)
     {
         if (double.IsNaN(depth)) return double.NaN;
         var k = Array.BinarySearch(_depths, depth);
@@ -40,14 +43,18 @@ public sealed class TrendLine
         return Math.Exp(_logs[k - 1] + (share * (_logs[k] - _logs[k - 1])));
     }
 
-    /// <summary>Fills the trend for every sample.</summary>
-    /// <param name="tvd">True vertical depth, m.</param>
-    /// <param name="solidTop">True vertical depth of the ground or mudline, m.</param>
-    /// <param name="slowness">Gets the slowness, s/m.</param>
-    /// <exception cref="ArgumentException">Lengths differ.</exception>
-    public void Fill(ReadOnlySpan<double> tvd, double solidTop, Span<double> slowness)
+    /// <inheritdoc/>
+    public override double DepthOf(double value)
     {
-        if (slowness.Length != tvd.Length) throw new ArgumentException("Lengths differ.", nameof(slowness));
-        for (var i = 0; i < tvd.Length; i++) slowness[i] = At(tvd[i] - solidTop);
+        var log = Math.Log(value);
+        for (var k = 1; k < _logs.Length; k++)
+        {
+            // Above the first point and below the last the outermost lines go on.
+            if ((k > 1 && log > _logs[k - 1]) || (k + 1 < _logs.Length && log < _logs[k])) continue;
+            var slope = (_logs[k] - _logs[k - 1]) / (_depths[k] - _depths[k - 1]);
+            return slope < 0 ? _depths[k - 1] + ((log - _logs[k - 1]) / slope) : double.NaN;
+        }
+
+        return double.NaN;
     }
 }

@@ -9,6 +9,9 @@ public sealed record ModuliSettings
     /// <summary>The relation that gives static Young's modulus.</summary>
     public Setting<Law> StaticYoungs { get; init; }
 
+    /// <summary>What the relation's static Young's modulus is multiplied with, as core plugs ask for it.</summary>
+    public Setting<double> StaticYoungsFactor { get; init; } = Setting.Default(1.0);
+
     /// <summary>The choice that gives static Poisson's ratio; there is no default, because it moves the least stress most.</summary>
     public Setting<Law> StaticPoisson { get; init; }
 
@@ -19,6 +22,7 @@ public sealed record ModuliSettings
         return new ModuliSettings
         {
             StaticYoungs = StaticYoungs.Over(below.StaticYoungs),
+            StaticYoungsFactor = StaticYoungsFactor.Over(below.StaticYoungsFactor),
             StaticPoisson = StaticPoisson.Over(below.StaticPoisson),
         };
     }

@@ -15,6 +15,12 @@ public sealed record StrengthSettings
     /// <summary>The relation that gives tensile strength.</summary>
     public Setting<Law> TensileStrength { get; init; }
 
+    /// <summary>The relation that gives mode-I fracture toughness.</summary>
+    public Setting<Law> Toughness { get; init; }
+
+    /// <summary>The brittleness index.</summary>
+    public Setting<Law> Brittleness { get; init; }
+
     /// <summary>These settings where they were decided, else those below them.</summary>
     public StrengthSettings Over(StrengthSettings below)
     {
@@ -24,6 +30,8 @@ public sealed record StrengthSettings
             Ucs = Ucs.Over(below.Ucs),
             FrictionAngle = FrictionAngle.Over(below.FrictionAngle),
             TensileStrength = TensileStrength.Over(below.TensileStrength),
+            Toughness = Toughness.Over(below.Toughness),
+            Brittleness = Brittleness.Over(below.Brittleness),
         };
     }
 }

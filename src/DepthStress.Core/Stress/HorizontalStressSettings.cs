@@ -48,6 +48,12 @@ public sealed record HorizontalStressSettings
     /// <summary>True when the temperature of the rock enters.</summary>
     public bool IsThermal => !ByRatio && ThermalExpansion.IsSet;
 
+    /// <summary>A later change of pore pressure, Pa, negative in depletion; the profile states the stresses before it.</summary>
+    public Setting<double> PressureChange { get; init; }
+
+    /// <summary>Relations whose curves stand beside the model's least stress; they never enter it.</summary>
+    public Setting<IReadOnlyList<ComparisonChoice>> Compare { get; init; }
+
     /// <summary>The strains along Shmin and SHmax; null where they are not both chosen, which counts as none.</summary>
     public (double AlongShmin, double AlongShmax)? BothStrains() =>
         StrainAlongShmin.IsSet && StrainAlongShmax.IsSet ? (StrainAlongShmin.Value, StrainAlongShmax.Value) : null;
@@ -66,6 +72,8 @@ public sealed record HorizontalStressSettings
             StrainAlongShmax = StrainAlongShmax.Over(below.StrainAlongShmax),
             ShmaxAzimuth = ShmaxAzimuth.Over(below.ShmaxAzimuth),
             FrictionCoefficient = FrictionCoefficient.Over(below.FrictionCoefficient),
+            PressureChange = PressureChange.Over(below.PressureChange),
+            Compare = Compare.Over(below.Compare),
         };
     }
 }

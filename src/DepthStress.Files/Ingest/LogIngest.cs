@@ -30,24 +30,25 @@ public static class LogIngest
     {
         var section = well.Sections.Logs;
         var files = new List<LogFile>();
-        foreach (var name in section.Files.Value.Distinct(StringComparer.Ordinal))
+        foreach (var name in section.Files.Value.Distinct(StringComparer.Ordinal).Where(f => !string.IsNullOrWhiteSpace(f)))
         {
             if (LogFileReader.Read(well.Resolve(name), name, Options(section, name), diagnostics) is { } file) files.Add(file);
         }
 
         if (diagnostics.HasErrors) return null;
-        var roles = RoleAssignment.Assign(section, files, diagnostics);
+        var roles = RoleAssignment.Assign(section, files, diagnostics).ToList();
         var depths = files.ConvertAll(f => Depths(f, section, diagnostics));
         if (diagnostics.HasErrors) return null;
 
-        var grid = DepthGrid.Union(depths);
+        if (DepthMerge.Of(section.Resample, files, depths, diagnostics) is not { } merge) return null;
         var curves = new List<Curve>();
         foreach (var role in roles)
         {
-            if (Curve(role, files, depths, grid, diagnostics) is { } curve) curves.Add(curve);
+            if (Curve(role, files, depths, merge, diagnostics) is { } curve) curves.Add(curve);
         }
 
-        return diagnostics.HasErrors ? null : new IngestedLogs(new LogTable(grid, curves), files, roles);
+        ShearServing.Choose(section, roles, curves, diagnostics);
+        return diagnostics.HasErrors ? null : new IngestedLogs(new LogTable(merge.Grid, curves), files, roles);
     }
 
     private static LogReadOptions Options(LogsSection section, string file) => new()
@@ -82,9 +83,9 @@ public static class LogIngest
     }
 
     private static Curve? Curve(
-        RoleChoice choice, List<LogFile> files, List<double[]> depths, double[] grid, DiagnosticBag diagnostics)
+        RoleChoice choice, List<LogFile> files, List<double[]> depths, DepthMerge merge, DiagnosticBag diagnostics)
     {
-        var parts = new List<(ColumnChoice Column, double[] Values, bool[] Resampled)>();
+        var parts = new List<CurvePart>();
         var usable = true;
         foreach (var column in choice.Columns)
         {
@@ -96,12 +97,12 @@ public static class LogIngest
 
             var si = CurveUnits.ToSi(choice.Role, column, unit, diagnostics);
             usable &= CurveUnits.Check(choice.Role, column, unit, si, diagnostics);
-            var resampled = new bool[grid.Length];
-            var own = depths[files.IndexOf(column.File)];
-            parts.Add((column, ReferenceEquals(own, grid) ? si : DepthGrid.Bring(own, si, grid, resampled), resampled));
+            parts.Add(merge.Bring(choice.Role, column, depths[files.IndexOf(column.File)], si));
         }
 
         if (!usable) return null;
-        return Splice.Join(choice.Role, parts, grid, diagnostics);
+        var curve = Splice.Join(choice.Role, parts, merge.Grid, merge.Step);
+        merge.Report(curve, parts, diagnostics);
+        return curve;
     }
 }

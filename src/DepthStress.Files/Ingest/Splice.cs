@@ -1,6 +1,4 @@
-using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
-using static System.FormattableString;
 
 namespace DepthStress.Files.Ingest;
 
@@ -8,22 +6,25 @@ namespace DepthStress.Files.Ingest;
 internal static class Splice
 {
     /// <summary>Joins one or several runs into a curve.</summary>
-    public static Curve Join(
-        CurveRole role, IReadOnlyList<(ColumnChoice Column, double[] Values, bool[] Resampled)> parts, double[] grid, DiagnosticBag diagnostics)
+    /// <param name="role">What the curve is.</param>
+    /// <param name="parts">Its runs from top to bottom, on the wanted depths.</param>
+    /// <param name="grid">The wanted depths, m.</param>
+    /// <param name="made">The step that made samples of the parts.</param>
+    public static Curve Join(CurveRole role, IReadOnlyList<CurvePart> parts, double[] grid, string made)
     {
         var origin = parts.Count > 1 ? SampleOrigin.Spliced : SampleOrigin.Measured;
         var values = parts.Count == 1 ? parts[0].Values : new double[grid.Length];
-        var resampled = parts.Count == 1 ? parts[0].Resampled : new bool[grid.Length];
+        var changes = parts.Count == 1 ? parts[0].Changes : new SampleOrigin[grid.Length];
         var tracks = new List<OriginRun>();
         var start = 0;
-        foreach (var (column, run, marks) in parts)
+        foreach (var (column, run, marks, _) in parts)
         {
             var end = column.Source is { Base.IsSet: true } s ? FirstBelow(grid, s.Base.Value) : grid.Length;
             end = Math.Max(end, start);
             if (parts.Count > 1)
             {
                 run.AsSpan(start..end).CopyTo(values.AsSpan(start));
-                marks.AsSpan(start..end).CopyTo(resampled.AsSpan(start));
+                marks.AsSpan(start..end).CopyTo(changes.AsSpan(start));
             }
 
             var step = $"{column.Column.Name} in {column.File.Name}";
@@ -34,15 +35,13 @@ internal static class Splice
 
         // Below the last splice depth there is no run.
         values.AsSpan(start).Fill(double.NaN);
-        resampled.AsSpan(start).Clear();
+        changes.AsSpan(start).Clear();
         if (start < grid.Length) tracks.Add(new OriginRun(start, grid.Length, SampleOrigin.None, ""));
 
         var origins = OriginTrack.From(tracks);
-        var moved = resampled.Count(r => r);
-        if (moved > 0)
+        foreach (var change in (ReadOnlySpan<SampleOrigin>)[SampleOrigin.Edited, SampleOrigin.Filled])
         {
-            origins = origins.Mark(resampled, SampleOrigin.Edited, "brought onto the depths of the first file by a straight line");
-            diagnostics.Note(parts[0].Column.Column.Position, Invariant($"{role.Id}: {moved} samples were brought onto the depths of the first file by a straight line"));
+            if (changes.Contains(change)) origins = origins.Mark(Array.ConvertAll(changes, c => c == change), change, made);
         }
 
         return new Curve(role, string.Join(", ", parts.Select(p => $"{p.Column.Column.Name} in {p.Column.File.Name}")), values, origins);

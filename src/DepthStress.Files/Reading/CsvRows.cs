@@ -72,7 +72,7 @@ internal sealed class CsvRows(LogSource source, CsvReader csv, CsvDialect dialec
     private bool ReadOdd(TableBuilder table, int line, int column)
     {
         var cell = csv.GetSpan(column);
-        var kind = Cell.Read(cell, dialect.DecimalComma, out table.Row[column]);
+        var kind = table.ReadCell(cell, column);
         if (kind == CellKind.NullText && table.NullTexts.Count(column)) table.NullTexts.Place(column, source.At(line, PlaceOf(column)), cell);
         if (kind == CellKind.Bad && table.Tally.Admit(RowProblem.Cell, source.At(line))) table.BadCell(line, PlaceOf(column), column, cell);
         return kind != CellKind.Bad;

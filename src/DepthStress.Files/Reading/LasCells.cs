@@ -63,7 +63,7 @@ internal sealed class LasCells(LogSource source, TableBuilder table, LasDialect 
     private bool Read(ReadOnlySpan<byte> line, int number, CellSpan span, int column)
     {
         var cell = line.Slice(span.Start, span.Length);
-        switch (Cell.Read(cell, table.DecimalComma, out table.Row[column]))
+        switch (table.ReadCell(cell, column))
         {
             case CellKind.Bad:
                 if (table.Tally.Admit(RowProblem.Cell, source.At(number))) table.BadCell(number, Place(line, span), column, cell);

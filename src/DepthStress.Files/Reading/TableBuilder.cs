@@ -10,7 +10,8 @@ internal sealed class TableBuilder
     private readonly List<ColumnHeader> _headers;
     private readonly int _depth;
     private readonly double? _null;
-    private readonly double[] _columnNull, _columnCode;
+    private readonly double[] _columnNull;
+    private readonly ColumnCodes?[] _columnCodes;
     private readonly double[][] _values;
     private readonly int[] _missing;
     private int _rows, _capacity;
@@ -27,13 +28,13 @@ internal sealed class TableBuilder
         _values = new double[headers.Count][];
         _missing = new int[headers.Count];
         _columnNull = new double[headers.Count];
-        _columnCode = new double[headers.Count];
-        var codes = new Dictionary<string, double>(StringComparer.OrdinalIgnoreCase);
-        foreach (var (name, code) in source.Options.MissingByColumn) codes[name] = code;
+        _columnCodes = new ColumnCodes?[headers.Count];
+        var codes = new Dictionary<string, ColumnCodes>(StringComparer.OrdinalIgnoreCase);
+        foreach (var (name, code) in source.Options.MissingByColumn) codes[name] = new ColumnCodes(code);
         for (var c = 0; c < headers.Count; c++)
         {
             _columnNull[c] = nullValue ?? double.NaN;
-            _columnCode[c] = codes.TryGetValue(headers[c].Name, out var code) ? code : double.NaN;
+            _columnCodes[c] = codes.GetValueOrDefault(headers[c].Name);
         }
 
         // A positive NULL may well be a depth; a negative one is none.
@@ -57,6 +58,14 @@ internal sealed class TableBuilder
 
     /// <summary>The depth so far.</summary>
     public DepthTrack Depth { get; }
+
+    /// <summary>Reads a cell that is not a plain number into <see cref="Row"/>; a text that the well file names as missing is a cell without a value.</summary>
+    public CellKind ReadCell(ReadOnlySpan<byte> cell, int column)
+    {
+        if (_columnCodes[column]?.Has(cell) != true) return Cell.Read(cell, DecimalComma, out Row[column]);
+        Row[column] = double.NaN;
+        return CellKind.Number;
+    }
 
     /// <summary>Takes <see cref="Row"/> as the next row.</summary>
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
@@ -150,7 +159,7 @@ internal sealed class TableBuilder
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private bool IsMissing(double value, int column) =>
         (!(value > -999) && (double.IsNaN(value) || value is -999.25 or -999 or -9999))
-        || value == _columnNull[column] || value == _columnCode[column];
+        || value == _columnNull[column] || _columnCodes[column]?.Has(value) == true;
 
     private void Grow(int line)
     {

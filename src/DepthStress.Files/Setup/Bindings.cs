@@ -1,7 +1,7 @@
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
-using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
@@ -14,13 +14,15 @@ internal static class Bindings
 {
     private static readonly Interval FractionRange = new(0, 1);
 
-    private static readonly (string, DepthKind)[] DepthKinds =
+    /// <summary>The words for kinds of depth.</summary>
+    public static readonly (string, DepthKind)[] DepthKinds =
         [("md", DepthKind.Measured), ("tvd", DepthKind.TrueVertical), ("tvdss", DepthKind.TrueVerticalSubsea)];
 
     private static readonly (string, DatumKind)[] Datums =
         [("rotary table", DatumKind.RotaryTable), ("ground", DatumKind.Ground), ("sea level", DatumKind.SeaLevel)];
 
-    private static readonly (string, DepthReference)[] References =
+    /// <summary>The words for reference levels.</summary>
+    public static readonly (string, DepthReference)[] References =
     [
         ("rotary table", DepthReference.Datum), ("ground", DepthReference.Ground),
         ("sea surface", DepthReference.SeaSurface), ("mudline", DepthReference.Mudline),
@@ -31,6 +33,12 @@ internal static class Bindings
 
     private static readonly (string, Property)[] PathCurves =
         [("true_vertical_depth", Property.LoggedVerticalDepth), ("vertical_position", Property.LoggedVerticalPosition)];
+
+    private static readonly (string, HeldStrain)[] HeldStrains =
+    [
+        ("none", HeldStrain.None), ("strain_along_shmin", HeldStrain.AlongShmin), ("strain_along_shmax", HeldStrain.AlongShmax),
+        ("difference", HeldStrain.Difference),
+    ];
 
     private static readonly (string, UnitSystem)[] UnitSystems = [("metric", UnitSystem.Metric), ("field", UnitSystem.Field)];
 
@@ -47,11 +55,10 @@ internal static class Bindings
     private static readonly (string, RepeatedDepth)[] RepeatedDepths =
         [("error", RepeatedDepth.Error), ("first", RepeatedDepth.First), ("mean", RepeatedDepth.Mean)];
 
-    private static readonly (string, PorePressureMethod)[] PressureWords =
-    [
-        ("hydrostatic", PorePressureMethod.Hydrostatic), ("gradient", PorePressureMethod.Gradient), ("table", PorePressureMethod.Table),
-        (PressureMethods.EatonSonic.Id, PorePressureMethod.EatonSonic),
-    ];
+    private static readonly (string, ShearChoice)[] ShearChoices =
+        [("fast", ShearChoice.Fast), ("slow", ShearChoice.Slow), ("mean", ShearChoice.Mean)];
+
+    private static readonly (string, ResampleMethod)[] ResampleMethods = [("linear", ResampleMethod.Linear), ("mean", ResampleMethod.Mean)];
 
     private static readonly (string, DensityFill)[] GapFills =
         [("none", new(DensityFillKind.None)), ("linear", new(DensityFillKind.Linear)), ("hold", new(DensityFillKind.Hold))];
@@ -71,10 +78,14 @@ internal static class Bindings
             Lithologies = s.Tables("lithology", w.Lithologies, Lithology, new(), "rules that choose settings by rock inside zones; the first that holds decides"),
             Settings = StageBindings.All(s, w.Settings),
             Overburden = s.Table("overburden", w.Overburden, Overburden, "vertical stress where density is not logged"),
-            Layers = s.Table("layers", w.Layers, Layers, "how the profile is cut into layers"),
+            Calibration = s.Table("calibration", w.Calibration, Calibration, "what the command calibrate estimates, and how"),
+            Mud = s.Table("mud", w.Mud, HoleBindings.Mud, "the mud the hole was drilled with"),
+            Casing = s.Table("casing", w.Casing, HoleBindings.Casing, "the casing strings"),
+            Observations = s.Table("observations", w.Observations, HoleBindings.Observations, "tests made in the hole"),
+            Core = s.Table("core", w.Core, CoreSection.Bind, "core plugs that the model is compared with; they never change it"),
+            Layers = s.Table("layers", w.Layers, LayerBindings.All, "how the profile is cut into layers"),
             Output = s.Table("output", w.Output, Output, "how results are written"),
         };
-        foreach (var key in (ReadOnlySpan<string>)["fluids", "mud", "casing", "observations", "core"]) s.Later(key);
         return bound;
     }
 
@@ -95,9 +106,19 @@ internal static class Bindings
             Files = s.Texts("files", l.Files, "the log files (CSV or LAS), relative to the well file"),
             Csv = s.Table("csv", l.Csv, Csv, "how CSV files are written; what is not stated is detected"),
             RepeatedDepth = s.Choice("repeated_depth", l.RepeatedDepth, RepeatedDepths, "what neighbouring rows of the same depth are: an error, or one row: the first of them or their mean"),
+            Resample = s.Table("resample", l.Resample, Resample, "one regular depth grid for all curves, at whole multiples of its step; without it the depths of the first file lead"),
+            ShearFrom = s.Choice("shear_from", l.ShearFrom, ShearChoices, "which wave serves as shear where there are a fast and a slow one but no plain shear; mean is that of the slownesses"),
         },
         Curves,
         "the column of each role; roles not named here are found by the usual mnemonics");
+
+    private static ResampleSection Resample(ISection s, ResampleSection r) => r with
+    {
+        Step = s.Quantity("step", r.Step, Sign.Positive, Dimension.Length, "distance between depths"),
+        Method = s.Choice("method", r.Method, ResampleMethods, "a straight line between samples, or the mean over the step where it holds two or more; codes and bit sizes take the nearest sample"),
+        MaxGap = s.Quantity("max_gap", r.MaxGap, Sign.Positive, Dimension.Length, "samples further apart than this are not joined: missing between them"),
+        Position = s.Position,
+    };
 
     private static CsvSection Csv(ISection s, CsvSection c) => c with
     {
@@ -127,7 +148,7 @@ internal static class Bindings
         Column = s.Text("column", c.Column, "name of the column"),
         File = s.Text("file", c.File, "the file, when several have the column"),
         Unit = s.Text("unit", c.Unit, "the unit, when the file states none or a wrong one"),
-        Missing = s.Number("missing", c.Missing, Interval.All, "a further value that means missing"),
+        Missing = s.Codes("missing", c.Missing, "further values that mean missing"),
         Base = s.Quantity("base", c.Base, Sign.Any, Dimension.Length, "measured depth down to which this column is used"),
         Position = s.Position,
     };
@@ -201,16 +222,26 @@ internal static class Bindings
         WaterDensity = s.FluidDensity("water_density", o.WaterDensity, "density of sea water"),
     };
 
-    private static LayerSettings Layers(ISection s, LayerSettings l) => l with
+    private static CalibrationSettings Calibration(ISection s, CalibrationSettings c) => c with
     {
-        BarrierContrast = s.Quantity("barrier_contrast", l.BarrierContrast, Sign.Positive, Dimension.Pressure, "how much a layer's Shmin must exceed a target's to count as a barrier"),
-        MaxThickness = s.Quantity("max_thickness", l.MaxThickness, Sign.Positive, Dimension.Length, "greatest true vertical thickness of a layer"),
+        Free = s.Texts("free", c.Free, $"what may change: {string.Join(", ", CalibrationSettings.Words.Select(w => w.Word))}"),
+        Groups = s.Tables("groups", c.Groups, ZoneGroup, new(), "groups of zones whose strains are estimated apart; none means one pair for the well"),
+        Hold = s.Choice("hold", c.Hold, HeldStrains, "what is held of the strains when the observations do not determine both; \"none\" accepts both as estimated"),
+        Robust = s.Flag("robust", c.Robust, "true: observations far off weigh less"),
+    };
+
+    private static ZoneGroup ZoneGroup(ISection s, ZoneGroup g) => g with
+    {
+        Zones = s.Texts("zones", g.Zones, "names of the zones"),
+        Position = s.Position,
     };
 
     private static OutputSection Output(ISection s, OutputSection o) => o with
     {
         Units = s.Choice("units", o.Units, UnitSystems, "the units of the results"),
         Tracks = s.Texts("tracks", o.Tracks, "the tracks to draw, in their order"),
+        PolygonDepths = s.Texts("polygon_depths", o.PolygonDepths, "depths of the stress polygons, at most six, each with its unit"),
+        PolygonDepthKind = s.Choice("polygon_depth_kind", o.PolygonDepthKind, DepthKinds, "the kind of these depths: measured, true vertical, or true vertical below sea level"),
         Scales = s.Tables("scales", o.Scales, Scale, new(), "scales of single curves in the tracks"),
     };
 
@@ -222,41 +253,8 @@ internal static class Bindings
         Position = s.Position,
     };
 
-    /// <summary>The [pore_pressure] section.</summary>
-    public static PorePressureSettings PorePressure(ISection s, PorePressureSettings p)
-    {
-        var points = s.Tables(
-            "points", p.Points.IsSet ? p.Points.Value : [], (t, point) => Point(t, point, p.Points.Source), new(double.NaN, double.NaN), "depth and pressure of each point, from top to bottom");
-        var trend = s.Tables(
-            "trend", p.Trend.IsSet ? p.Trend.Value : [], (t, point) => TrendPoint(t, point, p.Trend.Source), new(double.NaN, double.NaN), "trend methods: slowness of normally compacted shale at depths below the ground or mudline");
-        return p with
-        {
-            Method = s.Choice("method", p.Method, PressureWords, "how pore pressure is had"),
-            FluidDensity = s.FluidDensity("fluid_density", p.FluidDensity, "hydrostatic and trend methods: density of the pore fluid"),
-            Gradient = s.FluidDensity("gradient", p.Gradient, "gradient: pressure per depth, or the density of such a fluid"),
-            Reference = s.Choice("reference", p.Reference, References, "gradient: what depth counts from"),
-            Points = points.Count > 0 ? new Setting<IReadOnlyList<PressurePoint>>(points, s.SourceOf("points")) : p.Points,
-            DepthKind = s.Choice("depth_kind", p.DepthKind, DepthKinds, "table: the kind of depth of its points"),
-            Trend = trend.Count > 0 ? new Setting<IReadOnlyList<TrendPoint>>(trend, s.SourceOf("trend")) : p.Trend,
-            Exponent = s.Number("exponent", p.Exponent, new Interval(0.1, 10), "trend methods: exponent, when it is not the published one"),
-        };
-    }
-
-    private static PressurePoint Point(ISection s, PressurePoint p, SettingSource source)
-    {
-        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth of the point");
-        var pressure = s.Quantity("pressure", Known(p.Pressure, source), Sign.NotNegative, Dimension.Pressure, "pore pressure there");
-        return new PressurePoint(depth.IsSet ? depth.Value : double.NaN, pressure.IsSet ? pressure.Value : double.NaN);
-    }
-
-    private static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
-
-    private static TrendPoint TrendPoint(ISection s, TrendPoint p, SettingSource source)
-    {
-        var depth = s.Quantity("depth", Known(p.Depth, source), Sign.Any, Dimension.Length, "depth below the ground or mudline");
-        var slowness = s.Quantity("slowness", Known(p.Slowness, source), Sign.Positive, Dimension.Slowness, "slowness of normally compacted shale there");
-        return new TrendPoint(depth.IsSet ? depth.Value : double.NaN, slowness.IsSet ? slowness.Value : double.NaN);
-    }
+    /// <summary>A number of a list's row as a setting; not set where the row says nothing.</summary>
+    public static Setting<double> Known(double value, SettingSource source) => double.IsNaN(value) ? default : new(value, source);
 
     private static DensityFill Stated(double density) => new(DensityFillKind.Stated, density);
 

@@ -3,6 +3,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -45,8 +46,14 @@ internal interface ISection
     /// <summary>A list of pure numbers; one number is a list of one.</summary>
     Setting<IReadOnlyList<double>> Numbers(string key, Setting<IReadOnlyList<double>> current, string doc);
 
+    /// <summary>Numbers and texts that mean missing; one stands for a list of one.</summary>
+    Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc);
+
     /// <summary>A quantity with a unit, in SI.</summary>
     Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc);
+
+    /// <summary>A list of quantities with units, in SI; one quantity is a list of one.</summary>
+    Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc);
 
     /// <summary>A fluid density or the pressure gradient of such a fluid, in kg/m3.</summary>
     Setting<double> FluidDensity(string key, Setting<double> current, string doc);
@@ -69,7 +76,4 @@ internal interface ISection
 
     /// <summary>A list of tables inside this one; with a shorthand key, a text stands for a table with just that key.</summary>
     IReadOnlyList<T> Tables<T>(string key, IReadOnlyList<T> current, Func<ISection, T, T> bind, T empty, string doc, string? shorthand = null);
-
-    /// <summary>A section of the contract that this version cannot honour yet.</summary>
-    void Later(string key);
 }

@@ -3,6 +3,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -16,7 +17,6 @@ internal sealed class ReadingSection : ISection
     private readonly DiagnosticBag _diagnostics;
     private readonly WrongKeys _wrong;
     private readonly List<string> _known;
-    private readonly List<string> _later = [];
 
     /// <summary>Makes the section of a table.</summary>
     public ReadingSection(TomlTable table, string path, DiagnosticBag diagnostics, WrongKeys wrong)
@@ -50,7 +50,7 @@ internal sealed class ReadingSection : ISection
     {
         foreach (var (key, item) in _table.Items)
         {
-            if (_known.Contains(key) || _later.Contains(key)) continue;
+            if (_known.Contains(key)) continue;
             var isSection = _path.Length == 0 && item.Value is TomlTable or TomlArray { Items: [TomlTable, ..] };
             var found = isSection ? $"section [{Words.Short(key)}]" : $"key \"{Words.Short(key)}\"{(_path.Length == 0 ? "" : $" in {_path}")}";
             _diagnostics.Error(item.Key, $"found the unknown {found}, expected one of {string.Join(", ", _known)}{NearestName.Hint(key, _known)}");
@@ -90,8 +90,26 @@ internal sealed class ReadingSection : ISection
         });
 
     /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) => Read(key, current, node =>
+    {
+        List<TomlNode> items = node is TomlArray array ? array.Items : [node];
+        return items.TrueForAll(i => i is TomlNumber || (i is TomlText text && !string.IsNullOrWhiteSpace(text.Value)))
+            ? new MissingCodes([.. items.OfType<TomlNumber>().Select(n => n.Value)], [.. items.OfType<TomlText>().Select(t => t.Value)])
+            : Wrong<MissingCodes>(node, $"{key} = a number, a text, or a list of numbers and texts");
+    });
+
+    /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>
         Read(key, current, node => Quantity(node, key, sign, dimension));
+
+    /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Read<IReadOnlyList<double>>(key, current, node =>
+        {
+            List<TomlNode> items = node is TomlArray array ? array.Items : [node];
+            var values = items.ConvertAll(item => Quantity(item, key, Sign.Any, dimension));
+            return values.TrueForAll(v => v.HasValue) ? values.ConvertAll(v => v!.Value) : null;
+        });
 
     /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) => Read<double>(key, current, node =>
@@ -170,14 +188,6 @@ internal sealed class ReadingSection : ISection
         }
 
         return list;
-    }
-
-    /// <inheritdoc/>
-    public void Later(string key)
-    {
-        _later.Add(key);
-        if (_table.Items.TryGetValue(key, out var item))
-            _diagnostics.Error(item.Key, $"found the section [{key}], which this version does not support yet; remove it, its content would have no effect");
     }
 
     private T Bind<T>(TomlTable table, string path, T current, Func<ISection, T, T> bind)

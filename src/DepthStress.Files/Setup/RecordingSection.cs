@@ -5,6 +5,7 @@ using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -44,8 +45,19 @@ internal sealed class RecordingSection : ISection
         Add(key, current, v => new JsonArray([.. v.Select(n => (JsonNode)n)]));
 
     /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) => Add(key, current, codes =>
+    {
+        JsonNode[] items = [.. codes.Numbers.Select(n => (JsonNode)n), .. codes.Texts.Select(t => (JsonNode)t)];
+        return items is [var one] ? one : new JsonArray(items);
+    });
+
+    /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>
         Add(key, current, v => Show(v, dimension));
+
+    /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Add(key, current, v => new JsonArray([.. v.Select(n => (JsonNode)Show(n, dimension))]));
 
     /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) => Add(key, current, v => Show(v, Dimension.Density));
@@ -84,11 +96,6 @@ internal sealed class RecordingSection : ISection
     {
         if (current.Count > 0) Json[key] = new JsonArray([.. current.Select(item => (JsonNode)Inner(item, bind))]);
         return current;
-    }
-
-    /// <inheritdoc/>
-    public void Later(string key)
-    {
     }
 
     private JsonObject Inner<T>(T current, Func<ISection, T, T> bind)

@@ -6,6 +6,7 @@ using DepthStress.Core.Model;
 using DepthStress.Core.Prediction;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
+using DepthStress.Files.Reading;
 
 namespace DepthStress.Files.Setup;
 
@@ -56,8 +57,16 @@ internal sealed class SchemaSection : ISection
         Add(key, current, OneOrMany(doc, new JsonObject { ["type"] = "number" }));
 
     /// <inheritdoc/>
+    public Setting<MissingCodes> Codes(string key, Setting<MissingCodes> current, string doc) =>
+        Add(key, current, OneOrMany(doc, new JsonObject { ["type"] = List(["number", "string"]) }));
+
+    /// <inheritdoc/>
     public Setting<double> Quantity(string key, Setting<double> current, Sign sign, Dimension dimension, string doc) =>
         Add(key, current, QuantitySchema(doc, dimension));
+
+    /// <inheritdoc/>
+    public Setting<IReadOnlyList<double>> Quantities(string key, Setting<IReadOnlyList<double>> current, Dimension dimension, string doc) =>
+        Add(key, current, OneOrMany(doc, QuantitySchema(doc, dimension)));
 
     /// <inheritdoc/>
     public Setting<double> FluidDensity(string key, Setting<double> current, string doc) =>
@@ -144,14 +153,13 @@ internal sealed class SchemaSection : ISection
                 ["anyOf"] = new JsonArray(
                     new JsonObject { ["type"] = "string", ["description"] = $"the {shorthand}'s name" },
                     table.DeepClone(),
-                    new JsonObject { ["type"] = "array", ["items"] = table }),
+                    new JsonObject
+                    {
+                        ["type"] = "array",
+                        ["items"] = new JsonObject { ["anyOf"] = new JsonArray(new JsonObject { ["type"] = "string" }, table) },
+                    }),
             };
         return current;
-    }
-
-    /// <inheritdoc/>
-    public void Later(string key)
-    {
     }
 
     private Setting<T> Add<T>(string key, Setting<T> current, JsonObject schema)

@@ -1,3 +1,5 @@
+using DepthStress.Core.Borehole;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
@@ -43,8 +45,8 @@ public sealed record CurveSource
     /// <summary>The unit, when the file states none or a wrong one.</summary>
     public Setting<string> Unit { get; init; }
 
-    /// <summary>A further value that means missing.</summary>
-    public Setting<double> Missing { get; init; }
+    /// <summary>Further values that mean missing.</summary>
+    public Setting<MissingCodes> Missing { get; init; }
 
     /// <summary>Measured depth down to which the column is used, m; the next source goes on from there.</summary>
     public Setting<double> Base { get; init; }
@@ -58,6 +60,19 @@ public sealed record CurveSource
 /// <param name="Sources">Its sources from top to bottom.</param>
 public sealed record CurveChoice(string Role, IReadOnlyList<CurveSource> Sources);
 
+/// <summary>Which of two shear waves the isotropic chain takes.</summary>
+public enum ShearChoice
+{
+    /// <summary>The faster one.</summary>
+    Fast,
+
+    /// <summary>The slower one.</summary>
+    Slow,
+
+    /// <summary>The mean of the two slownesses, sample by sample.</summary>
+    Mean,
+}
+
 /// <summary>The [logs] section.</summary>
 public sealed record LogsSection
 {
@@ -69,6 +84,12 @@ public sealed record LogsSection
 
     /// <summary>What to do with neighbouring rows of the same depth.</summary>
     public Setting<RepeatedDepth> RepeatedDepth { get; init; } = Setting.Default(Reading.RepeatedDepth.Error);
+
+    /// <summary>The regular depth grid that all curves are brought onto.</summary>
+    public ResampleSection Resample { get; init; } = new();
+
+    /// <summary>Which of a fast and a slow shear wave serves as shear, when no plain shear column does.</summary>
+    public Setting<ShearChoice> ShearFrom { get; init; }
 
     /// <summary>The column that holds measured depth, when it is not the usual one; one at most in a sound file.</summary>
     public IReadOnlyList<CurveSource> DepthColumns { get; init; } = [];
@@ -218,8 +239,24 @@ public sealed record OutputSection
     /// <summary>Scales of single curves.</summary>
     public IReadOnlyList<ScaleSection> Scales { get; init; } = [];
 
+    /// <summary>The depths of the stress polygons, as text with their units; not set means that the picture chooses.</summary>
+    public Setting<IReadOnlyList<string>> PolygonDepths { get; init; }
+
+    /// <summary>The kind of these depths.</summary>
+    public Setting<DepthKind> PolygonDepthKind { get; init; }
+
     /// <summary>The units of the results.</summary>
     public Setting<UnitSystem> Units { get; init; } = Setting.Default(UnitSystem.Metric);
+}
+
+/// <summary>The [observations] section.</summary>
+public sealed record ObservationsSection
+{
+    /// <summary>The files, relative to the well file.</summary>
+    public Setting<IReadOnlyList<string>> Files { get; init; }
+
+    /// <summary>How they are understood.</summary>
+    public ObservationSettings Settings { get; init; } = new();
 }
 
 /// <summary>A whole well file as it was bound, before it is put together.</summary>
@@ -248,6 +285,21 @@ public sealed record WellFileSections
 
     /// <summary>The [overburden] section.</summary>
     public OverburdenSettings Overburden { get; init; } = new();
+
+    /// <summary>The [calibration] section.</summary>
+    public CalibrationSettings Calibration { get; init; } = new();
+
+    /// <summary>The [mud] section.</summary>
+    public MudSettings Mud { get; init; } = new();
+
+    /// <summary>The [casing] section.</summary>
+    public CasingSettings Casing { get; init; } = new();
+
+    /// <summary>The [observations] section.</summary>
+    public ObservationsSection Observations { get; init; } = new();
+
+    /// <summary>The [core] section.</summary>
+    public CoreSection Core { get; init; } = new();
 
     /// <summary>The [layers] section.</summary>
     public LayerSettings Layers { get; init; } = new();

@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Model;
 
@@ -33,11 +34,14 @@ internal static class SetupAssembly
         if (sections.Logs.DepthColumns is [_, var second, ..])
             diagnostics.Error(second.Position, "found a second column for depth, expected one: every file is read with it");
 
+        sections.Logs.Resample.Check(diagnostics);
         var frame = Frame(well, file, wrong, diagnostics);
         var trajectory = SurveyAssembly.Path(sections.Survey, sections.Logs.Csv.Options(), file, folder, inputs, wrong, diagnostics);
         CheckPoints(sections, wrong, diagnostics);
+        LayerCheck.Report(sections.Layers, diagnostics);
         var zones = Zones(sections.Zones, diagnostics);
         var lithologies = Lithologies(sections.Lithologies, wrong, diagnostics);
+        HoleAssembly.Check(sections, wrong, diagnostics);
         return new WellSetup
         {
             Position = file,
@@ -51,6 +55,11 @@ internal static class SetupAssembly
             Lithologies = lithologies,
             Settings = sections.Settings,
             Overburden = sections.Overburden,
+            Observations = HoleAssembly.Observations(sections, folder, inputs, wrong, file, diagnostics),
+            ObservationSettings = sections.Observations.Settings,
+            Mud = HoleAssembly.Whole(sections.Mud),
+            Casing = HoleAssembly.Whole(sections.Casing),
+            Core = sections.Core.Read(sections.Logs.Csv.Options(), folder, inputs, diagnostics),
             AcceptUnverified = sections.AcceptUnverified.Value,
         };
     }
@@ -105,6 +114,7 @@ internal static class SetupAssembly
 
     private static void CheckFiles(Setting<IReadOnlyList<string>> files, DiagnosticBag diagnostics)
     {
+        if (files.Value.Any(string.IsNullOrWhiteSpace)) diagnostics.Error(files.Source.Position, "found an empty name in [logs] files, expected the names of the log files");
         foreach (var twice in files.Value.GroupBy(f => f, StringComparer.Ordinal).Where(g => g.Count() > 1))
             diagnostics.Error(files.Source.Position, $"found the file \"{twice.Key}\" twice in [logs] files, expected each once");
     }

@@ -1,4 +1,5 @@
 using DepthStress.Core.Catalogue;
+using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
@@ -26,7 +27,8 @@ internal static class StageBindings
         Moduli = s.Table("moduli", c.Moduli, Moduli, "static elastic constants from dynamic ones"),
         Strength = s.Table("strength", c.Strength, Strength, "rock strength"),
         Biot = s.Table("biot", c.Biot, Biot, "Biot's coefficient"),
-        PorePressure = s.Table("pore_pressure", c.PorePressure, Bindings.PorePressure, "pore pressure"),
+        PorePressure = s.Table("pore_pressure", c.PorePressure, PressureBindings.PorePressure, "pore pressure"),
+        Fluids = s.Table("fluids", c.Fluids, PressureBindings.Fluids, "fluids in the pores and their contacts, for method or sands = \"fluid line\""),
         Temperature = s.Table("temperature", c.Temperature, AnisotropyBindings.Temperature, "temperature of the rock, for thermal stress"),
         HorizontalStress = s.Table("horizontal_stress", c.HorizontalStress, HorizontalStress, "horizontal stresses"),
     };
@@ -57,6 +59,7 @@ internal static class StageBindings
     private static ModuliSettings Moduli(ISection s, ModuliSettings c) => c with
     {
         StaticYoungs = s.Law("static_youngs", c.StaticYoungs, Property.YoungsStatic, "relation that gives static Young's modulus"),
+        StaticYoungsFactor = s.Number("static_youngs_factor", c.StaticYoungsFactor, new Interval(0.05, 20), "what the relation's static Young's modulus is multiplied with, as core plugs ask for it"),
         StaticPoisson = s.Law("static_poisson", c.StaticPoisson, Property.PoissonStatic, "choice that gives static Poisson's ratio"),
     };
 
@@ -65,6 +68,8 @@ internal static class StageBindings
         Ucs = s.Law("ucs", c.Ucs, Property.Ucs, "relation that gives unconfined compressive strength"),
         FrictionAngle = s.Law("friction_angle", c.FrictionAngle, Property.FrictionAngle, "relation that gives the angle of internal friction"),
         TensileStrength = s.Law("tensile_strength", c.TensileStrength, Property.TensileStrength, "relation that gives tensile strength"),
+        Toughness = s.Law("toughness", c.Toughness, Property.Toughness, "relation that gives mode-I fracture toughness"),
+        Brittleness = s.Law("brittleness", c.Brittleness, Property.Brittleness, "brittleness index"),
     };
 
     private static BiotSettings Biot(ISection s, BiotSettings c) => c with
@@ -82,9 +87,26 @@ internal static class StageBindings
         Ratio = s.Number("ratio", c.Ratio, new Interval(0, 5), "effective-stress-ratio: effective Shmin over effective vertical stress"),
         RatioShmax = s.Number("ratio_shmax", c.RatioShmax, new Interval(0, 10), "effective-stress-ratio: the same for SHmax, which stays empty without"),
         ThermalExpansion = s.Quantity("thermal_expansion", c.ThermalExpansion, Sign.Positive, Dimension.ThermalExpansion, "strain: linear thermal expansion along the beds; rock warmer than [temperature] reference gains horizontal stress, cooler rock loses it"),
+        Compare = Compare(s, c.Compare),
+        PressureChange = s.Quantity("pressure_change", c.PressureChange, Sign.Any, Dimension.Pressure, "a later change of pore pressure, negative in depletion: the summary says what Shmin becomes; the profile stays"),
         StrainAlongShmin = s.Quantity("strain_along_shmin", c.StrainAlongShmin, Sign.Any, Dimension.Strain, "tectonic strain along Shmin, compression positive"),
         StrainAlongShmax = s.Quantity("strain_along_shmax", c.StrainAlongShmax, Sign.Any, Dimension.Strain, "tectonic strain along SHmax, compression positive"),
         ShmaxAzimuth = s.Quantity("shmax_azimuth", c.ShmaxAzimuth, Sign.Any, Dimension.Angle, "azimuth of SHmax from north"),
         FrictionCoefficient = s.Number("friction_coefficient", c.FrictionCoefficient, new Interval(0, 2), "friction of existing faults, for the frictional limit"),
+    };
+
+    private static Setting<IReadOnlyList<ComparisonChoice>> Compare(ISection s, Setting<IReadOnlyList<ComparisonChoice>> current)
+    {
+        var choices = s.Tables(
+            "compare", current.IsSet ? current.Value : [], Comparison, new ComparisonChoice(), "relations whose curves stand beside the model's Shmin; they never enter it", "method");
+        var source = s.SourceOf("compare");
+        return source.Kind == SettingKind.NotSet ? current : new(choices, source);
+    }
+
+    private static ComparisonChoice Comparison(ISection s, ComparisonChoice c) => c with
+    {
+        Method = s.Choice("method", c.Method, [.. ComparisonMethods.All.Select(l => (l.Id, l))], "the relation"),
+        Ratio = s.Number("ratio", c.Ratio, new Interval(0, 1), "the ratio that matthews-kelly-1967 and eaton-1969 take: yours, from leak-offs of the region"),
+        Position = s.Position,
     };
 }

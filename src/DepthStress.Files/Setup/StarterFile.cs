@@ -34,6 +34,11 @@ public static class StarterFile
             [logs]
             files = [{Quoted(log.Name)}]
 
+            """);
+        StarterResample.Append(text, log);
+        StarterShear.Append(text, log);
+        text.Append("""
+
             [logs.curves]
 
             """);
@@ -58,7 +63,7 @@ public static class StarterFile
             # parked = true                       # take out the constant ends that a parked tool leaves
             # null_smear = true                   # take out edges of gaps that were averaged with the missing-value code
             # spikes = { window = "3 m", threshold = 5, curves = ["compressional", "shear", "density", "gamma_ray"] }
-            # washout = { caliper_excess = "1 in", density_correction = "0.025 g/cm3", rule = "both" }   # density out; "either" takes out more
+            # washout = { caliper_excess = "1 in", density_correction = "0.025 g/cm3", rule = "both" }   # density out, to be bridged by [overburden] gaps; "either" takes out more
             # fill_gaps = "1 m"                   # bridge gaps up to this length by a straight line
             # shifts = [{ curve = "density", by = "-0.4 m" }]   # positive downwards
 
@@ -94,8 +99,17 @@ public static class StarterFile
             below_log = "hold"                    # below the last density its value is held
 
             [pore_pressure]
-            # method = "hydrostatic"              # <- hydrostatic, gradient (with gradient, reference) or table (with points, depth_kind)
+            # method = "hydrostatic"              # <- hydrostatic, gradient (with gradient, reference), table (with points, depth_kind), fluid line (with [fluids]) or one of: depthstress methods --for pp
             fluid_density = "1.03 g/cm3"
+            # shale_cutoff = 0.5                  # methods of shale: least shale volume of shale
+            # sands = "shale"                     # and what other rock takes: shale (from the shale around), table or fluid line
+            # honour_tests = true                 # moves each zone to its measured formation pressures
+
+            # [pore_pressure.normal_trend]        # trend methods: where shale is normally compacted; parameters not given here are fitted there
+            # top = "1000 m"
+            # base = "2000 m"
+            # depth_kind = "tvd"
+            # matrix_slowness = "65 us/ft"
 
             [horizontal_stress]
             # strain_along_shmin = "0 microstrain"     # tectonic strains, compression positive; without them SHmax stays empty
@@ -123,7 +137,7 @@ public static class StarterFile
             if (candidates.Count == 0) continue;
             var column = candidates[0].Column;
             var known = role.Dimensions is [Dimension.None] || Units.Find(column.Unit ?? "", role.Dimensions) is not null;
-            var rivals = candidates.Count == 1 ? "" : $"; also there: {string.Join(", ", candidates.Skip(1).Select(c => c.Column.Name))}";
+            var rivals = candidates.Count == 1 ? "" : $"; also there: {string.Join(", ", candidates.Skip(1).Select(c => c.Column.Name))} ({column.Name} is the more specific name)";
             var value = known
                 ? Quoted(column.Name)
                 : $"{{ column = {Quoted(column.Name)}, unit = {Quoted(Units.Of(role.Dimensions[0]).First().Symbol)} }}";
@@ -187,7 +201,7 @@ public static class StarterFile
     {
         var (compressional, shear) = (Values(log, Property.Vp), Values(log, Property.Vs));
         var (there, lacking) = (compressional.Count(double.IsFinite), compressional.Where((v, i) => double.IsFinite(v) && !(shear.Length > 0 && double.IsFinite(shear[i]))).Count());
-        if (lacking == 0) return;
+        if (lacking == 0 || (shear.Length == 0 && StarterShear.HasWave(log))) return;
         var choice = 2 * lacking > there ? "castagna-1985-mudrock" : TrainedRelation.Id;
         text.AppendLine(CultureInfo.InvariantCulture, $"""
 

@@ -37,6 +37,12 @@ internal static class SurveyAssembly
             diagnostics.Error(file, "[survey] north is not set; expected \"true\", \"grid\" or \"magnetic\", what the survey's azimuths count from");
         var tieIn = TieIn(survey.TieIn, wrong, diagnostics);
         if (tieIn is null && survey.TieIn.Position is not null) return null;
+        if (string.IsNullOrWhiteSpace(survey.File.Value))
+        {
+            diagnostics.Error(survey.File.Source.Position, "found an empty name, expected [survey] file = the name of a survey file");
+            return null;
+        }
+
         var path = SurveyFile.Read(System.IO.Path.GetFullPath(survey.File.Value, folder), survey.File.Value, csv, tieIn, inputs, diagnostics);
         if (path is not null && tieIn is not null) Note(tieIn, survey.TieIn.Position ?? file, diagnostics);
         return path;

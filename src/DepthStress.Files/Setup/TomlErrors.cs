@@ -28,8 +28,12 @@ internal static class TomlErrors
 
         // A key that comes twice is quoted with all it holds.
         var (quote, end) = (message.IndexOf(" with `", StringComparison.Ordinal), message.LastIndexOf(" and cannot be redefined", StringComparison.Ordinal));
-        return (quote > 0 && end > quote ? message[..quote] + message[end..] : message).TrimEnd('.');
+        return Visible((quote > 0 && end > quote ? message[..quote] + message[end..] : message).TrimEnd('.'));
     }
+
+    /// <summary>A message with the control characters it quotes written as escapes: they would drive a terminal.</summary>
+    private static string Visible(string message) =>
+        message.Any(char.IsControl) ? string.Concat(message.Select(c => char.IsControl(c) ? $"\\u{(int)c:X4}" : c.ToString())) : message;
 
     /// <summary>The place of a span.</summary>
     public static SourcePosition At(string file, SourceSpan span) => new(file, span.Start.Line + 1, span.Start.Column + 1);

@@ -108,8 +108,10 @@ internal sealed class TomlTree
         return made;
     }
 
-    private string[] Path(KeySyntax key, SourcePosition position) =>
-        [.. key.DotKeys.Select(d => d.Key!).Prepend(key.Key!).Select(k => Printable(Name(k), position))];
+    /// <summary>The names of a key, from the outermost table in.</summary>
+    internal static string[] Names(KeySyntax key) => [.. key.DotKeys.Select(d => d.Key!).Prepend(key.Key!).Select(Name)];
+
+    private string[] Path(KeySyntax key, SourcePosition position) => [.. Names(key).Select(k => Printable(k, position))];
 
     /// <summary>Names end in messages and results: one that breaks lines or drives a terminal is refused.</summary>
     private string Printable(string text, SourcePosition position)

@@ -12,7 +12,7 @@ public sealed record InputFile(string Name, string Sha256);
 /// <param name="Name">The file as the user named it.</param>
 /// <param name="Sections">Its sections as bound.</param>
 /// <param name="Setup">The setup of the chain.</param>
-/// <param name="Inputs">The well file itself and the survey.</param>
+/// <param name="Inputs">The well file itself, the survey and the observations.</param>
 public sealed record WellFile(string Path, string Name, WellFileSections Sections, WellSetup Setup, IReadOnlyList<InputFile> Inputs)
 {
     /// <summary>Full path of a file that the well file names.</summary>

@@ -1,5 +1,6 @@
 using System.Security.Cryptography;
 using System.Text;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
 
@@ -33,6 +34,7 @@ public static class WellFileReader
         var checks = new DiagnosticBag();
         var setup = SetupAssembly.Assemble(sections, name, Path.GetDirectoryName(full)!, inputs, wrong, checks);
         SetupCheck.Report(setup, checks);
+        CalibrationCheck.Report(sections.Calibration, setup, checks);
         foreach (var check in checks.Items.Where(c => !wrong.Explains(c))) diagnostics.Add(check);
         return new WellFile(full, name, sections, setup, inputs);
     }

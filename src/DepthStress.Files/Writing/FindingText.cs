@@ -29,6 +29,6 @@ public static class FindingText
         var largest = ranges.OrderByDescending(r => r.Base - r.Top).Take(MostRanges).OrderBy(r => r.Top);
         var shown = string.Join(", ", largest.Select(r => r.Top == r.Base ? Number(r.Top) : $"{Number(r.Top)}-{Number(r.Base)}"));
         var more = ranges.Count - MostRanges;
-        return $"{shown} {unit.Symbol} md" + (more > 0 ? FormattableString.Invariant($" and {more} shorter intervals") : "");
+        return $"{shown} {unit.Symbol} md" + (more > 0 ? FormattableString.Invariant($" and {more} shorter {(more == 1 ? "interval" : "intervals")}") : "");
     }
 }

@@ -1,4 +1,5 @@
 using System.Text;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -15,7 +16,8 @@ public static class ResultGuide
     /// <param name="setup">The well.</param>
     /// <param name="units">The units of the results.</param>
     /// <param name="destination">Gets the bytes; stays open.</param>
-    public static void Write(WellSetup setup, UnitSystem units, Stream destination)
+    /// <param name="comparison">The columns of comparison.csv; null or empty where it is not written.</param>
+    public static void Write(WellSetup setup, UnitSystem units, Stream destination, IReadOnlyList<Column<EarthModel>>? comparison = null)
     {
         ArgumentNullException.ThrowIfNull(setup);
         ArgumentNullException.ThrowIfNull(destination);
@@ -25,6 +27,24 @@ public static class ResultGuide
         Conventions(text, units);
         Columns(text, "Columns of depth.csv", DepthColumns.All, units);
         Columns(text, "Columns of layers.csv and layers.json", LayerColumns.All, units);
+        if (setup.Observations.Count > 0) Columns(text, "Columns of observations.csv", ObservedColumns.All, units);
+        if (setup.Core.Plugs.Count > 0) Columns(text, "Columns of core.csv", CoreColumns.All, units);
+        if (comparison is { Count: > 0 }) Columns(text, "Columns of comparison.csv", comparison, units);
+        destination.Write(Encoding.UTF8.GetBytes(text.ToString()));
+    }
+
+    /// <summary>Writes the guide of a calibration's folder.</summary>
+    /// <param name="setup">The well.</param>
+    /// <param name="units">The units of the results.</param>
+    /// <param name="destination">Gets the bytes; stays open.</param>
+    public static void WriteCalibration(WellSetup setup, UnitSystem units, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(setup);
+        ArgumentNullException.ThrowIfNull(destination);
+        var text = new StringBuilder();
+        text.Append("DepthStress calibration: ").Append(CellText.Clean(setup.Name)).Append("\n\nCaution\n  ").Append(Caution.Text).Append('\n');
+        Depths(text, setup, units);
+        Columns(text, "Columns of observations.csv", ObservedColumns.All, units);
         destination.Write(Encoding.UTF8.GetBytes(text.ToString()));
     }
 

@@ -2,9 +2,11 @@ using System.Reflection;
 using System.Text.Encodings.Web;
 using System.Text.Json;
 using System.Text.Json.Nodes;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
+using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
 using DepthStress.Files.Ingest;
 using DepthStress.Files.Setup;
@@ -56,6 +58,9 @@ public static class RunJson
             ["messages"] = Array(diagnostics.Items.Select(d => (JsonNode)d.ToString())),
             ["layered_rock"] = Array(VtiZone.Of(model).Select(z => Layered(model, z))),
             ["predictions"] = Array(model.Predictions.Select(Predicted)),
+            ["trends"] = Array(model.Trends.Select(t => TrendRecord(model, t))),
+            ["core"] = CoreComparison.Of(model) is { } core ? CoreJson.Of(core) : null,
+            ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
         };
@@ -148,6 +153,38 @@ public static class RunJson
             ["beyond_training"] = prediction.Beyond.Count(b => b),
         };
     }
+
+    private static JsonObject TrendRecord(EarthModel model, FittedTrend trend) => new()
+    {
+        ["quantity"] = trend.Trend.Quantity switch
+        {
+            TrendQuantity.Slowness => "slowness",
+            TrendQuantity.Resistivity => "resistivity",
+            _ => "porosity",
+        },
+        ["zone"] = model.ZoneName(trend.Zone),
+        ["parameters"] = Array(trend.Parameters.Select(p =>
+        {
+            var (unit, _) = UnitSystem.Metric.UnitFor(p.Dimension);
+            return new JsonObject
+            {
+                ["key"] = p.Key,
+                ["value"] = Math.Round(p.Value / unit.Factor, 6),
+                ["standard_error"] = p.Kind == TrendParameterKind.Estimated ? Math.Round(p.Error / unit.Factor, 6) : null,
+                ["unit"] = unit.Symbol,
+                ["from"] = p.Kind switch
+                {
+                    TrendParameterKind.Given => "given",
+                    TrendParameterKind.Estimated => "fitted",
+                    _ => "fitted, stopped at its bound",
+                },
+            };
+        })),
+        ["shale_samples"] = trend.Samples,
+        ["independent_samples"] = Math.Round(trend.Effective, 1),
+        ["top_tvd_m"] = Number(trend.Top),
+        ["base_tvd_m"] = Number(trend.Base),
+    };
 
     private static JsonArray Array(IEnumerable<JsonNode> items) => new([.. items]);
 }

@@ -61,6 +61,14 @@ public class CatalogueStandingTests
         ["krief-1990-shear-modulus"] = Standing.Confirmed, // Zhang 2019 p. 78 eqs 2.90-2.91
         ["krief-1990-shear-porosity"] = Standing.Confirmed, // Zhang 2019 p. 79 eq. 2.94
         ["density-porosity"] = Standing.Identity, // mass balance
+        ["zhang-2002-tensile-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-tensile-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-ucs-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-modulus-toughness"] = Standing.FromMemory,
+        ["whittaker-1992-velocity-toughness"] = Standing.FromMemory,
+        ["rickman-2008"] = Standing.FromMemory,
+        ["strength-ratio-brittleness"] = Standing.Identity, // definition
+        ["strength-contrast-brittleness"] = Standing.Identity, // definition
         ["griffith-tensile"] = Standing.Identity, // from Griffith's criterion
         ["hashin-shtrikman-bound"] = Standing.Identity, // from the bound on the bulk modulus
 
@@ -147,11 +155,29 @@ public class CatalogueStandingTests
         ["traugott-1997"] = Standing.Confirmed, // Zhang 2019 p. 190 eqs 6.4-6.6
         ["barker-wood-1997"] = Standing.FromMemory, // coefficients recalled
         ["miller-gulf"] = Standing.Confirmed, // Zhang 2019 p. 34 eqs 2.3-2.4
+        ["hubbert-willis-1957-least"] = Standing.Confirmed, // exercise after Bourgoyne and others 1986
+        ["hubbert-willis-1957-greatest"] = Standing.Confirmed, // likewise
+        ["matthews-kelly-1967"] = Standing.Confirmed, // likewise
+        ["eaton-1969"] = Standing.Confirmed, // likewise, and Lapeyrouse
+        ["breckels-1982-gulf-coast"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-gulf-coast-deep"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-venezuela"] = Standing.Confirmed, // Zhang 2019 p. 209
+        ["breckels-1982-brunei"] = Standing.FromMemory, // Zhang 2019 p. 209, its normal gradient recalled
+        ["holbrook-1993"] = Standing.FromMemory,
+        ["bonaparte-sub-basin-depth"] = Standing.Confirmed, // Zhang 2019 pp. 209-210
+        ["ekofisk-field-depth"] = Standing.Confirmed, // Zhang 2019 pp. 209-210
         ["eaton-1975-sonic"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
         ["white-stoneley-c66"] = Standing.FromMemory,
         ["annie-1996-shale"] = Standing.FromMemory, // delta = 0 read in the abstract, the second link recalled
         ["modified-annie-c11"] = Standing.FromMemory,
         ["modified-annie-c13"] = Standing.FromMemory,
+        ["eaton-1975-resistivity"] = Standing.Confirmed, // drilling handbooks, after SPE 5544
+        ["bowers-1995-loading"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.15; A and B are the user's
+        ["bowers-1995-unloading"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.16; A, B, U and V_max are the user's
+        ["zhang-2011-porosity"] = Standing.Confirmed, // abstract of Zhang 2013
+        ["zhang-2011-sonic"] = Standing.Confirmed, // abstract of Zhang 2013
+        ["equivalent-depth-sonic"] = Standing.Confirmed, // Rezaee 2015 p. 150 eq. 7.14
+        ["compaction-porosity"] = Standing.Identity, // algebra
     };
 
     [Fact]

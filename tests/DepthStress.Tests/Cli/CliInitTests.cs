@@ -37,7 +37,7 @@ public sealed class CliInitTests : IDisposable
             [
                 "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level",
                 "well.toml: error: [well] has neither ground_elevation (onshore) nor water_depth (offshore); expected one of them",
-                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
+                "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table, fluid line, eaton-1975-sonic, eaton-1975-resistivity, bowers-1995-loading, bowers-1995-unloading and others, see \"depthstress methods --for pp\"",
             ],
             check.Error.Split('\n', StringSplitOptions.RemoveEmptyEntries));
     }
@@ -63,8 +63,63 @@ public sealed class CliInitTests : IDisposable
         var text = _cli.Folder.Read("well.toml");
         Assert.Contains("depth = { column = \"MD\", unit = \"m\" }   # <- the file states no unit: confirm\n", text, StringComparison.Ordinal);
         Assert.Contains(
-            "compressional = { column = \"DTC\", unit = \"us/ft\" }# <- confirm the unit; compressional slowness or velocity, no unit, 1000.0 to 1001.0; also there: DT\n",
+            "compressional = { column = \"DTC\", unit = \"us/ft\" }# <- confirm the unit; compressional slowness or velocity, no unit, 1000.0 to 1001.0; also there: DT (DTC is the more specific name)\n",
             text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task Rivals_for_the_further_roles_are_named_with_the_reason()
+    {
+        _cli.Folder.Write("well.csv", "DEPT[m],DTS_FAST[us/ft],DTSF[us/ft],DTSS[us/ft],DTST[us/ft],STONELEY[us/ft],ILM[ohm.m],RMED[ohm.m],LLS[ohm.m],SFLU[ohm.m]\n1000,150,150,160,220,221,2,3,4,5\n");
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        foreach (var (role, column, rival) in new[] { ("fast_shear", "DTSF", "DTS_FAST"), ("stoneley", "DTST", "STONELEY"), ("medium_resistivity", "RMED", "ILM"), ("shallow_resistivity", "LLS", "SFLU") })
+        {
+            var line = Assert.Single(text.Split('\n'), l => l.StartsWith($"{role} = \"{column}\"", StringComparison.Ordinal));
+            Assert.EndsWith($"; also there: {rival} ({column} is the more specific name)", line, StringComparison.Ordinal);
+        }
+    }
+
+    [Theory]
+    [InlineData("DEPT[ft],DTC[us/ft]\n1000,90\n1000.5,91\n1001,91\n", "# resample = { step = \"0.5 ft\", method = \"linear\", max_gap = \"1 m\" }   # or \"mean\"; one regular depth grid for all curves: the log's depths are even\n")]
+    [InlineData("DEPT[m],DTC[us/ft]\n1000,90\n1002,91\n1004,91\n1007.5,91\n", "# resample = { step = \"2 m\", method = \"linear\", max_gap = \"4 m\" }   # or \"mean\"; one regular depth grid for all curves: the log's depths run in steps of 2 to 3.5 m\n")]
+    public async Task A_regular_grid_is_offered_with_the_logs_own_step_and_taken_by_check(string log, string expected)
+    {
+        _cli.Folder.Write("well.csv", log);
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains(expected, text, StringComparison.Ordinal);
+        _cli.Folder.Write("well.toml", text.Replace("# resample", "resample", StringComparison.Ordinal));
+        Assert.DoesNotContain("resample", (await _cli.RunAsync("check", "well.toml")).Error, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("DTSF[us/ft],DTSS[us/ft]\n1000,150,160\n", "# shear_from = \"fast\"                 # <- fast (DTSF), slow (DTSS) or mean: stress or bedding parts the two waves, the isotropic chain takes one; the choice moves Vs by 6.5 % on average\n")]
+    [InlineData("DTSF[m/s],DTSS[us/m]\n1000,2000,525\n", "the choice moves Vs by 4.9 % on average\n")]
+    [InlineData("DTSF,DTSS\n1000,160,150\n", "the choice moves Vs by 6.5 % on average; the fast one is slower: are they exchanged?\n")]
+    [InlineData("DTSS[us/ft]\n1000,150\n", "# shear_from = \"slow\"                 # <- of the two shear waves only the slow one is there (DTSS)\n")]
+    [InlineData("DTSM[us/ft],DTSF[us/ft]\n1000,150,160\n", "# shear_from = \"fast\"                 # DTSM serves below; to take another, remove shear there: of the two shear waves only the fast one is there (DTSF)\n")]
+    public async Task Where_shear_comes_in_two_waves_the_user_is_asked_which_one_serves(string log, string expected)
+    {
+        _cli.Folder.Write("well.csv", "DEPT[m]," + log);
+        await _cli.RunAsync("init", "well.csv");
+        var text = _cli.Folder.Read("well.toml");
+        Assert.Contains(expected, text, StringComparison.Ordinal);
+        Assert.DoesNotContain("[prediction]", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task The_run_says_which_shear_wave_served()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs.Replace("DTS[us/ft]", "DTSF[us/ft],DTSS[us/ft]", StringComparison.Ordinal).Replace(",2.", ",170,2.", StringComparison.Ordinal));
+        await _cli.RunAsync("init", "well.csv");
+        Fill("well.toml");
+        Assert.Contains("\nshear_from = \"fast\" ", _cli.Folder.Read("well.toml").Split("[logs.curves]")[0], StringComparison.Ordinal);
+        var result = await _cli.RunAsync("run", "well.toml");
+        Assert.Equal(0, result.Code);
+        const string Served = "note: shear: fast_shear (DTSF in well.csv) serves; the fast one is 5.3 % faster on average over 5 samples than the slow one";
+        Assert.Contains(Served, result.Error, StringComparison.Ordinal);
+        Assert.Contains(Served, _cli.Folder.Read("well-results/run.json"), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -112,6 +167,47 @@ public sealed class CliInitTests : IDisposable
         Assert.DoesNotContain(": error: ", result.Error, StringComparison.Ordinal);
         Assert.Contains("depth.csv", _cli.Files("quillback-4-results").Keys);
         Assert.Contains("whole log", result.Output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task The_sections_that_the_starter_offers_are_taken_by_check_as_they_stand()
+    {
+        SampleLogs.Write(_cli.Folder.Of("logs"));
+        Assert.Equal(0, (await _cli.RunAsync("init", "logs/quillback-4.las")).Code);
+        var text = Open(Open(Fill("quillback-4.toml"), "[conditioning]"), "[prediction]");
+        Assert.Contains("\nshifts = [{ curve = \"density\"", text, StringComparison.Ordinal);
+        Assert.Contains("\nshear = \"trained\"", text, StringComparison.Ordinal);
+        _cli.Folder.Write("quillback-4.toml", text);
+        var result = await _cli.RunAsync("check", "quillback-4.toml");
+        Assert.Equal(0, result.Code);
+        Assert.DoesNotContain(": error: ", result.Error, StringComparison.Ordinal);
+        Assert.Matches(@"\n *density +RHOB .* edited [0-9.]+ *\n", result.Output); // all of it is shifted
+        var lines = result.Output.Split('\n').Select(l => l.Trim()).ToList();
+        Assert.StartsWith(">trained (on this well), ", lines[lines.IndexOf("[prediction] shear") + 1], StringComparison.Ordinal);
+        Assert.DoesNotContain("trained", lines[lines.IndexOf("[prediction] density") + 1], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_published_relation_is_offered_where_most_of_the_shear_is_missing_and_check_takes_it()
+    {
+        _cli.Folder.Write("well.csv", WellText.Logs.Replace("DTS[us/ft]", "ODD", StringComparison.Ordinal));
+        await _cli.RunAsync("init", "well.csv");
+        var text = Open(Fill("well.toml"), "[prediction]");
+        Assert.Contains("\nshear = \"castagna-1985-mudrock\"", text, StringComparison.Ordinal);
+        _cli.Folder.Write("well.toml", text);
+        var check = await _cli.RunAsync("check", "well.toml");
+        Assert.Equal(0, check.Code);
+        Assert.Matches(@"\n *shear .* predicted 100\.0 *\n", check.Output); // a curve without a column
+    }
+
+    /// <summary>Takes the comment signs from a section that the starter offers, down to the next empty line.</summary>
+    private static string Open(string text, string section)
+    {
+        var lines = text.Split('\n');
+        var first = Array.FindIndex(lines, l => l.TrimStart('#', ' ').StartsWith(section, StringComparison.Ordinal));
+        Assert.True(first >= 0, $"no {section} in the starter");
+        for (var i = first; i < lines.Length && lines[i].Length > 0; i++) lines[i] = lines[i].TrimStart('#', ' ');
+        return string.Join('\n', lines);
     }
 
     /// <summary>Takes the comment sign from the marked lines, as a user would; onshore.</summary>

@@ -33,7 +33,7 @@ public sealed class CliLawChoiceTests : IDisposable
     {
         var (code, _, error) = Check("static_youngs = \"lacy-1997-combined\"", $"static_youngs = {value}");
         Assert.Equal(2, code);
-        Assert.Contains(error.Split('\n'), l => l.StartsWith("quillback-4.toml(111,", StringComparison.Ordinal) && l.EndsWith($": error: {message}", StringComparison.Ordinal));
+        Assert.Contains(error.Split('\n'), l => l.StartsWith("quillback-4.toml(121,", StringComparison.Ordinal) && l.EndsWith($": error: {message}", StringComparison.Ordinal));
     }
 
     [Fact]

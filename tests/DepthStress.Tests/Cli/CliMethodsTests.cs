@@ -5,7 +5,7 @@ namespace DepthStress.Tests.Cli;
 
 public class CliMethodsTests
 {
-    private const string Results = "shale_volume, density, porosity, vs, youngs_static, poisson_static, ucs, friction_angle, tensile_strength, biot, mean_density_above, shallow_density, pp, c66, c11, c13";
+    private const string Results = "shale_volume, density, porosity, vs, youngs_static, poisson_static, ucs, friction_angle, tensile_strength, toughness, brittleness, biot, mean_density_above, shallow_density, pp, c66, c11, c13, comparison_shmin";
 
     private static (int Code, string Output, string Error) Run(int width, params string[] args)
     {

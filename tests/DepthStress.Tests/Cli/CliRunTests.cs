@@ -21,7 +21,7 @@ public sealed class CliRunTests : IDisposable
         Assert.Contains("\nResults: well-results\n", result.Output, StringComparison.Ordinal);
         Assert.StartsWith("Well Testwell 1: 5 samples, 1000.0 m to 1002.0 m measured depth", result.Output, StringComparison.Ordinal);
         Assert.Equal(
-            [".depthstress-files", "README.txt", "depth.csv", "layers.csv", "layers.json", "results.las", "run.json", "stress.svg", "tracks.svg"],
+            [".depthstress-files", "README.txt", "depth.csv", "layers.csv", "layers.json", "polygon.svg", "results.las", "run.json", "stress.svg", "tracks.svg"],
             _cli.Files("well-results").Keys);
         Assert.Equal(["logs.csv", "well-results", "well.toml"], Directory.EnumerateFileSystemEntries(_cli.Folder.Path).Select(Path.GetFileName).Order(StringComparer.Ordinal));
     }
@@ -38,6 +38,29 @@ public sealed class CliRunTests : IDisposable
         Assert.DoesNotContain('\u001b', run.Output + run.Error + check.Output);
         Assert.DoesNotContain('\r', run.Output + run.Error + check.Output);
         Assert.DoesNotContain('\u2026', run.Output); // no heading is cut off
+    }
+
+    [Fact]
+    public async Task The_record_of_a_run_says_what_was_predicted_how_and_how_sure_it_is()
+    {
+        SampleLogs.Write(_cli.Folder.Path);
+        Assert.Equal(0, (await _cli.RunAsync("run", "quillback-4.toml")).Code);
+        var predictions = JsonNode.Parse(_cli.Folder.Read("quillback-4-results/run.json"))!["predictions"]!.AsArray();
+        Assert.NotEmpty(predictions);
+        foreach (var p in predictions.Select(p => p!.AsObject()))
+        {
+            Assert.Equal(["property", "method", "formula", "unit", "standard_error", "samples", "beyond_training"], p.Select(k => k.Key));
+            Assert.Equal(("vs", "m/s"), (p["property"]!.GetValue<string>(), p["unit"]!.GetValue<string>()));
+            Assert.StartsWith("trained on ", p["method"]!.GetValue<string>(), StringComparison.Ordinal);
+            Assert.Matches(@"^Vs = -?[0-9.]+ Vp ", p["formula"]!.GetValue<string>());
+            Assert.InRange(p["standard_error"]!.GetValue<double>(), 1, 300); // m/s: neither without error nor as good as none
+            Assert.InRange(p["beyond_training"]!.GetValue<int>(), 0, p["samples"]!.GetValue<int>());
+        }
+
+        // Every sample that was predicted is in one of them, and no other: counted in the table of results.
+        var rows = _cli.Folder.Read("quillback-4-results/depth.csv").Split('\n', StringSplitOptions.RemoveEmptyEntries).Select(r => r.Split(',')).ToList();
+        var origin = Array.IndexOf(rows[0], "vs_origin");
+        Assert.Equal(rows.Count(r => r[origin] == "predicted"), predictions.Sum(p => p!["samples"]!.GetValue<int>()));
     }
 
     [Theory]

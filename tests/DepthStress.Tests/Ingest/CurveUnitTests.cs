@@ -75,8 +75,42 @@ public sealed class CurveUnitTests
     [InlineData(
         "CALI[in]", 311,
         "a.csv(1,9): error: column CALI (caliper): its median is 311 in, which no hole has (1.969 to 59.06 in); read as mm it would be 12.244 in; state the unit in [logs.curves]: caliper = { column = \"CALI\", unit = \"mm\" }")]
+    [InlineData(
+        "DTST[us/ft]", 790,
+        "a.csv(1,9): error: column DTST (stoneley): its median is 790 us/ft, which no rock has (190.5 to 762 us/ft); read as us/m it would be 240.79 us/ft; state the unit in [logs.curves]: stoneley = { column = \"DTST\", unit = \"us/m\" }")]
+    [InlineData(
+        "DTST[m/s]", 230,
+        "a.csv(1,9): error: column DTST (stoneley): its median is 230 m/s, which no rock has (400 to 1600 m/s); read as us/ft it would be 1325.2 m/s; state the unit in [logs.curves]: stoneley = { column = \"DTST\", unit = \"us/ft\" }")]
     public void A_median_that_contradicts_the_unit_is_shown_in_both_readings(string column, double printed, string expected) =>
         Assert.Equal([expected], Ingesting.One(Ingesting.Csv(column, 1000, 1, printed, printed, printed * 1.1)).Messages);
+
+    [Theory]
+    [InlineData(
+        "DTSF[us/m]", 110,
+        "a.csv(1,9): error: column DTSF (fast_shear): its median is 110 us/m, which no rock has (222.2 to 6667 us/m); read as us/ft it would be 360.89 us/m; state the unit in [logs.curves]: fast_shear = { column = \"DTSF\", unit = \"us/ft\" }")]
+    [InlineData(
+        "DTSS[us/ft]", 2200,
+        "a.csv(1,9): error: column DTSS (slow_shear): its median is 2200 us/ft, which no rock has (67.73 to 2032 us/ft); read as us/m it would be 670.56 us/ft; state the unit in [logs.curves]: slow_shear = { column = \"DTSS\", unit = \"us/m\" }")]
+    public void The_same_holds_for_the_two_shear_waves(string column, double printed, string expected) =>
+        Assert.Equal(expected, Ingesting.One(Ingesting.Csv(column, 1000, 1, printed, printed, printed * 1.1)).Messages[0]); // the second asks which one serves
+
+    [Theory]
+    [InlineData("RMED[ohm.m]", "medium_resistivity", 90000)]
+    [InlineData("RSHAL[ohm.m]", "shallow_resistivity", 0.004)]
+    public void A_resistivity_that_no_rock_has_is_a_warning_for_want_of_another_unit(string column, string role, double printed) => Assert.Equal(
+        [FormattableString.Invariant($"a.csv(1,9): warning: column {column.Split('[')[0]} ({role}): its median is {printed:G5} ohm.m, which no rock has (0.02 to 2E+04 ohm.m)")],
+        Ingesting.One(Ingesting.Csv(column, 1000, 1, printed, printed)).Messages);
+
+    [Theory]
+    [InlineData("DTSF[us/ft]", Property.FastShear, 150, 2032)] // 0.3048 m / 150e-6 s
+    [InlineData("DTS_SLOW[us/m]", Property.SlowShear, 500, 2000)]
+    [InlineData("STONELEY[us/ft]", Property.Stoneley, 240, 1270)]
+    [InlineData("RMED[ohm.m]", Property.MediumResistivity, 12, 12)]
+    [InlineData("RSHAL[ohm.m]", Property.ShallowResistivity, 8, 8)]
+    public void Further_waves_and_resistivities_become_SI(string column, Property property, double printed, double si) => Assert.Equal(
+        si,
+        Ingesting.Read("[logs]\nfiles = [\"a.csv\"]\n" + (column.StartsWith("DTSF", StringComparison.Ordinal) ? "shear_from = \"fast\"\n" : column.StartsWith("DTS_", StringComparison.Ordinal) ? "shear_from = \"slow\"\n" : ""), ("a.csv", Ingesting.Csv(column, 1000, 1, printed))).Logs![property]!.Values[0],
+        1e-9 * si); // two roundings
 
     [Fact]
     public void A_median_that_no_unit_explains_is_a_warning()
@@ -102,6 +136,26 @@ public sealed class CurveUnitTests
         Assert.Equal(["a.csv(1,9): warning: column DTC (compressional): found 2 slownesses of zero or less, expected them above zero: taken out"], messages);
         Assert.Equal(["0-1 Measured DTC in a.csv", "1-3 None", "3-4 Measured DTC in a.csv"], logs![Property.Vp]!.Origins());
     }
+
+    [Theory]
+    [InlineData("missing = \"off\"", "60,off,60", 60)]
+    [InlineData("missing = [0, \"off\", \"-\"]", "0,off,-", double.NaN)]
+    public void Texts_can_mean_missing(string missing, string cells, double first)
+    {
+        var (logs, messages) = Ingesting.One(
+            "DEPT[m],GR[gAPI]\n999,61\n" + string.Concat(cells.Split(',').Select((c, i) => FormattableString.Invariant($"{1000 + i},{c}\n"))), $"gamma_ray = {{ column = \"GR\", {missing} }}");
+        Assert.Empty(messages);
+        Assert.Equal([61, first, double.NaN, first], logs![Property.GammaRay]!.Values);
+    }
+
+    [Theory]
+    [InlineData("true", "found true")]
+    [InlineData("\"\"", "found the text \"\"")]
+    [InlineData("[0, [1]]", "found a list")]
+    [InlineData("2020-01-01", "found a date")]
+    public void Nothing_else_can(string missing, string found) => Assert.Equal(
+        [$"well.toml(28,40): error: {found}, expected missing = a number, a text, or a list of numbers and texts"],
+        Ingesting.One(Ingesting.Csv("GR[gAPI]", 1000, 1, 60), $"gamma_ray = {{ column = \"GR\", missing = {missing} }}").Messages);
 
     [Fact]
     public void A_missing_code_holds_for_its_column_in_its_file_only()

@@ -18,7 +18,7 @@ public class LayerBuilderTests
     private static WellSetup Zoned(params Zone[] zones) => Setup with { Zones = zones };
 
     private static IReadOnlyList<Layer> Build(EarthModel model, LayerSettings? settings = null) =>
-        LayerBuilder.Build(model, settings ?? new LayerSettings()).Layers;
+        Layered(model, settings ?? new LayerSettings()).Layers;
 
     private static (double, double)[] Tops(IEnumerable<Layer> layers) => [.. layers.Select(l => (l.TopTvd, l.BaseTvd))];
 

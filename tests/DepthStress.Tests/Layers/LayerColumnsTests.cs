@@ -8,7 +8,7 @@ namespace DepthStress.Tests.Layers;
 
 public class LayerColumnsTests
 {
-    private static readonly LayerTable Table = LayerBuilder.Build(Run(), AtMost(250));
+    private static readonly LayerTable Table = Layered(Run(), AtMost(250));
 
     private static double[] Read(string id)
     {

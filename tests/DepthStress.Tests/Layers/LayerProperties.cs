@@ -33,7 +33,7 @@ public class LayerProperties
     [Fact]
     public void Layers_tile_the_column_and_hold_every_sample_once() => Cases.Sample(c =>
     {
-        var layers = LayerBuilder.Build(c.Model, c.Settings).Layers;
+        var layers = Layered(c.Model, c.Settings).Layers;
         Assert.Equal(c.Model.Column(Property.TrueVerticalDepth)[0], layers[0].TopTvd);
         Assert.Equal(c.Model.Column(Property.TrueVerticalDepth)[^1], layers[^1].BaseTvd);
         for (var k = 1; k < layers.Count; k++)
@@ -50,7 +50,7 @@ public class LayerProperties
     [Fact]
     public void No_layer_of_several_samples_is_thicker_than_allowed() => Cases.Sample(c =>
     {
-        foreach (var layer in LayerBuilder.Build(c.Model, c.Settings).Layers)
+        foreach (var layer in Layered(c.Model, c.Settings).Layers)
             Assert.True(layer.Samples == 1 || layer.BaseTvd - layer.TopTvd <= c.Most * (1 + 1e-9));
     });
 
@@ -60,7 +60,7 @@ public class LayerProperties
     {
         var cell = LongestCell(c.Model);
         if (c.Most <= 2 * cell) return;
-        foreach (var zone in LayerBuilder.Build(c.Model, c.Settings).Layers.GroupBy(l => l.Zone))
+        foreach (var zone in Layered(c.Model, c.Settings).Layers.GroupBy(l => l.Zone))
         {
             var thickness = zone.Last().BaseTvd - zone.First().TopTvd;
             Assert.InRange(zone.Count(), 1, Math.Max(1, Math.Ceiling(thickness / (c.Most - cell))));
@@ -71,8 +71,8 @@ public class LayerProperties
     [Fact]
     public void The_mean_of_the_layers_is_the_mean_of_the_whole() => Cases.Sample(c =>
     {
-        var layers = LayerBuilder.Build(c.Model, c.Settings).Layers;
-        var whole = LayerBuilder.Build(c.Model with { Setup = c.Model.Setup with { Zones = [] }, Zones = [.. Enumerable.Repeat(ZoneIndex.None, c.Model.Count)] }, new LayerSettings()).Layers[0];
+        var layers = Layered(c.Model, c.Settings).Layers;
+        var whole = Layered(c.Model with { Setup = c.Model.Setup with { Zones = [] }, Zones = [.. Enumerable.Repeat(ZoneIndex.None, c.Model.Count)] }, new LayerSettings()).Layers[0];
         foreach (var property in new[] { Property.Density, Property.VerticalStress, Property.MinHorizontalStress })
         {
             double Value(Layer l) => property == Property.Density ? l.Mean(property) : l.Profile(property).Mean;

@@ -94,7 +94,7 @@ public class StressBarrierTests
         var model = Run(
             Setup with { Zones = [Zone("target", 0), Zone("lower", 200)] },
             Table(depths, Curve(Property.Vp, Same(4000, 401)), Curve(Property.Vs, shear), Curve(Property.Density, Same(2500, 401))));
-        var layers = LayerBuilder.Build(model, OneMegapascal);
+        var layers = Layered(model, OneMegapascal);
         Assert.Equal(397.3, layers.Layers[1].Profile(Property.MinHorizontalStress).Depth, 0.05); // five samples and half a one of 395 to 400 m
         var target = Assert.Single(StressTarget.Find(model, layers, OneMegapascal));
         Assert.Null(target.Below); // by its middle at 300 m it would have 1.2 MPa more

@@ -47,7 +47,7 @@ public class DepthColumnsTests
 
     [Fact]
     public void Headers_and_their_order_are_the_contract() => Assert.Equal(
-        $"{Contract} sv_unlogged_share bedding_angle_deg vs_error_m_s density_error_g_cm3 youngs_static_vertical_gpa youngs_static_horizontal_gpa poisson_static_vh poisson_static_hh biot_vertical biot_horizontal temperature_degc".Split(' '), DepthColumns.All.Select(c => c is NumberColumn<EarthModel> n ? n.Header(UnitSystem.Metric) : c.Id));
+        $"{Contract} sv_unlogged_share bedding_angle_deg vs_error_m_s density_error_g_cm3 youngs_static_vertical_gpa youngs_static_horizontal_gpa poisson_static_vh poisson_static_hh biot_vertical biot_horizontal temperature_degc normal_slowness_us_ft normal_resistivity_ohm_m normal_porosity toughness_mpa_m05 brittleness".Split(' '), DepthColumns.All.Select(c => c is NumberColumn<EarthModel> n ? n.Header(UnitSystem.Metric) : c.Id));
 
     [Fact]
     public void Field_headers_carry_field_units() => Assert.Equal(

@@ -97,6 +97,14 @@ internal static class SmallWell
 
     public static string[] Texts(this EarthModel model) => [.. model.Findings.Select(f => UnitSystem.Metric.Show(f.Text))];
 
+    public static LayerTable Layered(EarthModel model, LayerSettings settings)
+    {
+        var diagnostics = new DiagnosticBag();
+        var table = LayerBuilder.Build(model, settings, diagnostics);
+        Assert.Empty(diagnostics.Items);
+        return table!;
+    }
+
     public static LayerSettings AtMost(double thickness) => new() { MaxThickness = Chosen(thickness) };
 
     /// <summary>A hole that turns from vertical to an inclination, in rad, at a measured depth and keeps it.</summary>

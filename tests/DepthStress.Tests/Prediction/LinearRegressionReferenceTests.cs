@@ -8,20 +8,20 @@ namespace DepthStress.Tests.Prediction;
 /// </summary>
 public class LinearRegressionReferenceTests
 {
-    private static readonly double[] NorrisY =
+    internal static readonly double[] NorrisY =
     [
         0.1, 338.8, 118.1, 888.0, 9.2, 228.1, 668.5, 998.5, 449.1, 778.9, 559.2, 0.3, 0.1, 778.1, 668.8, 339.3, 448.9, 10.8, 557.7, 228.3, 998.0, 888.8,
         119.6, 0.3, 0.6, 557.6, 339.3, 888.0, 998.5, 778.9, 10.2, 117.6, 228.9, 668.4, 449.2, 0.2,
     ];
 
-    private static readonly double[] NorrisX =
+    internal static readonly double[] NorrisX =
     [
         0.2, 337.4, 118.2, 884.6, 10.1, 226.5, 666.3, 996.3, 448.6, 777.0, 558.2, 0.4, 0.6, 775.5, 666.9, 338.0, 447.5, 11.6, 556.0, 228.1, 995.8, 887.6,
         120.2, 0.3, 0.3, 556.8, 339.1, 887.2, 999.0, 779.0, 11.1, 118.3, 229.2, 669.1, 448.9, 0.5,
     ];
 
     // Employment; price deflator, gross national product, unemployed, armed forces, population, year.
-    private static readonly double[][] Longley =
+    internal static readonly double[][] Longley =
     [
         [60323, 83.0, 234289, 2356, 1590, 107608, 1947], [61122, 88.5, 259426, 2325, 1456, 108632, 1948],
         [60171, 88.2, 258054, 3682, 1616, 109773, 1949], [61187, 89.5, 284599, 3351, 1650, 110929, 1950],

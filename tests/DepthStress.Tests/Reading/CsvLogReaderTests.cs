@@ -80,7 +80,7 @@ public class CsvLogReaderTests
     [Fact]
     public void A_code_for_one_column_holds_for_that_column_alone()
     {
-        var options = new LogReadOptions { MissingByColumn = new Dictionary<string, double> { ["gr"] = 0, ["absent"] = 7 } };
+        var options = new LogReadOptions { MissingByColumn = new Dictionary<string, MissingCodes> { ["gr"] = new([0], []), ["absent"] = new([7], []) } };
         var file = LogReading.Csv("DEPT,GR,DT\n1,0,0\n2,7,7\n", options).Clean();
         Assert.Equal([1, 0], new[] { file.Columns[1].Missing, file.Columns[2].Missing });
         Assert.Equal([double.NaN, 7], file.Columns[1].Values);

@@ -89,7 +89,7 @@ public class DepthOrderTests
     [Fact]
     public void A_code_for_the_depth_column_makes_it_missing()
     {
-        var options = new LogReadOptions { MissingByColumn = new Dictionary<string, double> { ["DEPT"] = 0 } };
+        var options = new LogReadOptions { MissingByColumn = new Dictionary<string, MissingCodes> { ["DEPT"] = new([0], []) } };
         LogReading.Csv("DEPT,GR\n1,5\n0,5\n", options).IsRefusedWith(
             "a.csv(3): error: found no depth in data row 2, expected a number");
     }

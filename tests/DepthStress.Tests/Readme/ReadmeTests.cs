@@ -62,6 +62,19 @@ public sealed partial class ReadmeTests : IDisposable
     }
 
     [Fact]
+    public async Task The_picture_of_the_calibration_is_what_calibrate_draws()
+    {
+        CopySampleLogs();
+        Assert.Contains("(.readme/calibration.svg)", Text, StringComparison.Ordinal);
+        using var output = new StringWriter();
+        Assert.Equal(0, await Application.RunAsync(["calibrate", "sample-logs/quillback-4.toml"], new Terminal(output, output, _folder.Path), CancellationToken.None));
+        var drawn = await File.ReadAllTextAsync(Path.Combine(_folder.Path, "sample-logs", "quillback-4-calibration", "calibration.svg"));
+        var kept = Path.Combine(Golden.RepoRoot, ".readme", "calibration.svg");
+        if (Golden.Updating) await File.WriteAllTextAsync(kept, drawn);
+        Assert.True(drawn == await File.ReadAllTextAsync(kept), ".readme/calibration.svg is not what the sample well gives");
+    }
+
+    [Fact]
     public async Task The_layer_table_of_the_sample_well_is_as_agreed()
     {
         CopySampleLogs();

@@ -1,4 +1,6 @@
 using System.Globalization;
+using DepthStress.Core.Depth;
+using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report;
@@ -14,7 +16,7 @@ public class PictureLayoutTests
     public static TheoryData<string, UnitSystem> Cases()
     {
         var cases = new TheoryData<string, UnitSystem>();
-        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only" })
+        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only", "comparisons" })
         {
             cases.Add(name, UnitSystem.Metric);
             cases.Add(name, UnitSystem.Field);
@@ -53,7 +55,9 @@ public class PictureLayoutTests
         Assert.Equal(PageFrame.LongSide, sheet.Width, 0.1); // placed to a tenth of 1/96 inch
         Assert.Equal(PageFrame.ShortSide, sheet.Height);
         Assert.DoesNotContain(sheet.Texts, t => t.Text.Contains('\u2026', StringComparison.Ordinal));
-        foreach (var curve in TrackTable.All.SelectMany(t => t.Curves).Where(c => c.Column.Id != "tensile_strength"))
+        // This well has no tensile strength and no normal trend.
+        string[] absent = ["tensile_strength", "trend_shale", "normal_slowness", "normal_porosity"];
+        foreach (var curve in TrackTable.All.SelectMany(t => t.Curves).Where(c => !absent.Contains(c.Column.Id)))
             Assert.Contains(sheet.Texts, t => t.Text == curve.Label);
     }
 
@@ -106,6 +110,12 @@ public class PictureLayoutTests
         yield return TracksPicture.Draw(model, units, [TrackTable.All[1]]);
         yield return TracksPicture.Draw(model, units, [.. TrackTable.All, .. TrackTable.All]);
         yield return StressPicture.Draw(model, units);
+        yield return PolygonPicture.Draw(model, new PictureOptions(units));
+        foreach (var count in new[] { 1, 2, 3, 4, 5, 6 })
+        {
+            var (top, bottom) = (model.Values.Read(Property.MeasuredDepth)[0], model.Values.Read(Property.MeasuredDepth)[^1]);
+            yield return PolygonPicture.Draw(model, new PictureOptions(units, Depths: [.. Enumerable.Range(0, count).Select(i => (top + ((bottom - top) * (i + 0.3) / count), DepthKind.Measured))]));
+        }
     }
 
     private static EarthModel Model(string name) => name switch
@@ -116,6 +126,7 @@ public class PictureLayoutTests
         "long names" => PictureModels.Full(800, LongName, [PictureModels.Zone(LongName, 900), PictureModels.Zone("Unbreakablenamewithoutanyblankinit", 920)]),
         "two samples" => PictureModels.Small([1000, 1000.5], "two", [PictureModels.Zone("one", 900)], ("density", [2300, 2310])),
         "density only" => PictureModels.Small(PictureModels.Depths(300, 10, 3000), "density", [], ("density", [.. Enumerable.Range(0, 300).Select(i => 2000.0 + i)])),
+        "comparisons" => PictureModels.Full(800, comparisons: true),
         _ => PictureModels.Full(800),
     };
 

@@ -5,6 +5,7 @@ using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
+using DepthStress.Core.Stress;
 
 namespace DepthStress.Tests.Report;
 
@@ -14,10 +15,11 @@ internal static class PictureModels
     private static readonly SettingSource Here = new(SettingKind.WellFile, SourcePosition.None);
 
     /// <summary>A deviated well with every curve, gaps, filled density and zones.</summary>
-    public static EarthModel Full(int samples = 3000, string name = "Example 1", IReadOnlyList<Zone>? zones = null, bool strains = true, bool layered = false)
+    public static EarthModel Full(
+        int samples = 3000, string name = "Example 1", IReadOnlyList<Zone>? zones = null, bool strains = true, bool layered = false, bool comparisons = false)
     {
         var md = Depths(samples, 900, 3400);
-        return Run(name, md, zones ?? (layered ? [.. Zones().Select(Layered)] : Zones()), strains, Deviated(),
+        return Run(name, md, zones ?? (layered ? [.. Zones().Select(Layered)] : Zones()), Stress(strains, comparisons), Deviated(),
             ("gamma_ray", Shape(md, i => 75 + (45 * Wave(md[i], 260)) + (22 * Noise(i)))),
             ("caliper", Shape(md, i => 0.0254 * (8.6 + (Wave(md[i], 400) > 0.8 ? 9 * Math.Abs(Noise(i)) : 0.15 * Noise(i))))),
             ("bit_size", Shape(md, i => 0.0254 * (md[i] < 1500 ? 12.25 : 8.5))),
@@ -29,7 +31,7 @@ internal static class PictureModels
 
     /// <summary>A vertical well with density and perhaps little else.</summary>
     public static EarthModel Small(double[] md, string name, IReadOnlyList<Zone> zones, params (string Role, double[] Values)[] curves) =>
-        Run(name, md, zones, false, Trajectory.Vertical, curves);
+        Run(name, md, zones, Stress(false, false), Trajectory.Vertical, curves);
 
     /// <summary>Evenly spaced depths, m.</summary>
     public static double[] Depths(int samples, double top, double bottom) =>
@@ -37,6 +39,21 @@ internal static class PictureModels
 
     /// <summary>A zone without choices of its own.</summary>
     public static Zone Zone(string name, double top) => new(name, top, null, DepthKind.Measured, new StageSettings(), SourcePosition.None);
+
+    private static HorizontalStressSettings Stress(bool strains, bool comparisons)
+    {
+        var settings = strains ? new HorizontalStressSettings { StrainAlongShmin = Set(1e-4), StrainAlongShmax = Set(7e-4) } : new();
+        return !comparisons ? settings : settings with
+        {
+            Compare = Set<IReadOnlyList<ComparisonChoice>>(
+            [
+                .. ComparisonMethods.All.Select(l => new ComparisonChoice
+                {
+                    Method = Set(l), Ratio = l.Inputs.Any(i => i.Property == Property.MatrixStressRatio) ? Set(0.44) : default,
+                }),
+            ]),
+        };
+    }
 
     private static Zone[] Zones() =>
     [
@@ -54,7 +71,7 @@ internal static class PictureModels
     };
 
     private static EarthModel Run(
-        string name, double[] md, IReadOnlyList<Zone> zones, bool strains, Trajectory path, params (string Role, double[] Values)[] curves)
+        string name, double[] md, IReadOnlyList<Zone> zones, HorizontalStressSettings stress, Trajectory path, params (string Role, double[] Values)[] curves)
     {
         var settings = new StageSettings
         {
@@ -64,7 +81,7 @@ internal static class PictureModels
             Strength = new() { Ucs = First(Property.Ucs), FrictionAngle = First(Property.FrictionAngle) },
             Biot = new() { Coefficient = First(Property.Biot) },
             PorePressure = new() { Method = Set(PorePressureMethod.Hydrostatic), FluidDensity = Set(1040.0) },
-            HorizontalStress = strains ? new() { StrainAlongShmin = Set(1e-4), StrainAlongShmax = Set(7e-4) } : new(),
+            HorizontalStress = stress,
         };
         var setup = new WellSetup
         {

@@ -59,7 +59,7 @@ public class PictureTests
     {
         const string Name = "A_{b}^c <i>&\"x\"</i>\u0001\u0085\ud800 \u202e\u00e9 \ud83d\ude00";
         var model = PictureModels.Small([1000, 1001], Name, [PictureModels.Zone("z<1>&_{2}\u0000", 900)], ("density", [2300, 2310]));
-        foreach (var svg in new[] { Tracks(model), Stress(model) })
+        foreach (var svg in new[] { Tracks(model), Stress(model), Polygon(model) })
         {
             var texts = XDocument.Parse(svg).Descendants(Svg + "text").Select(t => t.Value).ToList();
             Assert.Contains(texts, t => t.StartsWith("A_{b}^c <i>&\"x\"</i> \u00e9 \ud83d\ude00 \u00b7", StringComparison.Ordinal));
@@ -154,6 +154,13 @@ public class PictureTests
     {
         using var stream = new MemoryStream();
         TracksPicture.Write(model, new PictureOptions(units, tracks.Length == 0 ? null : tracks), stream);
+        return Encoding.UTF8.GetString(stream.ToArray());
+    }
+
+    private static string Polygon(EarthModel model)
+    {
+        using var stream = new MemoryStream();
+        PolygonPicture.Write(model, new PictureOptions(UnitSystem.Metric), stream);
         return Encoding.UTF8.GetString(stream.ToArray());
     }
 

@@ -44,6 +44,8 @@ public sealed class RecordingTests
         Assert.False(Json["accept_unverified"]!["value"]!.GetValue<bool>());
         Assert.True(Json["survey"]!["vertical"]!["value"]!.GetValue<bool>());
         Assert.Equal(0, Json["logs"]!["curves"]!["shear"]![1]!["missing"]!["value"]!.GetValue<double>());
+        Assert.Equal("""[0,-1.5,"off","N/A"]""", Missing("[0, \"off\", -1.5, \"N/A\"]").ToJsonString());
+        Assert.Equal("off", Missing("\"off\"").GetValue<string>());
     }
 
     [Fact]
@@ -61,6 +63,9 @@ public sealed class RecordingTests
         var recorded = Settings(Json).Where(s => s["from"]!.GetValue<string>() != "default").Select(s => s["from"]!.GetValue<string>()[..^1].Split('(', ',')[1]);
         Assert.Equal(set, recorded.Distinct().Count()); // one key a line
     }
+
+    private static JsonNode Missing(string value) =>
+        Record(WellText.Sound + $"[logs.curves]\nshear = {{ column = \"S\", missing = {value} }}\n")["logs"]!["curves"]!["shear"]![0]!["missing"]!["value"]!;
 
     private static IEnumerable<JsonObject> Settings(JsonNode? node) => node switch
     {

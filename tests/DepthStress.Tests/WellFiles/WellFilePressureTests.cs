@@ -29,7 +29,7 @@ public sealed class WellFilePressureTests
     [Theory]
     [InlineData(
         "method = \"hydrostatic\"\nfluid_density = \"1.03 g/cm3\"\n", "",
-        "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic")]
+        "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table, fluid line, eaton-1975-sonic, eaton-1975-resistivity, bowers-1995-loading, bowers-1995-unloading and others, see \"depthstress methods --for pp\"")]
     [InlineData(
         "method = \"hydrostatic\"\nfluid_density = \"1.03 g/cm3\"\n", "method = \"hydrostatic\"\n",
         "well.toml: error: [pore_pressure] fluid_density is not set; expected such as \"1.03 g/cm3\"")]

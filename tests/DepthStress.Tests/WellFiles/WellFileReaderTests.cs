@@ -26,7 +26,7 @@ public sealed class WellFileReaderTests : IDisposable
             "well.toml: error: [moduli] static_youngs is not set; expected a value or a method: lacy-1997-sandstone, lacy-1997-shale, lacy-1997-combined, ohen-2003-shale and others, see \"depthstress methods --for youngs_static\"",
             "well.toml: error: [moduli] static_poisson is not set; expected a value or a method: equal-to-dynamic",
             "well.toml: error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"",
-            "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table or eaton-1975-sonic",
+            "well.toml: error: [pore_pressure] method is not set; expected hydrostatic, gradient, table, fluid line, eaton-1975-sonic, eaton-1975-resistivity, bowers-1995-loading, bowers-1995-unloading and others, see \"depthstress methods --for pp\"",
         ],
         WellText.Messages(""));
 

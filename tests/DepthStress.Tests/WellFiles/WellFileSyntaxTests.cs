@@ -23,6 +23,20 @@ public sealed class WellFileSyntaxTests
     public void Syntax_errors_have_their_place(string old, string replacement, params string[] expected) =>
         Assert.Equal(expected, WellText.Messages(WellText.With(old, replacement)));
 
+    [Fact] // found by the fuzz test: what a message quotes may drive a terminal
+    public void A_control_character_is_quoted_as_an_escape()
+    {
+        var messages = WellText.Messages(WellText.With("coefficient = 0.8", "coefficient = \u007f0.8"));
+        Assert.Contains(messages, m => m.StartsWith("well.toml(19,15): error: TOML: ", StringComparison.Ordinal) && m.Contains("\\u007F", StringComparison.Ordinal));
+        Assert.DoesNotContain(messages, m => m.Any(char.IsControl));
+    }
+
+    [Theory] // found by the fuzz test: a message about a file without a name has no place
+    [InlineData("files = [\"logs.csv\"]", "files = [\"logs.csv\", \" \"]", "well.toml(9,9): error: found an empty name in [logs] files, expected the names of the log files")]
+    [InlineData("vertical = true", "file = \"\"\nnorth = \"grid\"", "well.toml(12,8): error: found an empty name, expected [survey] file = the name of a survey file")]
+    public void A_file_without_a_name_is_an_error_where_it_stands(string old, string replacement, string expected) =>
+        Assert.Equal([expected], WellText.Messages(WellText.With(old, replacement)));
+
     [Theory]
     [InlineData(
         "[well]\nname = \"x\"\n",

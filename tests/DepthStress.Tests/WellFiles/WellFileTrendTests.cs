@@ -25,9 +25,9 @@ public sealed class WellFileTrendTests
     [InlineData(
         Method,
         ": error: [pore_pressure] fluid_density is not set; expected the fluid of normal pressure, such as \"1.03 g/cm3\"",
-        ": error: [pore_pressure] trend is not set; expected two or more points of depth below the ground or mudline and slowness")]
+        ": error: [pore_pressure] trend is not set; expected two or more points of depth below the ground or mudline and slowness, or [pore_pressure.normal_trend] with top, base and depth_kind of normally compacted shale")]
     [InlineData(
-        Method + Fluid, ": error: [pore_pressure] trend is not set; expected two or more points of depth below the ground or mudline and slowness")]
+        Method + Fluid, ": error: [pore_pressure] trend is not set; expected two or more points of depth below the ground or mudline and slowness, or [pore_pressure.normal_trend] with top, base and depth_kind of normally compacted shale")]
     [InlineData(Method + Trend, ": error: [pore_pressure] fluid_density is not set; expected the fluid of normal pressure, such as \"1.03 g/cm3\"")]
     [InlineData(
         Method + Fluid + "trend = [{ depth = \"0 m\", slowness = \"180 us/ft\" }]\n",

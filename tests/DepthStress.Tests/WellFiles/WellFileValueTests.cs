@@ -10,7 +10,7 @@ public sealed class WellFileValueTests
         "well.toml: error: [well] datum_elevation is not set; expected the datum's height above mean sea level")]
     [InlineData(
         "[biot]", "[bito]",
-        "well.toml(18,2): error: found the unknown section [bito], expected one of accept_unverified, well, logs, survey, zones, lithology, conditioning, shale, prediction, porosity, anisotropy, moduli, strength, biot, pore_pressure, temperature, horizontal_stress, overburden, layers, output; did you mean \"biot\"?",
+        "well.toml(18,2): error: found the unknown section [bito], expected one of accept_unverified, well, logs, survey, zones, lithology, conditioning, shale, prediction, porosity, anisotropy, moduli, strength, biot, pore_pressure, fluids, temperature, horizontal_stress, overburden, calibration, mud, casing, observations, core, layers, output; did you mean \"biot\"?",
         "well.toml: error: [biot] coefficient is not set; expected a value or a method: krief-1990-biot, consolidated-rock-biot, lee-2003-unconsolidated, nur-1998-critical-porosity and others, see \"depthstress methods --for biot\"")]
     [InlineData(
         "\"rotary table\"", "\"rotary tabel\"",
@@ -85,15 +85,6 @@ public sealed class WellFileValueTests
         "well.toml(12,9): error: found the bare number 3, expected shear = a column name, a table, or a list of tables")]
     public void A_value_of_the_wrong_type_is_named(string old, string replacement, params string[] expected) =>
         Assert.Equal(expected, WellText.Messages(WellText.With(old, replacement)));
-
-    [Theory]
-    [InlineData(
-        "[mud]\nx = 1\n[observations]\nfiles = \"b\"\n[core]\nfiles = \"a\"\n",
-        "well.toml(27,2): error: found the section [mud], which this version does not support yet; remove it, its content would have no effect",
-        "well.toml(29,2): error: found the section [observations], which this version does not support yet; remove it, its content would have no effect",
-        "well.toml(31,2): error: found the section [core], which this version does not support yet; remove it, its content would have no effect")]
-    public void Sections_of_later_versions_are_refused(string added, params string[] expected) =>
-        Assert.Equal(expected, WellText.Messages(WellText.Sound + added));
 
     [Theory]
     [InlineData(

@@ -16,7 +16,7 @@ public sealed class ResultTableTests
         + "pp_emw_g_cm3,shmin_emw_g_cm3,sv_emw_g_cm3,regime,a_phi,zone,lithology,vp_origin,vs_origin,density_origin,stress_basis";
 
     /// <summary>Columns that came later, in the order they came.</summary>
-    private const string Appended = "sv_unlogged_share,bedding_angle_deg,vs_error_m_s,density_error_g_cm3,youngs_static_vertical_gpa,youngs_static_horizontal_gpa,poisson_static_vh,poisson_static_hh,biot_vertical,biot_horizontal,temperature_degc";
+    private const string Appended = "sv_unlogged_share,bedding_angle_deg,vs_error_m_s,density_error_g_cm3,youngs_static_vertical_gpa,youngs_static_horizontal_gpa,poisson_static_vh,poisson_static_hh,biot_vertical,biot_horizontal,temperature_degc,normal_slowness_us_ft,normal_resistivity_ohm_m,normal_porosity,toughness_mpa_m05,brittleness";
 
     private static string[] Header(UnitSystem units) =>
         TinyWell.Text(s => DepthCsv.Write(TinyWell.Model(), units, s)).Split('\n')[0].Split(',');
@@ -61,7 +61,7 @@ public sealed class ResultTableTests
     {
         var lines = TinyWell.Text(s => DepthCsv.Write(TinyWell.Model(count: 2500), UnitSystem.Field, s)).TrimEnd('\n').Split('\n');
         Assert.Equal(2501, lines.Length);
-        Assert.All(lines, l => Assert.Equal(49, l.Split(',').Length));
+        Assert.All(lines, l => Assert.Equal(54, l.Split(',').Length));
     }
 
     [Fact]

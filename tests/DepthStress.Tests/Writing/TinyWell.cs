@@ -37,7 +37,7 @@ internal static class TinyWell
         return model;
     }
 
-    public static LayerTable Layers(EarthModel model) => LayerBuilder.Build(model, new LayerSettings());
+    public static LayerTable Layers(EarthModel model) => LayerBuilder.Build(model, new LayerSettings(), new DiagnosticBag())!;
 
     /// <summary>The bytes a writer gives, as text; throws on bytes that are not UTF-8.</summary>
     public static string Text(Action<Stream> write)

@@ -4,11 +4,15 @@ using static SampleWell.Writing.FixedText;
 namespace SampleWell.Writing;
 
 /// <summary>Makes the tests that the well has seen: the truth of each interval with the error of its kind of test.</summary>
-internal sealed class Observations(Truth truth, TestIntervals intervals)
+/// <param name="truth">The hidden truth.</param>
+/// <param name="intervals">Where tests can be made.</param>
+/// <param name="noise">Seed of the errors.</param>
+/// <param name="asStated">True for errors as large as their rows state; else they are somewhat smaller, as careful users state them.</param>
+internal sealed class Observations(Truth truth, TestIntervals intervals, ulong noise, bool asStated = false)
 {
     private const double MudAbove = 1060;
     private const double MudBelow = 1250;
-    private readonly Draws draws = new(truth.Plan.Seed, "tests");
+    private readonly Draws draws = new(noise, "tests");
     private readonly List<Observation> rows = [];
 
     /// <summary>Every test, from the shoes down.</summary>
@@ -34,6 +38,9 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
         return rows;
     }
 
+    /// <summary>An error of one size or, as stated, of another.</summary>
+    private double Error(double size, double stated) => (asStated ? stated : size) * draws.Normal();
+
     private double Stiffness(double top, double bottom) => Mean(truth.StaticHorizontal, top, bottom);
 
     private double Mean(double[] values, double top, double bottom) => truth.Grid.Mean(values, top, bottom);
@@ -43,7 +50,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
     private void Closure(int formation, double length, double rank, string note, bool atSurface = false)
     {
         var (top, bottom) = intervals.Ranked(formation, length, rank, Stiffness);
-        var value = Mean(truth.Shmin, top, bottom) + 0.45 * draws.Normal();
+        var value = Mean(truth.Shmin, top, bottom) + Error(0.45, 0.5);
         var column = Physics.ColumnMpa(1020, truth.Plan.Path.Tvd((top + bottom) / 2));
         var shown = atSurface ? Mpa(value - column) : Mpa(value);
         rows.Add(new(top, bottom, "md", "closure", shown, atSurface ? "surface" : "downhole", atSurface ? "1.02 g/cm3" : "", "0.5 MPa", "",
@@ -73,7 +80,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
     private void FormationPressure(int formation, double rank, string kind)
     {
         var (top, bottom) = intervals.Ranked(formation, 1, rank, (a, b) => -truth.Grid.Mean(truth.Rock.ShaleVolume, a, b));
-        var value = Mean(truth.Pore, top, bottom) + 0.1 * draws.Normal();
+        var value = Mean(truth.Pore, top, bottom) + Error(0.1, 0.15);
         var depths = kind == "md" ? (top, bottom) : (truth.Plan.Path.Tvd(top), truth.Plan.Path.Tvd(bottom));
         rows.Add(new(depths.Item1, depths.Item2, kind, "formation-pressure", Mpa(value), "downhole", "", "0.15 MPa", "", "2023-09-15",
             "wireline tester; good mobility"));
@@ -85,7 +92,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
         var (top, bottom) = intervals.Ranked(truth.Plan.Formations[1].Top + 3, truth.Plan.Path.KickOff, 1.5, rank, Stiffness);
         var pore = Mean(truth.Pore, top, bottom);
         var value = 3 * Mean(truth.Shmin, top, bottom) - Mean(truth.Shmax, top, bottom) - pore + Mean(truth.Strength, top, bottom) / 10
-            + 0.5 * draws.Normal();
+            + Error(0.5, 0.6);
         rows.Add(new(top, bottom, "md", "breakdown", Mpa(value), "downhole", "", "0.6 MPa", Mpa(pore), "2023-05-20",
             "small fracturing test between packers; vertical hole"));
     }
@@ -96,7 +103,7 @@ internal sealed class Observations(Truth truth, TestIntervals intervals)
         foreach (var (top, bottom) in intervals.Within(
             truth.Grid.Md[0] + 6, truth.Plan.Path.KickOff, 1, 3, (a, b) => wall.BreakoutWidth(a, b) is > 18 and < 100))
         {
-            var value = wall.BreakoutWidth(top, bottom) + 4 * draws.Normal();
+            var value = wall.BreakoutWidth(top, bottom) + Error(4, 6);
             rows.Add(new(top, bottom, "md", "breakout-width", Quantity(value, 0, "deg"), "", Quantity(MudAbove / 1000, 2, "g/cm3"), "6 deg", "",
                 "2023-05-18", "acoustic image; full opening angle of one side; vertical hole"));
         }

@@ -46,7 +46,29 @@ internal static class WellFile
             text.Add(WellFileZones.Zone(formation));
         text.Add(Choices);
         text.Add(PressureTable(truth));
+        text.Add(Hole(plan));
         text.Add(Guesses);
+    }
+
+    /// <summary>The casing, and the mud that was made heavier on the way down.</summary>
+    private static string Hole(WellPlan plan)
+    {
+        string Md(double depth) => Quantity(Math.Round(depth), 0, "m");
+        return $$"""
+            [mud]
+            depth_kind = "md"
+            density = [
+                { top = "0 m", density = "1.06 g/cm3" },
+                { top = "{{Md(plan.Formations[3].Top)}}", density = "1.25 g/cm3" },     # gas in the dapple shale
+                { top = "{{Md(plan.Formations[5].Top)}}", density = "1.40 g/cm3" },
+            ]
+
+            [casing]
+            depth_kind = "md"
+            shoes = [{ depth = "{{Md(plan.FirstMd)}}" }, { depth = "2105 m" }]
+
+
+            """;
     }
 
     private static string Spliced(Curve curve, string upper, string lower, string splice) => $$"""
@@ -76,6 +98,16 @@ internal static class WellFile
         porosity = "density-porosity"
         matrix_density = "2.66 g/cm3"
         fluid_density = "1.03 g/cm3"
+
+        # Shale is stiffer along its bedding. Thomsen's parameters of pure shale are those of plugs from a neighbouring well.
+        [anisotropy]
+        model = "thomsen"
+        epsilon = 0.07
+        gamma = 0.10
+        delta = 0.02
+        scale_with_shale = true
+        velocities = "vertical"              # the sonic of the deviated hole came corrected to the direction across the beds
+        outside = "isotropic"                # where shale volume is missing
 
         [moduli]
         static_youngs = "lacy-1997-combined"
@@ -123,15 +155,22 @@ internal static class WellFile
 
     private const string Guesses = """
         [horizontal_stress]
-        strain_along_shmin = "150 microstrain"   # first guesses from the neighbouring basin, compression positive; not calibrated
-        strain_along_shmax = "400 microstrain"
+        strain_along_shmin = "50 microstrain"   # first guesses from the neighbouring basin, compression positive; not calibrated
+        strain_along_shmax = "250 microstrain"
         shmax_azimuth = "60 deg"             # from breakouts in the vertical part of the hole
         friction_coefficient = 0.6
 
         [layers]
         max_thickness = "150 m"
 
-        # The tests made in the well are in quillback-4-observations.csv, the laboratory table of the plugs in quillback-4-core.csv.
+        [observations]
+        files = ["quillback-4-observations.csv"]
+        breakdown_fluid = "non-penetrating"  # small volumes of mud between packers, through its filter cake
+        strength_error = 0.05                # the crushed plugs scatter by no more around the relations of [strength]
+
+        [core]
+        files = ["quillback-4-core.csv"]
+        depth_shift_limit = "3 m"            # the summary says whether another depth would fit better
 
         """;
 }

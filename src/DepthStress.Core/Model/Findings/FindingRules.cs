@@ -6,7 +6,8 @@ public static class FindingRules
     /// <summary>The rules.</summary>
     public static IReadOnlyList<Func<EarthModel, IEnumerable<Finding>>> All { get; } =
     [
-        MissingFindings.Of, LawFindings.Of, LithologyFindings.Of, PredictionFindings.Of, PhysicalFindings.Of, FrictionFindings.Of, BeddingFindings.Of, AnisotropyFindings.Of,
+        MissingFindings.Of, LawFindings.Of, LithologyFindings.Of, PredictionFindings.Of, PhysicalFindings.Of, PressureFindings.Of, FrictionFindings.Of, BeddingFindings.Of,
+        ObservationFindings.Of, AnisotropyFindings.Of, ComparisonFindings.Of,
     ];
 
     /// <summary>Most important first: by severity, then what concerns the well as a whole, then by the number of samples.</summary>

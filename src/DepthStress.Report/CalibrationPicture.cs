@@ -1,0 +1,149 @@
+using System.Globalization;
+using DepthStress.Core.Calibration;
+using DepthStress.Core.Model;
+using DepthStress.Core.Quantities;
+using DepthStress.Report.Drawing;
+using OxyPlot;
+
+namespace DepthStress.Report;
+
+/// <summary>
+/// What a calibration did, as SVG: Shmin before and after with the observations, how far the model is off at each, and the
+/// plane of the two strains.
+/// </summary>
+public static class CalibrationPicture
+{
+    private const double AxisWidth = 62;
+    private const int MostPlanes = 3;
+    private static readonly TextStyle Small = new(8);
+    private static readonly TextStyle Title = new(9.5, Palette.Text, true);
+
+    /// <summary>Writes the picture: UTF-8, the same bytes for the same result and units.</summary>
+    public static void Write(CalibrationResult result, UnitSystem units, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(result);
+        ArgumentNullException.ThrowIfNull(destination);
+        using var sheet = Draw(result, units);
+        sheet.WriteTo(destination, $"{result.After.Setup.Name}: calibration");
+    }
+
+    /// <summary>Draws the picture.</summary>
+    internal static Sheet Draw(CalibrationResult result, UnitSystem units)
+    {
+        var model = result.After;
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        PageFrame.DrawTitle(sheet, model.Setup.Name, "calibration on observations", PageTexts.Surfaces(model.Setup.Frame, units));
+        var top = PageFrame.Margin + PageFrame.TitleHeight;
+        var bottom = sheet.Height - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 6;
+        DrawProfile(sheet, result, units, new OxyRect(PageFrame.Margin, top, 352, bottom - top));
+        ResidualRows.Draw(sheet, result, units, new OxyRect(PageFrame.Margin + 372, top, 372, bottom - top));
+        DrawPlanes(sheet, result, new OxyRect(PageFrame.Margin + 766, top, sheet.Width - (2 * PageFrame.Margin) - 766, bottom - top));
+        PageFrame.DrawCaution(sheet);
+        return sheet;
+    }
+
+    private static void DrawProfile(Sheet sheet, CalibrationResult result, UnitSystem units, OxyRect box)
+    {
+        var model = result.After;
+        var tvds = new double[model.Count];
+        DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
+        var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
+        var (left, right) = (box.Left + AxisWidth, box.Right);
+        var axis = new DepthAxis(finite.Min(), finite.Max(), box.Top + 34, box.Bottom - 34);
+        var curves = TrackTable.StressPanels.Stress.Curves.Where(c => c.Column.Id is "pp" or "sv" or "shmin" or "shmax").ToList();
+        var traces = curves.Select(c => CurveTrace.Read(model, c, units, tvds, axis)).OfType<CurveTrace>().ToList();
+        var shmin = curves.Find(c => c.Column.Id == "shmin")!;
+        var before = CurveTrace.Read(result.Before, shmin with { Pen = new CurvePen(Palette.Grey, 0.7) }, units, tvds, axis);
+        if (traces.Count == 0) return;
+        var scale = CurveTrace.Scales(traces, units)[0];
+        var panel = new Panel(left, right, scale, axis);
+
+        var unit = shmin.Column.In(units).Unit;
+        sheet.Write(new ScreenPoint((left + right) / 2, box.Top + 8), $"Total stress and pore pressure, {unit.Symbol}", Title, HorizontalAlignment.Center);
+        DepthScales.DrawOwn(sheet, axis, left, left, right);
+        sheet.Write(
+            new ScreenPoint(box.Left + 7, (axis.ScreenTop + axis.ScreenBase) / 2),
+            $"True vertical depth below {PageTexts.Datum(model.Setup.Frame)}, {units.UnitFor(Dimension.Length).Unit.Symbol}", Title, HorizontalAlignment.Center, true);
+        var step = (scale.Right - scale.Left) / scale.Divisions;
+        for (var i = 0; i <= scale.Divisions; i++)
+        {
+            var x = panel.Across(scale.Left + (i * step));
+            sheet.Line(x, axis.ScreenTop, x, axis.ScreenBase, new CurvePen(Palette.Grid, 0.5));
+            sheet.Write(new ScreenPoint(x, axis.ScreenTop - 8), RoundSteps.Show(scale.Left + (i * step), step), Small, HorizontalAlignment.Center);
+        }
+
+        if (before is not null) CurveDrawing.Draw(sheet, panel, before, traces.Count);
+        for (var i = 0; i < traces.Count; i++) CurveDrawing.Draw(sheet, panel, traces[i], i);
+        foreach (var comparison in result.AfterFit.Where(c => c.Reading.Subject is Reading.Shmin or Reading.PorePressure or Reading.Shmax))
+            DrawObservation(sheet, panel, comparison, units, unit);
+        sheet.Outline(new OxyRect(left, axis.ScreenTop, right - left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
+        DrawLegend(sheet, traces, before, left, right, axis.ScreenBase + 12);
+    }
+
+    private static void DrawObservation(Sheet sheet, Panel panel, Comparison comparison, UnitSystem units, Unit unit)
+    {
+        if (!double.IsFinite(comparison.Measured) || comparison.Reading.Meaning == Meaning.Nothing) return;
+        var (length, _) = units.UnitFor(Dimension.Length);
+        var y = panel.Depth.ToScreen(length.FromSi(comparison.Reading.Interval.MiddleTvd));
+        double X(double pascal) => panel.Across(Math.Clamp(unit.FromSi(pascal), panel.Scale.Low, panel.Scale.High));
+        var colour = ResidualRows.Colour(comparison.Reading);
+        var reach = 1.96 * comparison.Reading.Sigma;
+        sheet.Line(X(comparison.Measured - reach), y, X(comparison.Measured + reach), y, new CurvePen(colour, 1));
+        Marks.Draw(sheet, new ScreenPoint(X(comparison.Measured), y), comparison.Reading.Meaning, 3.2, colour);
+    }
+
+    private static void DrawLegend(Sheet sheet, IReadOnlyList<CurveTrace> traces, CurveTrace? before, double left, double right, double y)
+    {
+        var x = left;
+        var entries = traces.Select(t => (t.Curve.Pen, Text: t.Curve.Column.Symbol)).ToList();
+        if (before is not null) entries.Add((before.Curve.Pen, "Shmin before"));
+        foreach (var (pen, text) in entries)
+        {
+            var width = 24 + PlainText.Width(text, Small.Size, false);
+            if (x > left && x + width > right) (x, y) = (left, y + 12);
+            sheet.Line(x, y, x + 18, y, pen with { Width = pen.Width + 0.6 });
+            sheet.Write(new ScreenPoint(x + 22, y), text, Small);
+            x += width + 10;
+        }
+    }
+
+    private static void DrawPlanes(Sheet sheet, CalibrationResult result, OxyRect box)
+    {
+        var count = Math.Min(MostPlanes, result.Strains.Count);
+        var height = Math.Min(470, (box.Height - 70) / count);
+        for (var g = 0; g < count; g++)
+        {
+            var zones = result.Strains[g].Group.Name(result.After.Setup);
+            var name = zones.Length > 0 ? $"Strains, {zones}" : "Tectonic strains";
+            StrainPlane.Draw(sheet, result, g, name, new OxyRect(box.Left, box.Top + (g * height), box.Width, height));
+        }
+
+        var y = box.Top + (count * height) + 10;
+        foreach (var line in Words(result, count))
+        {
+            sheet.Write(new ScreenPoint(box.Left, y), PlainText.Shorten(line, Small.Size, false, box.Width), Small);
+            y += 12;
+        }
+    }
+
+    private static IEnumerable<string> Words(CalibrationResult result, int shown)
+    {
+        yield return "Lines: strains that meet one observation. Ellipse: joint 95 % region.";
+        foreach (var strain in result.Strains.Take(shown))
+        {
+            yield return $"along Shmin {Show(strain.AlongShmin)}, along SHmax {Show(strain.AlongShmax)} microstrain";
+            if (!strain.Separated) yield return "The observations do not separate the two strains.";
+        }
+
+        if (result.Strains.Count > shown)
+            yield return string.Create(CultureInfo.InvariantCulture, $"{result.Strains.Count - shown} more groups of zones find no room here");
+    }
+
+    private static string Show(Estimate estimate)
+    {
+        var value = string.Create(CultureInfo.InvariantCulture, $"{Units.Microstrain.FromSi(estimate.Value):F0}");
+        if (estimate.Held) return value + " (held)";
+        return string.Create(
+            CultureInfo.InvariantCulture, $"{value} ({Units.Microstrain.FromSi(estimate.Low):F0} to {Units.Microstrain.FromSi(estimate.High):F0})");
+    }
+}

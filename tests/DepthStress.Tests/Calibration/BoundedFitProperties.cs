@@ -1,0 +1,112 @@
+using CsCheck;
+using DepthStress.Core.Calibration;
+
+namespace DepthStress.Tests.Calibration;
+
+/// <summary>What holds of every bounded fit: the conditions of Karush, Kuhn and Tucker, and independence of units.</summary>
+public sealed class BoundedFitProperties
+{
+    /// <summary>A random problem: coefficients, data, bounds around zero (some with a corner as optimum), and units of the parameters.</summary>
+    private static readonly Gen<(int N, double[] Numbers, double[] Bounds, double[] Units)> Problems =
+        from n in Gen.Int[1, 6]
+        from numbers in Gen.Double[-1, 1].Array[(n + 6) * (n + 1)]
+        from bounds in Gen.Double[0, 3].Array[2 * n]
+        from units in Gen.Int[-9, 9].Select(e => Math.Pow(10, e)).Array[n]
+        select (n, numbers, bounds, units);
+
+    /// <summary>
+    /// Residuals with a bend (a cube), and every third one-sided. Parameters are given in their own units, up to eighteen orders
+    /// of magnitude apart.
+    /// </summary>
+    private static FitProblem Problem(int n, double[] numbers, double[] bounds, double[] units, bool oneSided) => new(
+        [.. units.Select((u, j) => new FitParameter(0, -bounds[2 * j] * u, bounds[(2 * j) + 1] * u, u))],
+        n + 6,
+        (p, r) =>
+        {
+            for (var i = 0; i < n + 6; i++)
+            {
+                var row = numbers.AsSpan(i * (n + 1), n + 1);
+                var x = 2 * row[n];
+                for (var j = 0; j < n; j++) x += row[j] * p[j] / units[j];
+                x += 0.05 * x * x * x;
+                r[i] = oneSided && i % 3 == 2 ? Math.Max(0, x) : x;
+            }
+        });
+
+    /// <summary>The greatest breach of the optimality conditions: gradient per length of its column and of the residuals (or one standard deviation).</summary>
+    private static double Breach(FitProblem problem, FitResult fit)
+    {
+        var at = fit.Estimates.ToArray();
+        var (plus, minus, worst) = (new double[problem.Count], new double[problem.Count], 0.0);
+        var length = Math.Max(1, Math.Sqrt(fit.ChiSquare));
+        for (var j = 0; j < at.Length; j++)
+        {
+            // The test's own derivative, with a coarser step than the fit's and regardless of bounds.
+            var (keep, step) = (at[j], 1e-5 * problem.Parameters[j].Scale);
+            at[j] = keep + step;
+            problem.Residuals(at, plus);
+            at[j] = keep - step;
+            problem.Residuals(at, minus);
+            at[j] = keep;
+            var (gradient, column) = (0.0, 0.0);
+            for (var i = 0; i < problem.Count; i++)
+            {
+                var slope = (plus[i] - minus[i]) / (2 * step);
+                gradient += slope * fit.Residuals[i];
+                column += slope * slope;
+            }
+
+            var cosine = column > 0 ? gradient / (Math.Sqrt(column) * length) : 0;
+            worst = Math.Max(worst, fit.Bounds[j] switch
+            {
+                BoundState.AtLower => -cosine,
+                BoundState.AtUpper => cosine,
+                BoundState.Held => 0,
+                _ => Math.Abs(cosine),
+            });
+        }
+
+        return worst;
+    }
+
+    // Differences are good to about 1e-9; where a kink lies within their step of 1e-5, a gradient to as much.
+    [Theory]
+    [InlineData(false)]
+    [InlineData(true)]
+    public void Nothing_within_the_bounds_lies_lower(bool oneSided) => Problems.Sample(
+        g =>
+        {
+            var problem = Problem(g.N, g.Numbers, g.Bounds, g.Units, oneSided);
+            var fit = BoundedFit.Solve(problem);
+            var breach = Breach(problem, fit);
+            Assert.True(fit.Converged && breach < (oneSided ? 3e-5 : 1e-6), FormattableString.Invariant($"converged {fit.Converged}, breach {breach}, steps {fit.Iterations}, chi-square {fit.ChiSquare}"));
+        },
+        iter: 2000, threads: 1);
+
+    [Fact]
+    public void Units_of_parameters_do_not_matter() => Problems.Sample(
+        g =>
+        {
+            var plain = BoundedFit.Solve(Problem(g.N, g.Numbers, g.Bounds, [.. g.Units.Select(_ => 1.0)], false));
+            var scaled = BoundedFit.Solve(Problem(g.N, g.Numbers, g.Bounds, g.Units, false));
+            // Rounding differs with the units; the sum of squares is flat at its least.
+            return Math.Abs(plain.ChiSquare - scaled.ChiSquare) <= 1e-9 * (1 + plain.ChiSquare);
+        },
+        iter: 500, threads: 1);
+
+    [Fact]
+    public void Every_kind_of_optimum_occurs_among_the_problems()
+    {
+        var (inside, edge, corner) = (0, 0, 0);
+        Problems.Sample(
+            g =>
+            {
+                var bound = BoundedFit.Solve(Problem(g.N, g.Numbers, g.Bounds, g.Units, true)).Bounds.Count(b => b != BoundState.Free);
+                if (bound == 0) inside++;
+                else if (bound < g.N) edge++;
+                else corner++;
+            },
+            iter: 500, threads: 1);
+        Assert.True(inside > 20 && edge > 20 && corner > 20, $"{inside.ToString(System.Globalization.CultureInfo.InvariantCulture)} {edge.ToString(System.Globalization.CultureInfo.InvariantCulture)} {corner.ToString(System.Globalization.CultureInfo.InvariantCulture)}");
+    }
+}
