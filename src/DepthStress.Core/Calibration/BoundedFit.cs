@@ -19,10 +19,16 @@ public static class BoundedFit
     private const double SmallStep = 1e-10;
 
     /// <summary>Changes of the sum of squares below this share of it are rounding.</summary>
-    private const double Rounding = 1e-13;
+    private const double Rounding = 1e-12;
 
     /// <summary>So are changes below this: residuals are in standard deviations.</summary>
-    private const double Nothing = 1e-16;
+    private const double Nothing = 1e-14;
+
+    /// <summary>A parameter that moves the residuals by less than this over its scale is hardly felt: its steps stay of the size of its scale.</summary>
+    private const double Unfelt = 1e-6;
+
+    /// <summary>A parameter nearer to a bound than this share of its scale is at it.</summary>
+    private const double Touching = 1e-12;
 
     private const double FirstDamping = 1e-4, LeastDamping = 1e-9, MostDamping = 1e12;
 
@@ -65,14 +71,14 @@ public static class BoundedFit
     private static FitResult Descend(FitProblem problem, double[]? weights)
     {
         var n = problem.Parameters.Count;
-        var at = problem.Parameters.Select(p => Math.Clamp(p.Start, p.Lower, p.Upper)).ToArray();
+        var at = problem.Parameters.Select(p => Snapped(Math.Clamp(p.Start, p.Lower, p.Upper), p)).ToArray();
         var residuals = new double[problem.Count];
         problem.Residuals(at, residuals);
         if (!residuals.All(double.IsFinite)) throw new ArgumentException("Its residuals are not finite at the start.", nameof(problem));
         var roots = weights?.Select(Math.Sqrt).ToArray();
         var jacobian = new double[problem.Count, n];
         var trial = new double[problem.Count];
-        var lengths = new double[n];
+        var lengths = problem.Parameters.Select(p => Unfelt / p.Scale).ToArray();
         var (damping, converged, quiet, steps) = (0.0, false, 0, 0);
         var sum = Sum(residuals, roots);
         var fresh = true;
@@ -131,6 +137,13 @@ public static class BoundedFit
         }
     }
 
+    /// <summary>The value, or the bound that it all but touches.</summary>
+    private static double Snapped(double value, FitParameter p)
+    {
+        if (value - p.Lower <= Touching * p.Scale) return p.Lower;
+        return p.Upper - value <= Touching * p.Scale ? p.Upper : value;
+    }
+
     private static double RelativeStep(FitProblem problem, double at, double step, int j) =>
         Math.Abs(step) / (Math.Abs(at) + problem.Parameters[j].Scale);
 
@@ -184,7 +197,7 @@ public static class BoundedFit
             // At a bound of the step the parameter is at its own, exactly.
             var moved = step.Select((s, j) => s == _low[j] ? _parameters[j].Lower
                 : s == _high[j] ? _parameters[j].Upper
-                : Math.Clamp(_at[j] + (s / _units[j]), _parameters[j].Lower, _parameters[j].Upper)).ToArray();
+                : Snapped(Math.Clamp(_at[j] + (s / _units[j]), _parameters[j].Lower, _parameters[j].Upper), _parameters[j])).ToArray();
             return (moved, left.DotProduct(left));
         }
     }

@@ -23,8 +23,11 @@ internal readonly ref struct AnisotropySource(PropertyTable table, AnisotropySet
     /// <summary>Up to this angle between the hole and the normal of the beds, 20 deg in rad, the Stoneley wave stands for C66 (common practice).</summary>
     public const double MostOblique = 20 * Math.PI / 180;
 
-    /// <summary>From this angle on, 45 deg in rad, the wave along the beds tells C66 at most twice as inexactly as itself.</summary>
-    public const double LeastOblique = 45 * Math.PI / 180;
+    /// <summary>
+    /// From this angle on, 60 deg in rad, the wave along the beds tells C66 a third more inexactly than itself at most. Near 45 deg two
+    /// pairs of velocities across the beds give the same ones along the hole, so nothing there can tell them apart.
+    /// </summary>
+    public const double LeastOblique = 60 * Math.PI / 180;
 
     private readonly ReadOnlySpan<double> _shale = table.Read(Property.ShaleVolume);
     private readonly ReadOnlySpan<double> _angle = table.Read(Property.BeddingAngle);
@@ -41,7 +44,7 @@ internal readonly ref struct AnisotropySource(PropertyTable table, AnisotropySet
         AnisotropyLack.StoneleyOblique => "the hole is more than 20 deg from the normal of the beds, where the Stoneley wave does not give C66",
         AnisotropyLack.StoneleyFast => "the Stoneley wave is not slower than sound in the mud",
         AnisotropyLack.ShearLog => "no log of the shear wave that c66 names",
-        AnisotropyLack.ShearSquare => "the hole is less than 45 deg from the normal of the beds, where a shear log does not give C66",
+        AnisotropyLack.ShearSquare => "the hole is less than 60 deg from the normal of the beds, where a shear log does not give C66",
         AnisotropyLack.NoVertical => "no vertical velocities fit those along the hole",
         _ => "the dynamic stiffness is not stable",
     };

@@ -39,7 +39,7 @@ internal static class AnisotropyBindings
         Gamma = s.Number("gamma", c.Gamma, new Interval(-0.2, 1.5), "thomsen, or c66 = \"gamma\": how much stiffer shear is along the beds, (C66 - C44) / (2 C44)"),
         Delta = s.Number("delta", c.Delta, new Interval(-0.4, 1), "thomsen: how compression changes close to the normal of the beds"),
         ScaleWithShale = s.Flag("scale_with_shale", c.ScaleWithShale, "true when epsilon, gamma and delta are those of pure shale and are multiplied by shale volume (common practice)"),
-        C66 = s.Choice("c66", c.C66, BedShears, "annie, modified-annie: where the shear stiffness in the plane of the beds comes from: the Stoneley wave within 20 deg of the normal of the beds, or the SH wave of a shear log from 45 deg on, or gamma"),
+        C66 = s.Choice("c66", c.C66, BedShears, "annie, modified-annie: where the shear stiffness in the plane of the beds comes from: the Stoneley wave within 20 deg of the normal of the beds, or the SH wave of a shear log from 60 deg on, or gamma"),
         MudDensity = s.FluidDensity("mud_density", c.MudDensity, "stoneley: density of the mud the wave ran in"),
         MudVelocity = s.Quantity("mud_velocity", c.MudVelocity, Sign.Positive, Dimension.Velocity, "stoneley: velocity of sound in that mud"),
         C11Factor = s.Number("c11_factor", c.C11Factor, new Interval(0.5, 2), "modified-annie: C11 over 2 (C66 - C44) + C33, from core"),

@@ -78,7 +78,7 @@ public sealed class CliUnitSystemTests : IDisposable
         Assert.Equal(expected, lines[head + 1].Split(' ', StringSplitOptions.RemoveEmptyEntries)); // nu and biot have none
         Assert.Contains($"What the choices of static Poisson's ratio and Biot's coefficient do to mean Shmin, {pressure}:", lines);
         var target = Assert.Single(lines, l => l.StartsWith("Target ", StringComparison.Ordinal));
-        Assert.Matches($@"^Target bracken sand, mean Shmin [\d.]+ {pressure}: barrier above apricot shale \([\d.]+-[\d.]+ {length} md\), [\d.]+ {pressure} more at equal depth over [\d.]+ {length} tvd, \d+ % of it on measured logs; below cinder marl \([\d.]+-[\d.]+ {length} md\), [\d.]+ {pressure} more at equal depth over [\d.]+ {length} tvd, \d+ % of it on measured logs\.$", target);
+        Assert.Matches($@"^Target bracken sand, mean Shmin [\d.]+ {pressure}: barrier above apricot shale \([\d.]+-[\d.]+ {length} md\), [\d.]+ {pressure} more at equal depth over [\d.]+ {length} tvd, \d+ % of it on measured logs; below cinder marl and dapple shale and elm limestone and fern shale \([\d.]+-[\d.]+ {length} md\), [\d.]+ {pressure} more at equal depth over [\d.]+ {length} tvd, \d+ % of it on measured logs\.$", target);
         Assert.All(
             lines.Where(l => l.StartsWith("warning: ", StringComparison.Ordinal) && l.Contains(" at ", StringComparison.Ordinal)),
             l => Assert.Contains($" {length} md", l, StringComparison.Ordinal));
