@@ -110,6 +110,7 @@ public static class CalibrationPicture
     private static void DrawPlanes(Sheet sheet, CalibrationResult result, OxyRect box)
     {
         var count = Math.Min(MostPlanes, result.Strains.Count);
+        if (count == 0) return;
         var height = Math.Min(470, (box.Height - 70) / count);
         for (var g = 0; g < count; g++)
         {

@@ -59,7 +59,7 @@ internal static class CalibrateAction
     private static CalibrationResult? Estimate(LoadedWell well, DiagnosticBag diagnostics, Action<string> stage)
     {
         stage("estimating");
-        return StrainCalibration.Run(
+        return WellCalibration.Run(
             well.Model, well.File.Sections.Calibration, setup => Chain.Run(setup, well.Logs.Logs, diagnostics), diagnostics);
     }
 

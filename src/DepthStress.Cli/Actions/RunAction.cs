@@ -1,5 +1,6 @@
 using DepthStress.Cli.Printing;
 using DepthStress.Cli.Runs;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Files.Writing;
 
@@ -43,6 +44,12 @@ internal static class RunAction
         {
             diagnostics.Error(new SourcePosition(well.File.Name), FormattableString.Invariant($"found {warnings} {(warnings == 1 ? "warning" : "warnings")}, expected none with --strict; nothing was written"));
             return new WellOutcome(diagnostics, well, null, ExitCodes.Input);
+        }
+
+        if (options.Spread)
+        {
+            stage("trying every choice");
+            well = well with { Spread = ChoiceSpread.Of(well.Model) };
         }
 
         var folder = options.Out is { } given ? Path.GetFullPath(given, terminal.Folder) : ResultWriter.DefaultFolder(path);

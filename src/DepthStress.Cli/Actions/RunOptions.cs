@@ -4,4 +4,5 @@ namespace DepthStress.Cli.Actions;
 /// <param name="Out">Folder for the results, or null.</param>
 /// <param name="Jobs">Wells at a time; 0 means one per core.</param>
 /// <param name="Strict">True when warnings fail.</param>
-internal sealed record RunOptions(string? Out, int Jobs, bool Strict);
+/// <param name="Spread">True when every admissible choice is tried.</param>
+internal sealed record RunOptions(string? Out, int Jobs, bool Strict, bool Spread);

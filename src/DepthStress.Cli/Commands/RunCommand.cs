@@ -39,6 +39,9 @@ internal sealed class RunCommand : Command
     /// <summary>Whether warnings fail.</summary>
     public readonly Option<bool> Strict = new("--strict") { Description = "Write nothing and end with 2 when there are warnings" };
 
+    /// <summary>Whether every admissible choice is tried.</summary>
+    public readonly Option<bool> Spread = new("--spread") { Description = "Also run every admissible choice of static modulus, Poisson's ratio and Biot's coefficient, and show what it does to Shmin" };
+
     /// <summary>Declares the command.</summary>
     public RunCommand(Terminal terminal)
         : base("run", "Read the logs, compute properties, pressures and stresses, and write tables, layers and pictures")
@@ -47,6 +50,7 @@ internal sealed class RunCommand : Command
         Add(Out);
         Add(Jobs);
         Add(Strict);
+        Add(Spread);
         Validators.Add(result =>
         {
             var files = Names.Of(result, WellFiles);
@@ -57,7 +61,7 @@ internal sealed class RunCommand : Command
         });
         SetAction((parsed, cancellation) =>
         {
-            var options = new RunOptions(parsed.GetValue(Out), parsed.GetValue(Jobs), parsed.GetValue(Strict));
+            var options = new RunOptions(parsed.GetValue(Out), parsed.GetValue(Jobs), parsed.GetValue(Strict), parsed.GetValue(Spread));
             return RunAction.RunAsync(terminal, parsed.GetRequiredValue(WellFiles), options, cancellation);
         });
     }

@@ -17,8 +17,13 @@ internal static class CalibrationPrinter
         var units = well.File.Sections.Output.Units.Value;
         terminal.Output.WriteLine($"Calibration of {well.File.Setup.Name}");
         terminal.Output.WriteLine();
-        terminal.Tables().Write(Estimates(result));
-        terminal.Output.WriteLine(Statistics(result, units));
+        if (result.Strains.Count > 0)
+        {
+            terminal.Tables().Write(Estimates(result));
+            terminal.Output.WriteLine(Statistics(result, units));
+        }
+
+        if (result.Others.Count > 0) terminal.Tables().Write(Others(result));
         terminal.Output.WriteLine();
         terminal.Tables().Write(Observations(result, units));
         foreach (var comparison in result.AfterFit.Where(c => c.Reading.Problem is not null))
@@ -42,6 +47,25 @@ internal static class CalibrationPrinter
             Row(table, "along Shmin" + where, strain.AlongShmin);
             Row(table, "along SHmax" + where, strain.AlongShmax);
             Row(table, "difference" + where, strain.Difference);
+        }
+
+        return table;
+    }
+
+    private static Table Others(CalibrationResult result)
+    {
+        var table = new Table().Border(TableBorder.Simple);
+        table.AddColumn(new TableColumn("parameter").NoWrap());
+        foreach (var title in (string[])["before", "estimate", "std error", "95 % from", "to"]) table.AddColumn(Numbers(title));
+        table.AddColumn(new TableColumn("from").NoWrap());
+        foreach (var (_, key, dimension, estimate, basis) in result.Others)
+        {
+            var (unit, decimals) = CalibrationEdits.UnitOf(dimension);
+            string Show(double si) => double.IsNaN(si) ? "" : unit.FromSi(si).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+            string Error(double si) => double.IsNaN(si) ? "bound" : (si / unit.Factor).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+            table.AddRow(
+                Markup.Escape(unit.Symbol.Length == 0 ? key : $"{key}, {unit.Symbol}"), Show(estimate.Start), Show(estimate.Value), Error(estimate.StandardError),
+                Show(estimate.Low), Show(estimate.High), Markup.Escape(basis));
         }
 
         return table;

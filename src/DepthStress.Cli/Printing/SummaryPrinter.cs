@@ -25,6 +25,7 @@ internal static class SummaryPrinter
         foreach (var columns in terminal.Width < FullWidth ? Narrow : [Columns]) terminal.Tables().Write(Zones(model, units, columns));
         terminal.Output.WriteLine();
         ChoicePrinter.Print(terminal, model, units);
+        SpreadPrinter.Print(terminal, well);
         BarrierPrinter.Print(terminal, well);
         ObservationPrinter.Print(terminal, well);
         DepletionPrinter.Print(terminal, model, units);

@@ -23,8 +23,26 @@ internal static class CalibrationEdits
             }
         }
 
+        foreach (var other in result.Others) edits.Add(new(-1, other.Section, other.Key, Text(other)));
         return edits;
     }
+
+    private static string Text(ParameterEstimate other)
+    {
+        var (unit, decimals) = UnitOf(other.Dimension);
+        var number = unit.FromSi(other.Estimate.Value).ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        return unit.Symbol.Length == 0 ? number : $"\"{number} {unit.Symbol}\"";
+    }
+
+    /// <summary>The unit in which a parameter is written and shown, with digits enough for its effect.</summary>
+    public static (Unit Unit, int Decimals) UnitOf(Dimension dimension) => dimension switch
+    {
+        Dimension.Slowness => (Units.MicrosecondPerFoot, 2),
+        Dimension.Length => (Units.Metre, 1),
+        Dimension.Resistivity => (Units.OhmMetre, 4),
+        Dimension.Fraction => (Units.Fraction, 4),
+        _ => (Units.One, 4),
+    };
 
     private static string Text(double strain) => string.Create(CultureInfo.InvariantCulture, $"\"{Units.Microstrain.FromSi(strain):F1} {Units.Microstrain.Symbol}\"");
 }

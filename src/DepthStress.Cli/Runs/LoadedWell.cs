@@ -1,3 +1,4 @@
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
@@ -16,6 +17,9 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
 {
     /// <summary>The layers that the model is cut into; what is found about them is among the model's findings.</summary>
     public required LayerTable Layers { get; init; }
+
+    /// <summary>What every admissible choice makes of Shmin; null when that was not asked for.</summary>
+    public IReadOnlyList<ChoiceSpread>? Spread { get; init; }
 
     /// <summary>Reads and computes a well; null when its input cannot be used.</summary>
     /// <param name="path">Full path of the well file.</param>

@@ -33,6 +33,7 @@ internal static class ResultWriter
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
         ];
 
+        if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));
         if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
         if (model.Setup.Observations.Count > 0) results.Add(("observations.csv", s => ObservationsCsv.Write(Comparison.Of(model), units, s)));
         if (CoreComparison.Of(model) is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));

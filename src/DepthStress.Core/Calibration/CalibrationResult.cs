@@ -47,6 +47,9 @@ public sealed record CalibrationResult
     /// <summary>The numbers, group by group, from which the strain plane is drawn: covariance of the strains along Shmin and along SHmax.</summary>
     public required IReadOnlyList<(double AlongShmin, double Both, double AlongShmax)> Covariances { get; init; }
 
+    /// <summary>Estimates that are no strains, in the order in which they were made.</summary>
+    public IReadOnlyList<ParameterEstimate> Others { get; init; } = [];
+
     /// <summary>What a reader should know, most important first.</summary>
     public IReadOnlyList<Finding> Findings { get; init; } = [];
 }

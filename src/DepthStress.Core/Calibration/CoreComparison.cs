@@ -92,9 +92,15 @@ public sealed record CoreComparison(
 
     private static PlugRow Row(CorePlug plug, double depth, PlugDepth at)
     {
-        var youngs = at.At(Property.YoungsStatic, depth);
+        // In layered rock a plug along the beds is compared with the modulus along them. A plug at an angle has no counterpart there.
+        var layered = at.Settings(depth)?.Anisotropy.IsOn ?? false;
+        var along = layered && plug.Orientation == PlugOrientation.Horizontal;
+        var inclined = layered && plug.Orientation == PlugOrientation.Inclined;
+        var youngs = inclined ? double.NaN : at.At(along ? Property.YoungsStaticHorizontal : Property.YoungsStatic, depth);
+        // Poisson's ratio of a plug along the beds depends on where its sides were measured.
+        var poisson = along || inclined ? double.NaN : at.At(Property.PoissonStatic, depth);
         return new PlugRow(
-            plug, depth, youngs, youngs / (at.Settings(depth)?.Moduli.StaticYoungsFactor.Value ?? 1), at.At(Property.YoungsDynamic, depth),
-            at.At(Property.PoissonStatic, depth), at.At(Property.Ucs, depth));
+            plug, depth, youngs, youngs / (at.Settings(depth)?.Moduli.StaticYoungsFactor.Value ?? 1),
+            inclined ? double.NaN : at.At(along ? Property.YoungsDynamicHorizontal : Property.YoungsDynamic, depth), poisson, at.At(Property.Ucs, depth));
     }
 }

@@ -38,7 +38,7 @@ public static class PressureCalibration
         var tests = Readings.Of(model, []).Where(r => r.Subject == Reading.PorePressure && r.Problem is null).ToList();
         if (tests.Count < parameters.Count)
         {
-            diagnostics.Error(position, FormattableString.Invariant($"[calibration] free: found {parameters.Count} parameters of the pore pressure and {tests.Count} formation pressures within the logs, expected as many of these at least: {parameters[^1].Key} is not determined"));
+            diagnostics.Error(position, FormattableString.Invariant($"[calibration] free: found {tests.Count} formation pressures within the logs, expected as many as freed parameters of the pore pressure at least, {parameters.Count}: {parameters[^1].Key} is not determined"));
             return null;
         }
 

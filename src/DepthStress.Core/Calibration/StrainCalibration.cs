@@ -53,7 +53,7 @@ public static class StrainCalibration
             Before = model,
             After = after,
             Strains = strains,
-            BeforeFit = [.. readings.Zip(fitted, (r, f) => AsItWas(r, start, f))],
+            BeforeFit = [],
             AfterFit = fitted,
             DegreesOfFreedom = fitter.DegreesOfFreedom(best),
             ReducedChiSquare = fitter.OwnChiSquare(held) / fitter.DegreesOfFreedom(best),
@@ -97,13 +97,6 @@ public static class StrainCalibration
         }
 
         return null;
-    }
-
-    private static Comparison AsItWas(Reading reading, double[] start, Comparison fitted)
-    {
-        // Without strains SHmax has no value before.
-        var (measured, modelled) = reading.At([.. start.Select(s => double.IsNaN(s) ? 0 : s)]);
-        return new Comparison(reading, measured, modelled, fitted.Sigma);
     }
 
     private static double Joint(int freedom) =>

@@ -60,7 +60,8 @@ internal static class WallReadings
 
         // In a near-vertical hole SHmax is a straight function of Shmin and of the strength; read off where the answer is always known.
         var meaning = interval.Observation.Kind == ObservationKind.NoBreakout ? Meaning.UpperBound : Meaning.Value;
-        var shmin0 = rock.Shmin;
+        // Standard deviations are taken where no strain that is to be estimated enters, so that they do not depend on its first guess.
+        var (shmin0, _) = response.Mean([]);
         var origin = rock.IsVertical ? rock.Pore : shmin0;
         var at = Shmax(interval.Value, origin, 1);
         if (!at.IsKnown) return Refused(at.Reason!);
@@ -102,9 +103,6 @@ internal static class WallReadings
         /// <summary>Azimuth of SHmax, rad; null where it is not set.</summary>
         public double? ShmaxAzimuth { get; } =
             model.Runs.First(r => first < r.End).Settings.HorizontalStress.ShmaxAzimuth is { IsSet: true } azimuth ? azimuth.Value : null;
-
-        /// <summary>Shmin as it is, Pa: where a derivative is taken.</summary>
-        public double Shmin { get; } = SampleMean.Of(model, Property.MinHorizontalStress, first, count);
 
         public FarField FarField(double shmin, double shmax) => new(Vertical, shmax, shmin, ShmaxAzimuth ?? double.NaN);
     }

@@ -50,7 +50,7 @@ public static class Chain
         var pressure = PressureStage.PorePressure(setup, table, runs, uses);
         if (!pressure.Report(diagnostics, setup.Position)) return null;
         findings.AddRange(pressure.Findings);
-        RockStage(table, runs, uses, findings);
+        RockStage.Apply(table, runs, uses, findings);
         TemperatureStage.Apply(setup, table, runs);
         StressStage.Apply(setup, table, runs);
         var comparisons = ComparisonStage.Apply(setup, table, runs, uses);
@@ -87,30 +87,5 @@ public static class Chain
         }
 
         return table;
-    }
-
-    private static void RockStage(PropertyTable table, IReadOnlyList<SettingsRun> runs, List<LawUse> uses, List<Finding> findings)
-    {
-        if (table.Has(Property.Vp) && table.Has(Property.Vs))
-        {
-            var youngs = table.Write(Property.YoungsDynamic);
-            var poisson = table.Write(Property.PoissonDynamic);
-            var vp = table.Read(Property.Vp);
-            var vs = table.Read(Property.Vs);
-            var density = table.Read(Property.Density);
-            foreach (var run in runs.Where(r => !r.Settings.Anisotropy.IsOn))
-            {
-                var (start, n) = (run.Start, run.Length);
-                DynamicModuli.Fill(vp.Slice(start, n), vs.Slice(start, n), density.Slice(start, n), youngs.Slice(start, n), poisson.Slice(start, n));
-            }
-        }
-
-        foreach (var slot in LawSlots.Rock.Skip(1))
-        {
-            LawStage.Apply(slot, table, runs, uses);
-            if (slot.Property == Property.PoissonStatic) VtiStaticStage.Moduli(table, runs, findings);
-        }
-
-        VtiStaticStage.Biot(table, runs, findings);
     }
 }

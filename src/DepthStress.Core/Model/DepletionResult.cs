@@ -43,6 +43,10 @@ public sealed record DepletionResult(
     {
         private readonly double[] _poisson = SampleMarks.Column(model, Property.PoissonStatic);
         private readonly double[] _biot = SampleMarks.Column(model, Property.Biot);
+        private readonly double[] _youngs = SampleMarks.Column(model, Property.YoungsStatic);
+        private readonly double[] _youngsHorizontal = SampleMarks.Column(model, Property.YoungsStaticHorizontal);
+        private readonly double[] _poissonHorizontal = SampleMarks.Column(model, Property.PoissonStaticHorizontal);
+        private readonly double[] _biotHorizontal = SampleMarks.Column(model, Property.BiotHorizontal);
         private readonly double[] _vertical = SampleMarks.Column(model, Property.VerticalStress);
         private readonly double[] _pore = SampleMarks.Column(model, Property.PorePressure);
         private readonly double[] _shmin = SampleMarks.Column(model, Property.MinHorizontalStress);
@@ -57,7 +61,9 @@ public sealed record DepletionResult(
             for (var i = run.Start; i < run.End; i++)
             {
                 if (double.IsNaN(_shmin[i])) continue;
-                var coefficient = DepletionPath.Coefficient(_biot[i], _poisson[i]);
+                var coefficient = run.Settings.Anisotropy.IsOn
+                    ? DepletionPath.Coefficient(_biot[i], _biotHorizontal[i], _youngsHorizontal[i] / _youngs[i], _poisson[i], _poissonHorizontal[i])
+                    : DepletionPath.Coefficient(_biot[i], _poisson[i]);
                 var after = _shmin[i] + (coefficient * change);
                 var distance = _shmin[i] - FrictionalLimit.LowestShmin(_vertical[i], _pore[i], friction);
                 var newDistance = after - FrictionalLimit.LowestShmin(_vertical[i], _pore[i] + change, friction);

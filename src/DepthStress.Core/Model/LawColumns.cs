@@ -52,6 +52,14 @@ internal static class LawColumns
             if (settings.Method.IsSet && ShaleMethod.Of(settings.Method.Value) is { } method) wanted.Add(method.Log);
         }
 
+        Derive(table, wanted);
+    }
+
+    /// <summary>Makes every slowness column, for laws that nobody has chosen yet.</summary>
+    public static void DeriveAll(PropertyTable table) => Derive(table, [Property.CompressionalSlowness, Property.ShearSlowness]);
+
+    private static void Derive(PropertyTable table, HashSet<Property> wanted)
+    {
         Invert(table, Property.Vp, Property.CompressionalSlowness, wanted);
         Invert(table, Property.Vs, Property.ShearSlowness, wanted);
     }

@@ -28,6 +28,9 @@ public static class CalibrationJson
             json.WriteStartArray("strains");
             foreach (var strain in result.Strains) Strain(json, result, strain);
             json.WriteEndArray();
+            json.WriteStartArray("other_parameters");
+            foreach (var other in result.Others) Other(json, other);
+            json.WriteEndArray();
             json.WriteNumber("degrees_of_freedom", result.DegreesOfFreedom);
             Number(json, "reduced_chi_square", result.ReducedChiSquare);
             Number(json, "model_error_mpa", Units.Megapascal.FromSi(result.ModelError));
@@ -51,6 +54,23 @@ public static class CalibrationJson
         Estimate(json, "difference", strain.Difference);
         Number(json, "correlation", strain.Correlation);
         json.WriteBoolean("separated", strain.Separated);
+        json.WriteEndObject();
+    }
+
+    private static void Other(Utf8JsonWriter json, ParameterEstimate other)
+    {
+        json.WriteStartObject();
+        json.WriteString("section", other.Section);
+        json.WriteString("key", other.Key);
+        json.WriteString("unit", $"SI of {other.Dimension}");
+        json.WriteNumber("value", other.Estimate.Value);
+        json.WritePropertyName("standard_error");
+        if (double.IsFinite(other.Estimate.StandardError)) json.WriteNumberValue(other.Estimate.StandardError);
+        else json.WriteNullValue();
+        json.WriteNumber("low_95", other.Estimate.Low);
+        json.WriteNumber("high_95", other.Estimate.High);
+        json.WriteNumber("before", other.Estimate.Start);
+        json.WriteString("from", other.Basis);
         json.WriteEndObject();
     }
 

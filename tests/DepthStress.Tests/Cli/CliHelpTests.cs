@@ -15,6 +15,7 @@ public sealed class CliHelpTests : IDisposable
     [InlineData("help-init", "init")]
     [InlineData("help-check", "check")]
     [InlineData("help-run", "run")]
+    [InlineData("help-calibrate", "calibrate")]
     [InlineData("help-methods", "methods")]
     [InlineData("help-schema", "schema")]
     public async Task Help_is_as_it_was(string golden, params string[] command)
@@ -46,7 +47,7 @@ public sealed class CliHelpTests : IDisposable
     [InlineData("error: Required argument missing for option: '--jobs'.\nRun \"depthstress run --help\" for usage.\n", "run", "a", "--jobs")]
     [InlineData("error: Required argument missing for option: '--out'.\nRun \"depthstress run --help\" for usage.\n", "run", "a", "--out")]
     [InlineData("error: found --out with several well files, expected one: --out takes the results of one well\nRun \"depthstress run --help\" for usage.\n", "run", "a", "b", "--out", "c")]
-    [InlineData("error: found the unknown option --outt, expected one of --out, --jobs, --strict, or ./--outt for a file of that name; did you mean \"--out\"?\nRun \"depthstress run --help\" for usage.\n", "run", "a", "--outt")]
+    [InlineData("error: found the unknown option --outt, expected one of --out, --jobs, --strict, --spread, or ./--outt for a file of that name; did you mean \"--out\"?\nRun \"depthstress run --help\" for usage.\n", "run", "a", "--outt")]
     [InlineData("error: found the unknown option --froce, expected one of --force, or ./--froce for a file of that name; did you mean \"--force\"?\nRun \"depthstress init --help\" for usage.\n", "init", "--froce")]
     [InlineData("error: found an empty WELLFILE, expected the name of a file\nRun \"depthstress check --help\" for usage.\n", "check", "")]
     [InlineData("error: found well files that share one result folder (a.toml, ./a.toml), expected each well once and under a name of its own\nRun \"depthstress run --help\" for usage.\n", "run", "a.toml", "./a.toml")]

@@ -36,6 +36,15 @@ public class DepletionReferenceTests
         Assert.Equal(DepletionPath.Coefficient(0.8, 0.2), (At(31e6) - At(29e6)) / 2e6, 1e-12);
     }
 
+    // The same in layered rock; and equal constants both ways give the isotropic path.
+    [Fact]
+    public void In_layered_rock_the_path_is_the_slope_of_the_models_own_stress_too()
+    {
+        double At(double pore) => VtiStrainModel.Of(20e9, 32e9, 0.2, 0.28, 0.8, 0.7, 60e6, pore, 2e-4, 6e-4);
+        Assert.Equal(DepletionPath.Coefficient(0.8, 0.7, 1.6, 0.2, 0.28), (At(31e6) - At(29e6)) / 2e6, 1e-12);
+        Assert.Equal(DepletionPath.Coefficient(0.8, 0.2), DepletionPath.Coefficient(0.8, 0.8, 1, 0.2, 0.2), 1e-15);
+    }
+
     // By hand from the printed columns of the model: nu 0.21875, Biot 0.8, 10 MPa of fall. Tolerance: rounding of means.
     [Fact]
     public void A_zone_says_where_it_goes_and_the_profile_stays()
