@@ -15,15 +15,12 @@ public static class StrainCalibration
     /// <summary>Estimates the strains.</summary>
     /// <param name="model">The model with the strains as they are.</param>
     /// <param name="settings">What is free and what is held.</param>
-    /// <param name="run">Makes a model of a changed setup.</param>
     /// <param name="diagnostics">Gets why nothing could be estimated.</param>
     /// <returns>The result, or null with an error reported.</returns>
-    public static CalibrationResult? Run(
-        EarthModel model, CalibrationSettings settings, Func<WellSetup, EarthModel?> run, DiagnosticBag diagnostics)
+    public static CalibrationResult? Run(EarthModel model, CalibrationSettings settings, DiagnosticBag diagnostics)
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(settings);
-        ArgumentNullException.ThrowIfNull(run);
         ArgumentNullException.ThrowIfNull(diagnostics);
         var groups = StrainGroup.Of(model.Setup, settings);
         var readings = Readings.Of(model, groups);
@@ -44,14 +41,13 @@ public static class StrainCalibration
 
         var setup = model.Setup;
         for (var g = 0; g < groups.Count; g++) setup = groups[g].With(setup, best.Strains[2 * g], best.Strains[(2 * g) + 1]);
-        if (run(setup) is not { } after) return null;
 
         var left = fitter.LeaveOneOut(best, held);
         var fitted = readings.Select(r => r.Compare(best.Strains, best.ModelError, best.Strength) with { LeftOut = left.GetValueOrDefault(r, double.NaN) }).ToList();
         var result = new CalibrationResult
         {
             Before = model,
-            After = after,
+            After = StressStage.Again(model, setup),
             Strains = strains,
             BeforeFit = [],
             AfterFit = fitted,

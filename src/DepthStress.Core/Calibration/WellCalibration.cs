@@ -40,7 +40,7 @@ public static class WellCalibration
             now = next;
         }
 
-        var result = settings.Frees(FreeParameter.Strains) ? StrainCalibration.Run(now, settings, run, diagnostics) : Unchanged(now);
+        var result = settings.Frees(FreeParameter.Strains) ? StrainCalibration.Run(now, settings, diagnostics) : Unchanged(now);
         return result is null ? null : result with { Before = model, BeforeFit = Before(model, result), Others = others };
     }
 

@@ -1,7 +1,6 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Lithology;
 using DepthStress.Core.Logs;
-using DepthStress.Core.Rock;
 
 namespace DepthStress.Core.Model;
 

@@ -1,6 +1,5 @@
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Logs;
-using DepthStress.Core.Quantities;
 
 namespace DepthStress.Core.Model;
 
@@ -24,25 +23,25 @@ internal sealed record FormationTest(Observation Observation, double MeasuredDep
         var tvd = table.Read(Property.TrueVerticalDepth);
         foreach (var observation in setup.Observations.Where(o => o.Kind == ObservationKind.FormationPressure))
         {
-            var depth = 0.5 * (ZoneIndex.ToMeasured(setup, observation.Top, observation.DepthKind) + ZoneIndex.ToMeasured(setup, observation.Base, observation.DepthKind));
+            var interval = ObservedInterval.Of(setup, observation);
+            var depth = 0.5 * (interval.Top + interval.Base);
             if (md.Length < 2 || !(depth >= md[0] && depth <= md[^1]))
             {
                 findings?.Add(Finding.General(Severity.Note, $"{observation.Position}: the formation pressure lies outside the logs and was not used"));
                 continue;
             }
 
-            if (observation is { AtSurface: true, FluidDensity: null })
+            if (double.IsNaN(interval.Value))
             {
                 findings?.Add(Finding.General(Severity.Warning, $"{observation.Position}: the formation pressure was read at the surface and lacks the density of the fluid in the hole; it was not used"));
                 continue;
             }
 
-            var vertical = setup.Trajectory.At(depth).TrueVerticalDepth;
-            var column = observation.AtSurface ? observation.FluidDensity!.Value * Constants.StandardGravity * vertical : 0;
+            var vertical = interval.MiddleTvd;
             var k = Math.Clamp(md.BinarySearch(depth) is var found && found >= 0 ? found : ~found, 1, md.Length - 1);
             var near = depth - md[k - 1] < md[k] - depth ? k - 1 : k;
             tests.Add(new FormationTest(
-                observation, depth, near, observation.Value + column,
+                observation, depth, near, interval.Value,
                 Between(table.Read(Property.PorePressure), tvd, k, near, vertical), Between(table.Read(Property.VerticalStress), tvd, k, near, vertical)));
         }
 

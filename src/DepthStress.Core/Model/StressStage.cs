@@ -8,6 +8,18 @@ internal static class StressStage
     /// <summary>The log curves that a horizontal stress rests on.</summary>
     private static readonly Property[] StressCurves = [Property.Vp, Property.Vs, Property.Density];
 
+    /// <summary>
+    /// The model with the horizontal stresses of another setup that differs in the settings for these alone. Its findings are those
+    /// of the first model: they are not looked for again.
+    /// </summary>
+    public static EarthModel Again(EarthModel model, WellSetup setup)
+    {
+        var table = model.Values.Sharing(Property.MinHorizontalStress, Property.MaxHorizontalStress);
+        var runs = SettingsRun.Resolve(setup, model.Zones, model.Lithologies);
+        Apply(setup, table, runs);
+        return model with { Setup = setup, Values = table, Runs = runs };
+    }
+
     /// <summary>True when a lithology is salt, whose stresses are all equal.</summary>
     public static bool IsSalt(WellSetup setup, int lithology) => lithology >= 0 && setup.Lithologies[lithology].Rule.Salt;
 

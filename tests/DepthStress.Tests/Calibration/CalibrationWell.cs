@@ -55,7 +55,7 @@ internal static class CalibrationWell
     public static CalibrationResult Calibrate(WellSetup setup, CalibrationSettings? settings = null)
     {
         var diagnostics = new DiagnosticBag();
-        var result = StrainCalibration.Run(Run(setup), settings ?? new CalibrationSettings(), Run, diagnostics);
+        var result = WellCalibration.Run(Run(setup), settings ?? new CalibrationSettings(), Run, diagnostics);
         Assert.Empty(diagnostics.Items);
         return result!;
     }
@@ -63,7 +63,7 @@ internal static class CalibrationWell
     public static string Refusal(WellSetup setup, CalibrationSettings? settings = null)
     {
         var diagnostics = new DiagnosticBag();
-        Assert.Null(StrainCalibration.Run(Run(setup), settings ?? new CalibrationSettings(), Run, diagnostics));
+        Assert.Null(WellCalibration.Run(Run(setup), settings ?? new CalibrationSettings(), Run, diagnostics));
         return Assert.Single(diagnostics.Items).ToString();
     }
 }

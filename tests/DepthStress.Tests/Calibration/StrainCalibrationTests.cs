@@ -149,4 +149,14 @@ public sealed class StrainCalibrationTests
         Assert.Equal(double.NaN, result.AfterFit[^1].Residual);
         Assert.Equal(7, result.DegreesOfFreedom); // nine closures, two strains
     }
+
+    [Fact]
+    public void The_model_with_the_estimates_is_what_a_run_with_them_gives()
+    {
+        var result = CalibrationWell.Calibrate(Guess with { Observations = CalibrationWell.Closures(Truth, 0.5e6, i => 0.3e6 * (i % 2)) });
+        var again = CalibrationWell.Run(result.After.Setup);
+        Assert.Equal(again.Column(Property.MinHorizontalStress), result.After.Column(Property.MinHorizontalStress));
+        Assert.Equal(again.Column(Property.MaxHorizontalStress), result.After.Column(Property.MaxHorizontalStress));
+        Assert.NotEqual(result.Before.Column(Property.MinHorizontalStress), result.After.Column(Property.MinHorizontalStress));
+    }
 }

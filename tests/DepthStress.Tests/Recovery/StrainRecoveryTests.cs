@@ -90,8 +90,7 @@ public sealed class StrainRecoveryTests(ITestOutputHelper output)
             var file = WellFileReader.Read(Path.Combine(Written.Folder, "quillback-4.toml"), diagnostics)!;
             var observations = file.Setup.Observations.Where(o => chosen?.Invoke(o) ?? true).ToList();
             var model = _model with { Setup = _model.Setup with { Observations = observations } };
-            // What is looked at are the estimates; the model they give is not computed again.
-            return StrainCalibration.Run(model, file.Sections.Calibration, _ => model, diagnostics)!;
+            return StrainCalibration.Run(model, file.Sections.Calibration, diagnostics)!;
         }
 
         public void Dispose() => Written.Dispose();
