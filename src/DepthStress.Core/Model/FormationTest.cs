@@ -8,9 +8,10 @@ namespace DepthStress.Core.Model;
 /// <param name="MeasuredDepth">Measured depth of its middle, m.</param>
 /// <param name="Sample">The sample nearest to it.</param>
 /// <param name="Pressure">Measured pressure at its depth, Pa.</param>
+/// <param name="Sigma">Its standard deviation, Pa.</param>
 /// <param name="Computed">Pore pressure of the profile there, Pa; NaN when it has none.</param>
 /// <param name="Stress">Vertical stress there, Pa; NaN when the profile has none.</param>
-internal sealed record FormationTest(Observation Observation, double MeasuredDepth, int Sample, double Pressure, double Computed, double Stress)
+internal sealed record FormationTest(Observation Observation, double MeasuredDepth, int Sample, double Pressure, double Sigma, double Computed, double Stress)
 {
     /// <summary>Measured less computed, Pa.</summary>
     public double Residual => Pressure - Computed;
@@ -41,7 +42,7 @@ internal sealed record FormationTest(Observation Observation, double MeasuredDep
             var k = Math.Clamp(md.BinarySearch(depth) is var found && found >= 0 ? found : ~found, 1, md.Length - 1);
             var near = depth - md[k - 1] < md[k] - depth ? k - 1 : k;
             tests.Add(new FormationTest(
-                observation, depth, near, interval.Value,
+                observation, depth, near, interval.Value, interval.Sigma,
                 Between(table.Read(Property.PorePressure), tvd, k, near, vertical), Between(table.Read(Property.VerticalStress), tvd, k, near, vertical)));
         }
 

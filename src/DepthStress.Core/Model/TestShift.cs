@@ -30,7 +30,7 @@ internal static class TestShift
             double weighted = 0, weights = 0;
             foreach (var test in own)
             {
-                var weight = 1 / (test.Observation.Sigma * test.Observation.Sigma);
+                var weight = 1 / (test.Sigma * test.Sigma);
                 weighted += weight * test.Residual;
                 weights += weight;
             }

@@ -62,6 +62,15 @@ public class FormationPressureTests
         Assert.Contains("tests.csv(4): the formation pressure lies outside the logs and was not used", Computed(Honoured, null, Test(4000, 1e6)).Texts());
     }
 
+    // By hand: 1100 kg/m3 from the datum, +- 10 kg/m3.
+    [Fact]
+    public void A_pressure_stated_as_a_density_counts_from_the_datum()
+    {
+        var stated = Test(1001, 1100, 10) with { AsDensity = true };
+        Assert.Equal(Hydrostatic(1500) + (1100 * G * 1001) - Hydrostatic(1001), Computed(Honoured, null, stated).Column(Property.PorePressure)[At(1500)], 1e-3);
+        Assert.Contains(Computed(Plain, null, stated).Texts(), t => t.Contains("more than three sigma (0.10 MPa each)", StringComparison.Ordinal));
+    }
+
     [Fact]
     public void A_pressure_above_the_vertical_stress_cannot_be() => Assert.Equal(
         [UnitSystem.Metric.Show($"tests.csv(4): error: found a formation pressure of 30.00 MPa at 1001.0 m measured depth, expected it below the vertical stress there of {Quantity.Pressure(Weight(1001))}")],

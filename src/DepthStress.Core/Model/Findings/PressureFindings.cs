@@ -39,10 +39,10 @@ internal static class PressureFindings
     }
 
     private static IEnumerable<Finding> Tests(EarthModel model) => FormationTest.Of(model.Setup, model.Values, null)
-        .Where(t => Math.Abs(t.Residual) > MostSigmas * t.Observation.Sigma)
+        .Where(t => Math.Abs(t.Residual) > MostSigmas * t.Sigma)
         .Select(t => Finding.General(
             Severity.Warning,
-            $"the formation pressure of {Quantity.Pressure(t.Pressure)} at {Quantity.Length(t.MeasuredDepth)} measured depth is more than three sigma ({Quantity.Pressure(t.Observation.Sigma)} each) off the computed {Quantity.Pressure(t.Computed)}"));
+            $"the formation pressure of {Quantity.Pressure(t.Pressure)} at {Quantity.Length(t.MeasuredDepth)} measured depth is more than three sigma ({Quantity.Pressure(t.Sigma)} each) off the computed {Quantity.Pressure(t.Computed)}"));
 
     /// <summary>Where a log lies beyond the ends of its method's curve.</summary>
     private static IEnumerable<Finding> Outside(EarthModel model)
