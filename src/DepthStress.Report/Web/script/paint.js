@@ -87,8 +87,10 @@ export function paintHead(g, layout, view, place, colours) {
     const y = layout.top - 5 - layout.row * (track.curves.length - i);
     const scale = curve[view.units];
     const pen = colours.curve(curve.colour);
+    // The label gives way, the count of what is off the scale does not.
     const off = scale.off > 0 ? ` (${scale.off} off)` : "";
-    write(g, curve.label + off, middle, y + 7, { align: "center", size: 10, width: right - left, colour: text });
+    g.font = `400 10px ${FONT}`;
+    write(g, fit(g, curve.label, right - left - g.measureText(off).width) + off, middle, y + 7, { align: "center", size: 10, colour: text });
     g.setLineDash(curve.dash.map((d) => d * 1.5));
     line(g, left, y + 15, right, y + 15, pen, curve.width + 1);
     g.setLineDash([]);
