@@ -11,11 +11,17 @@ internal static class BarrierPrinter
     /// <summary>Prints the lines; nothing when no zone is a target.</summary>
     public static void Print(Terminal terminal, LoadedWell well)
     {
+        var lines = Lines(well);
+        foreach (var line in lines) terminal.Output.WriteLine(line);
+        if (lines.Count > 0) terminal.Output.WriteLine();
+    }
+
+    /// <summary>The lines.</summary>
+    internal static IReadOnlyList<string> Lines(LoadedWell well)
+    {
         var (file, _, model, _) = well;
         var (units, settings) = (file.Sections.Output.Units.Value, file.Sections.Layers);
-        var targets = StressTarget.Find(model, well.Layers, settings);
-        foreach (var target in targets) terminal.Output.WriteLine(Line(target, units, settings));
-        if (targets.Count > 0) terminal.Output.WriteLine();
+        return [.. StressTarget.Find(model, well.Layers, settings).Select(t => Line(t, units, settings))];
     }
 
     /// <summary>The line of one target.</summary>

@@ -19,7 +19,8 @@ internal static class CorePrinter
         terminal.Output.WriteLine();
     }
 
-    private static IEnumerable<string> Lines(CoreComparison core, UnitSystem units)
+    /// <summary>The lines.</summary>
+    internal static IEnumerable<string> Lines(CoreComparison core, UnitSystem units)
     {
         var (modulus, decimals) = units == UnitSystem.Metric ? (Units.Gigapascal, "F2") : (Units.Mpsi, "F3");
         string Modulus(double si) => $"{modulus.FromSi(si).ToString(decimals, CultureInfo.InvariantCulture)} {modulus}";

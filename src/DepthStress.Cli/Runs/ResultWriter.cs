@@ -29,6 +29,7 @@ internal static class ResultWriter
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
             ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
+            ("report.html", s => ReportPage.Write(ReportParts.Of(well, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
         ];

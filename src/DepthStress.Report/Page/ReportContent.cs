@@ -1,0 +1,29 @@
+using DepthStress.Core.Layers;
+using DepthStress.Core.Model;
+
+namespace DepthStress.Report.Page;
+
+/// <summary>What the page shows beside pictures: results, and sentences that were put into words elsewhere.</summary>
+/// <param name="Model">The model.</param>
+/// <param name="Layers">Its layers.</param>
+/// <param name="Pictures">Units, tracks and scales.</param>
+public sealed record ReportContent(EarthModel Model, LayerTable Layers, PictureOptions Pictures)
+{
+    /// <summary>Lines on the nearest stress barriers of each target zone.</summary>
+    public IReadOnlyList<string> Barriers { get; init; } = [];
+
+    /// <summary>How well the model meets its observations.</summary>
+    public IReadOnlyList<string> Observed { get; init; } = [];
+
+    /// <summary>Further sentences of the summary.</summary>
+    public IReadOnlyList<string> Remarks { get; init; } = [];
+
+    /// <summary>Findings and messages, most important first.</summary>
+    public IReadOnlyList<string> Findings { get; init; } = [];
+
+    /// <summary>The input files with their SHA-256.</summary>
+    public IReadOnlyList<(string Name, string Sha256)> Inputs { get; init; } = [];
+
+    /// <summary>Version of the program.</summary>
+    public string Version { get; init; } = "";
+}
