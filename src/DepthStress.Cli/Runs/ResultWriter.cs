@@ -1,6 +1,7 @@
 using System.Runtime.ExceptionServices;
 using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Files.Writing;
 using DepthStress.Report;
@@ -19,22 +20,31 @@ internal static class ResultWriter
     {
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
-        var layers = well.Layers;
+        var (layers, layerSettings) = (well.Layers, file.Sections.Layers);
+        var column = SolverColumn.Of(layers, layerSettings.Deck.Value);
         List<(string Name, Action<Stream> Write)> results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
             ("results.las", s => ResultsLas.Write(model, units, s)),
             ("layers.csv", s => LayersCsv.Write(layers, units, s)),
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
+            ("layers-solver.csv", s => SolverCsv.Write(layers, s)),
+            ("layers.vtu", s => LayersVtu.Write(layers, layerSettings, s)),
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
             ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
             ("report.html", s => ReportPage.Write(ReportParts.Of(well, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
-            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
+            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s, column)),
         ];
 
         if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));
+        if (column is not null)
+        {
+            results.Add(("column.inp", s => DeckWriter.Write(column, layerSettings, file.Setup, DeckStart.FromLoads, s)));
+            results.Add(("column-balanced.inp", s => DeckWriter.Write(column, layerSettings, file.Setup, DeckStart.Balanced, s)));
+        }
+
         if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
         if (model.Setup.Observations.Count > 0) results.Add(("observations.csv", s => ObservationsCsv.Write(Comparison.Of(model), units, s)));
         if (CoreComparison.Of(model) is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));

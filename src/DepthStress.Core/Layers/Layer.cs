@@ -68,6 +68,12 @@ public sealed record Layer
     /// <summary>Mean Shmin of the layer below minus this one's, Pa; NaN at the bottom.</summary>
     public double ContrastBelow { get; init; } = double.NaN;
 
+    /// <summary>The layer as a solver takes it; null where it has no values or none that are stable.</summary>
+    public LayerMedium? Medium { get; init; }
+
+    /// <summary>Least unconfined compressive strength of its samples, Pa; NaN when no sample has one.</summary>
+    public double LeastUcs { get; init; } = double.NaN;
+
     /// <summary>Mean of a property; NaN when there is none.</summary>
     public double Mean(Property property) => Means.GetValueOrDefault(property, double.NaN);
 
@@ -84,4 +90,7 @@ public sealed record LayerTable(IReadOnlyList<Layer> Layers)
 {
     /// <summary>What a reader should know about the cut.</summary>
     public IReadOnlyList<Finding> Findings { get; init; } = [];
+
+    /// <summary>The lateral strains that a solver imposes on all of them.</summary>
+    public FarField Strains { get; init; }
 }

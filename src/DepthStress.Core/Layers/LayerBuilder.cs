@@ -11,6 +11,7 @@ public static class LayerBuilder
     [
         Property.Density, Property.YoungsStatic, Property.PoissonStatic, Property.Biot, Property.Porosity, Property.ShaleVolume,
         Property.Ucs, Property.FrictionAngle, Property.TensileStrength, Property.Toughness, Property.YoungsDynamic, Property.PoissonDynamic,
+        Property.Temperature,
     ];
 
     private static readonly Property[] Profiled =
@@ -33,7 +34,8 @@ public static class LayerBuilder
         if (LayerCutter.Of(model, cells, settings, diagnostics, findings) is not { } bounds) return null;
         var weights = new double[model.Count];
         for (var i = 0; i < weights.Length; i++) weights[i] = cells.Thickness(i);
-        var layers = bounds.Select((b, k) => Make(model, k, b, cells, weights)).ToList();
+        var strains = FarField.Of(model, weights);
+        var layers = bounds.Select((b, k) => Make(model, k, b, cells, weights) with { Medium = LayerMedium.Of(model, b, weights, strains) }).ToList();
         if (!MissingShare.Accepts(layers, settings.LargestMissingShare, diagnostics)) return null;
         var (surface, contrast) = (model.Setup.Frame.SurfaceTvd, settings.BarrierContrast.Value);
         return new LayerTable([.. layers.Select((layer, k) => layer with
@@ -44,7 +46,8 @@ public static class LayerBuilder
             BarrierBelow = StressTarget.BarrierThickness(layers, k, 1, surface, contrast),
         })])
         {
-            Findings = findings,
+            Findings = [.. findings, .. MediumFindings.Of(layers)],
+            Strains = strains,
         };
     }
 
@@ -65,6 +68,7 @@ public static class LayerBuilder
             NotMeasured = NotMeasured(model, bounds, weights),
             Missing = MissingShare.Of(model, bounds, weights),
             Misfits = Horizontal.Where(model.Values.Has).ToDictionary(p => p, p => StressMisfit.Of(Column(model, Property.TrueVerticalDepth, bounds), Column(model, p, bounds), weights.AsSpan(bounds.Start))),
+            LeastUcs = model.Values.Has(Property.Ucs) ? Least(Column(model, Property.Ucs, bounds)) : double.NaN,
             Means = Averaged.Where(model.Values.Has).ToDictionary(p => p, p => Mean(Column(model, p, bounds), weights.AsSpan(bounds.Start))),
             Profiles = Profiled.Where(model.Values.Has).ToDictionary(p => p, p => Profile(Column(model, p, bounds), weights.AsSpan(bounds.Start), Column(model, Property.TrueVerticalDepth, bounds))),
         };
@@ -92,6 +96,17 @@ public static class LayerBuilder
         }
 
         return total > 0 ? sum / total : double.NaN;
+    }
+
+    private static double Least(ReadOnlySpan<double> values)
+    {
+        var least = double.NaN;
+        foreach (var value in values)
+        {
+            if (!(value >= least)) least = double.IsNaN(value) ? least : value;
+        }
+
+        return least;
     }
 
     private static LayerProfile Profile(ReadOnlySpan<double> values, ReadOnlySpan<double> weights, ReadOnlySpan<double> tvd)

@@ -21,6 +21,11 @@ public static class LayerCheck
 
         if (settings.Count.IsSet && settings.Count.Value != Math.Floor(settings.Count.Value))
             Error(settings.Count.Source, "found a fraction, expected count = a whole number");
+        foreach (var (number, key) in (ReadOnlySpan<(Setting<double>, string)>)[(settings.ElementsAlongShmax, "nx"), (settings.ElementsAlongShmin, "ny")])
+        {
+            if (number.Value != Math.Floor(number.Value)) Error(number.Source, $"found a fraction, expected {key} = a whole number");
+        }
+
         if (settings.Count.IsSet && cut == LayerCut.Zones)
             Error(settings.Count.Source, "found count with one layer per zone, expected cut = \"equal thickness\" or \"change of properties\" beside it");
         if (settings.Count.IsSet && merge)

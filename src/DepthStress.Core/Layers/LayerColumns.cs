@@ -47,6 +47,21 @@ public static class LayerColumns
         .. Misfits("shmax", "SHmax", Property.MaxHorizontalStress),
         Number("barrier_thickness_above", "true vertical thickness of the nearest stress barrier above", "", Depths, "[layers] barrier_contrast", l => l.BarrierAbove),
         Number("barrier_thickness_below", "true vertical thickness of the nearest stress barrier below", "", Depths, "[layers] barrier_contrast", l => l.BarrierBelow),
+        Stiffness("c11", "compression along the beds", "Backus 1962", c => c.C11),
+        Stiffness("c12", "between the directions along the beds", "C11 - 2 C66", c => c.C12),
+        Stiffness("c13", "between along and across the beds", "Backus 1962", c => c.C13),
+        Stiffness("c33", "compression across the beds", "Backus 1962", c => c.C33),
+        Stiffness("c44", "shear across the beds", "Backus 1962", c => c.C44),
+        Stiffness("c66", "shear in the plane of the beds", "Backus 1962", c => c.C66),
+        Upscaled("biot_vertical_upscaled", "Biot's coefficient across the beds that carries the mean stress", "alpha_v", ColumnUnits.Numbers, "Backus 1962 with the pressure term", m => m.Rock.BiotVertical),
+        Upscaled("biot_horizontal_upscaled", "Biot's coefficient along the beds that carries the mean stress", "alpha_h", ColumnUnits.Numbers, "Backus 1962 with the pressure term", m => m.Rock.BiotHorizontal),
+        Upscaled("youngs_upscaled", "Young's modulus of the isotropic rock that carries the mean horizontal stress", "E", Moduli, "E/(1 - nu) = C11 + C12 - 2 C13^2/C33", m => m.Pair.Youngs),
+        Upscaled("poisson_upscaled", "Poisson's ratio of that rock", "nu", ColumnUnits.Numbers, "nu/(1 - nu) = C13/C33", m => m.Pair.Poisson),
+        Upscaled("biot_upscaled", "Biot's coefficient of that rock", "alpha", ColumnUnits.Numbers, "(alpha_h - alpha_v C13/C33)/(1 - C13/C33)", m => m.Pair.Biot),
+        Number("ucs_min", "least unconfined compressive strength", "UCS", Stresses, "least of the samples", l => l.LeastUcs),
+        Mean("temperature", "temperature", "T", Temperatures, Property.Temperature),
+        Upscaled("shmin_closing", "mean Shmin less what the column's one pair of lateral strains gives", "", Stresses, "profile less strain model at every sample", m => m.ClosingShmin),
+        Upscaled("shmax_closing", "mean SHmax less what that pair gives", "", Stresses, "profile less strain model at every sample", m => m.ClosingShmax),
     ];
 
     private static NumberColumn<LayerTable> Number(
@@ -62,6 +77,13 @@ public static class LayerColumns
 
     private static NumberColumn<LayerTable> Elastic(string id, string title, string symbol, string formula, Func<double, double, double> constant) =>
         Number(id, title, symbol, Moduli, formula, l => constant(l.Mean(Property.YoungsStatic), l.Mean(Property.PoissonStatic)));
+
+    private static NumberColumn<LayerTable> Upscaled(
+        string id, string title, string symbol, (ColumnUnit Metric, ColumnUnit Field) units, string formula, Func<LayerMedium, double> value) =>
+        Number(id, title, symbol, units, formula, l => l.Medium is { } medium ? value(medium) : double.NaN);
+
+    private static NumberColumn<LayerTable> Stiffness(string id, string title, string formula, Func<VtiStiffness, double> value) =>
+        Upscaled(id, "upscaled static stiffness, " + title, id.ToUpperInvariant(), Moduli, formula, m => value(m.Rock.Stiffness));
 
     private static IEnumerable<NumberColumn<LayerTable>> Profile(string id, string title, string symbol, Property property) =>
     [

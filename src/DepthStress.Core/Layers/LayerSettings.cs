@@ -71,6 +71,18 @@ public sealed record LayerSettings
     /// <summary>How much a layer's mean Shmin must exceed a target's at equal depth to count as a barrier, Pa; the default is common practice.</summary>
     public Setting<double> BarrierContrast { get; init; } = Setting.Default(1e6);
 
+    /// <summary>Which rock the solver's deck is made of.</summary>
+    public Setting<SolverRock> Deck { get; init; } = Setting.Default(SolverRock.Isotropic);
+
+    /// <summary>Elements of the deck along SHmax; a whole number from 1 on.</summary>
+    public Setting<double> ElementsAlongShmax { get; init; } = Setting.Default(1.0);
+
+    /// <summary>Elements of the deck along Shmin; a whole number from 1 on.</summary>
+    public Setting<double> ElementsAlongShmin { get; init; } = Setting.Default(1.0);
+
+    /// <summary>Width of the deck along both horizontal axes, m.</summary>
+    public Setting<double> Extent { get; init; } = Setting.Default(100.0);
+
     /// <summary>The least and the greatest thickness; where changes decide, no layer is thinner than what the tools resolve.</summary>
     public ThicknessLimits Limits => new(
         MinThickness.IsSet ? MinThickness.Value : Cut.Value == LayerCut.ChangeOfProperties ? Resolution.Value : 0,

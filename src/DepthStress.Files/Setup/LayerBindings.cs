@@ -12,6 +12,10 @@ internal static class LayerBindings
 
     private static readonly (string, ThinLayers)[] Thin = [("keep", ThinLayers.Keep), ("merge", ThinLayers.Merge)];
 
+    private static readonly (string, SolverRock)[] Decks = [("isotropic", SolverRock.Isotropic), ("layered", SolverRock.Layered)];
+
+    private static readonly Interval Elements = new(1, 20);
+
     private static readonly Interval Counts = new(1, 1000);
 
     private static readonly Interval Contrasts = new(0.01, 1000);
@@ -33,5 +37,9 @@ internal static class LayerBindings
         Contrast = s.Number("contrast", l.Contrast, Contrasts, "change of properties: how clear a change must be; 1 is what chance rarely makes, more gives fewer layers"),
         LargestMissingShare = s.Number("largest_missing_share", l.LargestMissingShare, FractionRange, "greatest share of a layer's thickness that may lack static moduli or Shmin"),
         BarrierContrast = s.Quantity("barrier_contrast", l.BarrierContrast, Sign.Positive, Dimension.Pressure, "how much a layer's Shmin must exceed a target's to count as a barrier"),
+        Deck = s.Choice("deck", l.Deck, Decks, "the rock of the solver's deck: the isotropic pair of each layer, or layered rock alike in every direction along its beds"),
+        ElementsAlongShmax = s.Number("nx", l.ElementsAlongShmax, Elements, "elements of the deck along SHmax, axis 1"),
+        ElementsAlongShmin = s.Number("ny", l.ElementsAlongShmin, Elements, "elements of the deck along Shmin, axis 2"),
+        Extent = s.Quantity("extent", l.Extent, Sign.Positive, Dimension.Length, "width of the deck along both horizontal axes"),
     };
 }

@@ -66,6 +66,9 @@ public static class ResultGuide
         Row(text, "missing", "", $"empty in .csv, {ResultsLas.Null} in results.las, null in layers.json");
         Row(text, "names", "", "a text that a spreadsheet would run as a formula has an apostrophe in front; control characters are left out");
         Row(text, "results.las", "", $"the columns of numbers of depth.csv without {string.Join(", ", DepthColumns.Numbers.Where(c => !c.InLas).Select(c => c.Id))}, names in capitals without units, measured depth as DEPT");
+        Row(text, "layers-solver.csv", "", "the columns of layers.csv in SI with every digit, and the lateral strains of the solver's column");
+        Row(text, "layers.vtu", "", $"the same numbers as a grid, a hexahedron per layer; missing is {ResultsLas.Null}");
+        Row(text, "column.inp", "", "the layers as a deck for CalculiX, whose comments say how to read it; column-balanced.inp starts from stress in balance");
         Row(text, ResultManifest.FileName, "", "names the files that a new run replaces; a folder that holds anything else is left alone");
     }
 

@@ -5,6 +5,7 @@ using System.Text.Json.Nodes;
 using DepthStress.Core.Calibration;
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Quantities;
@@ -30,8 +31,8 @@ public static class RunJson
     public static string Version { get; } =
         typeof(RunJson).Assembly.GetCustomAttribute<AssemblyInformationalVersionAttribute>()?.InformationalVersion ?? "";
 
-    /// <summary>Writes the record of a run.</summary>
-    public static void Write(WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, Stream destination)
+    /// <summary>Writes the record of a run; with a solver's column, what the program's own finite elements find in it.</summary>
+    public static void Write(WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, Stream destination, SolverColumn? column = null)
     {
         ArgumentNullException.ThrowIfNull(file);
         ArgumentNullException.ThrowIfNull(logs);
@@ -61,6 +62,14 @@ public static class RunJson
             ["trends"] = Array(model.Trends.Select(t => TrendRecord(model, t))),
             ["core"] = CoreComparison.Of(model) is { } core ? CoreJson.Of(core) : null,
             ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
+            ["column_check"] = column is null ? null : Array(ColumnCheck.Of(column).Select(b => new JsonObject
+            {
+                ["top_tvd_m"] = Number(b.Top),
+                ["base_tvd_m"] = Number(b.Base),
+                ["top_displacement_m"] = Math.Round(b.Displacement, 6),
+                ["equilibrium_residual"] = Math.Round(b.Residual, 9),
+                ["vertical_stress_error"] = Math.Round(b.Stress, 9),
+            })),
             ["findings"] = Array(model.Findings.Select(f => (JsonNode)FindingText.Of(f, units, model.Count))),
             ["methods"] = Array(model.LawUses.GroupBy(u => (u.Slot, u.Law)).Select(u => Method(model, u))),
         };
