@@ -28,6 +28,7 @@ internal static class ResultWriter
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
+            ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
             ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s)),
