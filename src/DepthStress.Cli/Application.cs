@@ -56,6 +56,7 @@ public static class Application
         new CheckCommand(terminal),
         new RunCommand(terminal),
         new CalibrateCommand(terminal),
+        new CompareCommand(terminal),
         new MethodsCommand(terminal),
         new SchemaCommand(terminal),
     };

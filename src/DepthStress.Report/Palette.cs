@@ -23,4 +23,7 @@ internal static class Palette
     public const int ZoneTint = 0xF4F6F1;
     public const int ZoneMark = 0xB9C4B4;
     public const int ZoneEdge = 0xA7B0A2;
+
+    /// <summary>A colour halfway to paper.</summary>
+    public static int Light(int colour) => ((((colour & 0xFEFEFE) >> 1) + 0x7F7F7F) & 0xFFFFFF);
 }

@@ -32,6 +32,7 @@ internal static class ResultWriter
             ("layers.vtu", s => LayersVtu.Write(layers, layerSettings, s)),
             ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
             ("stress.svg", s => StressPicture.Write(model, pictures, s)),
+            ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
             ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
             ("report.html", s => ReportPage.Write(ReportParts.Of(well, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),

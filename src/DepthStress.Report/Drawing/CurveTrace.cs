@@ -14,22 +14,39 @@ internal sealed record CurveTrace(
 {
     private const int Chunk = 4096;
 
+    /// <summary>Fills a span with values in the picture's unit, from a sample on.</summary>
+    private delegate void Filler(int start, Span<double> destination);
+
     /// <summary>Reads a curve in one pass over chunks; null when it has no value.</summary>
     /// <param name="model">The model.</param>
     /// <param name="curve">The curve.</param>
     /// <param name="units">The picture's units.</param>
     /// <param name="depths">Depth of each sample, in the picture's unit.</param>
     /// <param name="axis">The depth axis, which decides what can still be told apart.</param>
-    public static CurveTrace? Read(EarthModel model, CurveDefinition curve, UnitSystem units, double[] depths, DepthAxis axis)
+    public static CurveTrace? Read(EarthModel model, CurveDefinition curve, UnitSystem units, double[] depths, DepthAxis axis) =>
+        Read(curve, units, depths, axis, (start, destination) => curve.Column.Fill(model, start, units, destination));
+
+    /// <summary>The same of values in SI, one for each depth; null when none is there.</summary>
+    public static CurveTrace? Of(CurveDefinition curve, double[] values, UnitSystem units, double[] depths, DepthAxis axis)
     {
-        var values = new double[Math.Min(Chunk, model.Count)];
+        var unit = curve.Column.In(units).Unit;
+        return Read(curve, units, depths, axis, (start, destination) =>
+        {
+            values.AsSpan(start, destination.Length).CopyTo(destination);
+            unit.FromSi(destination);
+        });
+    }
+
+    private static CurveTrace? Read(CurveDefinition curve, UnitSystem units, double[] depths, DepthAxis axis, Filler fill)
+    {
+        var values = new double[Math.Min(Chunk, depths.Length)];
         var decimator = new Decimator(axis.Top, axis.Pixel);
         var (low, high) = (curve.Scale(units).Low, curve.Scale(units).High);
         var (least, greatest, offScale) = (double.NaN, double.NaN, 0);
-        for (var start = 0; start < model.Count; start += Chunk)
+        for (var start = 0; start < depths.Length; start += Chunk)
         {
-            var n = Math.Min(Chunk, model.Count - start);
-            curve.Column.Fill(model, start, units, values.AsSpan(0, n));
+            var n = Math.Min(Chunk, depths.Length - start);
+            fill(start, values.AsSpan(0, n));
             for (var i = 0; i < n; i++)
             {
                 var value = values[i];

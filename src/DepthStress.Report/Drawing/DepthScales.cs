@@ -1,3 +1,5 @@
+using DepthStress.Core.Depth;
+using DepthStress.Core.Quantities;
 using OxyPlot;
 
 namespace DepthStress.Report.Drawing;
@@ -26,6 +28,12 @@ internal static class DepthScales
             y += 9;
         }
     }
+
+    /// <summary>Names the axis of true vertical depth, reading upwards beside it.</summary>
+    public static void DrawTitle(Sheet sheet, DepthFrame frame, UnitSystem units, DepthAxis axis, double x) => sheet.Write(
+        new ScreenPoint(x, (axis.ScreenTop + axis.ScreenBase) / 2),
+        $"True vertical depth below {PageTexts.Datum(frame)}, {units.UnitFor(Dimension.Length).Unit.Symbol}",
+        new TextStyle(9.5, Palette.Text, true), HorizontalAlignment.Center, true);
 
     /// <summary>Draws the scale of the axis itself, its labels ending at a line, and the grid lines to the right of it.</summary>
     public static void DrawOwn(Sheet sheet, DepthAxis axis, double labelRight, double gridLeft, double gridRight)

@@ -16,6 +16,7 @@ public sealed class CliHelpTests : IDisposable
     [InlineData("help-check", "check")]
     [InlineData("help-run", "run")]
     [InlineData("help-calibrate", "calibrate")]
+    [InlineData("help-compare", "compare")]
     [InlineData("help-methods", "methods")]
     [InlineData("help-schema", "schema")]
     public async Task Help_is_as_it_was(string golden, params string[] command)
@@ -50,6 +51,8 @@ public sealed class CliHelpTests : IDisposable
     [InlineData("error: found the unknown option --outt, expected one of --out, --jobs, --strict, --spread, or ./--outt for a file of that name; did you mean \"--out\"?\nRun \"depthstress run --help\" for usage.\n", "run", "a", "--outt")]
     [InlineData("error: found the unknown option --froce, expected one of --force, or ./--froce for a file of that name; did you mean \"--force\"?\nRun \"depthstress init --help\" for usage.\n", "init", "--froce")]
     [InlineData("error: found an empty WELLFILE, expected the name of a file\nRun \"depthstress check --help\" for usage.\n", "check", "")]
+    [InlineData("error: Required argument 'B' missing for command: 'compare'.\nRun \"depthstress compare --help\" for usage.\n", "compare", "a")]
+    [InlineData("error: found --out c.png, expected a name that ends with .svg\nRun \"depthstress compare --help\" for usage.\n", "compare", "a", "b", "--out", "c.png")]
     [InlineData("error: found well files that share one result folder (a.toml, ./a.toml), expected each well once and under a name of its own\nRun \"depthstress run --help\" for usage.\n", "run", "a.toml", "./a.toml")]
     [InlineData("error: found well files that share one result folder (a.toml, a.txt), expected each well once and under a name of its own\nRun \"depthstress run --help\" for usage.\n", "run", "a.toml", "a.txt")]
     public async Task Wrong_usage_ends_with_1_and_says_so_on_the_error_writer(string expected, params string[] args)

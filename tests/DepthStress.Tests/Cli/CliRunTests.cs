@@ -21,7 +21,7 @@ public sealed class CliRunTests : IDisposable
         Assert.Contains("\nResults: well-results\n", result.Output, StringComparison.Ordinal);
         Assert.StartsWith("Well Testwell 1: 5 samples, 1000.0 m to 1002.0 m measured depth", result.Output, StringComparison.Ordinal);
         Assert.Equal(
-            [".depthstress-files", "README.txt", "column-balanced.inp", "column.inp", "depth.csv", "layers-solver.csv", "layers.csv", "layers.json", "layers.vtu", "polygon.svg", "report.html", "results.las", "run.json", "stress.svg", "tracks.svg"],
+            [".depthstress-files", "README.txt", "column-balanced.inp", "column.inp", "depth.csv", "layers-solver.csv", "layers.csv", "layers.json", "layers.svg", "layers.vtu", "polygon.svg", "report.html", "results.las", "run.json", "stress.svg", "tracks.svg"],
             _cli.Files("well-results").Keys);
         Assert.Equal(["logs.csv", "well-results", "well.toml"], Directory.EnumerateFileSystemEntries(_cli.Folder.Path).Select(Path.GetFileName).Order(StringComparer.Ordinal));
     }

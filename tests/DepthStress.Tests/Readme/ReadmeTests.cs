@@ -49,6 +49,7 @@ public sealed partial class ReadmeTests : IDisposable
     [Theory]
     [InlineData("tracks.svg")]
     [InlineData("stress.svg")]
+    [InlineData("layers.svg")]
     public async Task The_pictures_are_what_the_first_command_draws(string name)
     {
         CopySampleLogs();
@@ -83,6 +84,23 @@ public sealed partial class ReadmeTests : IDisposable
         Golden.Match("sample-layers.csv", _folder.Read("sample-logs/quillback-4-results/layers.csv"));
     }
 
+    /// <summary>An excerpt of a result file is whole lines of it, cut to the named columns.</summary>
+    [Fact]
+    public async Task The_excerpt_of_the_layer_table_is_what_the_first_command_writes()
+    {
+        CopySampleLogs();
+        using var output = new StringWriter();
+        Assert.Equal(0, await Application.RunAsync(["run", "sample-logs/quillback-4.toml"], new Terminal(output, output, _folder.Path), CancellationToken.None));
+        var table = Lines(_folder.Read("sample-logs/quillback-4-results/layers.csv")).Select(l => l.Split(',')).ToList();
+        var excerpt = TableExcerpt().Match(Text);
+        Assert.True(excerpt.Success);
+        var rows = Lines(excerpt.Groups["text"].Value).Where(l => l != "...").Select(l => l.Split(',')).ToList();
+        var columns = rows[0].Select(name => Array.IndexOf(table[0], name)).ToList();
+        Assert.DoesNotContain(-1, columns);
+        Assert.InRange(rows.Count, 3, table.Count);
+        foreach (var row in rows) Assert.Contains(table, line => columns.Select(c => line[c]).SequenceEqual(row));
+    }
+
     [Fact]
     public void The_two_commands_stand_in_the_readme_as_the_check_script_runs_them()
     {
@@ -114,6 +132,9 @@ public sealed partial class ReadmeTests : IDisposable
 
         return false;
     }
+
+    [GeneratedRegex("<!-- columns of layers.csv -->\n```\n(?<text>.*?)```", RegexOptions.Singleline | RegexOptions.ExplicitCapture)]
+    private static partial Regex TableExcerpt();
 
     [GeneratedRegex("<!-- excerpt: (?<command>[^\n]+) -->\n```\n(?<text>.*?)```", RegexOptions.Singleline | RegexOptions.ExplicitCapture)]
     private static partial Regex Excerpts();

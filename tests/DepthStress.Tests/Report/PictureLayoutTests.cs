@@ -1,5 +1,6 @@
 using System.Globalization;
 using DepthStress.Core.Depth;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -16,7 +17,7 @@ public class PictureLayoutTests
     public static TheoryData<string, UnitSystem> Cases()
     {
         var cases = new TheoryData<string, UnitSystem>();
-        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only", "comparisons" })
+        foreach (var name in new[] { "full", "no strains", "many zones", "very many zones", "long names", "two samples", "density only", "comparisons", "targets" })
         {
             cases.Add(name, UnitSystem.Metric);
             cases.Add(name, UnitSystem.Field);
@@ -110,6 +111,8 @@ public class PictureLayoutTests
         yield return TracksPicture.Draw(model, units, [TrackTable.All[1]]);
         yield return TracksPicture.Draw(model, units, [.. TrackTable.All, .. TrackTable.All]);
         yield return StressPicture.Draw(model, units);
+        yield return LayersPicture.Draw(model, PictureModels.Layers(model, 1e4), new LayerSettings(), units);
+        yield return LayersPicture.Draw(model, PictureModels.Layers(model, 17), new LayerSettings(), units);
         yield return PolygonPicture.Draw(model, new PictureOptions(units));
         foreach (var count in new[] { 1, 2, 3, 4, 5, 6 })
         {
@@ -126,6 +129,7 @@ public class PictureLayoutTests
         "long names" => PictureModels.Full(800, LongName, [PictureModels.Zone(LongName, 900), PictureModels.Zone("Unbreakablenamewithoutanyblankinit", 920)]),
         "two samples" => PictureModels.Small([1000, 1000.5], "two", [PictureModels.Zone("one", 900)], ("density", [2300, 2310])),
         "density only" => PictureModels.Small(PictureModels.Depths(300, 10, 3000), "density", [], ("density", [.. Enumerable.Range(0, 300).Select(i => 2000.0 + i)])),
+        "targets" => PictureModels.Full(800, zones: [.. Enumerable.Range(0, 12).Select(i => PictureModels.Zone(Numbered(i, " formation"), 900 + (210 * i)) with { Target = i % 2 == 1 })]),
         "comparisons" => PictureModels.Full(800, comparisons: true),
         _ => PictureModels.Full(800),
     };

@@ -1,6 +1,7 @@
 using DepthStress.Core.Catalogue;
 using DepthStress.Core.Depth;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
@@ -32,6 +33,14 @@ internal static class PictureModels
     /// <summary>A vertical well with density and perhaps little else.</summary>
     public static EarthModel Small(double[] md, string name, IReadOnlyList<Zone> zones, params (string Role, double[] Values)[] curves) =>
         Run(name, md, zones, Stress(false, false), Trajectory.Vertical, curves);
+
+    /// <summary>The layers of a model, no thicker than so many m.</summary>
+    public static LayerTable Layers(EarthModel model, double thickness)
+    {
+        var diagnostics = new DiagnosticBag();
+        return LayerBuilder.Build(model, new LayerSettings { MaxThickness = Set(thickness), LargestMissingShare = Set(1.0) }, diagnostics)
+            ?? throw new InvalidOperationException(string.Join("\n", diagnostics.Items.Select(d => d.Text)));
+    }
 
     /// <summary>Evenly spaced depths, m.</summary>
     public static double[] Depths(int samples, double top, double bottom) =>
