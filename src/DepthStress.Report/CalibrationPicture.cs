@@ -16,7 +16,6 @@ public static class CalibrationPicture
     private const double AxisWidth = 62;
     private const int MostPlanes = 3;
     private static readonly TextStyle Small = new(8);
-    private static readonly TextStyle Title = new(9.5, Palette.Text, true);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same result and units.</summary>
     public static void Write(CalibrationResult result, UnitSystem units, Stream destination)
@@ -59,37 +58,14 @@ public static class CalibrationPicture
         var panel = new Panel(left, right, scale, axis);
 
         var unit = shmin.Column.In(units).Unit;
-        sheet.Write(new ScreenPoint((left + right) / 2, box.Top + 8), $"Total stress and pore pressure, {unit.Symbol}", Title, HorizontalAlignment.Center);
+        PanelFrame.Open(sheet, panel, $"Total stress and pore pressure, {unit.Symbol}");
         DepthScales.DrawOwn(sheet, axis, left, left, right);
-        sheet.Write(
-            new ScreenPoint(box.Left + 7, (axis.ScreenTop + axis.ScreenBase) / 2),
-            $"True vertical depth below {PageTexts.Datum(model.Setup.Frame)}, {units.UnitFor(Dimension.Length).Unit.Symbol}", Title, HorizontalAlignment.Center, true);
-        var step = (scale.Right - scale.Left) / scale.Divisions;
-        for (var i = 0; i <= scale.Divisions; i++)
-        {
-            var x = panel.Across(scale.Left + (i * step));
-            sheet.Line(x, axis.ScreenTop, x, axis.ScreenBase, new CurvePen(Palette.Grid, 0.5));
-            sheet.Write(new ScreenPoint(x, axis.ScreenTop - 8), RoundSteps.Show(scale.Left + (i * step), step), Small, HorizontalAlignment.Center);
-        }
-
+        DepthScales.DrawTitle(sheet, model.Setup.Frame, units, axis, box.Left + 7);
         if (before is not null) CurveDrawing.Draw(sheet, panel, before, traces.Count);
         for (var i = 0; i < traces.Count; i++) CurveDrawing.Draw(sheet, panel, traces[i], i);
-        foreach (var comparison in result.AfterFit.Where(c => c.Reading.Subject is Reading.Shmin or Reading.PorePressure or Reading.Shmax))
-            DrawObservation(sheet, panel, comparison, units, unit);
-        sheet.Outline(new OxyRect(left, axis.ScreenTop, right - left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
-        DrawLegend(sheet, traces, before, left, right, axis.ScreenBase + 12);
-    }
-
-    private static void DrawObservation(Sheet sheet, Panel panel, Comparison comparison, UnitSystem units, Unit unit)
-    {
-        if (!double.IsFinite(comparison.Measured) || comparison.Reading.Meaning == Meaning.Nothing) return;
-        var (length, _) = units.UnitFor(Dimension.Length);
-        var y = panel.Depth.ToScreen(length.FromSi(comparison.Reading.Interval.MiddleTvd));
-        double X(double pascal) => panel.Across(Math.Clamp(unit.FromSi(pascal), panel.Scale.Low, panel.Scale.High));
-        var colour = ResidualRows.Colour(comparison.Reading);
-        var reach = 1.96 * comparison.Reading.Sigma;
-        sheet.Line(X(comparison.Measured - reach), y, X(comparison.Measured + reach), y, new CurvePen(colour, 1));
-        Marks.Draw(sheet, new ScreenPoint(X(comparison.Measured), y), comparison.Reading.Meaning, 3.2, colour);
+        var off = ObservationMarks.Draw(sheet, panel, ObservationMarks.Shown(result.AfterFit), units, unit);
+        PanelFrame.Close(sheet, panel, traces, off);
+        DrawLegend(sheet, traces, before, left, right, axis.ScreenBase + 20);
     }
 
     private static void DrawLegend(Sheet sheet, IReadOnlyList<CurveTrace> traces, CurveTrace? before, double left, double right, double y)

@@ -1,3 +1,4 @@
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report.Drawing;
@@ -10,10 +11,8 @@ public static class StressPicture
 {
     private const double AxisWidth = 66;
     private const double LegendLine = 14;
-    private const double AxisHeight = 34;
     private const double Gap = 32;
     private static readonly TextStyle Small = new(8);
-    private static readonly TextStyle Title = new(9.5, Palette.Text, true);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same model and options.</summary>
     /// <param name="model">The finished model.</param>
@@ -41,7 +40,9 @@ public static class StressPicture
         var comparisons = ComparisonCurves.Of(model);
         var (left, right, names) = (PageFrame.Margin + AxisWidth, sheet.Width - PageFrame.Margin, ZoneStrip.Width(zones));
         var keys = ComparisonCurves.Keys(comparisons, right - left);
-        var plotTop = legendTop + ((2 + keys.Count) * LegendLine) + AxisHeight + 6;
+        var observations = ObservationMarks.Shown(Comparison.Of(model));
+        var lines = 2 + (observations.Count > 0 ? 1 : 0);
+        var plotTop = legendTop + ((lines + keys.Count) * LegendLine) + PanelFrame.Height + 6;
         var axis = new DepthAxis(finite.Min(), finite.Max(), plotTop, PageFrame.LongSide - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 16);
         var middle = left + ((right - names - left) * 0.58);
         var views = new[] { TrackTable.StressPanels.Stress with { Curves = [.. comparisons, .. TrackTable.StressPanels.Stress.Curves] }, TrackTable.StressPanels.Gradient }
@@ -51,13 +52,14 @@ public static class StressPicture
         if (views[0] is { } stress)
         {
             DrawLegend(sheet, model, units, stress, left, right, legendTop);
-            ComparisonCurves.DrawKeys(sheet, keys, left, legendTop + (2.5 * LegendLine), LegendLine);
-            DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle);
+            ComparisonCurves.DrawKeys(sheet, keys, left, legendTop + ((lines + 0.5) * LegendLine), LegendLine);
+            Legend.Draw(sheet, ObservationMarks.Entries(observations), left, right, legendTop + (2.5 * LegendLine));
+            DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle, observations);
             ComparisonCurves.DrawLetters(sheet, stress, comparisons, new Panel(left, middle, stress.Scales[0], axis));
         }
 
         if (views[1] is { } gradient)
-            DrawPanel(sheet, gradient, $"Gradient: value / depth below {(model.Setup.Frame.IsOffshore ? "sea surface" : "ground")}", units, axis, middle + Gap, right - names - 8);
+            DrawPanel(sheet, gradient, $"Gradient: value / depth below {(model.Setup.Frame.IsOffshore ? "sea surface" : "ground")}", units, axis, middle + Gap, right - names - 8, []);
         PageFrame.DrawCaution(sheet);
         return sheet;
     }
@@ -65,14 +67,12 @@ public static class StressPicture
     private static void DrawFrame(
         Sheet sheet, EarthModel model, UnitSystem units, DepthAxis axis, IReadOnlyList<ZoneSpan> zones, double left, double plotRight, double right)
     {
-        var (frame, unit) = (model.Setup.Frame, units.UnitFor(Dimension.Length).Unit.Symbol);
+        var frame = model.Setup.Frame;
         PageFrame.DrawTitle(sheet, model.Setup.Name, "stress over depth", PageTexts.Surfaces(frame, units));
         ZoneStrip.DrawBands(sheet, zones, axis, left, right);
         ZoneStrip.DrawNames(sheet, zones, axis, plotRight + 8, right, axis.ScreenBase + 9);
         DepthScales.DrawOwn(sheet, axis, left, left, plotRight);
-        sheet.Write(
-            new ScreenPoint(PageFrame.Margin + 8, (axis.ScreenTop + axis.ScreenBase) / 2), $"True vertical depth below {PageTexts.Datum(frame)}, {unit}", Title,
-            HorizontalAlignment.Center, true);
+        DepthScales.DrawTitle(sheet, frame, units, axis, PageFrame.Margin + 8);
     }
 
     private static void DrawLegend(Sheet sheet, EarthModel model, UnitSystem units, TrackView stress, double left, double right, double top)
@@ -97,22 +97,13 @@ public static class StressPicture
         return $"reference: water of {density} {unit.Symbol} below the {(model.Setup.Frame.IsOffshore ? "sea surface" : "water table")}";
     }
 
-    private static void DrawPanel(Sheet sheet, TrackView view, string title, UnitSystem units, DepthAxis axis, double left, double right)
+    private static void DrawPanel(
+        Sheet sheet, TrackView view, string title, UnitSystem units, DepthAxis axis, double left, double right, IReadOnlyList<Comparison> observations)
     {
-        var (scale, unit) = (view.Scales[0], view.Traces[0].Curve.Column.In(units).Unit.Symbol);
-        var step = (scale.Right - scale.Left) / scale.Divisions;
-        sheet.Write(new ScreenPoint((left + right) / 2, axis.ScreenTop - 26), $"{title}, {unit}", Title, HorizontalAlignment.Center);
-        for (var i = 0; i <= scale.Divisions; i++)
-        {
-            var x = left + ((right - left) * i / scale.Divisions);
-            sheet.Line(x, axis.ScreenTop, x, axis.ScreenBase, new CurvePen(Palette.Grid, 0.5));
-            sheet.Line(x, axis.ScreenTop - 4, x, axis.ScreenTop, new CurvePen(Palette.Frame, 0.6));
-            sheet.Write(new ScreenPoint(x, axis.ScreenTop - 10), RoundSteps.Show(scale.Left + (i * step), step), Small, HorizontalAlignment.Center);
-        }
-
-        for (var i = 0; i < view.Traces.Count; i++) CurveDrawing.Draw(sheet, new Panel(left, right, scale, axis), view.Traces[i], i);
-        sheet.Outline(new OxyRect(left, axis.ScreenTop, right - left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
-        var off = view.Traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Label.Split(',')[0]}: {PageTexts.OffScale(t.OffScale)}");
-        sheet.Write(new ScreenPoint(left, axis.ScreenBase + 9), string.Join(", ", off), Small);
+        var (panel, unit) = (new Panel(left, right, view.Scales[0], axis), view.Traces[0].Curve.Column.In(units).Unit);
+        PanelFrame.Open(sheet, panel, $"{title}, {unit.Symbol}", 2 * Gap);
+        for (var i = 0; i < view.Traces.Count; i++) CurveDrawing.Draw(sheet, panel, view.Traces[i], i);
+        var off = ObservationMarks.Draw(sheet, panel, observations, units, unit);
+        PanelFrame.Close(sheet, panel, view.Traces, off);
     }
 }

@@ -16,10 +16,11 @@ internal static class PanelFrame
     /// <param name="sheet">The page.</param>
     /// <param name="panel">The panel.</param>
     /// <param name="title">What it shows, with the unit; two lines at most.</param>
-    public static void Open(Sheet sheet, Panel panel, string title)
+    /// <param name="beyond">How much wider than the panel the title may be.</param>
+    public static void Open(Sheet sheet, Panel panel, string title, double beyond = 20)
     {
         var (axis, scale) = (panel.Depth, panel.Scale);
-        var lines = PlainText.Wrap(title, Title.Size, true, panel.Right - panel.Left + 20, 2);
+        var lines = PlainText.Wrap(title, Title.Size, true, panel.Right - panel.Left + beyond, 2);
         for (var i = 0; i < lines.Count; i++)
         {
             var y = axis.ScreenTop - 26 - ((lines.Count - 1 - i) * TitleLine);
@@ -36,12 +37,13 @@ internal static class PanelFrame
         }
     }
 
-    /// <summary>Draws the edge, and below it how many samples lie off the scale.</summary>
-    public static void Close(Sheet sheet, Panel panel, IEnumerable<CurveTrace> traces)
+    /// <summary>Draws the edge, and below it how many samples and observations lie off the scale.</summary>
+    public static void Close(Sheet sheet, Panel panel, IEnumerable<CurveTrace> traces, int observationsOff = 0)
     {
         var axis = panel.Depth;
         sheet.Outline(new OxyRect(panel.Left, axis.ScreenTop, panel.Right - panel.Left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
-        var off = traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Label.Split(',')[0]}: {PageTexts.OffScale(t.OffScale)}");
+        var off = traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Label.Split(',')[0]}: {PageTexts.OffScale(t.OffScale)}").ToList();
+        if (observationsOff > 0) off.Add($"observations: {PageTexts.OffScale(observationsOff)}");
         sheet.Write(
             new ScreenPoint(panel.Left, axis.ScreenBase + 9), PlainText.Shorten(string.Join(", ", off), Small.Size, false, panel.Right - panel.Left), Small);
     }
