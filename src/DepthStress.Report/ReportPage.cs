@@ -1,6 +1,5 @@
 using System.Globalization;
 using System.Text;
-using DepthStress.Core.Calibration;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -20,7 +19,6 @@ public static class ReportPage
         ArgumentNullException.ThrowIfNull(content);
         ArgumentNullException.ThrowIfNull(destination);
         var (model, units) = (content.Model, content.Pictures.Units);
-        var observations = Comparison.Of(model);
         var bins = Bins.Of(model.Count);
         var parts = new Dictionary<string, string>
         {
@@ -37,17 +35,17 @@ public static class ReportPage
             ["zones"] = ResultTables.Zones(model, units),
             ["choices"] = ResultTables.Choices(model, units),
             ["layers"] = ResultTables.Layers(content.Layers, units),
-            ["observations"] = ResultTables.Observations(observations, units),
+            ["observations"] = ResultTables.Observations(content.Comparisons, units),
             ["remarks"] = content.Remarks.Count > 0 ? Html.List(content.Remarks, "") : "",
             ["findings"] = Html.List(content.Findings, "Nothing was found that a reader must know."),
             ["curves"] = SourceTables.Curves(model, units),
             ["methods"] = SourceTables.Methods(model, units),
             ["inputs"] = SourceTables.Inputs(content.Inputs, units),
             ["version"] = Html.Text(content.Version),
-            ["tracks-picture"] = Picture(s => TracksPicture.Write(model, content.Pictures, s)),
-            ["stress-picture"] = Picture(s => StressPicture.Write(model, content.Pictures, s)),
-            ["polygon-picture"] = Picture(s => PolygonPicture.Write(model, content.Pictures, s)),
-            ["data"] = new PageData(content).Write(PageTrack.Of(model, content.Pictures), observations),
+            ["tracks-picture"] = Picture(content.Drawn.Tracks),
+            ["stress-picture"] = Picture(content.Drawn.Stress),
+            ["polygon-picture"] = Picture(content.Drawn.Polygon),
+            ["data"] = new PageData(content).Write(PageTrack.Of(model, content.Pictures), content.Comparisons),
         };
         using var writer = new StreamWriter(destination, new UTF8Encoding(false), leaveOpen: true) { NewLine = "\n" };
         Fill(WebFiles.Frame, parts, writer);
@@ -87,10 +85,5 @@ public static class ReportPage
         return string.Create(CultureInfo.InvariantCulture, $"{model.Count} samples, {Show(md[0])} to {Show(md[^1])} measured depth, {Show(tvd[0])} to {Show(tvd[^1])} true vertical depth below the {PageTexts.Datum(model.Setup.Frame)}");
     }
 
-    private static string Picture(Action<Stream> write)
-    {
-        using var bytes = new MemoryStream();
-        write(bytes);
-        return "data:image/svg+xml;base64," + Convert.ToBase64String(bytes.GetBuffer(), 0, (int)bytes.Length);
-    }
+    private static string Picture(ReadOnlySpan<byte> svg) => "data:image/svg+xml;base64," + Convert.ToBase64String(svg);
 }

@@ -1,7 +1,6 @@
 using System.Globalization;
 using DepthStress.Core.Calibration;
 using DepthStress.Core.Catalogue;
-using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 
 namespace DepthStress.Cli.Printing;
@@ -12,9 +11,9 @@ internal static class CorePrinter
     private const int Best = 3;
 
     /// <summary>Prints the lines; nothing without core.</summary>
-    public static void Print(Terminal terminal, EarthModel model, UnitSystem units)
+    public static void Print(Terminal terminal, CoreComparison? core, UnitSystem units)
     {
-        if (CoreComparison.Of(model) is not { } core) return;
+        if (core is null) return;
         foreach (var line in Lines(core, units)) terminal.Output.WriteLine(line);
         terminal.Output.WriteLine();
     }

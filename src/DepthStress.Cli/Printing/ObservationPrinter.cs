@@ -23,7 +23,7 @@ internal static class ObservationPrinter
     internal static IReadOnlyList<string> Lines(LoadedWell well)
     {
         var units = well.File.Sections.Output.Units.Value;
-        var all = Comparison.Of(well.Model);
+        var all = well.Observed;
         if (all.Count == 0) return [];
         var compared = all.Where(c => double.IsFinite(c.Residual)).ToList();
         var far = compared.Where(c => Math.Abs(c.Residual) > Far).OrderByDescending(c => Math.Abs(c.Residual)).ToList();

@@ -25,14 +25,12 @@ internal static class SpreadPrinter
         foreach (var title in (string[])["Shmin", "every choice", "E static", "nu static", "biot", "tests less\nmodel", "plug E\nover model"])
             table.AddColumn(new TableColumn(title).RightAligned().NoWrap().PadLeft(1).PadRight(0));
         table.AddColumn(new TableColumn("moves it\nmost").NoWrap());
-        var comparisons = Comparison.Of(model);
-        var core = CoreComparison.Of(model);
         foreach (var spread in spreads)
         {
             var name = spread.Zone < 0 ? (model.Setup.Zones.Count == 0 ? "whole log" : "no zone") : model.ZoneName(spread.Zone);
             table.AddRow(
                 Markup.Escape(name), Show(spread.Chosen), Span(spread.All), Span(spread.ByYoungs), Span(spread.ByPoisson), Span(spread.ByBiot),
-                Tests(model, comparisons, spread.Zone, Show), Core(model, core, spread.Zone), spread.Dominant);
+                Tests(model, well.Observed, spread.Zone, Show), Core(model, well.Core, spread.Zone), spread.Dominant);
         }
 
         terminal.Tables().Write(table);

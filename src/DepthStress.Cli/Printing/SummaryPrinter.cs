@@ -29,7 +29,7 @@ internal static class SummaryPrinter
         BarrierPrinter.Print(terminal, well);
         ObservationPrinter.Print(terminal, well);
         DepletionPrinter.Print(terminal, model, units);
-        CorePrinter.Print(terminal, model, units);
+        CorePrinter.Print(terminal, well.Core, units);
         foreach (var finding in model.Findings) terminal.Output.WriteLine(FindingText.Of(finding, units, model.Count));
         terminal.Output.WriteLine();
         if (folder is not null) terminal.Output.WriteLine($"Results: {Path.GetRelativePath(terminal.Folder, folder)}");

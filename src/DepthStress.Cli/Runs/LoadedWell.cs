@@ -18,6 +18,12 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
     /// <summary>The layers that the model is cut into; what is found about them is among the model's findings.</summary>
     public required LayerTable Layers { get; init; }
 
+    /// <summary>Its observations beside the model.</summary>
+    public required IReadOnlyList<Comparison> Observed { get; init; }
+
+    /// <summary>Its core beside the model; null without plugs.</summary>
+    public required CoreComparison? Core { get; init; }
+
     /// <summary>What every admissible choice makes of Shmin; null when that was not asked for.</summary>
     public IReadOnlyList<ChoiceSpread>? Spread { get; init; }
 
@@ -40,6 +46,11 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
         if (Chain.Run(file.Setup, logs.Logs, diagnostics) is not { } model) return null;
         PictureChoice.Check(pictures, file.Sections.Output, model, diagnostics);
         if (LayerBuilder.Build(model, file.Sections.Layers, diagnostics) is not { } layers) return null;
-        return new LoadedWell(file, logs, model with { Findings = FindingRules.Sort(model.Findings.Concat(layers.Findings)) }, pictures) { Layers = layers };
+        return new LoadedWell(file, logs, model with { Findings = FindingRules.Sort(model.Findings.Concat(layers.Findings)) }, pictures)
+        {
+            Layers = layers,
+            Observed = Comparison.Of(model),
+            Core = CoreComparison.Of(model),
+        };
     }
 }

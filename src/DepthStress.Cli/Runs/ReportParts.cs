@@ -1,8 +1,8 @@
 using DepthStress.Cli.Printing;
-using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Model;
 using DepthStress.Files.Writing;
+using DepthStress.Report;
 using DepthStress.Report.Page;
 
 namespace DepthStress.Cli.Runs;
@@ -11,18 +11,23 @@ namespace DepthStress.Cli.Runs;
 internal static class ReportParts
 {
     /// <summary>The content of a well's page.</summary>
-    public static ReportContent Of(LoadedWell well, DiagnosticBag diagnostics)
+    /// <param name="well">The well.</param>
+    /// <param name="drawn">Its static pictures.</param>
+    /// <param name="diagnostics">Every message.</param>
+    public static ReportContent Of(LoadedWell well, DrawnPictures drawn, DiagnosticBag diagnostics)
     {
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
         return new ReportContent(model, well.Layers, pictures)
         {
+            Drawn = drawn,
+            Comparisons = well.Observed,
             Barriers = BarrierPrinter.Lines(well),
             Observed = [.. ObservationPrinter.Lines(well).Select(l => l.Trim())],
             Remarks =
             [
                 .. DepletionResult.Of(model).Select(d => DepletionText.Line(d, model, units)),
-                .. CoreComparison.Of(model) is { } core ? CorePrinter.Lines(core, units).Select(l => l.Trim()) : [],
+                .. well.Core is { } core ? CorePrinter.Lines(core, units).Select(l => l.Trim()) : [],
             ],
             Findings = [.. model.Findings.Select(f => FindingText.Of(f, units, model.Count)), .. diagnostics.Items.Select(d => d.ToString())],
             Inputs = [.. file.Inputs.Select(i => (i.Name, i.Sha256)), .. logs.Files.Select(f => (f.Name, f.Sha256))],

@@ -22,6 +22,7 @@ internal static class ResultWriter
         var units = file.Sections.Output.Units.Value;
         var (layers, layerSettings) = (well.Layers, file.Sections.Layers);
         var column = SolverColumn.Of(layers, layerSettings.Deck.Value);
+        var drawn = new DrawnPictures(model, pictures);
         List<(string Name, Action<Stream> Write)> results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
@@ -30,13 +31,13 @@ internal static class ResultWriter
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
             ("layers-solver.csv", s => SolverCsv.Write(layers, s)),
             ("layers.vtu", s => LayersVtu.Write(layers, layerSettings, s)),
-            ("tracks.svg", s => TracksPicture.Write(model, pictures, s)),
-            ("stress.svg", s => StressPicture.Write(model, pictures, s)),
+            ("tracks.svg", s => s.Write(drawn.Tracks)),
+            ("stress.svg", s => s.Write(drawn.Stress)),
             ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
-            ("polygon.svg", s => PolygonPicture.Write(model, pictures, s)),
-            ("report.html", s => ReportPage.Write(ReportParts.Of(well, diagnostics), s)),
+            ("polygon.svg", s => s.Write(drawn.Polygon)),
+            ("report.html", s => ReportPage.Write(ReportParts.Of(well, drawn, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
-            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, s, column)),
+            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, column, s)),
         ];
 
         if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));
@@ -47,8 +48,8 @@ internal static class ResultWriter
         }
 
         if (model.Comparisons.Count > 0) results.Add(("comparison.csv", s => ComparisonCsv.Write(model, units, s)));
-        if (model.Setup.Observations.Count > 0) results.Add(("observations.csv", s => ObservationsCsv.Write(Comparison.Of(model), units, s)));
-        if (CoreComparison.Of(model) is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));
+        if (well.Observed.Count > 0) results.Add(("observations.csv", s => ObservationsCsv.Write(well.Observed, units, s)));
+        if (well.Core is { } core) results.Add(("core.csv", s => CoreCsv.Write(core, units, s)));
 
         using var target = ResultFolder.Begin(folder);
         try

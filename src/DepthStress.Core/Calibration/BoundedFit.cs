@@ -5,7 +5,7 @@ namespace DepthStress.Core.Calibration;
 /// <summary>
 /// Weighted non-linear least squares within bounds, for a few parameters of any scale: Gauss-Newton steps, each a linear
 /// problem within the bounds (<see cref="BoundedLinear"/>), damped where they fail (Levenberg 1944; Marquardt 1963) along
-/// columns scaled as by Moré 1978, Lecture Notes in Mathematics 630:105-116. Deterministic.
+/// columns scaled as by Moré 1978, in Watson (ed.), Numerical Analysis, Springer, 105-116. Deterministic.
 /// </summary>
 public static class BoundedFit
 {

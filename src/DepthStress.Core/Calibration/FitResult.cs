@@ -27,7 +27,7 @@ public sealed record FitResult
     /// <summary>The parameters.</summary>
     public required IReadOnlyList<double> Estimates { get; init; }
 
-    /// <summary>Where each lies. Ordinary errors do not hold when one is at a bound: see <see cref="ProfileInterval"/> and <see cref="Bootstrap"/>.</summary>
+    /// <summary>Where each lies. Ordinary errors do not hold when one is at a bound: see <see cref="ProfileInterval"/>.</summary>
     public required IReadOnlyList<BoundState> Bounds { get; init; }
 
     /// <summary>The residuals there, in standard deviations, without robust weights.</summary>

@@ -92,7 +92,7 @@ public static class ComparisonMethods
             WorkedExample.Computed(9400, 6, 10000, 7000, 0.2)),
         Entry(
             "bonaparte-sub-basin-depth", "Least stress from depth, a sub-basin of the Bonaparte Basin, Australia", Units.Megapascal, [Metres], [new("a", 0.0184, "MPa/m")],
-            "{a} Z", (x, c) => c[0] * x[0], "that sub-basin", Zhang + "pp. 209-210", Standing.Confirmed, WorkedExample.Computed(55.2, 6, 3000)),
+            "{a} Z", (x, c) => c[0] * x[0], "that sub-basin, its place from memory", Zhang + "pp. 209-210", Standing.Confirmed, WorkedExample.Computed(55.2, 6, 3000)),
         Entry(
             "ekofisk-field-depth", "Least stress from depth below the mudline, Ekofisk field", Units.Megapascal, [BelowMudline.Within(500, 2900)], [new("a", 0.0185, "MPa/m")],
             "{a} Z", (x, c) => c[0] * x[0], "the field of that name", Zhang + "pp. 209-210", Standing.Confirmed, WorkedExample.Computed(37.0, 6, 2000)),

@@ -31,8 +31,16 @@ public static class RunJson
     public static string Version { get; } =
         typeof(RunJson).Assembly.GetCustomAttribute<AssemblyInformationalVersionAttribute>()?.InformationalVersion ?? "";
 
-    /// <summary>Writes the record of a run; with a solver's column, what the program's own finite elements find in it.</summary>
-    public static void Write(WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, Stream destination, SolverColumn? column = null)
+    /// <summary>Writes the record of a run.</summary>
+    /// <param name="file">The well file.</param>
+    /// <param name="logs">The logs.</param>
+    /// <param name="model">The model.</param>
+    /// <param name="diagnostics">Every message.</param>
+    /// <param name="core">Core beside the model, or null.</param>
+    /// <param name="column">The solver's column, whose own finite elements are solved; or null.</param>
+    /// <param name="destination">Gets the record; stays open.</param>
+    public static void Write(
+        WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, CoreComparison? core, SolverColumn? column, Stream destination)
     {
         ArgumentNullException.ThrowIfNull(file);
         ArgumentNullException.ThrowIfNull(logs);
@@ -60,7 +68,7 @@ public static class RunJson
             ["layered_rock"] = Array(VtiZone.Of(model).Select(z => Layered(model, z))),
             ["predictions"] = Array(model.Predictions.Select(Predicted)),
             ["trends"] = Array(model.Trends.Select(t => TrendRecord(model, t))),
-            ["core"] = CoreComparison.Of(model) is { } core ? CoreJson.Of(core) : null,
+            ["core"] = core is null ? null : CoreJson.Of(core),
             ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
             ["column_check"] = column is null ? null : Array(ColumnCheck.Of(column).Select(b => new JsonObject
             {

@@ -1,3 +1,4 @@
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 
@@ -9,6 +10,12 @@ namespace DepthStress.Report.Page;
 /// <param name="Pictures">Units, tracks and scales.</param>
 public sealed record ReportContent(EarthModel Model, LayerTable Layers, PictureOptions Pictures)
 {
+    /// <summary>The static pictures, drawn once for their files and the page.</summary>
+    public DrawnPictures Drawn { get => field ??= new(Model, Pictures); init; }
+
+    /// <summary>The observations beside the model.</summary>
+    public IReadOnlyList<Comparison> Comparisons { get => field ??= Comparison.Of(Model); init; }
+
     /// <summary>Lines on the nearest stress barriers of each target zone.</summary>
     public IReadOnlyList<string> Barriers { get; init; } = [];
 

@@ -128,39 +128,4 @@ public sealed class BoundedFitTests
         Assert.Equal((0.0, true, false), (interval.Low, interval.OpenBelow, interval.OpenAbove));
         Assert.Equal((Math.Sqrt(2) - 1) / 2, interval.High, 1e-5); // the search ends within 1e-7 of its step
     }
-
-    private static Bootstrap Drawn(double[] values, FitParameter parameter, int seed, BootstrapErrors errors)
-    {
-        var problem = Mean(parameter, values);
-        return Bootstrap.Run(
-            problem,
-            (p, e, r) =>
-            {
-                for (var i = 0; i < values.Length; i++) r[i] = p[0] - values[i] - e[i];
-            },
-            BoundedFit.Solve(problem), 2000, seed, errors);
-    }
-
-    [Theory]
-    [InlineData(BootstrapErrors.Normal)]
-    [InlineData(BootstrapErrors.Resampled)]
-    public void The_bootstrap_of_a_mean_has_its_standard_error(BootstrapErrors errors)
-    {
-        // Residuals of deviation 1 about 10, twenty of them: standard error 1 / sqrt 20 = 0.2236; 0.02 is four errors of 2000 draws.
-        double[] values = [.. Enumerable.Range(0, 20).Select(i => 10 + (i % 2 == 0 ? 1.0 : -1.0))];
-        var drawn = Drawn(values, Between(-99, 99), 7, errors);
-        Assert.Equal(2000, drawn.Draws.Count);
-        var half = (drawn.Percentile(0, 84.134) - drawn.Percentile(0, 15.866)) / 2;
-        Assert.Equal(0.2236, half, 0.02);
-        Assert.Equal(10, drawn.Percentile(0, 50), 0.03);
-    }
-
-    [Fact]
-    public void The_same_seed_gives_the_same_draws_and_another_seed_others()
-    {
-        double[] values = [1, 2, 3];
-        var (first, again, other) = (Drawn(values, Between(-9, 9), 1, BootstrapErrors.Normal), Drawn(values, Between(-9, 9), 1, BootstrapErrors.Normal), Drawn(values, Between(-9, 9), 2, BootstrapErrors.Normal));
-        Assert.Equal(first.Draws.Select(d => d[0]), again.Draws.Select(d => d[0]));
-        Assert.NotEqual(first.Draws.Select(d => d[0]), other.Draws.Select(d => d[0]));
-    }
 }
