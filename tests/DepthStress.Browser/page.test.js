@@ -31,7 +31,8 @@ async function open(well, { width = 1280, height = 900, ...options } = {}) {
   return { page, troubles, close: () => context.close() };
 }
 
-const geometry = (page) => page.evaluate(() => new Promise((done) => requestAnimationFrame(() => requestAnimationFrame(() => done(window.depthStress.geometry())))));
+const geometry = (page) =>
+  page.evaluate(() => new Promise((done) => requestAnimationFrame(() => requestAnimationFrame(() => done(window.depthStress.geometry())))));
 const canvasAt = async (page, x, y) => {
   await page.locator("#stage").scrollIntoViewIfNeeded();
   const box = await page.locator("#tracks").boundingBox();
@@ -56,7 +57,10 @@ for (const well of ["quillback-4", "field", "tiny", "many"]) {
   });
 }
 
-for (const [well, name] of [["quillback-4", "metric"], ["field", "field"]]) {
+for (const [well, name] of [
+  ["quillback-4", "metric"],
+  ["field", "field"],
+]) {
   test(`the crosshair shows the digits of depth.csv at ten depths, ${name} units`, async () => {
     const { page, close } = await open(well);
     const rows = table(wells.folder, well, "depth.csv");
@@ -68,7 +72,9 @@ for (const [well, name] of [["quillback-4", "metric"], ["field", "field"]]) {
       }, row);
       let compared = 0;
       for (const [column, cell] of Object.entries(rows[row])) {
-        const id = Object.keys(shown).filter((k) => column === k || column.startsWith(`${k}_`)).sort((a, b) => b.length - a.length)[0];
+        const id = Object.keys(shown)
+          .filter((k) => column === k || column.startsWith(`${k}_`))
+          .sort((a, b) => b.length - a.length)[0];
         if (!id || !sameColumn(column, id)) continue;
         assert.equal(shown[id], cell, `${column} in row ${row}`);
         const visible = await page.locator(`#values dd[data-id="${id}"]`).first().textContent();
@@ -90,7 +96,7 @@ test("wheel and drag move all tracks together and keep the depth under the point
   aligned(first);
   const y = first.plotTop + 0.3 * (first.plotBase - first.plotTop);
   const depthAt = (g, at) => g.top + ((at - g.plotTop) / (g.plotBase - g.plotTop)) * (g.base - g.top);
-  await page.mouse.move(...await canvasAt(page, first.tracks[2].left + 20, y));
+  await page.mouse.move(...(await canvasAt(page, first.tracks[2].left + 20, y)));
   for (let i = 0; i < 5; i++) await page.mouse.wheel(0, -100);
   const near = await geometry(page);
   aligned(near);
@@ -98,13 +104,13 @@ test("wheel and drag move all tracks together and keep the depth under the point
   const pixel = (first.base - first.top) / (first.plotBase - first.plotTop);
   assert.ok(Math.abs(depthAt(near, y) - depthAt(first, y)) < pixel, "within a pixel line: the pointer lies on whole ones");
   await page.mouse.down();
-  await page.mouse.move(...await canvasAt(page, first.tracks[2].left + 20, y + 60), { steps: 6 });
+  await page.mouse.move(...(await canvasAt(page, first.tracks[2].left + 20, y + 60)), { steps: 6 });
   await page.mouse.up();
   const moved = await geometry(page);
   aligned(moved);
   assert.ok(Math.abs(moved.base - moved.top - (near.base - near.top)) < 1e-6, "the same height, but for rounding");
   assert.ok(moved.top < near.top);
-  await page.mouse.dblclick(...await canvasAt(page, first.tracks[0].left + 20, y));
+  await page.mouse.dblclick(...(await canvasAt(page, first.tracks[0].left + 20, y)));
   const back = await geometry(page);
   assert.deepEqual([back.top, back.base], [first.top, first.base]);
   await close();
@@ -114,15 +120,18 @@ test("a drag on the depth scale, a click on a zone and one on a layer's row go t
   const { page, close } = await open("quillback-4");
   const g = await geometry(page);
   const x = (g.depthStrip[0] + g.depthStrip[1]) / 2;
-  await page.mouse.move(...await canvasAt(page, x, g.plotTop + 100));
+  await page.mouse.move(...(await canvasAt(page, x, g.plotTop + 100)));
   await page.mouse.down();
-  await page.mouse.move(...await canvasAt(page, x, g.plotTop + 200), { steps: 4 });
+  await page.mouse.move(...(await canvasAt(page, x, g.plotTop + 200)), { steps: 4 });
   await page.mouse.up();
   const chosen = await geometry(page);
-  assert.ok(Math.abs((chosen.base - chosen.top) / (g.base - g.top) - 100 / (g.plotBase - g.plotTop)) < 0.01, "100 lines of the plot, within a line or two");
+  assert.ok(
+    Math.abs((chosen.base - chosen.top) / (g.base - g.top) - 100 / (g.plotBase - g.plotTop)) < 0.01,
+    "100 lines of the plot, within a line or two",
+  );
   await page.click("#all");
   const zone = g.zones[2];
-  await page.mouse.click(...await canvasAt(page, (g.zoneStrip[0] + g.zoneStrip[1]) / 2, (zone.screen[0] + zone.screen[1]) / 2));
+  await page.mouse.click(...(await canvasAt(page, (g.zoneStrip[0] + g.zoneStrip[1]) / 2, (zone.screen[0] + zone.screen[1]) / 2)));
   const there = await geometry(page);
   const [top, base] = there.zones[2].screen;
   assert.ok(top >= there.plotTop && base <= there.plotBase && base - top > 0.8 * (there.plotBase - there.plotTop));
@@ -156,7 +165,7 @@ test("depth kinds and units switch right, in tracks, crosshair and tables", asyn
   assert.equal(shown.density, rows[row].density_g_cm3);
   const cell = async (n) => page.locator("#layers tbody tr").first().locator("td").nth(n).textContent();
   const layer = table(wells.folder, "quillback-4", "layers.csv")[0];
-  assert.equal(await cell(1), ((Math.round(Number(layer.top_md_m) * 10) / 10) / 0.3048).toFixed(1));
+  assert.equal(await cell(1), (Math.round(Number(layer.top_md_m) * 10) / 10 / 0.3048).toFixed(1));
   await page.check('input[name="units"][value="metric"]');
   assert.equal(await cell(1), Number(layer.top_md_m).toFixed(1));
   await close();
@@ -166,17 +175,28 @@ test("tables sort both ways and copy as CSV in the order shown", async () => {
   const { page, close } = await open("quillback-4", { permissions: ["clipboard-read", "clipboard-write"] });
   const head = page.locator('#layers th[data-id="shmin_mean"]');
   const column = async () => {
-    const csv = (await page.evaluate(() => window.depthStress.csv("layers"))).trimEnd().split("\n").map((l) => l.split(","));
+    const csv = (await page.evaluate(() => window.depthStress.csv("layers")))
+      .trimEnd()
+      .split("\n")
+      .map((l) => l.split(","));
     return csv.slice(1).map((cells) => Number(cells[csv[0].indexOf("shmin_mean_mpa")]));
   };
   await head.locator("button").click();
   assert.equal(await head.getAttribute("aria-sort"), "ascending");
   const up = await column();
-  assert.deepEqual(up, [...up].sort((a, b) => a - b));
+  assert.deepEqual(
+    up,
+    [...up].sort((a, b) => a - b),
+  );
   await head.locator("button").click();
   const down = await column();
   assert.deepEqual(down, [...up].reverse());
-  assert.deepEqual(up, table(wells.folder, "quillback-4", "layers.csv").map((l) => Number(Number(l.shmin_mean_mpa).toFixed(2))).sort((a, b) => a - b));
+  assert.deepEqual(
+    up,
+    table(wells.folder, "quillback-4", "layers.csv")
+      .map((l) => Number(Number(l.shmin_mean_mpa).toFixed(2)))
+      .sort((a, b) => a - b),
+  );
   await page.getByRole("button", { name: "Copy as CSV: Layers" }).click();
   await page.getByText("Copied", { exact: true }).first().waitFor();
   assert.equal(await page.evaluate(() => navigator.clipboard.readText()), await page.evaluate(() => window.depthStress.csv("layers")));
@@ -201,8 +221,17 @@ test("drawn extremes are the data's, or counted as off the scale", async () => {
   const { page, close } = await open("quillback-4");
   const rows = table(wells.folder, "quillback-4", "depth.csv");
   const drawn = await page.evaluate(() => window.depthStress.drawn());
-  for (const [column, id] of [["shmin_mpa", "shmin"], ["sv_mpa", "sv"], ["density_g_cm3", "density"], ["youngs_static_gpa", "youngs_static"], ["ucs_mpa", "ucs"]]) {
-    const values = rows.map((r) => r[column]).filter((v) => v !== "").map(Number);
+  for (const [column, id] of [
+    ["shmin_mpa", "shmin"],
+    ["sv_mpa", "sv"],
+    ["density_g_cm3", "density"],
+    ["youngs_static_gpa", "youngs_static"],
+    ["ucs_mpa", "ucs"],
+  ]) {
+    const values = rows
+      .map((r) => r[column])
+      .filter((v) => v !== "")
+      .map(Number);
     const curve = drawn.find((d) => d.column === id);
     assert.deepEqual([curve.least, curve.greatest], [Math.min(...values), Math.max(...values)], id);
   }
@@ -274,14 +303,22 @@ test("print gives a paper log: each picture on a page of its own, tables after t
   await close();
 });
 
-for (const [width, scheme] of [[1280, "light"], [1280, "dark"], [2560, "light"], [320, "light"]]) {
+for (const [width, scheme] of [
+  [1280, "light"],
+  [1280, "dark"],
+  [2560, "light"],
+  [320, "light"],
+]) {
   test(`axe-core finds no serious fault at ${width} px, ${scheme}; the page is not wider than the window`, async () => {
     const { page, close } = await open("quillback-4", { width, colorScheme: scheme });
     assert.ok(await page.evaluate(() => document.documentElement.scrollWidth <= window.innerWidth), "400 % zoom of 1280 px is 320 px");
     // The policy of the page forbids foreign scripts, so axe comes in through the browser's own door.
     await page.evaluate(axe);
     const { violations } = await page.evaluate(() => window.axe.run(document));
-    assert.deepEqual(violations.filter((v) => ["serious", "critical"].includes(v.impact)).map((v) => `${v.id}: ${v.nodes.map((n) => n.target).join(" ")}`), []);
+    assert.deepEqual(
+      violations.filter((v) => ["serious", "critical"].includes(v.impact)).map((v) => `${v.id}: ${v.nodes.map((n) => n.target).join(" ")}`),
+      [],
+    );
     await close();
   });
 }

@@ -15,21 +15,25 @@ export function runWells() {
   writeFileSync(join(folder, "field.toml"), `${readFileSync(sample, "utf8")}\n[output]\nunits = "field"\n`);
   writeTiny(folder);
   writeMany(folder);
-  for (const well of ["quillback-4", "field", "tiny", "many"]) execFileSync("dotnet", [program, "run", `${well}.toml`], { cwd: folder, stdio: ["ignore", "ignore", "inherit"] });
+  for (const well of ["quillback-4", "field", "tiny", "many"])
+    execFileSync("dotnet", [program, "run", `${well}.toml`], { cwd: folder, stdio: ["ignore", "ignore", "inherit"] });
   return { folder, page: (well) => `file://${join(folder, `${well}-results`, "report.html")}`, remove: () => rmSync(folder, { recursive: true }) };
 }
 
 /** Two samples, two curves, a mnemonic with markup, neither zones nor observations. */
 function writeTiny(folder) {
   writeFileSync(join(folder, "tiny.csv"), "DEPT,<script>alert(1)</script>\nm,g/cm3\n1000.0,2.40\n1000.5,2.41\n");
-  writeFileSync(join(folder, "tiny.toml"), well("Tiny <b>well</b>", "tiny.csv", "\ndensity = \"<script>alert(1)</script>\"\n"));
+  writeFileSync(join(folder, "tiny.toml"), well("Tiny <b>well</b>", "tiny.csv", '\ndensity = "<script>alert(1)</script>"\n'));
 }
 
 /** So many samples that the page carries bins, with one extreme in a single sample. */
 function writeMany(folder) {
-  const rows = Array.from({ length: 50_000 }, (_, i) => `${(1000 + i * 0.05).toFixed(2)},${i === 33_333 ? "2.9000" : (2.3 + 0.1 * Math.sin(i / 900)).toFixed(4)}`);
+  const rows = Array.from(
+    { length: 50_000 },
+    (_, i) => `${(1000 + i * 0.05).toFixed(2)},${i === 33_333 ? "2.9000" : (2.3 + 0.1 * Math.sin(i / 900)).toFixed(4)}`,
+  );
   writeFileSync(join(folder, "many.csv"), `DEPT,RHO\nm,g/cm3\n${rows.join("\n")}\n`);
-  writeFileSync(join(folder, "many.toml"), well("Many", "many.csv", "\ndensity = \"RHO\"\n"));
+  writeFileSync(join(folder, "many.toml"), well("Many", "many.csv", '\ndensity = "RHO"\n'));
 }
 
 const well = (name, file, curves) => `[well]
@@ -63,6 +67,9 @@ fluid_density = "1.03 g/cm3"
 
 /** A result table as rows of cells by name. */
 export function table(folder, well, name) {
-  const [head, ...rows] = readFileSync(join(folder, `${well}-results`, name), "utf8").trimEnd().split("\n").map((line) => line.split(","));
+  const [head, ...rows] = readFileSync(join(folder, `${well}-results`, name), "utf8")
+    .trimEnd()
+    .split("\n")
+    .map((line) => line.split(","));
   return rows.map((cells) => Object.fromEntries(head.map((title, k) => [title, cells[k]])));
 }

@@ -1,10 +1,11 @@
 using System.Security.Cryptography;
 using System.Text;
+using System.Text.RegularExpressions;
 
 namespace DepthStress.Report.Page;
 
 /// <summary>The page's own files, as they lie in Web/, embedded at build and put together here.</summary>
-internal static class WebFiles
+internal static partial class WebFiles
 {
     /// <summary>The modules of the script; a module stands after those it imports from.</summary>
     private static readonly string[] Modules = ["numbers", "store", "view", "layout", "paint", "curves", "marks", "reading", "input", "tables", "main"];
@@ -23,9 +24,11 @@ internal static class WebFiles
     /// <summary>The hash of a script or style for the security policy.</summary>
     public static string Hash(string text) => $"'sha256-{Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)))}'";
 
-    private static string Joined(string module) => string.Concat(module.Split('\n')
-        .Where(line => !line.StartsWith("import ", StringComparison.Ordinal))
-        .Select(line => (line.StartsWith("export ", StringComparison.Ordinal) ? line["export ".Length..] : line) + "\n"));
+    private static string Joined(string module) => Linking().Replace(module, "");
+
+    /// <summary>An import, over one line or several, and the word before what a module exports.</summary>
+    [GeneratedRegex("^import [^;]*;\n|^export ", RegexOptions.Multiline | RegexOptions.ExplicitCapture)]
+    private static partial Regex Linking();
 
     private static string Read(string name)
     {

@@ -12,15 +12,19 @@ export function listen(stage, canvas, view, layoutOf, changed, speak) {
   const at = (y) => depthOf(layoutOf(), view, y);
   const inside = ([x, y], [left, right]) => x >= left && x < right && y >= layoutOf().top;
 
-  canvas.addEventListener("wheel", (event) => {
-    const widens = event.deltaY > 0;
-    // At the whole log a further turn scrolls the page.
-    if (event.ctrlKey || (widens && view.isWhole() && !event.shiftKey)) return;
-    event.preventDefault();
-    if (event.shiftKey) view.move(((view.base - view.top) / 8) * Math.sign(event.deltaY || event.deltaX));
-    else view.zoom(widens ? 1 / CLOSER : CLOSER, at(place(event)[1]));
-    changed();
-  }, { passive: false });
+  canvas.addEventListener(
+    "wheel",
+    (event) => {
+      const widens = event.deltaY > 0;
+      // At the whole log a further turn scrolls the page.
+      if (event.ctrlKey || (widens && view.isWhole() && !event.shiftKey)) return;
+      event.preventDefault();
+      if (event.shiftKey) view.move(((view.base - view.top) / 8) * Math.sign(event.deltaY || event.deltaX));
+      else view.zoom(widens ? 1 / CLOSER : CLOSER, at(place(event)[1]));
+      changed();
+    },
+    { passive: false },
+  );
 
   canvas.addEventListener("pointerdown", (event) => {
     if (event.button !== 0) return;
@@ -56,7 +60,10 @@ export function listen(stage, canvas, view, layoutOf, changed, speak) {
   });
 
   function click(here) {
-    for (const [items, strip] of [[view.store.zones, layoutOf().zones], [view.store.layers, layoutOf().layers]]) {
+    for (const [items, strip] of [
+      [view.store.zones, layoutOf().zones],
+      [view.store.layers, layoutOf().layers],
+    ]) {
       if (!inside(here, strip)) continue;
       const depth = at(here[1]);
       const item = items.find((i) => view.span(i)[0] <= depth && depth < view.span(i)[1]);

@@ -24,8 +24,15 @@ export function layOut(view, width, height, measure) {
     return place;
   });
   return {
-    width: Math.max(width, x), height, top: head, base: height - 8, row: ROW,
-    depth: [0, DEPTH], zones: [DEPTH, DEPTH + zones], layers: [DEPTH + zones, DEPTH + zones + layers], tracks: places,
+    width: Math.max(width, x),
+    height,
+    top: head,
+    base: height - 8,
+    row: ROW,
+    depth: [0, DEPTH],
+    zones: [DEPTH, DEPTH + zones],
+    layers: [DEPTH + zones, DEPTH + zones + layers],
+    tracks: places,
   };
 }
 

@@ -32,7 +32,9 @@ function paint() {
   paintFrame(g, layout, view, colours);
   for (const place of layout.tracks) paintHead(g, layout, view, place, colours);
   paintLayers(g, layout, view, colours);
-  drawn = layout.tracks.flatMap((place) => place.track.curves.map((c) => ({ track: place.track.id, ...paintCurve(g, layout, view, place, c, colours) })));
+  drawn = layout.tracks.flatMap((place) =>
+    place.track.curves.map((c) => ({ track: place.track.id, ...paintCurve(g, layout, view, place, c, colours) })),
+  );
   for (const ribbon of layout.tracks.flatMap((p) => p.ribbons)) paintRibbon(g, layout, view, ribbon, colours);
   marks = paintObservations(g, layout, view, colours);
   const right = layout.tracks.length ? layout.tracks.at(-1).right : layout.width;
@@ -58,15 +60,25 @@ function changed(chosen = null) {
 function speak(text) {
   const depth = store.columns.get("md");
   const window = `Window ${view.top.toFixed(1)} to ${view.base.toFixed(1)} ${view.depthUnit().unit}`;
-  element("spoken").textContent = text ?? (view.row < 0 ? window
-    : readingAt(view).flatMap((group) => group.items).filter((i) => ["md", "zone", "shmin", "pp", "sv", "stress_basis"].includes(i.id) && i.text !== "")
-      .map((i) => `${i.label} ${i.text} ${i.unit}`).join(", ") || depth.title);
+  element("spoken").textContent =
+    text ??
+    (view.row < 0
+      ? window
+      : readingAt(view)
+          .flatMap((group) => group.items)
+          .filter((i) => ["md", "zone", "shmin", "pp", "sv", "stress_basis"].includes(i.id) && i.text !== "")
+          .map((i) => `${i.label} ${i.text} ${i.unit}`)
+          .join(", ") || depth.title);
 }
 
 function choose(kind, units) {
   view.change(kind, units);
   showUnits(store.units, view.units);
-  for (const [name, value] of [["depth", kind], ["units", units]]) document.querySelector(`input[name="${name}"][value="${value}"]`).checked = true;
+  for (const [name, value] of [
+    ["depth", kind],
+    ["units", units],
+  ])
+    document.querySelector(`input[name="${name}"][value="${value}"]`).checked = true;
   changed();
 }
 
@@ -104,14 +116,25 @@ for (const track of store.tracks) {
   label.append(box, ` ${track.title}`);
   element("track-choice").append(label);
 }
-for (const [id, act] of [["closer", () => view.zoom(0.6)], ["wider", () => view.zoom(1 / 0.6)], ["all", () => view.whole()]]) {
+for (const [id, act] of [
+  ["closer", () => view.zoom(0.6)],
+  ["wider", () => view.zoom(1 / 0.6)],
+  ["all", () => view.whole()],
+]) {
   element(id).addEventListener("click", () => {
     act();
     changed();
     speak();
   });
 }
-listen(stage, canvas, view, () => layout, changed, () => speak());
+listen(
+  stage,
+  canvas,
+  view,
+  () => layout,
+  changed,
+  () => speak(),
+);
 enliven(go, () => view.units, speak);
 fillLegend(element("legend"), store, ink());
 new ResizeObserver(() => changed()).observe(stage);
@@ -124,10 +147,18 @@ paint();
 /** What the page shows, for checks from outside: geometry, readings, drawn extremes. */
 window.depthStress = {
   geometry: () => ({
-    kind: view.kind, units: view.units, top: view.top, base: view.base, plotTop: layout.top, plotBase: layout.base, width: layout.width,
+    kind: view.kind,
+    units: view.units,
+    top: view.top,
+    base: view.base,
+    plotTop: layout.top,
+    plotBase: layout.base,
+    width: layout.width,
     tracks: layout.tracks.map((p) => ({ id: p.track.id, left: p.left, right: p.right, top: layout.top, base: layout.base })),
     zones: store.zones.map((z) => ({ name: z.name, screen: view.span(z).map((d) => screenOf(layout, view, d)) })),
-    zoneStrip: layout.zones, layerStrip: layout.layers, depthStrip: layout.depth,
+    zoneStrip: layout.zones,
+    layerStrip: layout.layers,
+    depthStrip: layout.depth,
   }),
   drawn: () => drawn,
   marks: () => marks,
@@ -135,7 +166,12 @@ window.depthStress = {
     view.point(row);
     paint();
   },
-  reading: () => Object.fromEntries(readingAt(view).flatMap((group) => group.items).map((i) => [i.id, i.text])),
+  reading: () =>
+    Object.fromEntries(
+      readingAt(view)
+        .flatMap((group) => group.items)
+        .map((i) => [i.id, i.text]),
+    ),
   rows: store.rows,
   csv: (id) => csvOf(element(id), view.units),
 };

@@ -9,8 +9,18 @@ export const SUBJECTS = { Shmin: "b5472b", SHmax: "d3a012", "pore pressure": "3e
 
 /** The shape of a mark as points around its place: a disc, or a triangle whose tip points to where the model must lie. */
 export function markShape(meaning, size) {
-  if (meaning === "upper bound") return [[0, -size], [0, size], [-1.6 * size, 0]];
-  if (meaning === "lower bound") return [[0, -size], [0, size], [1.6 * size, 0]];
+  if (meaning === "upper bound")
+    return [
+      [0, -size],
+      [0, size],
+      [-1.6 * size, 0],
+    ];
+  if (meaning === "lower bound")
+    return [
+      [0, -size],
+      [0, size],
+      [1.6 * size, 0],
+    ];
   return Array.from({ length: 16 }, (_, k) => [size * Math.cos((Math.PI * k) / 8), size * Math.sin((Math.PI * k) / 8)]);
 }
 
@@ -96,13 +106,36 @@ export function fillLegend(list, store, colours) {
     list.append(li);
   };
   list.replaceChildren();
-  const box = (w, h) => [[-w, -h], [w, -h], [w, h], [-w, h]];
+  const box = (w, h) => [
+    [-w, -h],
+    [w, -h],
+    [w, h],
+    [-w, h],
+  ];
   for (const meaning of ["value", "upper bound", "lower bound"].filter((m) => store.observations.some((o) => o.meaning === m)))
-    item(meaning === "value" ? "observed value, bar 95 %" : `observed ${meaning}, the tip towards the model`, markShape(meaning, 4.5), colours.named("text"));
+    item(
+      meaning === "value" ? "observed value, bar 95 %" : `observed ${meaning}, the tip towards the model`,
+      markShape(meaning, 4.5),
+      colours.named("text"),
+    );
   for (const [subject, hex] of Object.entries(SUBJECTS).filter(([s]) => store.observations.some((o) => o.subject === s)))
     item(`of ${subject}`, markShape("value", 4.5), colours.curve(hex));
   if (store.layers.some((l) => l.shmin !== undefined)) item("layer: mean Shmin", box(1.4, 6), colours.curve(SUBJECTS.Shmin));
-  item("wedge: beyond the scale", [[-4, 0], [3, -4], [3, 4]], colours.named("text"));
-  const used = new Set(store.tracks.flatMap((t) => t.curves).filter((c) => c.origin).flatMap((c) => store.words.get(c.origin).runs.map((r) => r.word)));
-  for (const [origin, hex] of Object.entries(store.origins).filter(([o]) => used.has(o))) item(`origin: ${origin}`, box(8, 5), `#${hex}`, colours.named("edge"));
+  item(
+    "wedge: beyond the scale",
+    [
+      [-4, 0],
+      [3, -4],
+      [3, 4],
+    ],
+    colours.named("text"),
+  );
+  const used = new Set(
+    store.tracks
+      .flatMap((t) => t.curves)
+      .filter((c) => c.origin)
+      .flatMap((c) => store.words.get(c.origin).runs.map((r) => r.word)),
+  );
+  for (const [origin, hex] of Object.entries(store.origins).filter(([o]) => used.has(o)))
+    item(`origin: ${origin}`, box(8, 5), `#${hex}`, colours.named("edge"));
 }

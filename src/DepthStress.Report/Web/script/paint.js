@@ -82,7 +82,8 @@ export function paintHead(g, layout, view, place, colours) {
   const { left, right, track } = place;
   const middle = (left + right) / 2;
   twoLines(g, track.title, right - left + 4).forEach((part, i) =>
-    write(g, part, middle, 11 + 13 * i, { align: "center", bold: true, size: 11, width: right - left + 4, colour: text }));
+    write(g, part, middle, 11 + 13 * i, { align: "center", bold: true, size: 11, width: right - left + 4, colour: text }),
+  );
   track.curves.forEach((curve, i) => {
     const y = layout.top - 5 - layout.row * (track.curves.length - i);
     const scale = curve[view.units];

@@ -8,8 +8,12 @@ export function readingAt(view) {
   };
   const kinds = { md: "MD", tvd: "TVD", tvdss: "TVDSS" };
   const names = { regime: "regime", stress_basis: "stress rests on" };
-  const place = Object.entries(kinds).filter(([id]) => store.columns.has(id)).map(([id, label]) => number(id, label));
-  const words = [...store.words.values()].filter((w) => w.any && !w.id.endsWith("_origin")).map((w) => ({ id: w.id, label: names[w.id] ?? w.title, text: w.at(row), unit: "" }));
+  const place = Object.entries(kinds)
+    .filter(([id]) => store.columns.has(id))
+    .map(([id, label]) => number(id, label));
+  const words = [...store.words.values()]
+    .filter((w) => w.any && !w.id.endsWith("_origin"))
+    .map((w) => ({ id: w.id, label: names[w.id] ?? w.title, text: w.at(row), unit: "" }));
   const tracks = view.tracks().map((track) => ({
     title: track.title,
     items: track.curves.flatMap((c) => {
@@ -30,22 +34,24 @@ export function fillReading(panel, groups) {
     panel.replaceChildren(hint);
     return;
   }
-  panel.replaceChildren(...groups.map((group) => {
-    const part = document.createElement("section");
-    const title = document.createElement("h4");
-    title.textContent = group.title;
-    const list = document.createElement("dl");
-    for (const item of group.items) {
-      const [name, value, unit] = ["dt", "dd", "dd"].map((tag) => document.createElement(tag));
-      name.textContent = item.label;
-      value.textContent = item.text === "" ? "\u2013" : item.text;
-      value.dataset.id = item.id;
-      unit.textContent = item.text === "" ? "" : item.unit;
-      unit.className = "unit";
-      if (item.unit === "") value.className = "word";
-      list.append(...(item.unit === "" ? [name, value] : [name, value, unit]));
-    }
-    part.append(title, list);
-    return part;
-  }));
+  panel.replaceChildren(
+    ...groups.map((group) => {
+      const part = document.createElement("section");
+      const title = document.createElement("h4");
+      title.textContent = group.title;
+      const list = document.createElement("dl");
+      for (const item of group.items) {
+        const [name, value, unit] = ["dt", "dd", "dd"].map((tag) => document.createElement(tag));
+        name.textContent = item.label;
+        value.textContent = item.text === "" ? "\u2013" : item.text;
+        value.dataset.id = item.id;
+        unit.textContent = item.text === "" ? "" : item.unit;
+        unit.className = "unit";
+        if (item.unit === "") value.className = "word";
+        list.append(...(item.unit === "" ? [name, value] : [name, value, unit]));
+      }
+      part.append(title, list);
+      return part;
+    }),
+  );
 }

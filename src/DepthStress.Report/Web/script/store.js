@@ -38,9 +38,10 @@ function column(raw, own) {
     },
     /** The text of a row: the printed digits, or converted from them; least and greatest where they differ. */
     text(row, units) {
-      const one = (digits) => (units === own
-        ? digitsText(digits, unit.decimals)
-        : fixedText(convert(digitsValue(digits, unit.decimals), unit, raw[units]), raw[units].decimals));
+      const one = (digits) =>
+        units === own
+          ? digitsText(digits, unit.decimals)
+          : fixedText(convert(digitsValue(digits, unit.decimals), unit, raw[units]), raw[units].decimals);
       const [a, b] = [one(low[row]), one(high[row])];
       return a === b ? a : `${a} to ${b}`;
     },

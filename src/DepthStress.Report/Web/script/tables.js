@@ -17,9 +17,8 @@ export function showUnits(own, units) {
       for (const row of table.tBodies[0].rows) {
         const cell = row.cells[k];
         const digits = cell.dataset.n === "" ? NaN : Number(cell.dataset.n);
-        const text = own === units
-          ? digitsText(digits, from.decimals)
-          : fixedText(convert(digitsValue(digits, from.decimals), from, to), to.decimals);
+        const text =
+          own === units ? digitsText(digits, from.decimals) : fixedText(convert(digitsValue(digits, from.decimals), from, to), to.decimals);
         (cell.querySelector("button, span") ?? cell).textContent = text;
       }
     });
@@ -47,7 +46,9 @@ export function enliven(go, unitsNow, speak) {
       const done = await copyText(csvOf(table, unitsNow()));
       copy.textContent = done ? "Copied" : "Copying was refused";
       speak(copy.textContent);
-      setTimeout(() => { copy.textContent = "Copy as CSV"; }, 2000);
+      setTimeout(() => {
+        copy.textContent = "Copy as CSV";
+      }, 2000);
     });
     table.closest(".sheet").before(copy);
   }
