@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Logs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
@@ -32,8 +33,10 @@ public static class ReportPage
             ["caution"] = Html.Text(Caution.Text),
             ["summary"] = Summary(content),
             ["bins"] = bins.PerRow == 1 ? "" : Html.Paragraph(string.Create(CultureInfo.InvariantCulture, $"Too many samples for one page: curves are drawn, and the crosshair reads, in {bins.Rows} bins of {bins.PerRow} samples, each with its least and greatest value. No extreme is lost; depth.csv has every sample."), "notice"),
-            ["zones"] = ResultTables.Zones(model, units),
-            ["choices"] = ResultTables.Choices(model, units),
+            ["zones"] = ResultTables.Zones(model, content.Zones, units),
+            ["choices"] = ResultTables.Choices(model, content.Sensitivities, units),
+            ["spread"] = ResultTables.Spread(content, units),
+            ["solver"] = Solver(content),
             ["layers"] = ResultTables.Layers(content.Layers, units),
             ["observations"] = ResultTables.Observations(content.Comparisons, units),
             ["remarks"] = content.Remarks.Count > 0 ? Html.List(content.Remarks, "") : "",
@@ -72,9 +75,16 @@ public static class ReportPage
             ? content.Barriers
             : ["No zone is marked as a target, so no stress barriers are looked for (target = true in a zone)."];
         return string.Concat(barriers.Select(b => Html.Paragraph(b, "barrier")))
-            + string.Concat(Targets.Uncertainty(content.Model, content.Pictures.Units).Select(b => Html.Paragraph(b)))
+            + string.Concat(Targets.Uncertainty(content).Select(b => Html.Paragraph(b)))
             + Html.Paragraph(Targets.Basis(content.Model))
             + Html.List(content.Observed, "No observation was given: nothing but the logs and the choices speaks for these stresses.");
+    }
+
+    private static string Solver(ReportContent content)
+    {
+        if (content.Solved is not { } blocks) return Html.Paragraph("No layer has all that a solver needs, so none was solved and no deck was written.");
+        var loop = ClosedLoop.Of(content.Layers, blocks);
+        return string.Concat(SolverWords.Of(loop, blocks, content.Pictures.Units).Select(s => Html.Paragraph(s))) + ResultTables.Solved(loop, content.Pictures.Units);
     }
 
     private static string Extent(EarthModel model, UnitSystem units)

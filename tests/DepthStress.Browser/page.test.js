@@ -1,9 +1,10 @@
 import assert from "node:assert/strict";
 import { createRequire } from "node:module";
 import { readFileSync } from "node:fs";
+import { join } from "node:path";
 import { after, before, test } from "node:test";
 import { chromium } from "playwright-core";
-import { runWells, table } from "./wells.js";
+import { pagesOf, runWells, table } from "./wells.js";
 
 const PSI = 6894.757293168361; // Pa in a psi, NIST SP 811 (2008)
 const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
@@ -197,7 +198,7 @@ test("tables sort both ways and copy as CSV in the order shown", async () => {
       .map((l) => Number(Number(l.shmin_mean_mpa).toFixed(2)))
       .sort((a, b) => a - b),
   );
-  await page.getByRole("button", { name: "Copy as CSV: Layers" }).click();
+  await page.getByRole("button", { name: "Copy as CSV: Layers: means" }).click();
   await page.getByText("Copied", { exact: true }).first().waitFor();
   assert.equal(await page.evaluate(() => navigator.clipboard.readText()), await page.evaluate(() => window.depthStress.csv("layers")));
   await close();
@@ -283,6 +284,81 @@ test("observations stand on the stress track with their error bars and meaning",
   await close();
 });
 
+test("the polygon at the crosshair is what friction allows there, and the model stands in it", async () => {
+  for (const [well, unit, suffix] of [
+    ["quillback-4", "MPa", "mpa"],
+    ["field", "psi", "psi"],
+  ]) {
+    const { page, close } = await open(well);
+    const rows = table(wells.folder, well, "depth.csv");
+    // Jaeger and Cook; Zoback 2007, Reservoir Geomechanics: q = (sqrt(mu^2 + 1) + mu)^2, 3.12 for 0.6, the friction of the sample well.
+    const q = (Math.sqrt(1.36) + 0.6) ** 2;
+    assert.ok(Math.abs(q - 3.12) < 0.005);
+    for (const share of [0.03, 0.2, 0.45, 0.7, 0.93]) {
+      const row = Math.round(share * (rows.length - 1));
+      await page.evaluate((i) => window.depthStress.point(i), row);
+      const found = await page.evaluate(() => {
+        const { mark, lowest, highest, friction } = window.depthStress.polygon();
+        return { mark, lowest, highest, friction };
+      });
+      const [sv, pp, shmin, shmax] = ["sv", "pp", "shmin", "shmax"].map((id) => Number(rows[row][`${id}_${suffix}`]));
+      assert.equal(found.friction, 0.6);
+      assert.ok(Math.abs(found.lowest - (pp + (sv - pp) / q)) < 1e-9 * sv && Math.abs(found.highest - (pp + q * (sv - pp))) < 1e-9 * sv);
+      const { mark } = found;
+      const scale = (mark.right - mark.left) / (found.highest - found.lowest);
+      assert.ok(Math.abs(mark.x - mark.left - (shmin - found.lowest) * scale) < 1e-6, "the mark stands at Shmin");
+      assert.ok(Math.abs(mark.base - mark.y - (shmax - found.lowest) * scale) < 1e-6, "and at SHmax");
+      const words = await page.locator("#polygon-words").textContent();
+      assert.match(words, new RegExp(`^Friction 0\\.60: Shmin from ${found.lowest.toFixed(unit === "MPa" ? 2 : 0)} ${unit}`));
+      const verdict = shmin < found.lowest ? "Shmin is below what" : shmax > pp + q * (shmin - pp) ? "SHmax is above what" : "Within what";
+      assert.ok(words.includes(verdict), `${words} says "${verdict}"`);
+    }
+    await close();
+  }
+});
+
+test("the page opens with the crosshair in the target zone; without a crosshair the polygon asks for one", async () => {
+  const { page, close } = await open("quillback-4");
+  assert.equal((await page.evaluate(() => window.depthStress.reading())).zone, "bracken sand");
+  await page.focus("#stage");
+  await page.keyboard.press("Escape");
+  await geometry(page);
+  assert.match(await page.locator("#polygon-words").textContent(), /^Put the crosshair/);
+  assert.equal(await page.locator("#polygon > *").count(), 0);
+  await close();
+});
+
+test("a well without stress has no polygon and says so", async () => {
+  const { page, close } = await open("tiny");
+  assert.match(await page.locator("#polygon-words").textContent(), /^(Friction 0\.60.*No horizontal stress here|No polygon)/);
+  assert.match(await page.locator("#solver-part").textContent(), /none was solved/);
+  await close();
+});
+
+test("the spread of choices has the extremes of spread.csv, the solver's part the numbers of run.json", async () => {
+  const { page, close } = await open("quillback-4");
+  const [head, ...shown] = (await page.evaluate(() => window.depthStress.csv("spread")))
+    .trimEnd()
+    .split("\n")
+    .map((l) => l.split(","));
+  const trials = table(wells.folder, "quillback-4", "spread.csv");
+  assert.equal(shown.length, 6);
+  for (const cells of shown) {
+    const values = trials.filter((t) => t.zone === cells[0]).map((t) => Number(t.shmin_mpa));
+    const cell = (id) => Number(cells[head.indexOf(id)]);
+    assert.ok(Math.abs(cell("every_choice_lowest_mpa") - Math.min(...values)) <= 0.0051, "two decimals beside four");
+    assert.ok(Math.abs(cell("every_choice_highest_mpa") - Math.max(...values)) <= 0.0051);
+  }
+  const { closed_loop: loop } = JSON.parse(readFileSync(join(wells.folder, "quillback-4-results", "run.json"), "utf8"));
+  const text = await page.locator("#solver-part").textContent();
+  assert.ok(
+    text.includes(`in layer ${loop.profile_layer}: ${loop.profile_stress} by ${(100 * loop.profile_share).toFixed(2)} %`),
+    text.slice(0, 600),
+  );
+  assert.ok(loop.formula_share < 1e-6 && loop.profile_share < 0.005);
+  await close();
+});
+
 test("without scripts the page shows pictures and tables", async () => {
   const { page, close } = await open("quillback-4", { javaScriptEnabled: false });
   assert.equal(await page.locator("#viewer").isVisible(), false);
@@ -294,9 +370,20 @@ test("without scripts the page shows pictures and tables", async () => {
 
 test("print gives a paper log: each picture on a page of its own, tables after them", async () => {
   const { page, close } = await open("quillback-4");
-  const pdf = (await page.pdf({ preferCSSPageSize: true })).toString("latin1");
-  const pages = pdf.match(/\/Type\s*\/Page\b/g).length;
-  assert.ok(pages >= 7 && pages <= 16, `${pages} pages: one of summary, three of pictures, the rest tables, sources and findings`);
+  const pages = pagesOf(await page.pdf({ preferCSSPageSize: true }));
+  assert.ok(pages.length >= 9 && pages.length <= 18, `${pages.length} pages: one of summary, one a picture, the rest tables, sources and findings`);
+  assert.match(pages[0], /Target bracken sand, mean Shmin[^]*How sure:[^]*Caution\./);
+  // A table that goes on over pages carries its headings with it.
+  const spread = [
+    ["missed by more", "Verdict"],
+    ["wireline tester", "Verdict"],
+    ["read in the source", "Coefficients"],
+  ].map(([row, head]) => {
+    const withRows = pages.filter((p) => p.includes(row));
+    assert.ok(withRows.length >= 1 && withRows.every((p) => p.includes(head)), `pages with "${row}" have "${head}"`);
+    return withRows.length;
+  });
+  assert.ok(Math.max(...spread) >= 2, "at least one table goes on over two pages, so headings are put to the test");
   await page.emulateMedia({ media: "print" });
   assert.equal(await page.locator("#viewer").isVisible(), false);
   assert.equal(await page.locator("#pictures img").count(), 3);

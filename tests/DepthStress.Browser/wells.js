@@ -16,11 +16,11 @@ export function runWells() {
   writeTiny(folder);
   writeMany(folder);
   for (const well of ["quillback-4", "field", "tiny", "many"])
-    execFileSync("dotnet", [program, "run", `${well}.toml`], { cwd: folder, stdio: ["ignore", "ignore", "inherit"] });
+    execFileSync("dotnet", [program, "run", `${well}.toml`, "--spread"], { cwd: folder, stdio: ["ignore", "ignore", "inherit"] });
   return { folder, page: (well) => `file://${join(folder, `${well}-results`, "report.html")}`, remove: () => rmSync(folder, { recursive: true }) };
 }
 
-/** Two samples, two curves, a mnemonic with markup, neither zones nor observations. */
+/** Two samples, one curve beside depth, a mnemonic with markup, neither zones nor observations. */
 function writeTiny(folder) {
   writeFileSync(join(folder, "tiny.csv"), "DEPT,<script>alert(1)</script>\nm,g/cm3\n1000.0,2.40\n1000.5,2.41\n");
   writeFileSync(join(folder, "tiny.toml"), well("Tiny <b>well</b>", "tiny.csv", '\ndensity = "<script>alert(1)</script>"\n'));
@@ -64,6 +64,11 @@ above_log = "2.0 g/cm3"
 method = "hydrostatic"
 fluid_density = "1.03 g/cm3"
 `;
+
+/** The text of each page of a PDF, columns kept beside each other. */
+export function pagesOf(pdf) {
+  return execFileSync("pdftotext", ["-layout", "-", "-"], { input: pdf, encoding: "utf8" }).split("\f").slice(0, -1);
+}
 
 /** A result table as rows of cells by name. */
 export function table(folder, well, name) {

@@ -1,4 +1,5 @@
 using System.Globalization;
+using DepthStress.Cli.Runs;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using Spectre.Console;
@@ -9,9 +10,9 @@ namespace DepthStress.Cli.Printing;
 internal static class ChoicePrinter
 {
     /// <summary>Prints one row per zone that has a Shmin; nothing when none has.</summary>
-    public static void Print(Terminal terminal, EarthModel model, UnitSystem units)
+    public static void Print(Terminal terminal, LoadedWell well)
     {
-        var sensitivities = ShminSensitivity.Of(model);
+        var (sensitivities, units) = (well.Sensitivities, well.File.Sections.Output.Units.Value);
         if (sensitivities.Count == 0) return;
         var (unit, decimals) = units == UnitSystem.Metric ? (Units.Megapascal, 1) : (Units.Psi, 0);
         var format = "F" + decimals.ToString(CultureInfo.InvariantCulture);
@@ -26,7 +27,7 @@ internal static class ChoicePrinter
         {
             string Change(double si) => unit.FromSi(si).ToString(signed, CultureInfo.InvariantCulture);
             table.AddRow(
-                Markup.Escape(s.Zone < 0 ? (model.Setup.Zones.Count == 0 ? "whole log" : "no zone") : model.ZoneName(s.Zone)),
+                Markup.Escape(well.Model.ZoneTitle(s.Zone)),
                 unit.FromSi(s.Shmin).ToString(format, CultureInfo.InvariantCulture),
                 Change(s.PoissonLower), Change(s.PoissonHigher), Change(s.BiotLower), Change(s.BiotHigher));
         }

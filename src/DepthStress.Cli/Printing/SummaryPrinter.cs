@@ -22,9 +22,9 @@ internal static class SummaryPrinter
         var units = file.Sections.Output.Units.Value;
         terminal.Output.WriteLine($"Well {file.Setup.Name}: {Extent(model, units)}");
         terminal.Output.WriteLine();
-        foreach (var columns in terminal.Width < FullWidth ? Narrow : [Columns]) terminal.Tables().Write(Zones(model, units, columns));
+        foreach (var columns in terminal.Width < FullWidth ? Narrow : [Columns]) terminal.Tables().Write(Zones(well.Zones, units, columns));
         terminal.Output.WriteLine();
-        ChoicePrinter.Print(terminal, model, units);
+        ChoicePrinter.Print(terminal, well);
         SpreadPrinter.Print(terminal, well);
         BarrierPrinter.Print(terminal, well);
         ObservationPrinter.Print(terminal, well);
@@ -64,7 +64,7 @@ internal static class SummaryPrinter
 
     private static readonly (string Title, string Column, int Metric, int Field)[][] Narrow = [Columns[..4], Columns[4..7], Columns[7..]];
 
-    private static Table Zones(EarthModel model, UnitSystem units, (string Title, string Column, int Metric, int Field)[] columns)
+    private static Table Zones(IReadOnlyList<ZoneMeans> zones, UnitSystem units, (string Title, string Column, int Metric, int Field)[] columns)
     {
         var table = new Table().Border(TableBorder.Simple);
         var length = units.UnitFor(Dimension.Length).Unit;
@@ -76,7 +76,7 @@ internal static class SummaryPrinter
         if (last) table.AddColumn(Numbers("no log\n% Sv"));
         foreach (var column in table.Columns) column.NoWrap().Padding(0, 0, 1, 0);
 
-        foreach (var zone in ZoneMeans.Of(model))
+        foreach (var zone in zones)
         {
             var cells = columns.Select(c =>
             {
@@ -85,7 +85,7 @@ internal static class SummaryPrinter
             });
             string[] share = last ? [Show(zone.Mean(DepthColumns.Get("sv_unlogged_share")), Units.Percent, 0)] : [];
             table.AddRow([
-                Markup.Escape(zone.Name.Length > 0 ? zone.Name : "whole log"), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells, .. share]);
+                Markup.Escape(zone.Title), Show(zone.TopMd, length, 1), Show(zone.Covered, Units.Percent, 0), .. cells, .. share]);
         }
 
         return table;

@@ -24,6 +24,12 @@ internal sealed record LoadedWell(WellFile File, IngestedLogs Logs, EarthModel M
     /// <summary>Its core beside the model; null without plugs.</summary>
     public required CoreComparison? Core { get; init; }
 
+    /// <summary>Means of its zones.</summary>
+    public IReadOnlyList<ZoneMeans> Zones => field ??= ZoneMeans.Of(Model);
+
+    /// <summary>How its mean Shmin hangs on the choices that logs cannot settle.</summary>
+    public IReadOnlyList<ShminSensitivity> Sensitivities => field ??= ShminSensitivity.Of(Model);
+
     /// <summary>What every admissible choice makes of Shmin; null when that was not asked for.</summary>
     public IReadOnlyList<ChoiceSpread>? Spread { get; init; }
 

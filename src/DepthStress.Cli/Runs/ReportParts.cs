@@ -1,5 +1,7 @@
 using DepthStress.Cli.Printing;
+using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
+using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
 using DepthStress.Files.Writing;
 using DepthStress.Report;
@@ -13,8 +15,9 @@ internal static class ReportParts
     /// <summary>The content of a well's page.</summary>
     /// <param name="well">The well.</param>
     /// <param name="drawn">Its static pictures.</param>
+    /// <param name="solved">What the program's own finite elements find in its layers; null where none can be solved.</param>
     /// <param name="diagnostics">Every message.</param>
-    public static ReportContent Of(LoadedWell well, DrawnPictures drawn, DiagnosticBag diagnostics)
+    public static ReportContent Of(LoadedWell well, DrawnPictures drawn, IReadOnlyList<ColumnBlock>? solved, DiagnosticBag diagnostics)
     {
         var (file, logs, model, pictures) = well;
         var units = file.Sections.Output.Units.Value;
@@ -22,6 +25,11 @@ internal static class ReportParts
         {
             Drawn = drawn,
             Comparisons = well.Observed,
+            Zones = well.Zones,
+            Sensitivities = well.Sensitivities,
+            Spreads = well.Spread ?? ChoiceSpread.Of(model),
+            Core = well.Core,
+            Solved = solved,
             Barriers = BarrierPrinter.Lines(well),
             Observed = [.. ObservationPrinter.Lines(well).Select(l => l.Trim())],
             Remarks =

@@ -22,6 +22,7 @@ internal static class ResultWriter
         var units = file.Sections.Output.Units.Value;
         var (layers, layerSettings) = (well.Layers, file.Sections.Layers);
         var column = SolverColumn.Of(layers, layerSettings.Deck.Value);
+        var solved = column is null ? null : ColumnCheck.Of(column);
         var drawn = new DrawnPictures(model, pictures);
         List<(string Name, Action<Stream> Write)> results =
         [
@@ -35,9 +36,9 @@ internal static class ResultWriter
             ("stress.svg", s => s.Write(drawn.Stress)),
             ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
             ("polygon.svg", s => s.Write(drawn.Polygon)),
-            ("report.html", s => ReportPage.Write(ReportParts.Of(well, drawn, diagnostics), s)),
+            ("report.html", s => ReportPage.Write(ReportParts.Of(well, drawn, solved, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
-            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, column, s)),
+            ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, layers, solved, s)),
         ];
 
         if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));

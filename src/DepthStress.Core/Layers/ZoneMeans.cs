@@ -12,18 +12,19 @@ public sealed class ZoneMeans
     private const int Chunk = 1024;
     private readonly EarthModel _model;
     private readonly List<int> _samples;
+    private readonly Dictionary<string, double> _means = [];
 
     private ZoneMeans(EarthModel model, short zone, List<int> covered, List<int> all)
     {
         _model = model;
         _samples = covered.Count > 0 ? covered : all;
-        Name = model.ZoneName(zone);
+        Title = model.ZoneTitle(zone);
         TopMd = model.Values.Read(Property.MeasuredDepth)[all[0]];
         Covered = covered.Count / (double)all.Count;
     }
 
-    /// <summary>The zone's name; empty when the well has no zones.</summary>
-    public string Name { get; }
+    /// <summary>The zone's name; "whole log" when the well has no zones.</summary>
+    public string Title { get; }
 
     /// <summary>Measured depth of the zone's first sample, m.</summary>
     public double TopMd { get; }
@@ -52,6 +53,11 @@ public sealed class ZoneMeans
     public double Mean(NumberColumn<EarthModel> column)
     {
         ArgumentNullException.ThrowIfNull(column);
+        return _means.TryGetValue(column.Id, out var known) ? known : _means[column.Id] = Compute(column);
+    }
+
+    private double Compute(NumberColumn<EarthModel> column)
+    {
         double sum = 0;
         var count = 0;
         Span<double> buffer = stackalloc double[Chunk];

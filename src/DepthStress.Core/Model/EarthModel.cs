@@ -63,6 +63,9 @@ public sealed record EarthModel
     /// <summary>The name of a zone, or nothing.</summary>
     public string ZoneName(int zone) => zone < 0 ? "" : Setup.Zones[zone].Name;
 
+    /// <summary>The name of a zone as a table shows it, which needs a word for samples outside zones and for a well without zones.</summary>
+    public string ZoneTitle(int zone) => zone >= 0 ? ZoneName(zone) : Setup.Zones.Count == 0 ? "whole log" : "no zone";
+
     /// <summary>The name of a lithology, or nothing.</summary>
     public string LithologyName(int lithology) => lithology < 0 ? "" : Setup.Lithologies[lithology].Rule.Name;
 

@@ -15,6 +15,9 @@ namespace DepthStress.Core.Model;
 public sealed record StressState(
     string Zone, double MeasuredDepth, double TrueVerticalDepth, double Vertical, double Pore, double Shmin, double Shmax, double Friction)
 {
+    /// <summary>Number of the sample.</summary>
+    public int Sample { get; init; }
+
     /// <summary>The most states that are chosen without being asked for.</summary>
     public const int MostChosen = 6;
 
@@ -66,6 +69,9 @@ public sealed record StressState(
         var run = model.Runs.First(r => sample < r.End);
         return new StressState(
             model.ZoneName(model.Zones[sample]), At(Property.MeasuredDepth), At(Property.TrueVerticalDepth), At(Property.VerticalStress),
-            At(Property.PorePressure), At(Property.MinHorizontalStress), At(Property.MaxHorizontalStress), run.Settings.HorizontalStress.FrictionCoefficient.Value);
+            At(Property.PorePressure), At(Property.MinHorizontalStress), At(Property.MaxHorizontalStress), run.Settings.HorizontalStress.FrictionCoefficient.Value)
+        {
+            Sample = sample,
+        };
     }
 }

@@ -37,10 +37,11 @@ public static class RunJson
     /// <param name="model">The model.</param>
     /// <param name="diagnostics">Every message.</param>
     /// <param name="core">Core beside the model, or null.</param>
-    /// <param name="column">The solver's column, whose own finite elements are solved; or null.</param>
+    /// <param name="layers">The layers.</param>
+    /// <param name="solved">What the program's own finite elements find in their column; or null.</param>
     /// <param name="destination">Gets the record; stays open.</param>
     public static void Write(
-        WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, CoreComparison? core, SolverColumn? column, Stream destination)
+        WellFile file, IngestedLogs logs, EarthModel model, DiagnosticBag diagnostics, CoreComparison? core, LayerTable layers, IReadOnlyList<ColumnBlock>? solved, Stream destination)
     {
         ArgumentNullException.ThrowIfNull(file);
         ArgumentNullException.ThrowIfNull(logs);
@@ -70,7 +71,8 @@ public static class RunJson
             ["trends"] = Array(model.Trends.Select(t => TrendRecord(model, t))),
             ["core"] = core is null ? null : CoreJson.Of(core),
             ["depletion"] = Array(DepletionResult.Of(model).Select(d => DepletionText.Json(d, model))),
-            ["column_check"] = column is null ? null : Array(ColumnCheck.Of(column).Select(b => new JsonObject
+            ["closed_loop"] = solved is null ? null : Loop(ClosedLoop.Of(layers, solved)),
+            ["column_check"] = solved is null ? null : Array(solved.Select(b => new JsonObject
             {
                 ["top_tvd_m"] = Number(b.Top),
                 ["base_tvd_m"] = Number(b.Base),
@@ -86,6 +88,15 @@ public static class RunJson
         writer.Flush();
         destination.Write("\n"u8);
     }
+
+    private static JsonObject Loop(ClosedLoop loop) => new()
+    {
+        ["formula_share"] = Math.Round(loop.Formula.Share, 9),
+        ["profile_share"] = Math.Round(loop.Profile.Share, 9),
+        ["profile_difference_pa"] = Number(loop.Profile.Pressure),
+        ["profile_stress"] = loop.Profile.Stress,
+        ["profile_layer"] = loop.Profile.Layer,
+    };
 
     private static JsonObject Datum(WellSetup setup)
     {

@@ -34,6 +34,8 @@ internal sealed class PageData(ReportContent content)
         Each(json, "zones", Zones(), z => Interval(json, z.Name, z.Top, z.Base, null));
         Each(json, "layers", content.Layers.Layers, l => Interval(json, l.Number.ToString(CultureInfo.InvariantCulture), (l.TopMd, l.TopTvd), (l.BaseMd, l.BaseTvd), l.Profile(Property.MinHorizontalStress).Mean));
         Each(json, "observations", observations.Where(o => double.IsFinite(o.Residual)), o => Observation(json, o));
+        Each(json, "friction", Frictions(bins), f => json.WriteNumberValue(f));
+        if (StressState.Chosen(_model) is [var state, ..]) json.WriteNumber("start", state.Sample / bins.PerRow);
         json.WriteStartObject("origins");
         foreach (var origin in Enum.GetValues<SampleOrigin>().Where(o => o != SampleOrigin.None)) json.WriteString(origin.Name(), Colour(OriginRibbon.Colour(origin)));
         json.WriteEndObject();
@@ -174,6 +176,20 @@ internal sealed class PageData(ReportContent content)
     {
         json.WritePropertyName(name);
         Finite(json, value);
+    }
+
+    /// <summary>The friction coefficient of the settings by rows: one past the last row of a run, then its value. A bin has that of its first sample.</summary>
+    private IEnumerable<double> Frictions(Bins bins)
+    {
+        var runs = new List<(int End, double Friction)>();
+        foreach (var run in _model.Runs)
+        {
+            var (end, friction) = ((run.End + bins.PerRow - 1) / bins.PerRow, run.Settings.HorizontalStress.FrictionCoefficient.Value);
+            if (runs.Count > 0 && (runs[^1].Friction == friction || runs[^1].End == end)) runs[^1] = (end, runs[^1].Friction);
+            else runs.Add((end, friction));
+        }
+
+        return runs.SelectMany(r => new[] { r.End, r.Friction });
     }
 
     private static string Colour(int colour) => colour.ToString("x6", CultureInfo.InvariantCulture);

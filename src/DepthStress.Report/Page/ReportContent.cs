@@ -16,6 +16,21 @@ public sealed record ReportContent(EarthModel Model, LayerTable Layers, PictureO
     /// <summary>The observations beside the model.</summary>
     public IReadOnlyList<Comparison> Comparisons { get => field ??= Comparison.Of(Model); init; }
 
+    /// <summary>Means of the zones.</summary>
+    public IReadOnlyList<ZoneMeans> Zones { get => field ??= ZoneMeans.Of(Model); init; }
+
+    /// <summary>How mean Shmin hangs on the choices that logs cannot settle.</summary>
+    public IReadOnlyList<ShminSensitivity> Sensitivities { get => field ??= ShminSensitivity.Of(Model); init; }
+
+    /// <summary>What every admissible choice for the rock makes of mean Shmin.</summary>
+    public IReadOnlyList<ChoiceSpread> Spreads { get => field ??= ChoiceSpread.Of(Model); init; }
+
+    /// <summary>The core beside the model; null without plugs.</summary>
+    public CoreComparison? Core { get; init; }
+
+    /// <summary>What the program's own finite elements find in the exported layers; null where none can be solved.</summary>
+    public IReadOnlyList<ColumnBlock>? Solved { get; init; }
+
     /// <summary>Lines on the nearest stress barriers of each target zone.</summary>
     public IReadOnlyList<string> Barriers { get; init; } = [];
 

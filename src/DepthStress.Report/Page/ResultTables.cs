@@ -18,15 +18,14 @@ internal static class ResultTables
     private static readonly (ColumnUnit Metric, ColumnUnit Field) Ratio = (new(Units.One, 3), new(Units.One, 3));
 
     /// <summary>Means of every zone.</summary>
-    public static string Zones(EarthModel model, UnitSystem units)
+    public static string Zones(EarthModel model, IReadOnlyList<ZoneMeans> means, UnitSystem units)
     {
-        var means = ZoneMeans.Of(model);
         var md = model.Values.Read(Property.MeasuredDepth);
         var end = md.IsEmpty ? double.NaN : md[^1];
         NumberCells<ZoneMeans> Mean(string title, string id, (ColumnUnit Metric, ColumnUnit Field) unit) => new(title, id, unit, z => z.Mean(DepthColumns.Get(id)));
         PageTable<ZoneMeans> table = new("zones", "Zones: means over the samples that have Shmin",
         [
-            new WordCells<ZoneMeans>("Zone", "zone", z => z.Name.Length > 0 ? z.Name : "whole log"),
+            new WordCells<ZoneMeans>("Zone", "zone", z => z.Title),
             new NumberCells<ZoneMeans>("Top MD", "top_md", Length, z => z.TopMd),
             new NumberCells<ZoneMeans>("Covered", "covered", Percent, z => z.Covered),
             Mean("Sv", "sv", Stress), Mean("Pp", "pp", Stress), Mean("Shmin", "shmin", Stress), Mean("SHmax", "shmax", Stress),
@@ -41,20 +40,69 @@ internal static class ResultTables
     }
 
     /// <summary>What the choices that logs cannot settle do to Shmin.</summary>
-    public static string Choices(EarthModel model, UnitSystem units)
+    public static string Choices(EarthModel model, IReadOnlyList<ShminSensitivity> sensitivities, UnitSystem units)
     {
-        string Name(ShminSensitivity s) => s.Zone >= 0 ? model.ZoneName(s.Zone) : model.Setup.Zones.Count == 0 ? "whole log" : "no zone";
         static string Shift(string name, double step) => string.Create(CultureInfo.InvariantCulture, $"{name} {step:+0.00;-0.00}");
         var (nu, biot) = (ShminSensitivity.PoissonStep, ShminSensitivity.BiotStep);
         return new PageTable<ShminSensitivity>("choices", "Choices: change of mean Shmin with another static Poisson's ratio or Biot's coefficient",
         [
-            new WordCells<ShminSensitivity>("Zone", "zone", Name),
+            new WordCells<ShminSensitivity>("Zone", "zone", s => model.ZoneTitle(s.Zone)),
             new NumberCells<ShminSensitivity>("Shmin", "shmin", Stress, s => s.Shmin),
             new NumberCells<ShminSensitivity>(Shift("nu", -nu), "poisson_lower", Stress, s => s.PoissonLower),
             new NumberCells<ShminSensitivity>(Shift("nu", nu), "poisson_higher", Stress, s => s.PoissonHigher),
             new NumberCells<ShminSensitivity>(Shift("Biot", -biot), "biot_lower", Stress, s => s.BiotLower),
             new NumberCells<ShminSensitivity>(Shift("Biot", biot), "biot_higher", Stress, s => s.BiotHigher),
-        ]).Write(ShminSensitivity.Of(model), units, "There is no Shmin, so no choice can move it.");
+        ]).Write(sensitivities, units, "There is no Shmin, so no choice can move it.");
+    }
+
+    /// <summary>What every admissible choice for the rock makes of mean Shmin, beside what tests and core say.</summary>
+    public static string Spread(ReportContent content, UnitSystem units)
+    {
+        var model = content.Model;
+        SpreadEvidence Evidence(ChoiceSpread s) => SpreadEvidence.Of(model, content.Comparisons, content.Core, s.Zone);
+        static NumberCells<ChoiceSpread>[] Range(string title, string id, Func<ChoiceSpread, SpreadRange> range) =>
+        [
+            new($"{title}, lowest", $"{id}_lowest", Stress, s => range(s).Low), new($"{title}, highest", $"{id}_highest", Stress, s => range(s).High),
+        ];
+        return new PageTable<ChoiceSpread>("spread", "Spread: mean Shmin over every admissible choice for the rock",
+        [
+            new WordCells<ChoiceSpread>("Zone", "zone", s => model.ZoneTitle(s.Zone)),
+            new NumberCells<ChoiceSpread>("Shmin", "shmin", Stress, s => s.Chosen),
+            .. Range("Every choice", "every_choice", s => s.All),
+            .. Range("E static alone", "youngs_static", s => s.ByYoungs),
+            .. Range("nu static alone", "poisson_static", s => s.ByPoisson),
+            .. Range("Biot alone", "biot", s => s.ByBiot),
+            new WordCells<ChoiceSpread>("Moves it most", "dominant", s => s.Trials.Count > 1 ? s.Dominant : ""),
+            new NumberCells<ChoiceSpread>("Tests less model", "tests_less_model", Stress, s => Evidence(s).TestMiss),
+            new NumberCells<ChoiceSpread>("Tests", "tests", ColumnUnits.Counts, s => Evidence(s).Tests),
+            new NumberCells<ChoiceSpread>("Plug E over model", "plug_modulus_ratio", (new(Units.One, 2), new(Units.One, 2)), s => Evidence(s).ModulusRatio),
+            new NumberCells<ChoiceSpread>("Plugs", "plugs", ColumnUnits.Counts, s => Evidence(s).Plugs),
+        ]).Write(content.Spreads, units, "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
+    }
+
+    /// <summary>What the program's own finite elements find in the exported layers, beside the profile at log scale.</summary>
+    public static string Solved(ClosedLoop loop, UnitSystem units)
+    {
+        static (ColumnUnit Metric, ColumnUnit Field) Fine() => (new(Units.Megapascal, 3), new(Units.Psi, 1));
+        static NumberCells<LoopLayer>[] Pair(string symbol, Property property, Func<LoopLayer, double> difference) =>
+        [
+            new($"{symbol}, profile", $"{property.ToString().ToLowerInvariant()}_profile", Stress, l => l.Layer.Profile(property).Mean),
+            new($"{symbol}, solved less profile", $"{property.ToString().ToLowerInvariant()}_difference", Fine(), difference),
+        ];
+        return new PageTable<LoopLayer>("solved", "Layers solved: means over each layer beside the profile at log scale",
+        [
+            new NumberCells<LoopLayer>("Layer", "layer", ColumnUnits.Counts, l => l.Layer.Number),
+            new WordCells<LoopLayer>("Zone", "zone", l => l.Layer.Zone),
+            .. Pair("Sv", Property.VerticalStress, l => l.Vertical),
+            .. Pair("Shmin", Property.MinHorizontalStress, l => l.Shmin),
+            .. Pair("SHmax", Property.MaxHorizontalStress, l => l.Shmax),
+            new NumberCells<LoopLayer>("Shmin off a straight line, mean", "shmin_misfit_mean", Stress, l => l.Layer.Misfit(Property.MinHorizontalStress).Mean),
+            new NumberCells<LoopLayer>("Shmin off a straight line, greatest", "shmin_misfit_greatest", Stress, l => l.Layer.Misfit(Property.MinHorizontalStress).Greatest),
+            new NumberCells<LoopLayer>("Missing", "share_missing", Percent, l => l.Layer.Missing),
+        ])
+        {
+            Place = l => (l.Layer.TopMd, l.Layer.BaseMd),
+        }.Write(loop.Layers, units, "No layer can be solved.");
     }
 
     /// <summary>The layers.</summary>

@@ -9,10 +9,11 @@ namespace DepthStress.Report.Page;
 internal static class Targets
 {
     /// <summary>One sentence per target zone that has a Shmin.</summary>
-    public static IEnumerable<string> Uncertainty(EarthModel model, UnitSystem units)
+    public static IEnumerable<string> Uncertainty(ReportContent content)
     {
+        var (model, units) = (content.Model, content.Pictures.Units);
         string Size(double si) => (si > 0 ? "+" : "") + units.Show(Quantity.Pressure(si));
-        return ShminSensitivity.Of(model).Where(s => s.Zone >= 0 && model.Setup.Zones[s.Zone].Target).Select(s => string.Create(
+        return content.Sensitivities.Where(s => s.Zone >= 0 && model.Setup.Zones[s.Zone].Target).Select(s => string.Create(
             CultureInfo.InvariantCulture,
             $"How sure: the mean Shmin of {model.ZoneName(s.Zone)} moves by {Size(s.PoissonLower)} to {Size(s.PoissonHigher)} when static Poisson's ratio is {ShminSensitivity.PoissonStep:0.00} lower or higher, and by {Size(s.BiotLower)} to {Size(s.BiotHigher)} when Biot's coefficient is {ShminSensitivity.BiotStep:0.00} lower or higher; logs cannot settle either. Barriers move with the same choices."));
     }

@@ -22,7 +22,7 @@ public class ZoneMeansTests
     {
         var model = Run(Setup with { Zones = [Of("A", 100, 200), Of("B", 200)] }, LogsWith(Curve(Property.Vs, 2400, 2400, 2400, Gap, 2400)));
         var zones = ZoneMeans.Of(model);
-        Assert.Equal([("A", 100.0, 1.0), ("B", 200.0, 2 / 3.0)], zones.Select(z => (z.Name, z.TopMd, z.Covered)));
+        Assert.Equal([("A", 100.0, 1.0), ("B", 200.0, 2 / 3.0)], zones.Select(z => (z.Title, z.TopMd, z.Covered)));
         Assert.Equal(2500 * G * 300, Mean(zones[1], "sv"), 1); // 200 and 400 m
         Assert.Equal((model.Column(Property.MinHorizontalStress)[2] + model.Column(Property.MinHorizontalStress)[4]) / 2, Mean(zones[1], "shmin"), 1e-6);
         Assert.True(double.IsNaN(Mean(zones[1], "shmax")));
@@ -33,11 +33,11 @@ public class ZoneMeansTests
     {
         var model = Run(Setup, Table(Depths, Curve(Property.Density, Same(2500))));
         var zone = Assert.Single(ZoneMeans.Of(model));
-        Assert.Equal(("", 0.0, 0.0), (zone.Name, zone.TopMd, zone.Covered));
+        Assert.Equal(("whole log", 0.0, 0.0), (zone.Title, zone.TopMd, zone.Covered));
         Assert.Equal(2500 * G * 200, Mean(zone, "sv"), 1);
     }
 
     [Fact]
     public void Samples_outside_the_zones_and_zones_without_samples_have_no_row() =>
-        Assert.Equal(["B"], ZoneMeans.Of(Run(Setup with { Zones = [Of("A", 120, 180), Of("B", 200, 300)] }, LogsWith())).Select(z => z.Name));
+        Assert.Equal(["B"], ZoneMeans.Of(Run(Setup with { Zones = [Of("A", 120, 180), Of("B", 200, 300)] }, LogsWith())).Select(z => z.Title));
 }

@@ -19,7 +19,7 @@ public class ClosedLoopReadmeTests
         {
             var settings = SampleColumn.Settings(rock);
             var run = CalculixRun.Of(SampleColumn.Deck(SampleColumn.Table, SampleColumn.Model.Setup, settings, DeckStart.FromLoads));
-            table.Append("| ").Append(name).Append(" | ").Append(ClosedLoop.Of(SampleColumn.Table, SolverColumn.Of(SampleColumn.Table, rock)!, run, settings)).Append(" |\n");
+            table.Append("| ").Append(name).Append(" | ").Append(CalculixLoop.Of(SampleColumn.Table, SolverColumn.Of(SampleColumn.Table, rock)!, run, settings)).Append(" |\n");
         }
 
         var path = Path.Combine(Golden.RepoRoot, "README.md");

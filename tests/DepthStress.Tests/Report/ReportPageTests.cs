@@ -25,7 +25,7 @@ public sealed partial class ReportPageTests
     {
         var page = Write(Content(PictureModels.Full()) with { Barriers = ["the barrier line"] });
         string[] parts = ["Content-Security-Policy", "<h1>Example 1</h1>", "the barrier line", "What it rests on, by", "Caution.", "id=\"viewer\"", "id=\"pictures\"",
-            "<table id=\"zones\">", "<table id=\"choices\">", "There are no layers.", "There are no observations", "Findings", "<table id=\"curves\">", "<table id=\"methods\">", "id=\"data\""];
+            "<table id=\"zones\">", "<table id=\"choices\">", "<table id=\"spread\">", "There are no layers.", "none was solved", "There are no observations", "id=\"findings-title\"", "<table id=\"curves\">", "<table id=\"methods\">", "id=\"data\""];
         var places = parts.Select(p => page.IndexOf(p, StringComparison.Ordinal)).ToList();
         Assert.All(places, p => Assert.True(p >= 0));
         Assert.Equal(places.Order(), places);

@@ -5,6 +5,7 @@ import { ink, line, paintFrame, paintHead } from "./paint.js";
 import { paintCurve, paintRibbon } from "./curves.js";
 import { fillLegend, paintLayers, paintObservations } from "./marks.js";
 import { fillReading, readingAt } from "./reading.js";
+import { fillPolygon, stateAt } from "./polygon.js";
 import { goTo, listen } from "./input.js";
 import { csvOf, enliven, showUnits } from "./tables.js";
 
@@ -13,11 +14,12 @@ const store = readStore(element("data").textContent);
 const view = new View(store);
 const [stage, canvas] = [element("stage"), element("tracks")];
 const g = canvas.getContext("2d");
-let [layout, drawn, marks, waiting, selection] = [null, [], [], false, null];
+const beside = matchMedia("(min-width: 1700px)"); // the reading then stands beside the tracks
+let [layout, drawn, marks, polygon, waiting, selection] = [null, [], [], null, false, null];
 
 function paint() {
   waiting = false;
-  const [width, height] = [stage.clientWidth, Math.max(420, Math.min(window.innerHeight - 310, 1400))];
+  const [width, height] = [stage.clientWidth, Math.max(420, Math.min(window.innerHeight - (beside.matches ? 190 : 380), 1400))];
   g.font = "11px sans-serif";
   layout = layOut(view, width, height, (text) => g.measureText(text).width * 1.1);
   const dense = window.devicePixelRatio || 1;
@@ -46,8 +48,13 @@ function paint() {
     g.globalAlpha = 1;
   }
   const y = view.row < 0 ? NaN : screenOf(layout, view, view.depths().low[view.row]);
-  if (y >= layout.top && y <= layout.base) line(g, 0, y, right, y, colours.named("mark"), 1);
+  if (y >= layout.top && y <= layout.base) {
+    // Not through the names of zones and layers.
+    line(g, layout.depth[0], y, layout.depth[1], y, colours.named("mark"), 1);
+    line(g, layout.layers[1], y, right, y, colours.named("mark"), 1);
+  }
   fillReading(element("values"), readingAt(view));
+  polygon = fillPolygon(element("polygon"), element("polygon-words"), stateAt(view));
 }
 
 function changed(chosen = null) {
@@ -142,7 +149,9 @@ matchMedia("(prefers-color-scheme: dark)").addEventListener("change", () => {
   fillLegend(element("legend"), store, ink());
   changed();
 });
+view.row = store.start ?? -1;
 paint();
+const firstDrawn = performance.now();
 
 /** What the page shows, for checks from outside: geometry, readings, drawn extremes. */
 window.depthStress = {
@@ -162,6 +171,8 @@ window.depthStress = {
   }),
   drawn: () => drawn,
   marks: () => marks,
+  polygon: () => ({ mark: polygon, ...stateAt(view)?.limits }),
+  firstDrawn,
   point(row) {
     view.point(row);
     paint();

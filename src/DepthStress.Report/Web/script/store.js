@@ -14,7 +14,7 @@ export function readStore(text) {
   const data = JSON.parse(text);
   const columns = new Map(data.columns.map((c) => [c.id, column(c, data.units)]));
   const words = new Map(data.words.map((w) => [w.id, wordAt(w)]));
-  return { ...data, columns, words };
+  return { ...data, columns, words, frictionAt: (row) => runAt(data.friction, row) };
 }
 
 function column(raw, own) {
@@ -46,6 +46,12 @@ function column(raw, own) {
       return a === b ? a : `${a} to ${b}`;
     },
   };
+}
+
+/** The value of a row in a list of runs: one past the last row, then the value, over and over. */
+function runAt(runs, row) {
+  for (let i = 0; i < runs.length; i += 2) if (row < runs[i]) return runs[i + 1];
+  return NaN;
 }
 
 function wordAt(raw) {

@@ -12,7 +12,7 @@ internal readonly record struct Worst(double Share, double Pascals, int Layer)
 }
 
 /// <summary>The two numbers: the solver against the layers' own formula, and against the profile at log scale.</summary>
-internal sealed record ClosedLoop(Worst Formula, Worst Profile, bool WithinProfile)
+internal sealed record CalculixLoop(Worst Formula, Worst Profile, bool WithinProfile)
 {
     /// <summary>Share of a stress, or stress in Pa, within which a layer's mean must be.</summary>
     private const double LargestShare = 0.005;
@@ -21,7 +21,7 @@ internal sealed record ClosedLoop(Worst Formula, Worst Profile, bool WithinProfi
     /// <summary>Elements of a layer along the vertical.</summary>
     private const int Slices = 4;
 
-    public static ClosedLoop Of(LayerTable table, SolverColumn column, CalculixRun run, LayerSettings settings)
+    public static CalculixLoop Of(LayerTable table, SolverColumn column, CalculixRun run, LayerSettings settings)
     {
         var (formula, profile, within) = (default(Worst), default(Worst), true);
         var perLayer = Slices * (int)(settings.ElementsAlongShmax.Value * settings.ElementsAlongShmin.Value);
@@ -54,7 +54,7 @@ internal sealed record ClosedLoop(Worst Formula, Worst Profile, bool WithinProfi
             }
         }
 
-        return new ClosedLoop(formula, profile, within);
+        return new CalculixLoop(formula, profile, within);
     }
 
     public override string ToString() => string.Create(
