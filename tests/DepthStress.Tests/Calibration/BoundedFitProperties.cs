@@ -33,7 +33,11 @@ public sealed class BoundedFitProperties
             }
         });
 
-    /// <summary>The greatest breach of the optimality conditions: gradient per length of its column and of the residuals (or one standard deviation).</summary>
+    /// <summary>
+    /// The greatest breach of the optimality conditions: gradient per length of its column and of the residuals (or one standard
+    /// deviation). A parameter whose whole way downhill to its bound would lower the sum of squares by rounding alone breaches none:
+    /// nothing lower lies there.
+    /// </summary>
     private static double Breach(FitProblem problem, FitResult fit)
     {
         var at = fit.Estimates.ToArray();
@@ -56,6 +60,8 @@ public sealed class BoundedFitProperties
                 column += slope * slope;
             }
 
+            var room = gradient > 0 ? at[j] - problem.Parameters[j].Lower : problem.Parameters[j].Upper - at[j];
+            if (fit.Bounds[j] == BoundState.Free && 2 * Math.Abs(gradient) * room <= 1e-12 * (1 + fit.ChiSquare)) continue;
             var cosine = column > 0 ? gradient / (Math.Sqrt(column) * length) : 0;
             worst = Math.Max(worst, fit.Bounds[j] switch
             {
@@ -67,6 +73,23 @@ public sealed class BoundedFitProperties
         }
 
         return worst;
+    }
+
+    // Found by a random problem: the rows that feel the second parameter are one-sided and at rest; what is left moves a residual by 1e-11 over its scale.
+    [Fact]
+    public void Nothing_lower_lies_at_the_bounds_of_a_parameter_that_nothing_feels()
+    {
+        double[] numbers = [0, -8.409E-15, 0, -0.145833, -0.418406, -0.221984, 0.84269, 0, -0.133333, 0.0568182, -0.714286, -0.0454545, 0.275, 1.888E-26, -0.224338, -1, 8.546E-12, 1];
+        double[] order = [.. numbers[..3], .. numbers[..3], .. numbers[3..6], .. numbers[6..9], 0, 0, 0, .. numbers[9..]];
+        var problem = Problem(2, order, [1.626713266592713, 1.9480133057473838, 0.029411764705882353, 3], [1e-5, 1e-9], true);
+        var fit = BoundedFit.Solve(problem);
+        Assert.True(fit.Converged);
+        foreach (var bound in new[] { problem.Parameters[1].Lower, 0.1 * problem.Parameters[1].Upper })
+        {
+            var residuals = new double[problem.Count];
+            problem.Residuals([fit.Estimates[0], bound], residuals);
+            Assert.InRange(residuals.Sum(r => r * r), fit.ChiSquare * (1 - 1e-12), double.MaxValue);
+        }
     }
 
     // Differences are good to about 1e-9; where a kink lies within their step of 1e-5, a gradient to as much.
