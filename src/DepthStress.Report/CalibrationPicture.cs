@@ -54,7 +54,7 @@ public static class CalibrationPicture
         var shmin = curves.Find(c => c.Column.Id == "shmin")!;
         var before = CurveTrace.Read(result.Before, shmin with { Pen = new CurvePen(Palette.Grey, 0.7) }, units, tvds, axis);
         if (traces.Count == 0) return;
-        var scale = CurveTrace.Scales(traces, units)[0];
+        var scale = CurveTrace.Scales(traces)[0];
         var panel = new Panel(left, right, scale, axis);
 
         var unit = shmin.Column.In(units).Unit;

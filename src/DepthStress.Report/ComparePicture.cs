@@ -68,7 +68,7 @@ public static class ComparePicture
     private static void DrawPanel(Sheet sheet, List<CurveTrace> traces, string title, double left, double right, DepthAxis axis, UnitSystem units)
     {
         if (traces.Count == 0) return;
-        var panel = new Panel(left, right, CurveTrace.Scales(traces, units)[0], axis);
+        var panel = new Panel(left, right, CurveTrace.Scales(traces)[0], axis);
         PanelFrame.Open(sheet, panel, title);
         if (panel.Beyond(0) == 0) sheet.Line(panel.Across(0), axis.ScreenTop, panel.Across(0), axis.ScreenBase, new CurvePen(Palette.Frame, 0.8));
         for (var i = 0; i < traces.Count; i++) CurveDrawing.Draw(sheet, panel, traces[i], i);

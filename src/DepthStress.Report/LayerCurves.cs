@@ -58,8 +58,8 @@ internal static class LayerCurves
         }
 
         var pen = new CurvePen(curve.Curve.Pen.Colour, Bold);
-        var values = lines.SelectMany(l => l).Select(p => p.Value).DefaultIfEmpty(double.NaN).ToList();
-        return lines.Count == 0 ? null : new CurveTrace(curve.Curve with { Pen = pen }, lines, values.Min(), values.Max(), 0);
+        // The scale follows the profile behind the layers, which is counted against it.
+        return lines.Count == 0 ? null : new CurveTrace(curve.Curve with { Pen = pen }, lines, new ScaleTally(curve.Curve.Scale(units)));
     }
 
     /// <summary>How the profile behind the layers is drawn: thin and light.</summary>

@@ -99,7 +99,7 @@ public static class LayersPicture
         var profiles = definition.Curves.Select(c => CurveTrace.Read(model, LayerCurves.Behind(c.Curve), units, tvds, axis)).OfType<CurveTrace>().ToList();
         if (profiles.Count == 0) return;
         var unit = profiles[0].Curve.Column.In(units).Unit.Symbol;
-        var panel = new Panel(left, right, CurveTrace.Scales(profiles, units)[0], axis);
+        var panel = new Panel(left, right, CurveTrace.Scales(profiles)[0], axis);
         PanelFrame.Open(sheet, panel, unit.Length > 0 ? $"{definition.Title}, {unit}" : definition.Title);
         for (var i = 0; i < profiles.Count; i++) CurveDrawing.Draw(sheet, panel, profiles[i], i);
         foreach (var curve in definition.Curves)

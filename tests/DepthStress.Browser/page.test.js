@@ -141,6 +141,8 @@ test("a drag on the depth scale, a click on a zone and one on a layer's row go t
   const last = await geometry(page);
   assert.ok(last.top < Number(layer.top_md_m) && last.base > Number(layer.base_md_m) - 0.2);
   assert.ok(last.base - last.top < 1.3 * Number(layer.thickness_md_m));
+  const { md } = await page.evaluate(() => window.depthStress.reading());
+  assert.ok(Number(md) > Number(layer.top_md_m) && Number(md) < Number(layer.base_md_m), "the crosshair stands in the layer");
   await close();
 });
 

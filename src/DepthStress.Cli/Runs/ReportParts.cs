@@ -1,5 +1,4 @@
 using DepthStress.Cli.Printing;
-using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
 using DepthStress.Core.Layers;
 using DepthStress.Core.Model;
@@ -27,7 +26,7 @@ internal static class ReportParts
             Comparisons = well.Observed,
             Zones = well.Zones,
             Sensitivities = well.Sensitivities,
-            Spreads = well.Spread ?? ChoiceSpread.Of(model),
+            Spreads = well.Spread,
             Core = well.Core,
             Solved = solved,
             Barriers = BarrierPrinter.Lines(well),

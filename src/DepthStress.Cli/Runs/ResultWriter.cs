@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Runtime.ExceptionServices;
 using DepthStress.Core.Calibration;
 using DepthStress.Core.Diagnostics;
@@ -28,6 +29,7 @@ internal static class ResultWriter
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
             ("results.las", s => ResultsLas.Write(model, units, s)),
+            ("report.html", s => ReportPage.Write(ReportParts.Of(well, drawn, solved, diagnostics), s)),
             ("layers.csv", s => LayersCsv.Write(layers, units, s)),
             ("layers.json", s => LayersJson.Write(layers, file.Setup, units, s)),
             ("layers-solver.csv", s => SolverCsv.Write(layers, s)),
@@ -36,7 +38,6 @@ internal static class ResultWriter
             ("stress.svg", s => s.Write(drawn.Stress)),
             ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
             ("polygon.svg", s => s.Write(drawn.Polygon)),
-            ("report.html", s => ReportPage.Write(ReportParts.Of(well, drawn, solved, diagnostics), s)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, layers, solved, s)),
         ];
@@ -55,8 +56,8 @@ internal static class ResultWriter
         using var target = ResultFolder.Begin(folder);
         try
         {
-            // Each file is made from the finished model alone, so their order does not matter.
-            Parallel.ForEach(results, new ParallelOptions { CancellationToken = cancellation }, result =>
+            // Each file is made from the finished model alone, so their order does not matter; the longest stand first, one at a time for each core.
+            Parallel.ForEach(Partitioner.Create(results, EnumerablePartitionerOptions.NoBuffering), new ParallelOptions { CancellationToken = cancellation }, result =>
             {
                 stage($"writing {result.Name}");
                 using var stream = target.Create(result.Name);

@@ -6,13 +6,13 @@ namespace DepthStress.Report.Drawing;
 /// <summary>What a picture needs of one curve: its thinned lines and what the thinning leaves out.</summary>
 /// <param name="Curve">The curve.</param>
 /// <param name="Lines">Lines without gaps.</param>
-/// <param name="Least">The least value on the scale.</param>
-/// <param name="Greatest">The greatest value on the scale.</param>
-/// <param name="OffScale">How many samples lie beyond an end of the scale.</param>
-internal sealed record CurveTrace(
-    CurveDefinition Curve, IReadOnlyList<IReadOnlyList<LogPoint>> Lines, double Least, double Greatest, int OffScale)
+/// <param name="Tally">All its samples against its scale.</param>
+internal sealed record CurveTrace(CurveDefinition Curve, IReadOnlyList<IReadOnlyList<LogPoint>> Lines, ScaleTally Tally)
 {
     private const int Chunk = 4096;
+
+    /// <summary>How many samples lie beyond an end of the scale.</summary>
+    public int OffScale => Tally.OffScale;
 
     /// <summary>Fills a span with values in the picture's unit, from a sample on.</summary>
     private delegate void Filler(int start, Span<double> destination);
@@ -41,40 +41,22 @@ internal sealed record CurveTrace(
     {
         var values = new double[Math.Min(Chunk, depths.Length)];
         var decimator = new Decimator(axis.Top, axis.Pixel);
-        var (low, high) = (curve.Scale(units).Low, curve.Scale(units).High);
-        var (least, greatest, offScale) = (double.NaN, double.NaN, 0);
+        var tally = new ScaleTally(curve.Scale(units));
         for (var start = 0; start < depths.Length; start += Chunk)
         {
             var n = Math.Min(Chunk, depths.Length - start);
             fill(start, values.AsSpan(0, n));
             for (var i = 0; i < n; i++)
             {
-                var value = values[i];
-                decimator.Add(depths[start + i], value);
-                if (!double.IsFinite(value)) continue;
-                if (value < low || value > high)
-                {
-                    offScale++;
-                    value = Math.Clamp(value, low, high);
-                }
-
-                if (!(value >= least)) least = value;
-                if (!(value <= greatest)) greatest = value;
+                decimator.Add(depths[start + i], values[i]);
+                tally.Add(values[i]);
             }
         }
 
         var lines = decimator.Lines();
-        return lines.Count == 0 ? null : new CurveTrace(curve, lines, least, greatest, offScale);
+        return lines.Count == 0 ? null : new CurveTrace(curve, lines, tally);
     }
 
     /// <summary>The scale of each curve of a track, those that follow the data set to round ends.</summary>
-    public static IReadOnlyList<CurveScale> Scales(IReadOnlyList<CurveTrace> traces, UnitSystem units)
-    {
-        var fitted = traces.Where(t => t.Curve.Scale(units).Fit != ScaleFit.Fixed).ToList();
-        if (fitted.Count == 0) return [.. traces.Select(t => t.Curve.Scale(units))];
-        var first = fitted[0].Curve.Scale(units);
-        var low = first.Fit == ScaleFit.RightEnd ? first.Left : fitted.Min(t => t.Least);
-        var shared = RoundSteps.Around(low, fitted.Max(t => t.Greatest), first.Divisions);
-        return [.. traces.Select(t => t.Curve.Scale(units) is { Fit: ScaleFit.Fixed } fixedScale ? fixedScale : shared)];
-    }
+    public static IReadOnlyList<CurveScale> Scales(IReadOnlyList<CurveTrace> traces) => ScaleTally.Scales([.. traces.Select(t => t.Tally)]);
 }

@@ -19,7 +19,7 @@ internal sealed record TrackView(
     public static TrackView? Read(EarthModel model, TrackDefinition track, UnitSystem units, double[] depths, DepthAxis axis)
     {
         var traces = track.Curves.Select(c => CurveTrace.Read(model, c, units, depths, axis)).OfType<CurveTrace>().ToList();
-        return traces.Count == 0 ? null : new TrackView(track, traces, CurveTrace.Scales(traces, units), []);
+        return traces.Count == 0 ? null : new TrackView(track, traces, CurveTrace.Scales(traces), []);
     }
 
     /// <summary>The track with the origins of its curves.</summary>

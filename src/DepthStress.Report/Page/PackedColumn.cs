@@ -26,25 +26,34 @@ internal sealed record PackedColumn(NumberColumn<EarthModel> Column, bool Wide, 
         Array.Fill(low, double.NaN);
         Array.Fill(high, double.NaN);
         var values = new double[Math.Min(Chunk, model.Count)];
-        var decimals = column.In(units).Decimals;
-        var (any, wide) = (false, false);
         for (var start = 0; start < model.Count; start += Chunk)
         {
             var n = Math.Min(Chunk, model.Count - start);
             column.Fill(model, start, units, values.AsSpan(0, n));
             for (var i = 0; i < n; i++)
             {
-                var digits = ScaledDigits.Of(values[i], decimals);
-                if (double.IsNaN(digits)) continue;
-                var row = (start + i) / bins.PerRow;
-                if (!(digits >= low[row])) low[row] = digits;
-                if (!(digits <= high[row])) high[row] = digits;
-                any = true;
-                wide |= Math.Abs(digits) > int.MaxValue;
+                var (value, row) = (values[i], (start + i) / bins.PerRow);
+                if (!double.IsFinite(value)) continue;
+                if (!(value >= low[row])) low[row] = value;
+                if (!(value <= high[row])) high[row] = value;
             }
         }
 
-        return any ? new PackedColumn(column, wide, Bytes(low, wide), bins.PerRow > 1 ? Bytes(high, wide) : null) : null;
+        // Rounding keeps order, so the least value has the least digits.
+        var wide = Round(low) | Round(high);
+        return Array.TrueForAll(low, double.IsNaN) ? null : new PackedColumn(column, wide, Bytes(low, wide), bins.PerRow > 1 ? Bytes(high, wide) : null);
+
+        bool Round(double[] row)
+        {
+            var beyond = false;
+            for (var i = 0; i < row.Length; i++)
+            {
+                row[i] = ScaledDigits.Of(row[i], column.In(units).Decimals);
+                beyond |= Math.Abs(row[i]) > int.MaxValue;
+            }
+
+            return beyond;
+        }
     }
 
     private static byte[] Bytes(double[] digits, bool wide)

@@ -28,7 +28,7 @@ internal sealed class PageData(ReportContent content)
         json.WriteNumber("samples", bins.Samples);
         json.WriteNumber("perRow", bins.PerRow);
         json.WriteNumber("rows", bins.Rows);
-        Each(json, "columns", Depths.Select(DepthColumns.Get).Concat(tracks.SelectMany(t => t.Metric.Traces).Select(t => t.Curve.Column)).Distinct(), c => Column(json, c, units, bins));
+        Each(json, "columns", Depths.Select(DepthColumns.Get).Concat(tracks.SelectMany(t => t.Curves).Select(c => c.Definition.Column)).Distinct(), c => Column(json, c, units, bins));
         Each(json, "words", DepthColumns.All.OfType<TextColumn<EarthModel>>(), c => Words(json, WordRuns.Of(_model, c, bins)));
         Each(json, "tracks", tracks, t => Track(json, t));
         Each(json, "zones", Zones(), z => Interval(json, z.Name, z.Top, z.Base, null));
@@ -96,37 +96,35 @@ internal sealed class PageData(ReportContent content)
     private void Track(Utf8JsonWriter json, PageTrack track)
     {
         json.WriteStartObject();
-        json.WriteString("id", track.Metric.Definition.Id);
-        json.WriteString("title", track.Metric.Definition.Title);
+        json.WriteString("id", track.Definition.Id);
+        json.WriteString("title", track.Definition.Title);
         json.WriteBoolean("shown", track.Shown);
-        json.WriteStartArray("curves");
-        for (var i = 0; i < track.Metric.Traces.Count; i++)
-        {
-            var curve = track.Metric.Traces[i].Curve;
-            json.WriteStartObject();
-            json.WriteString("column", curve.Column.Id);
-            json.WriteString("label", curve.Label);
-            json.WriteString("colour", Colour(curve.Pen.Colour));
-            json.WriteNumber("width", curve.Pen.Width);
-            Each(json, "dash", curve.Pen.Dash ?? [], json.WriteNumberValue);
-            if (curve.Ribbon is { } ribbon && _model.Origins(ribbon) is not null) json.WriteString("origin", $"{DepthColumns.All.First(c => c.Id.Equals(ribbon.ToString(), StringComparison.OrdinalIgnoreCase)).Id}_origin");
-            Scale(json, "metric", track.Metric, i);
-            Scale(json, "field", track.Field, i);
-            json.WriteEndObject();
-        }
-
-        json.WriteEndArray();
+        Each(json, "curves", track.Curves, c => Curve(json, c));
         json.WriteEndObject();
     }
 
-    private static void Scale(Utf8JsonWriter json, string name, TrackView view, int curve)
+    private void Curve(Utf8JsonWriter json, PageCurve curve)
     {
-        var scale = view.Scales[curve];
+        var definition = curve.Definition;
+        json.WriteStartObject();
+        json.WriteString("column", definition.Column.Id);
+        json.WriteString("label", definition.Label);
+        json.WriteString("colour", Colour(definition.Pen.Colour));
+        json.WriteNumber("width", definition.Pen.Width);
+        Each(json, "dash", definition.Pen.Dash ?? [], json.WriteNumberValue);
+        if (definition.Ribbon is { } ribbon && _model.Origins(ribbon) is not null) json.WriteString("origin", $"{DepthColumns.All.First(c => c.Id.Equals(ribbon.ToString(), StringComparison.OrdinalIgnoreCase)).Id}_origin");
+        Scale(json, "metric", curve.Metric);
+        Scale(json, "field", curve.Field);
+        json.WriteEndObject();
+    }
+
+    private static void Scale(Utf8JsonWriter json, string name, PageScale scale)
+    {
         json.WriteStartObject(name);
-        json.WriteNumber("left", scale.Left);
-        json.WriteNumber("right", scale.Right);
-        json.WriteNumber("divisions", scale.Divisions);
-        json.WriteNumber("off", view.Traces[curve].OffScale);
+        json.WriteNumber("left", scale.Scale.Left);
+        json.WriteNumber("right", scale.Scale.Right);
+        json.WriteNumber("divisions", scale.Scale.Divisions);
+        json.WriteNumber("off", scale.OffScale);
         json.WriteEndObject();
     }
 

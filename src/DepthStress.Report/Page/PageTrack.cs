@@ -4,47 +4,65 @@ using DepthStress.Report.Drawing;
 
 namespace DepthStress.Report.Page;
 
-/// <summary>A track of the page: the same definition as in the pictures, with its scales in both unit systems.</summary>
-/// <param name="Metric">What the model has of it, in metric units.</param>
-/// <param name="Field">The same in field units; the same curves in the same order.</param>
+/// <summary>A scale of the page, and how many samples lie beyond it.</summary>
+internal readonly record struct PageScale(CurveScale Scale, int OffScale);
+
+/// <summary>A curve of the page with its scale in both unit systems.</summary>
+internal sealed record PageCurve(CurveDefinition Definition, PageScale Metric, PageScale Field);
+
+/// <summary>A track of the page: the same definition as in the pictures.</summary>
+/// <param name="Definition">The track.</param>
+/// <param name="Curves">Its curves that have a value.</param>
 /// <param name="Shown">True when it is shown at first.</param>
-internal sealed record PageTrack(TrackView Metric, TrackView Field, bool Shown)
+internal sealed record PageTrack(TrackDefinition Definition, IReadOnlyList<PageCurve> Curves, bool Shown)
 {
+    private const int Chunk = 4096;
+
     /// <summary>Every track that has a value: those of the pictures, then the rest, hidden at first, with the gradients last.</summary>
     public static IReadOnlyList<PageTrack> Of(EarthModel model, PictureOptions options)
     {
         var chosen = (options.Tracks ?? [.. TrackTable.All.Select(t => t.Id)]).Select(TrackTable.Find).OfType<TrackDefinition>().ToList();
         var gradient = TrackTable.StressPanels.Gradient;
         var rest = TrackTable.All.Where(t => !chosen.Contains(t)).Append(gradient with { Curves = [.. gradient.Curves.Where(c => DepthColumns.All.Contains(c.Column))] });
-        var tracks = new List<PageTrack>();
-        foreach (var (track, shown) in chosen.Select(t => (t, true)).Concat(rest.Select(t => (t, false))))
-        {
-            if (Read(model, track, options, UnitSystem.Metric) is { } metric && Read(model, track, options, UnitSystem.Field) is { } field)
-                tracks.Add(new PageTrack(metric, field, shown));
-        }
-
-        return tracks;
+        return [.. chosen.Select(t => Read(model, t, options, true)).Concat(rest.Select(t => Read(model, t, options, false))).Where(t => t.Curves.Count > 0)];
     }
 
-    private static TrackView? Read(EarthModel model, TrackDefinition track, PictureOptions options, UnitSystem units)
+    private static PageTrack Read(EarthModel model, TrackDefinition track, PictureOptions options, bool shown)
     {
-        var depths = new double[model.Count];
-        DepthColumns.Get("md").Fill(model, 0, units, depths);
-        var axis = new DepthAxis(depths.FirstOrDefault(double.NaN), depths.LastOrDefault(double.NaN), 0, 1000);
-        return TrackView.Read(model, track.With(Scales(track, options, units)), units, depths, axis);
+        List<(CurveDefinition Curve, ScaleTally Metric, ScaleTally Field)> read =
+            [.. track.Curves.Select(c => Tally(model, c, options)).Where(c => double.IsFinite(c.Metric.Least))];
+        var (metric, field) = (ScaleTally.Scales([.. read.Select(c => c.Metric)]), ScaleTally.Scales([.. read.Select(c => c.Field)]));
+        return new PageTrack(track, [.. read.Select((c, i) => new PageCurve(c.Curve, new(metric[i], c.Metric.OffScale), new(field[i], c.Field.OffScale)))], shown);
     }
 
-    /// <summary>The user's scales, which are in the units of the pictures, in a unit system.</summary>
-    private static Dictionary<string, CurveScale> Scales(TrackDefinition track, PictureOptions options, UnitSystem units)
+    /// <summary>Counts a curve's samples against its scales of both unit systems, in one pass.</summary>
+    private static (CurveDefinition Curve, ScaleTally Metric, ScaleTally Field) Tally(EarthModel model, CurveDefinition curve, PictureOptions options)
     {
-        var scales = new Dictionary<string, CurveScale>();
-        foreach (var column in track.Curves.Select(c => c.Column))
+        var (metric, field) = (new ScaleTally(Scale(curve, options, UnitSystem.Metric)), new ScaleTally(Scale(curve, options, UnitSystem.Field)));
+        var (values, converted) = (new double[Math.Min(Chunk, model.Count)], new double[Math.Min(Chunk, model.Count)]);
+        for (var start = 0; start < model.Count; start += Chunk)
         {
-            if (options.Scales?.TryGetValue(column.Id, out var scale) != true) continue;
-            var (from, to) = (column.In(options.Units).Unit, column.In(units).Unit);
-            scales[column.Id] = from == to ? scale : scale with { Left = to.FromSi(from.ToSi(scale.Left)), Right = to.FromSi(from.ToSi(scale.Right)) };
+            var n = Math.Min(Chunk, model.Count - start);
+            curve.Column.Read(model, start, values.AsSpan(0, n));
+            Add(ref metric, curve.Column.Metric.Unit);
+            Add(ref field, curve.Column.Field.Unit);
+
+            void Add(ref ScaleTally tally, Unit unit)
+            {
+                values.AsSpan(0, n).CopyTo(converted);
+                unit.FromSi(converted.AsSpan(0, n));
+                foreach (var value in converted.AsSpan(0, n)) tally.Add(value);
+            }
         }
 
-        return scales;
+        return (curve, metric, field);
+    }
+
+    /// <summary>The curve's scale in a unit system; one of the user's is in the units of the pictures.</summary>
+    private static CurveScale Scale(CurveDefinition curve, PictureOptions options, UnitSystem units)
+    {
+        if (options.Scales?.TryGetValue(curve.Column.Id, out var scale) != true) return curve.Scale(units);
+        var (from, to) = (curve.Column.In(options.Units).Unit, curve.Column.In(units).Unit);
+        return from == to ? scale : scale with { Left = to.FromSi(from.ToSi(scale.Left)), Right = to.FromSi(from.ToSi(scale.Right)) };
     }
 }

@@ -22,8 +22,11 @@ public sealed record ReportContent(EarthModel Model, LayerTable Layers, PictureO
     /// <summary>How mean Shmin hangs on the choices that logs cannot settle.</summary>
     public IReadOnlyList<ShminSensitivity> Sensitivities { get => field ??= ShminSensitivity.Of(Model); init; }
 
-    /// <summary>What every admissible choice for the rock makes of mean Shmin.</summary>
-    public IReadOnlyList<ChoiceSpread> Spreads { get => field ??= ChoiceSpread.Of(Model); init; }
+    /// <summary>Up to so many samples the page tries every choice for the rock unasked.</summary>
+    public const int MostForSpread = 200_000;
+
+    /// <summary>What every admissible choice for the rock makes of mean Shmin; null where that was not asked for and takes long.</summary>
+    public IReadOnlyList<ChoiceSpread>? Spreads { get => field ??= Model.Count <= MostForSpread ? ChoiceSpread.Of(Model) : null; init; }
 
     /// <summary>The core beside the model; null without plugs.</summary>
     public CoreComparison? Core { get; init; }

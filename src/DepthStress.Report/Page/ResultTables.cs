@@ -58,6 +58,7 @@ internal static class ResultTables
     /// <summary>What every admissible choice for the rock makes of mean Shmin, beside what tests and core say.</summary>
     public static string Spread(ReportContent content, UnitSystem units)
     {
+        if (content.Spreads is not { } spreads) return Html.Paragraph("So many samples that every choice for the rock is tried on request only: depthstress run --spread.");
         var model = content.Model;
         SpreadEvidence Evidence(ChoiceSpread s) => SpreadEvidence.Of(model, content.Comparisons, content.Core, s.Zone);
         static NumberCells<ChoiceSpread>[] Range(string title, string id, Func<ChoiceSpread, SpreadRange> range) =>
@@ -77,7 +78,7 @@ internal static class ResultTables
             new NumberCells<ChoiceSpread>("Tests", "tests", ColumnUnits.Counts, s => Evidence(s).Tests),
             new NumberCells<ChoiceSpread>("Plug E over model", "plug_modulus_ratio", (new(Units.One, 2), new(Units.One, 2)), s => Evidence(s).ModulusRatio),
             new NumberCells<ChoiceSpread>("Plugs", "plugs", ColumnUnits.Counts, s => Evidence(s).Plugs),
-        ]).Write(content.Spreads, units, "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
+        ]).Write(spreads, units, "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
     }
 
     /// <summary>What the program's own finite elements find in the exported layers, beside the profile at log scale.</summary>

@@ -88,7 +88,7 @@ export function paintRibbon(g, layout, view, ribbon, colours) {
     const span = [screenOf(layout, view, low[run.start]), screenOf(layout, view, run.end < low.length ? low[next] : high[next])];
     const [a, b] = span.sort((p, q) => p - q).map((y) => Math.min(Math.max(y, layout.top), layout.base));
     if (!(b > a)) continue;
-    g.fillStyle = `#${view.store.origins[run.word]}`;
+    g.fillStyle = colours.curve(view.store.origins[run.word]);
     g.fillRect(ribbon.left, a, ribbon.width, Math.max(1, b - a));
   }
   g.strokeStyle = colours.named("edge");

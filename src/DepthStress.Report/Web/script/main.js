@@ -99,6 +99,7 @@ function go(topMd, baseMd) {
   });
   const { low } = view.depths();
   goTo(view, [Math.min(...rows.map((r) => low[r])), Math.max(...rows.map((r) => low[r]))]);
+  view.row = Math.round((rows[0] + rows[1]) / 2);
   changed();
   element("viewer").scrollIntoView({ block: "start" });
   stage.focus({ preventScroll: true });
@@ -150,6 +151,7 @@ matchMedia("(prefers-color-scheme: dark)").addEventListener("change", () => {
   changed();
 });
 view.row = store.start ?? -1;
+element("values").classList.toggle("ranges", store.perRow > 1);
 paint();
 const firstDrawn = performance.now();
 

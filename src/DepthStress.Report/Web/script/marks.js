@@ -137,5 +137,5 @@ export function fillLegend(list, store, colours) {
       .flatMap((c) => store.words.get(c.origin).runs.map((r) => r.word)),
   );
   for (const [origin, hex] of Object.entries(store.origins).filter(([o]) => used.has(o)))
-    item(`origin: ${origin}`, box(8, 5), `#${hex}`, colours.named("edge"));
+    item(`origin: ${origin}`, box(8, 5), colours.curve(hex), colours.named("edge"));
 }
