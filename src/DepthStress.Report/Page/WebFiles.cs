@@ -8,7 +8,7 @@ namespace DepthStress.Report.Page;
 internal static partial class WebFiles
 {
     /// <summary>The modules of the script; a module stands after those it imports from.</summary>
-    private static readonly string[] Modules = ["numbers", "store", "view", "layout", "paint", "curves", "marks", "reading", "polygon", "input", "tables", "main"];
+    private static readonly string[] Modules = ["numbers", "store", "view", "layout", "paint", "curves", "marks", "scene", "reading", "polygon", "input", "tables", "main"];
 
     private static readonly string[] Sheets = ["page", "viewer", "print"];
 

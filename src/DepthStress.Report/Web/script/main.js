@@ -1,9 +1,8 @@
 import { readStore } from "./store.js";
 import { View } from "./view.js";
-import { layOut, screenOf } from "./layout.js";
-import { ink, line, paintFrame, paintHead } from "./paint.js";
-import { paintCurve, paintRibbon } from "./curves.js";
-import { fillLegend, paintLayers, paintObservations } from "./marks.js";
+import { ink } from "./paint.js";
+import { fillLegend } from "./marks.js";
+import { Scene } from "./scene.js";
 import { fillReading, readingAt } from "./reading.js";
 import { fillPolygon, stateAt } from "./polygon.js";
 import { goTo, listen } from "./input.js";
@@ -13,46 +12,12 @@ const element = (id) => document.getElementById(id);
 const store = readStore(element("data").textContent);
 const view = new View(store);
 const [stage, canvas] = [element("stage"), element("tracks")];
-const g = canvas.getContext("2d");
-const beside = matchMedia("(min-width: 1700px)"); // the reading then stands beside the tracks
-let [layout, drawn, marks, polygon, waiting, selection] = [null, [], [], null, false, null];
+const scene = new Scene(stage, canvas, view);
+let [polygon, waiting, selection] = [null, false, null];
 
 function paint() {
   waiting = false;
-  const [width, height] = [stage.clientWidth, Math.max(420, Math.min(window.innerHeight - (beside.matches ? 190 : 380), 1400))];
-  g.font = "11px sans-serif";
-  layout = layOut(view, width, height, (text) => g.measureText(text).width * 1.1);
-  const dense = window.devicePixelRatio || 1;
-  if (canvas.width !== Math.round(layout.width * dense) || canvas.height !== Math.round(height * dense)) {
-    [canvas.width, canvas.height] = [Math.round(layout.width * dense), Math.round(height * dense)];
-    [canvas.style.width, canvas.style.height] = [`${layout.width}px`, `${height}px`];
-  }
-  const colours = ink();
-  g.setTransform(dense, 0, 0, dense, 0, 0);
-  g.fillStyle = colours.named("paper");
-  g.fillRect(0, 0, layout.width, height);
-  paintFrame(g, layout, view, colours);
-  for (const place of layout.tracks) paintHead(g, layout, view, place, colours);
-  paintLayers(g, layout, view, colours);
-  drawn = layout.tracks.flatMap((place) =>
-    place.track.curves.map((c) => ({ track: place.track.id, ...paintCurve(g, layout, view, place, c, colours) })),
-  );
-  for (const ribbon of layout.tracks.flatMap((p) => p.ribbons)) paintRibbon(g, layout, view, ribbon, colours);
-  marks = paintObservations(g, layout, view, colours);
-  const right = layout.tracks.length ? layout.tracks.at(-1).right : layout.width;
-  if (selection) {
-    const [a, b] = selection.map((d) => screenOf(layout, view, d)).sort((p, q) => p - q);
-    g.globalAlpha = 0.2;
-    g.fillStyle = colours.named("link");
-    g.fillRect(0, a, right, b - a);
-    g.globalAlpha = 1;
-  }
-  const y = view.row < 0 ? NaN : screenOf(layout, view, view.depths().low[view.row]);
-  if (y >= layout.top && y <= layout.base) {
-    // Not through the names of zones and layers.
-    line(g, layout.depth[0], y, layout.depth[1], y, colours.named("mark"), 1);
-    line(g, layout.layers[1], y, right, y, colours.named("mark"), 1);
-  }
+  scene.paint(selection);
   fillReading(element("values"), readingAt(view));
   polygon = fillPolygon(element("polygon"), element("polygon-words"), stateAt(view));
 }
@@ -139,7 +104,7 @@ listen(
   stage,
   canvas,
   view,
-  () => layout,
+  () => scene.layout,
   changed,
   () => speak(),
 );
@@ -157,22 +122,10 @@ const firstDrawn = performance.now();
 
 /** What the page shows, for checks from outside: geometry, readings, drawn extremes. */
 window.depthStress = {
-  geometry: () => ({
-    kind: view.kind,
-    units: view.units,
-    top: view.top,
-    base: view.base,
-    plotTop: layout.top,
-    plotBase: layout.base,
-    width: layout.width,
-    tracks: layout.tracks.map((p) => ({ id: p.track.id, left: p.left, right: p.right, top: layout.top, base: layout.base })),
-    zones: store.zones.map((z) => ({ name: z.name, screen: view.span(z).map((d) => screenOf(layout, view, d)) })),
-    zoneStrip: layout.zones,
-    layerStrip: layout.layers,
-    depthStrip: layout.depth,
-  }),
-  drawn: () => drawn,
-  marks: () => marks,
+  geometry: () => scene.geometry(),
+  drawn: () => scene.drawn,
+  scales: () => scene.scales(),
+  marks: () => scene.marks,
   polygon: () => ({ mark: polygon, ...stateAt(view)?.limits }),
   firstDrawn,
   point(row) {
