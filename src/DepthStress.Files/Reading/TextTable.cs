@@ -36,7 +36,7 @@ internal sealed record TextTable(string Name, string Sha256, char Delimiter, Tex
         try
         {
             if (Directory.Exists(path)) return Refuse("found a folder, expected a CSV file");
-            if (new FileInfo(path) is { Exists: true, Length: > MostBytes }) return Refuse("found more than 16 MiB, expected a table of observations");
+            if (new FileInfo(path) is { Exists: true, Length: > MostBytes }) return Refuse("found more than 16 MiB, expected a table of observations or of core plugs");
             bytes = File.ReadAllBytes(path);
         }
         catch (Exception problem) when (problem is IOException or UnauthorizedAccessException)

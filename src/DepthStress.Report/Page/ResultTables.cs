@@ -17,6 +17,9 @@ internal static class ResultTables
     private static readonly (ColumnUnit Metric, ColumnUnit Field) Percent = (new(Units.Percent, 0), new(Units.Percent, 0));
     private static readonly (ColumnUnit Metric, ColumnUnit Field) Ratio = (new(Units.One, 3), new(Units.One, 3));
 
+    private const string SpreadNote = "Lowest and highest over the relations of the catalogue that were made for the same rock and that the logs can feed; \"alone\" changes that choice only. "
+        + "Static Poisson's ratio is tried 0.05 lower and higher. Strains are those of the run. Relations that were recalled take part only with accept_unverified.";
+
     /// <summary>Means of every zone.</summary>
     public static string Zones(EarthModel model, IReadOnlyList<ZoneMeans> means, UnitSystem units)
     {
@@ -65,7 +68,7 @@ internal static class ResultTables
         [
             new($"{title}, lowest", $"{id}_lowest", Stress, s => range(s).Low), new($"{title}, highest", $"{id}_highest", Stress, s => range(s).High),
         ];
-        return new PageTable<ChoiceSpread>("spread", "Spread: mean Shmin over every admissible choice for the rock",
+        var table = new PageTable<ChoiceSpread>("spread", "Spread: mean Shmin over every admissible choice for the rock",
         [
             new WordCells<ChoiceSpread>("Zone", "zone", s => model.ZoneTitle(s.Zone)),
             new NumberCells<ChoiceSpread>("Shmin", "shmin", Stress, s => s.Chosen),
@@ -79,6 +82,7 @@ internal static class ResultTables
             new NumberCells<ChoiceSpread>("Plug E over model", "plug_modulus_ratio", (new(Units.One, 2), new(Units.One, 2)), s => Evidence(s).ModulusRatio),
             new NumberCells<ChoiceSpread>("Plugs", "plugs", ColumnUnits.Counts, s => Evidence(s).Plugs),
         ]).Write(spreads, units, "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
+        return spreads.Count > 0 ? table + Html.Paragraph(SpreadNote, "small") : table;
     }
 
     /// <summary>What the program's own finite elements find in the exported layers, beside the profile at log scale.</summary>
