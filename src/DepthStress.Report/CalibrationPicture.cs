@@ -22,15 +22,26 @@ public static class CalibrationPicture
     {
         ArgumentNullException.ThrowIfNull(result);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(result, units);
-        sheet.WriteTo(destination, $"{result.After.Setup.Name}: calibration");
+        SvgPaper.Write(Draw(result, units), destination);
+    }
+
+    /// <summary>Writes the picture as a page of A4 in a PDF, without letters outside those of Western Europe.</summary>
+    /// <param name="result">The calibration.</param>
+    /// <param name="units">The units of every scale.</param>
+    /// <param name="destination">Gets the bytes; stays open.</param>
+    public static void WritePdf(CalibrationResult result, UnitSystem units, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(result);
+        ArgumentNullException.ThrowIfNull(destination);
+        var sheet = Draw(result, units);
+        PdfBook.Write([sheet], sheet.Title, destination);
     }
 
     /// <summary>Draws the picture.</summary>
     internal static Sheet Draw(CalibrationResult result, UnitSystem units)
     {
         var model = result.After;
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: calibration");
         PageFrame.DrawTitle(sheet, model.Setup.Name, "calibration on observations", PageTexts.Surfaces(model.Setup.Frame, units));
         var top = PageFrame.Margin + PageFrame.TitleHeight;
         var bottom = sheet.Height - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 6;

@@ -31,8 +31,7 @@ public static class LayersPicture
         ArgumentNullException.ThrowIfNull(settings);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, table, settings, options.Units);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: layers over the profile");
+        SvgPaper.Write(Draw(model, table, settings, options.Units), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -43,7 +42,7 @@ public static class LayersPicture
         var zones = ZoneSpan.Of(model, tvds);
         var targets = StressTarget.Find(model, table, settings);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: layers over the profile");
         var count = string.Create(CultureInfo.InvariantCulture, $"{table.Layers.Count} {(table.Layers.Count == 1 ? "layer" : "layers")}");
         PageFrame.DrawTitle(sheet, model.Setup.Name, $"{count} over the profile", PageTexts.Surfaces(model.Setup.Frame, units));
 

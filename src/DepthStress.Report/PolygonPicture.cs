@@ -20,8 +20,7 @@ public static class PolygonPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: stress polygons");
+        SvgPaper.Write(Draw(model, options), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -30,7 +29,7 @@ public static class PolygonPicture
         var states = options.Depths is { } depths
             ? [.. depths.Select(d => StressState.At(model, d.Depth, d.Kind)).OfType<StressState>()]
             : StressState.Chosen(model);
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: stress polygons");
         PageFrame.DrawTitle(
             sheet, model.Setup.Name, "stress polygons", $"{PageTexts.Surfaces(model.Setup.Frame, options.Units)}. {Choice(model, options)}");
         var top = PageFrame.Margin + PageFrame.TitleHeight;

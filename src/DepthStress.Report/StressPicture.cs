@@ -23,8 +23,7 @@ public static class StressPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options.Units);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: stress over depth");
+        SvgPaper.Write(Draw(model, options.Units), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -34,7 +33,7 @@ public static class StressPicture
         DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
         var zones = ZoneSpan.Of(model, tvds);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
-        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
+        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide, $"{model.Setup.Name}: stress over depth");
 
         var legendTop = PageFrame.Margin + PageFrame.TitleHeight;
         var comparisons = ComparisonCurves.Of(model);

@@ -21,11 +21,13 @@ public static class TracksPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options.Units, Chosen(options));
-        sheet.WriteTo(destination, $"{model.Setup.Name}: depth tracks");
+        SvgPaper.Write(Draw(model, options), destination);
     }
 
     /// <summary>Draws the picture.</summary>
+    internal static Sheet Draw(EarthModel model, PictureOptions options) => Draw(model, options.Units, Chosen(options));
+
+    /// <summary>Draws some tracks.</summary>
     internal static Sheet Draw(EarthModel model, UnitSystem units, IReadOnlyList<TrackDefinition> definitions)
     {
         var (mds, tvds) = (Read(model, "md", units), Read(model, "tvd", units));
@@ -41,7 +43,7 @@ public static class TracksPicture
         var axis = new DepthAxis(top, bottom, PageFrame.Margin + PageFrame.TitleHeight + heads + 4, PageFrame.ShortSide - foot);
         tracks = [.. tracks.Select(t => t.WithRibbons(model, mds, axis))];
 
-        var sheet = new Sheet(layout.PageWidth, PageFrame.ShortSide);
+        var sheet = new Sheet(layout.PageWidth, PageFrame.ShortSide, $"{model.Setup.Name}: depth tracks");
         DrawFrame(sheet, model, units, layout, axis, zones, mds, tvds);
         for (var i = 0; i < tracks.Count; i++) DrawTrack(sheet, tracks[i], units, layout, i, axis);
         if (tracks.Count == 0) sheet.Write(new ScreenPoint(layout.ZoneRight + 12, axis.ScreenTop - 8), "No curve of these tracks has a value.", new TextStyle(9));

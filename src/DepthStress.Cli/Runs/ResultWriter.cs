@@ -40,6 +40,7 @@ internal static class ResultWriter
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, column, s)),
         ];
 
+        if (file.Sections.Output.Pdf.Value) results.Add(("pictures.pdf", s => drawn.WritePdf(layers, layerSettings, s)));
         if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));
         if (column is not null)
         {

@@ -33,16 +33,13 @@ public class PictureLayoutTests
         var model = Model(name);
         foreach (var sheet in Sheets(model, units))
         {
-            using (sheet)
+            var page = new OxyRect(0, 0, sheet.Width, sheet.Height);
+            Assert.NotEmpty(sheet.Texts);
+            Assert.All(sheet.Texts, t => Assert.True(Contains(page, t.Box), $"\"{t.Text}\" is cut off"));
+            for (var i = 0; i < sheet.Texts.Count; i++)
             {
-                var page = new OxyRect(0, 0, sheet.Width, sheet.Height);
-                Assert.NotEmpty(sheet.Texts);
-                Assert.All(sheet.Texts, t => Assert.True(Contains(page, t.Box), $"\"{t.Text}\" is cut off"));
-                for (var i = 0; i < sheet.Texts.Count; i++)
-                {
-                    for (var j = i + 1; j < sheet.Texts.Count; j++)
-                        Assert.False(Overlap(sheet.Texts[i].Box, sheet.Texts[j].Box), $"\"{sheet.Texts[i].Text}\" overlaps \"{sheet.Texts[j].Text}\"");
-                }
+                for (var j = i + 1; j < sheet.Texts.Count; j++)
+                    Assert.False(Overlap(sheet.Texts[i].Box, sheet.Texts[j].Box), $"\"{sheet.Texts[i].Text}\" overlaps \"{sheet.Texts[j].Text}\"");
             }
         }
     }
@@ -52,7 +49,7 @@ public class PictureLayoutTests
     [InlineData(UnitSystem.Field)]
     public void All_tracks_fit_on_A4_without_a_shortened_text(UnitSystem units)
     {
-        using var sheet = TracksPicture.Draw(PictureModels.Full(layered: true), units, TrackTable.All);
+        var sheet = TracksPicture.Draw(PictureModels.Full(layered: true), units, TrackTable.All);
         Assert.Equal(PageFrame.LongSide, sheet.Width, 0.1); // placed to a tenth of 1/96 inch
         Assert.Equal(PageFrame.ShortSide, sheet.Height);
         Assert.DoesNotContain(sheet.Texts, t => t.Text.Contains('\u2026', StringComparison.Ordinal));
@@ -84,7 +81,7 @@ public class PictureLayoutTests
     [Fact]
     public void Zones_without_room_for_a_name_are_counted()
     {
-        using var sheet = TracksPicture.Draw(Model("very many zones"), UnitSystem.Metric, TrackTable.All);
+        var sheet = TracksPicture.Draw(Model("very many zones"), UnitSystem.Metric, TrackTable.All);
         var named = sheet.Texts.Count(t => t.Text.EndsWith(" bed", StringComparison.Ordinal));
         Assert.InRange(named, 40, 119);
         Assert.Contains(sheet.Texts, t => t.Text == Numbered(120 - named, " unnamed"));
@@ -93,8 +90,8 @@ public class PictureLayoutTests
     [Fact]
     public void Titles_name_the_well_the_datum_and_the_units()
     {
-        using var tracks = TracksPicture.Draw(PictureModels.Full(), UnitSystem.Field, TrackTable.All);
-        using var stress = StressPicture.Draw(PictureModels.Full(), UnitSystem.Metric);
+        var tracks = TracksPicture.Draw(PictureModels.Full(), UnitSystem.Field, TrackTable.All);
+        var stress = StressPicture.Draw(PictureModels.Full(), UnitSystem.Metric);
         Assert.Contains(tracks.Texts, t => t.Text == "Example 1 \u00b7 depth tracks");
         Assert.Contains(tracks.Texts, t => t.Text == "Rotary table at 1024.9 ft above mean sea level; ground at 1001.3 ft above mean sea level");
         Assert.Contains(tracks.Texts, t => t.Text == "MD, ft");
