@@ -76,7 +76,6 @@ public static class TracksPicture
         DepthScales.DrawHead(sheet, "TVD", unit, PageTexts.Datum(frame), left + TracksLayout.DepthWidth, TracksLayout.DepthWidth, axis.ScreenTop);
         DepthScales.DrawOwn(sheet, axis, left + TracksLayout.DepthWidth - 8, layout.ZoneRight, layout.Right);
         DepthScales.DrawOther(sheet, axis, mds, tvds, left + (2 * TracksLayout.DepthWidth) - 8);
-        if (zones.Count > 0) sheet.Write(new ScreenPoint(layout.ZoneRight, axis.ScreenTop - 6), "Zone", new TextStyle(9, Palette.Text, true), HorizontalAlignment.Right);
         ZoneStrip.DrawNames(sheet, zones, axis, layout.ZoneLeft, layout.ZoneRight, axis.ScreenTop - 18);
     }
 
@@ -98,7 +97,7 @@ public static class TracksPicture
         {
             var x = layout.RibbonLeft(index, i);
             OriginRibbon.Draw(sheet, track.Ribbons[i].Rows, axis, x);
-            sheet.Write(new ScreenPoint(x + (OriginRibbon.Width / 2), axis.ScreenTop - 5), track.Ribbons[i].Label, new TextStyle(7.5), HorizontalAlignment.Left, true);
+            sheet.Write(new ScreenPoint(x + (OriginRibbon.Width / 2), axis.ScreenTop - 5), track.Ribbons[i].Label, new TextStyle(8), HorizontalAlignment.Left, true);
         }
     }
 
@@ -111,7 +110,7 @@ public static class TracksPicture
         {
             sheet.Write(
                 new ScreenPoint(sheet.Width - PageFrame.Margin, y), "A wedge at a track's edge: values off the scale, samples counted in the head.",
-                new TextStyle(7.5, Palette.FaintText), HorizontalAlignment.Right);
+                new TextStyle(8, Palette.FaintText), HorizontalAlignment.Right);
         }
 
         PageFrame.DrawCaution(sheet);

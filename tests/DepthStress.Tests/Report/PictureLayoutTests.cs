@@ -6,7 +6,6 @@ using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report;
 using DepthStress.Report.Drawing;
-using OxyPlot;
 
 namespace DepthStress.Tests.Report;
 
@@ -31,17 +30,7 @@ public class PictureLayoutTests
     public void No_two_texts_overlap_and_all_lie_on_the_page(string name, UnitSystem units)
     {
         var model = Model(name);
-        foreach (var sheet in Sheets(model, units))
-        {
-            var page = new OxyRect(0, 0, sheet.Width, sheet.Height);
-            Assert.NotEmpty(sheet.Texts);
-            Assert.All(sheet.Texts, t => Assert.True(Contains(page, t.Box), $"\"{t.Text}\" is cut off"));
-            for (var i = 0; i < sheet.Texts.Count; i++)
-            {
-                for (var j = i + 1; j < sheet.Texts.Count; j++)
-                    Assert.False(Overlap(sheet.Texts[i].Box, sheet.Texts[j].Box), $"\"{sheet.Texts[i].Text}\" overlaps \"{sheet.Texts[j].Text}\"");
-            }
-        }
+        foreach (var sheet in Sheets(model, units)) SheetChecks.NoTextOverlapsOrIsCutOff(sheet);
     }
 
     [Theory]
@@ -111,6 +100,7 @@ public class PictureLayoutTests
         yield return LayersPicture.Draw(model, PictureModels.Layers(model, 1e4), new LayerSettings(), units);
         yield return LayersPicture.Draw(model, PictureModels.Layers(model, 17), new LayerSettings(), units);
         yield return PolygonPicture.Draw(model, new PictureOptions(units));
+        yield return ComparePicture.Draw(PictureModels.Pair(model), units);
         foreach (var count in new[] { 1, 2, 3, 4, 5, 6 })
         {
             var (top, bottom) = (model.Values.Read(Property.MeasuredDepth)[0], model.Values.Read(Property.MeasuredDepth)[^1]);
@@ -132,9 +122,4 @@ public class PictureLayoutTests
     };
 
     private static string Numbered(int number, string text) => number.ToString(CultureInfo.InvariantCulture) + text;
-
-    private static bool Overlap(OxyRect a, OxyRect b) =>
-        Math.Min(a.Right, b.Right) - Math.Max(a.Left, b.Left) > 0.01 && Math.Min(a.Bottom, b.Bottom) - Math.Max(a.Top, b.Top) > 0.01;
-
-    private static bool Contains(OxyRect page, OxyRect box) => box.Left >= 0 && box.Top >= 0 && box.Right <= page.Right && box.Bottom <= page.Bottom;
 }

@@ -115,7 +115,7 @@ public class PictureTests
         var model = PictureModels.Full(100);
         model = model with { Setup = model.Setup with { Frame = new DepthFrame(DatumKind.SeaLevel, 0, null, 95, null) } };
         var texts = Texts(Stress(model));
-        Assert.Contains("water depth 95.0 m", texts);
+        Assert.Contains("Datum at mean sea level; water depth 95.0 m", texts);
         Assert.Contains("True vertical depth below mean sea level, m", texts);
         Assert.Contains("reference: water of 1.04 g/cm3 below the sea surface", texts);
     }
