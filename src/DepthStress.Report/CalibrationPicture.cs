@@ -15,6 +15,7 @@ public static class CalibrationPicture
 {
     private const double AxisWidth = 62;
     private const int MostPlanes = 3;
+    private const double WordLine = 12;
     private static readonly TextStyle Small = new(8);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same result and units.</summary>
@@ -22,15 +23,26 @@ public static class CalibrationPicture
     {
         ArgumentNullException.ThrowIfNull(result);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(result, units);
-        sheet.WriteTo(destination, $"{result.After.Setup.Name}: calibration");
+        SvgPaper.Write(Draw(result, units), destination);
+    }
+
+    /// <summary>Writes the picture as a page of A4 in a PDF, without letters outside those of Western Europe.</summary>
+    /// <param name="result">The calibration.</param>
+    /// <param name="units">The units of every scale.</param>
+    /// <param name="destination">Gets the bytes; stays open.</param>
+    public static void WritePdf(CalibrationResult result, UnitSystem units, Stream destination)
+    {
+        ArgumentNullException.ThrowIfNull(result);
+        ArgumentNullException.ThrowIfNull(destination);
+        var sheet = Draw(result, units);
+        PdfBook.Write([sheet], sheet.Title, destination);
     }
 
     /// <summary>Draws the picture.</summary>
     internal static Sheet Draw(CalibrationResult result, UnitSystem units)
     {
         var model = result.After;
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: calibration");
         PageFrame.DrawTitle(sheet, model.Setup.Name, "calibration on observations", PageTexts.Surfaces(model.Setup.Frame, units));
         var top = PageFrame.Margin + PageFrame.TitleHeight;
         var bottom = sheet.Height - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 6;
@@ -48,7 +60,7 @@ public static class CalibrationPicture
         DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
         var (left, right) = (box.Left + AxisWidth, box.Right);
-        var axis = new DepthAxis(finite.Min(), finite.Max(), box.Top + 34, box.Bottom - 34);
+        var axis = new DepthAxis(finite.Min(), finite.Max(), box.Top + 34, box.Bottom - 40);
         var curves = TrackTable.StressPanels.Stress.Curves.Where(c => c.Column.Id is "pp" or "sv" or "shmin" or "shmax").ToList();
         var traces = curves.Select(c => CurveTrace.Read(model, c, units, tvds, axis)).OfType<CurveTrace>().ToList();
         var shmin = curves.Find(c => c.Column.Id == "shmin")!;
@@ -65,29 +77,17 @@ public static class CalibrationPicture
         for (var i = 0; i < traces.Count; i++) CurveDrawing.Draw(sheet, panel, traces[i], i);
         var off = ObservationMarks.Draw(sheet, panel, ObservationMarks.Shown(result.AfterFit), units, unit);
         PanelFrame.Close(sheet, panel, traces, off);
-        DrawLegend(sheet, traces, before, left, right, axis.ScreenBase + 20);
-    }
-
-    private static void DrawLegend(Sheet sheet, IReadOnlyList<CurveTrace> traces, CurveTrace? before, double left, double right, double y)
-    {
-        var x = left;
-        var entries = traces.Select(t => (t.Curve.Pen, Text: t.Curve.Column.Symbol)).ToList();
-        if (before is not null) entries.Add((before.Curve.Pen, "Shmin before"));
-        foreach (var (pen, text) in entries)
-        {
-            var width = 24 + PlainText.Width(text, Small.Size, false);
-            if (x > left && x + width > right) (x, y) = (left, y + 12);
-            sheet.Line(x, y, x + 18, y, pen with { Width = pen.Width + 0.6 });
-            sheet.Write(new ScreenPoint(x + 22, y), text, Small);
-            x += width + 10;
-        }
+        var entries = traces.Reverse<CurveTrace>().Select(t => LegendEntry.Line(t.Curve.Pen, t.Curve.Column.Symbol)).ToList();
+        if (before is not null) entries.Add(LegendEntry.Line(before.Curve.Pen, "Shmin before"));
+        Legend.Draw(sheet, entries, left, right, axis.ScreenBase + 22);
     }
 
     private static void DrawPlanes(Sheet sheet, CalibrationResult result, OxyRect box)
     {
         var count = Math.Min(MostPlanes, result.Strains.Count);
         if (count == 0) return;
-        var height = Math.Min(470, (box.Height - 70) / count);
+        var words = Words(result, count).ToList();
+        var height = Math.Min(470, (box.Height - 10 - (words.Count * WordLine)) / count);
         for (var g = 0; g < count; g++)
         {
             var zones = result.Strains[g].Group.Name(result.After.Setup);
@@ -96,10 +96,10 @@ public static class CalibrationPicture
         }
 
         var y = box.Top + (count * height) + 10;
-        foreach (var line in Words(result, count))
+        foreach (var line in words)
         {
             sheet.Write(new ScreenPoint(box.Left, y), PlainText.Shorten(line, Small.Size, false, box.Width), Small);
-            y += 12;
+            y += WordLine;
         }
     }
 

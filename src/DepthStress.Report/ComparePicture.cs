@@ -15,8 +15,7 @@ public static class ComparePicture
     {
         ArgumentNullException.ThrowIfNull(pair);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(pair, units);
-        sheet.WriteTo(destination, $"{pair.Well}: two results compared");
+        SvgPaper.Write(Draw(pair, units), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -25,7 +24,7 @@ public static class ComparePicture
         var length = units.UnitFor(Dimension.Length).Unit;
         double[] before = [.. pair.BeforeTvd.Select(length.FromSi)], after = [.. pair.AfterTvd.Select(length.FromSi)];
         var finite = before.Concat(after).Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
-        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
+        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide, $"{pair.Well}: two results compared");
         PageFrame.DrawTitle(sheet, pair.Well, "two results compared", PageTexts.Surfaces(pair.Frame, units));
         var (left, right) = (PageFrame.Margin + AxisWidth, sheet.Width - PageFrame.Margin);
         var curves = pair.Curves.Select(c => (Data: c, Style: Style(c.Column))).ToList();

@@ -16,6 +16,7 @@ public static class LayersPicture
     private const double Gap = 28;
     private const double LeastForMean = 7;
     private static readonly TextStyle Small = new(8);
+    private static readonly TextStyle Head = new(9, Palette.Text, true);
     private static readonly CurvePen Boundary = new(Palette.ZoneEdge, 0.5);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same model, layers and options.</summary>
@@ -31,8 +32,7 @@ public static class LayersPicture
         ArgumentNullException.ThrowIfNull(settings);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, table, settings, options.Units);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: layers over the profile");
+        SvgPaper.Write(Draw(model, table, settings, options.Units), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -43,7 +43,7 @@ public static class LayersPicture
         var zones = ZoneSpan.Of(model, tvds);
         var targets = StressTarget.Find(model, table, settings);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: layers over the profile");
         var count = string.Create(CultureInfo.InvariantCulture, $"{table.Layers.Count} {(table.Layers.Count == 1 ? "layer" : "layers")}");
         PageFrame.DrawTitle(sheet, model.Setup.Name, $"{count} over the profile", PageTexts.Surfaces(model.Setup.Frame, units));
 
@@ -59,8 +59,7 @@ public static class LayersPicture
         DepthScales.DrawOwn(sheet, axis, PageFrame.Margin + AxisWidth, left, plotRight);
         DepthScales.DrawTitle(sheet, model.Setup.Frame, units, axis, PageFrame.Margin + 8);
         DrawLayers(sheet, table, units, axis, left, plotRight);
-        var panels = Panels(left, plotRight);
-        for (var k = 0; k < panels.Count; k++) DrawPanel(sheet, model, table, units, tvds, axis, LayerCurves.Panels[k], panels[k].Left, panels[k].Right);
+        DrawPanels(sheet, model, table, units, tvds, axis, left, plotRight);
         BarrierLanes.Draw(sheet, targets, table, units, axis, plotRight + 8);
         BarrierLanes.DrawFoot(sheet, targets, units, PageFrame.Margin, right, axis.ScreenBase + 18);
         PageFrame.DrawCaution(sheet);
@@ -78,31 +77,30 @@ public static class LayersPicture
         foreach (var entry in BarrierLanes.Legend(units, settings)) yield return entry;
     }
 
-    private static List<(double Left, double Right)> Panels(double left, double right)
+    /// <summary>Draws the panels that have a value; they share the width.</summary>
+    private static void DrawPanels(
+        Sheet sheet, EarthModel model, LayerTable table, UnitSystem units, double[] tvds, DepthAxis axis, double left, double right)
     {
-        var shares = LayerCurves.Panels.Select(p => p.Share).ToList();
-        var each = (right - left - ((shares.Count - 1) * Gap)) / shares.Sum();
-        var panels = new List<(double, double)>();
-        foreach (var share in shares)
+        var panels = LayerCurves.Panels
+            .Select(p => (p.Title, p.Share, p.Curves, Profiles: p.Curves.Select(c => CurveTrace.Read(model, LayerCurves.Behind(c.Curve), units, tvds, axis)).OfType<CurveTrace>().ToList()))
+            .Where(p => p.Profiles.Count > 0).ToList();
+        var each = (right - left - ((panels.Count - 1) * Gap)) / panels.Sum(p => p.Share);
+        foreach (var (title, share, curves, profiles) in panels)
         {
-            panels.Add((left, left + (share * each)));
+            DrawPanel(sheet, table, units, axis, title, curves, profiles, left, left + (share * each));
             left += (share * each) + Gap;
         }
-
-        return panels;
     }
 
     private static void DrawPanel(
-        Sheet sheet, EarthModel model, LayerTable table, UnitSystem units, double[] tvds, DepthAxis axis,
-        (string Title, double Share, IReadOnlyList<LayerCurve> Curves) definition, double left, double right)
+        Sheet sheet, LayerTable table, UnitSystem units, DepthAxis axis, string title, IReadOnlyList<LayerCurve> curves, List<CurveTrace> profiles,
+        double left, double right)
     {
-        var profiles = definition.Curves.Select(c => CurveTrace.Read(model, LayerCurves.Behind(c.Curve), units, tvds, axis)).OfType<CurveTrace>().ToList();
-        if (profiles.Count == 0) return;
         var unit = profiles[0].Curve.Column.In(units).Unit.Symbol;
         var panel = new Panel(left, right, CurveTrace.Scales(profiles)[0], axis);
-        PanelFrame.Open(sheet, panel, unit.Length > 0 ? $"{definition.Title}, {unit}" : definition.Title);
+        PanelFrame.Open(sheet, panel, unit.Length > 0 ? $"{title}, {unit}" : title);
         for (var i = 0; i < profiles.Count; i++) CurveDrawing.Draw(sheet, panel, profiles[i], i);
-        foreach (var curve in definition.Curves)
+        foreach (var curve in curves)
         {
             if (LayerCurves.Trace(table, curve, units) is { } trace) CurveDrawing.Draw(sheet, panel, trace, profiles.Count);
             if (curve.Sloping) DrawMeans(sheet, table, curve, units, panel);
@@ -129,7 +127,7 @@ public static class LayersPicture
     {
         var length = units.UnitFor(Dimension.Length).Unit;
         var last = double.NegativeInfinity;
-        sheet.Write(new ScreenPoint(left - 9, axis.ScreenTop - 10), "layer", Small, HorizontalAlignment.Right);
+        sheet.Write(new ScreenPoint(left - 18, axis.ScreenTop - 6), "Layer", Head, HorizontalAlignment.Right);
         foreach (var layer in table.Layers)
         {
             var (top, bottom) = (axis.ToScreen(length.FromSi(layer.TopTvd)), axis.ToScreen(length.FromSi(layer.BaseTvd)));

@@ -8,7 +8,6 @@ namespace DepthStress.Report;
 public static class PolygonPicture
 {
     private const double Gap = 22;
-    private const double LegendLine = 14;
     private static readonly TextStyle Small = new(8);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same model and options.</summary>
@@ -20,8 +19,7 @@ public static class PolygonPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: stress polygons");
+        SvgPaper.Write(Draw(model, options), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -30,15 +28,15 @@ public static class PolygonPicture
         var states = options.Depths is { } depths
             ? [.. depths.Select(d => StressState.At(model, d.Depth, d.Kind)).OfType<StressState>()]
             : StressState.Chosen(model);
-        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide);
+        var sheet = new Sheet(PageFrame.LongSide, PageFrame.ShortSide, $"{model.Setup.Name}: stress polygons");
         PageFrame.DrawTitle(
             sheet, model.Setup.Name, "stress polygons", $"{PageTexts.Surfaces(model.Setup.Frame, options.Units)}. {Choice(model, options)}");
         var top = PageFrame.Margin + PageFrame.TitleHeight;
-        DrawLegend(sheet, top + (LegendLine / 2));
+        Legend.Draw(sheet, PolygonMarks.Legend, PageFrame.Margin, sheet.Width - PageFrame.Margin, top + (Legend.LineHeight / 2));
         PageFrame.DrawCaution(sheet);
 
         var area = new OxyRect(
-            new ScreenPoint(PageFrame.Margin, top + LegendLine + 8),
+            new ScreenPoint(PageFrame.Margin, top + Legend.LineHeight + 8),
             new ScreenPoint(sheet.Width - PageFrame.Margin, sheet.Height - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 6));
         if (states.Count == 0) sheet.Write(new ScreenPoint(area.Left, area.Top + 8), "No sample lies at these depths.", Small);
         var columns = states.Count <= 3 ? Math.Max(1, states.Count) : states.Count == 4 ? 2 : 3;
@@ -60,16 +58,5 @@ public static class PolygonPicture
         return model.Setup.Zones.Any(z => z.Target)
             ? "Depths: the middle of each target zone, or the nearest sample to it with a Shmin"
             : "Depth: the middle of the profile, or the nearest sample to it with a Shmin";
-    }
-
-    private static void DrawLegend(Sheet sheet, double y)
-    {
-        var x = PageFrame.Margin;
-        foreach (var (mark, text) in PolygonMarks.Legend)
-        {
-            mark(sheet, new ScreenPoint(x + 11, y));
-            sheet.Write(new ScreenPoint(x + 28, y), text, Small);
-            x += 28 + PlainText.Width(text, Small.Size, false) + 16;
-        }
     }
 }

@@ -47,6 +47,7 @@ public static class ReportPage
             ["version"] = Html.Text(content.Version),
             ["tracks-picture"] = Picture(content.Drawn.Tracks),
             ["stress-picture"] = Picture(content.Drawn.Stress),
+            ["layers-picture"] = Picture(content.Drawn.Layers),
             ["polygon-picture"] = Picture(content.Drawn.Polygon),
             ["data"] = new PageData(content).Write(PageTrack.Of(model, content.Pictures), content.Comparisons),
         };

@@ -2,7 +2,6 @@ using DepthStress.Core.Calibration;
 using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report.Drawing;
-using OxyPlot;
 
 namespace DepthStress.Report;
 
@@ -10,9 +9,7 @@ namespace DepthStress.Report;
 public static class StressPicture
 {
     private const double AxisWidth = 66;
-    private const double LegendLine = 14;
     private const double Gap = 32;
-    private static readonly TextStyle Small = new(8);
 
     /// <summary>Writes the picture: UTF-8, the same bytes for the same model and options.</summary>
     /// <param name="model">The finished model.</param>
@@ -23,8 +20,7 @@ public static class StressPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options.Units);
-        sheet.WriteTo(destination, $"{model.Setup.Name}: stress over depth");
+        SvgPaper.Write(Draw(model, options.Units), destination);
     }
 
     /// <summary>Draws the picture.</summary>
@@ -34,7 +30,7 @@ public static class StressPicture
         DepthColumns.Get("tvd").Fill(model, 0, units, tvds);
         var zones = ZoneSpan.Of(model, tvds);
         var finite = tvds.Where(double.IsFinite).DefaultIfEmpty(double.NaN).ToList();
-        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide);
+        var sheet = new Sheet(PageFrame.ShortSide, PageFrame.LongSide, $"{model.Setup.Name}: stress over depth");
 
         var legendTop = PageFrame.Margin + PageFrame.TitleHeight;
         var comparisons = ComparisonCurves.Of(model);
@@ -42,7 +38,7 @@ public static class StressPicture
         var keys = ComparisonCurves.Keys(comparisons, right - left);
         var observations = ObservationMarks.Shown(Comparison.Of(model));
         var lines = 2 + (observations.Count > 0 ? 1 : 0);
-        var plotTop = legendTop + ((lines + keys.Count) * LegendLine) + PanelFrame.Height + 6;
+        var plotTop = legendTop + ((lines + keys.Count) * Legend.LineHeight) + PanelFrame.Height + 6;
         var axis = new DepthAxis(finite.Min(), finite.Max(), plotTop, PageFrame.LongSide - PageFrame.Margin - PageFrame.CautionHeight(sheet.Width) - 16);
         var middle = left + ((right - names - left) * 0.58);
         var views = new[] { TrackTable.StressPanels.Stress with { Curves = [.. comparisons, .. TrackTable.StressPanels.Stress.Curves] }, TrackTable.StressPanels.Gradient }
@@ -51,9 +47,9 @@ public static class StressPicture
         DrawFrame(sheet, model, units, axis, zones, left, right - names - 8, right);
         if (views[0] is { } stress)
         {
-            DrawLegend(sheet, model, units, stress, left, right, legendTop);
-            ComparisonCurves.DrawKeys(sheet, keys, left, legendTop + ((lines + 0.5) * LegendLine), LegendLine);
-            Legend.Draw(sheet, ObservationMarks.Entries(observations), left, right, legendTop + (2.5 * LegendLine));
+            Legend.Draw(sheet, Entries(model, units, stress), left, right, legendTop + (Legend.LineHeight / 2));
+            ComparisonCurves.DrawKeys(sheet, keys, left, legendTop + ((lines + 0.5) * Legend.LineHeight), Legend.LineHeight);
+            Legend.Draw(sheet, ObservationMarks.Entries(observations), left, right, legendTop + (2.5 * Legend.LineHeight));
             DrawPanel(sheet, stress, "Total stress and pore pressure", units, axis, left, middle, observations);
             ComparisonCurves.DrawLetters(sheet, stress, comparisons, new Panel(left, middle, stress.Scales[0], axis));
         }
@@ -75,19 +71,9 @@ public static class StressPicture
         DepthScales.DrawTitle(sheet, frame, units, axis, PageFrame.Margin + 8);
     }
 
-    private static void DrawLegend(Sheet sheet, EarthModel model, UnitSystem units, TrackView stress, double left, double right, double top)
-    {
-        var (x, y) = (left, top + (LegendLine / 2));
-        foreach (var curve in stress.Traces.Select(t => t.Curve).Where(c => !ComparisonCurves.Has(model, c)).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure))
-        {
-            var text = curve.Column == HydrostaticColumns.Pressure ? Hydrostatic(model, units) : $"{curve.Column.Symbol}, {curve.Column.Title}";
-            var width = 28 + PlainText.Width(text, Small.Size, false);
-            if (x > left && x + width > right) (x, y) = (left, y + LegendLine);
-            sheet.Line(x, y, x + 22, y, curve.Pen with { Width = curve.Pen.Width + 0.6 });
-            sheet.Write(new ScreenPoint(x + 28, y), text, Small);
-            x += width + 16;
-        }
-    }
+    private static IEnumerable<LegendEntry> Entries(EarthModel model, UnitSystem units, TrackView stress) =>
+        stress.Traces.Select(t => t.Curve).Where(c => !ComparisonCurves.Has(model, c)).Reverse().OrderBy(c => c.Column == HydrostaticColumns.Pressure)
+            .Select(c => LegendEntry.Line(c.Pen, c.Column == HydrostaticColumns.Pressure ? Hydrostatic(model, units) : $"{c.Column.Symbol}, {c.Column.Title}"));
 
     private static string Hydrostatic(EarthModel model, UnitSystem units)
     {

@@ -21,11 +21,13 @@ public static class TracksPicture
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(options);
         ArgumentNullException.ThrowIfNull(destination);
-        using var sheet = Draw(model, options.Units, Chosen(options));
-        sheet.WriteTo(destination, $"{model.Setup.Name}: depth tracks");
+        SvgPaper.Write(Draw(model, options), destination);
     }
 
     /// <summary>Draws the picture.</summary>
+    internal static Sheet Draw(EarthModel model, PictureOptions options) => Draw(model, options.Units, Chosen(options));
+
+    /// <summary>Draws some tracks.</summary>
     internal static Sheet Draw(EarthModel model, UnitSystem units, IReadOnlyList<TrackDefinition> definitions)
     {
         var (mds, tvds) = (Read(model, "md", units), Read(model, "tvd", units));
@@ -41,7 +43,7 @@ public static class TracksPicture
         var axis = new DepthAxis(top, bottom, PageFrame.Margin + PageFrame.TitleHeight + heads + 4, PageFrame.ShortSide - foot);
         tracks = [.. tracks.Select(t => t.WithRibbons(model, mds, axis))];
 
-        var sheet = new Sheet(layout.PageWidth, PageFrame.ShortSide);
+        var sheet = new Sheet(layout.PageWidth, PageFrame.ShortSide, $"{model.Setup.Name}: depth tracks");
         DrawFrame(sheet, model, units, layout, axis, zones, mds, tvds);
         for (var i = 0; i < tracks.Count; i++) DrawTrack(sheet, tracks[i], units, layout, i, axis);
         if (tracks.Count == 0) sheet.Write(new ScreenPoint(layout.ZoneRight + 12, axis.ScreenTop - 8), "No curve of these tracks has a value.", new TextStyle(9));
@@ -74,7 +76,6 @@ public static class TracksPicture
         DepthScales.DrawHead(sheet, "TVD", unit, PageTexts.Datum(frame), left + TracksLayout.DepthWidth, TracksLayout.DepthWidth, axis.ScreenTop);
         DepthScales.DrawOwn(sheet, axis, left + TracksLayout.DepthWidth - 8, layout.ZoneRight, layout.Right);
         DepthScales.DrawOther(sheet, axis, mds, tvds, left + (2 * TracksLayout.DepthWidth) - 8);
-        if (zones.Count > 0) sheet.Write(new ScreenPoint(layout.ZoneRight, axis.ScreenTop - 6), "Zone", new TextStyle(9, Palette.Text, true), HorizontalAlignment.Right);
         ZoneStrip.DrawNames(sheet, zones, axis, layout.ZoneLeft, layout.ZoneRight, axis.ScreenTop - 18);
     }
 
@@ -96,7 +97,7 @@ public static class TracksPicture
         {
             var x = layout.RibbonLeft(index, i);
             OriginRibbon.Draw(sheet, track.Ribbons[i].Rows, axis, x);
-            sheet.Write(new ScreenPoint(x + (OriginRibbon.Width / 2), axis.ScreenTop - 5), track.Ribbons[i].Label, new TextStyle(7.5), HorizontalAlignment.Left, true);
+            sheet.Write(new ScreenPoint(x + (OriginRibbon.Width / 2), axis.ScreenTop - 5), track.Ribbons[i].Label, new TextStyle(8), HorizontalAlignment.Left, true);
         }
     }
 
@@ -109,7 +110,7 @@ public static class TracksPicture
         {
             sheet.Write(
                 new ScreenPoint(sheet.Width - PageFrame.Margin, y), "A wedge at a track's edge: values off the scale, samples counted in the head.",
-                new TextStyle(7.5, Palette.FaintText), HorizontalAlignment.Right);
+                new TextStyle(8, Palette.FaintText), HorizontalAlignment.Right);
         }
 
         PageFrame.DrawCaution(sheet);

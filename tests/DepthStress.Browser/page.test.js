@@ -394,7 +394,7 @@ test("print gives a paper log: each picture on a page of its own, tables after t
   assert.ok(Math.max(...spread) >= 2, "at least one table goes on over two pages, so headings are put to the test");
   await page.emulateMedia({ media: "print" });
   assert.equal(await page.locator("#viewer").isVisible(), false);
-  assert.equal(await page.locator("#pictures img").count(), 3);
+  assert.equal(await page.locator("#pictures img").count(), 4);
   await close();
 });
 

@@ -15,13 +15,15 @@ internal static class CalibrationWriter
     public static void Write(LoadedWell well, CalibrationResult result, string folder, Action<string> stage, CancellationToken cancellation)
     {
         var units = well.File.Sections.Output.Units.Value;
-        (string Name, Action<Stream> Write)[] results =
+        List<(string Name, Action<Stream> Write)> results =
         [
             ("calibration.svg", s => CalibrationPicture.Write(result, units, s)),
             ("calibration.json", s => CalibrationJson.Write(result, units, s)),
             ("observations.csv", s => ObservationsCsv.Write(result.AfterFit, units, s)),
             ("README.txt", s => ResultGuide.WriteCalibration(well.File.Setup, units, s)),
         ];
+        if (well.File.Sections.Output.Pdf.Value) results.Add(("calibration.pdf", s => CalibrationPicture.WritePdf(result, units, s)));
+
         using var target = ResultFolder.Begin(folder);
         foreach (var (name, write) in results)
         {

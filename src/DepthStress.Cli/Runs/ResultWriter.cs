@@ -24,7 +24,7 @@ internal static class ResultWriter
         var (layers, layerSettings) = (well.Layers, file.Sections.Layers);
         var column = SolverColumn.Of(layers, layerSettings.Deck.Value);
         var solved = column is null ? null : ColumnCheck.Of(column);
-        var drawn = new DrawnPictures(model, pictures);
+        var drawn = new DrawnPictures(model, layers, layerSettings, pictures);
         List<(string Name, Action<Stream> Write)> results =
         [
             ("depth.csv", s => DepthCsv.Write(model, units, s)),
@@ -36,12 +36,13 @@ internal static class ResultWriter
             ("layers.vtu", s => LayersVtu.Write(layers, layerSettings, s)),
             ("tracks.svg", s => s.Write(drawn.Tracks)),
             ("stress.svg", s => s.Write(drawn.Stress)),
-            ("layers.svg", s => LayersPicture.Write(model, layers, file.Sections.Layers, pictures, s)),
+            ("layers.svg", s => s.Write(drawn.Layers)),
             ("polygon.svg", s => s.Write(drawn.Polygon)),
             ("README.txt", s => ResultGuide.Write(file.Setup, units, s, ComparisonColumns.Of(model))),
             ("run.json", s => RunJson.Write(file, logs, model, diagnostics, well.Core, layers, solved, s)),
         ];
 
+        if (file.Sections.Output.Pdf.Value) results.Add(("pictures.pdf", drawn.WritePdf));
         if (well.Spread is { } spread) results.Add(("spread.csv", s => SpreadCsv.Write(SpreadRow.Of(model, spread), units, s)));
         if (column is not null)
         {

@@ -242,6 +242,7 @@ internal static class Bindings
         Tracks = s.Texts("tracks", o.Tracks, "the tracks to draw, in their order"),
         PolygonDepths = s.Texts("polygon_depths", o.PolygonDepths, "depths of the stress polygons, at most six, each with its unit"),
         PolygonDepthKind = s.Choice("polygon_depth_kind", o.PolygonDepthKind, DepthKinds, "the kind of these depths: measured, true vertical, or true vertical below sea level"),
+        Pdf = s.Flag("pdf", o.Pdf, "true: the pictures also as a PDF, each on a page of A4"),
         Scales = s.Tables("scales", o.Scales, Scale, new(), "scales of single curves in the tracks"),
     };
 

@@ -245,6 +245,9 @@ public sealed record OutputSection
     /// <summary>The kind of these depths.</summary>
     public Setting<DepthKind> PolygonDepthKind { get; init; }
 
+    /// <summary>True when the pictures are also written as a PDF.</summary>
+    public Setting<bool> Pdf { get; init; } = Setting.Default(false);
+
     /// <summary>The units of the results.</summary>
     public Setting<UnitSystem> Units { get; init; } = Setting.Default(UnitSystem.Metric);
 }

@@ -69,6 +69,7 @@ public static class ResultGuide
         Row(text, "layers-solver.csv", "", "the columns of layers.csv in SI with every digit, and the lateral strains of the solver's column");
         Row(text, "layers.vtu", "", $"the same numbers as a grid, a hexahedron per layer; missing is {ResultsLas.Null}");
         Row(text, "column.inp", "", "the layers as a deck for CalculiX, whose comments say how to read it; column-balanced.inp starts from stress in balance");
+        Row(text, "pictures.pdf", "", "where [output] pdf = true: the pictures, each on a page of A4; a letter that is not of Western Europe is a question mark there, the .svg files keep it");
         Row(text, ResultManifest.FileName, "", "names the files that a new run replaces; a folder that holds anything else is left alone");
     }
 

@@ -12,7 +12,7 @@ internal static class BarrierLanes
     private const double Gap = 4;
     private const int MostLanes = 4;
     private const double FootLine = 11;
-    private static readonly TextStyle Small = new(7.5);
+    private static readonly TextStyle Small = new(8);
     private static readonly CurvePen Edge = new(Palette.Frame, 0.5);
 
     /// <summary>Names of the marks.</summary>

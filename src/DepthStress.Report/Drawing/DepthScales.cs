@@ -12,7 +12,7 @@ internal static class DepthScales
     private const double Tick = 4;
     private const double StepsUnlabelled = 2.5;
     private static readonly TextStyle Head = new(9, Palette.Text, true);
-    private static readonly TextStyle Note = new(7, Palette.FaintText);
+    private static readonly TextStyle Note = new(8, Palette.FaintText);
     private static readonly TextStyle Number = new(8);
     private static readonly CurvePen TickPen = new(Palette.Frame, 0.6);
 

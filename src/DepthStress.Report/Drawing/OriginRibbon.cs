@@ -8,7 +8,7 @@ internal static class OriginRibbon
 {
     public const double Width = 6;
 
-    private static readonly TextStyle Style = new(7.5);
+    private static readonly TextStyle Style = new(8);
 
     /// <summary>The colour of an origin; the weaker the origin, the more it stands out.</summary>
     public static int Colour(SampleOrigin origin) => origin switch

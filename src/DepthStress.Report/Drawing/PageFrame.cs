@@ -18,7 +18,7 @@ internal static class PageFrame
     private const double CautionLine = 9.5;
     private static readonly TextStyle Title = new(15, Palette.Text, true);
     private static readonly TextStyle Subtitle = new(9, Palette.FaintText);
-    private static readonly TextStyle Small = new(7.5, Palette.FaintText);
+    private static readonly TextStyle Small = new(8, Palette.FaintText);
 
     /// <summary>Height of the caution on a page of some width.</summary>
     public static double CautionHeight(double pageWidth) => (CautionLines(pageWidth).Count * CautionLine) + 4;

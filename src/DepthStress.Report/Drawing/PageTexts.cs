@@ -18,7 +18,7 @@ internal static class PageTexts
     /// <summary>Where the surfaces around the well lie.</summary>
     public static string Surfaces(DepthFrame frame, UnitSystem units)
     {
-        var datum = frame.Datum == DatumKind.SeaLevel ? "" : $"{Sentence(Datum(frame))} at {Level(frame.DatumElevation, units)}";
+        var datum = frame.Datum == DatumKind.SeaLevel ? "Datum at mean sea level" : $"{Sentence(Datum(frame))} at {Level(frame.DatumElevation, units)}";
         var solid = frame.WaterDepth is { } water ? $"water depth {units.Show(Quantity.Length(water))}"
             : frame.GroundElevation is { } ground && frame.Datum != DatumKind.Ground ? $"ground at {Level(ground, units)}" : "";
         return string.Join("; ", new[] { datum, solid }.Where(t => t.Length > 0));

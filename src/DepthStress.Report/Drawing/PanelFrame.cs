@@ -38,11 +38,11 @@ internal static class PanelFrame
     }
 
     /// <summary>Draws the edge, and below it how many samples and observations lie off the scale.</summary>
-    public static void Close(Sheet sheet, Panel panel, IEnumerable<CurveTrace> traces, int observationsOff = 0)
+    public static void Close(Sheet sheet, Panel panel, IReadOnlyList<CurveTrace> drawn, int observationsOff = 0)
     {
         var axis = panel.Depth;
         sheet.Outline(new OxyRect(panel.Left, axis.ScreenTop, panel.Right - panel.Left, axis.ScreenBase - axis.ScreenTop), new CurvePen(Palette.Frame, 0.8));
-        var off = traces.Where(t => t.OffScale > 0).Select(t => $"{t.Curve.Label.Split(',')[0]}: {PageTexts.OffScale(t.OffScale)}").ToList();
+        var off = drawn.Where(t => t.OffScale > 0).Select(t => (drawn.Count > 1 ? t.Curve.Label.Split(',')[0] + ": " : "") + PageTexts.OffScale(t.OffScale)).ToList();
         if (observationsOff > 0) off.Add($"observations: {PageTexts.OffScale(observationsOff)}");
         sheet.Write(
             new ScreenPoint(panel.Left, axis.ScreenBase + 9), PlainText.Shorten(string.Join(", ", off), Small.Size, false, panel.Right - panel.Left), Small);

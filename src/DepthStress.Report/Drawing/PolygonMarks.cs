@@ -15,14 +15,14 @@ internal static class PolygonMarks
     public static CurvePen Range { get; } = new(Palette.Rust, 1.6, [2, 1.5]);
 
     /// <summary>The marks in the order of the legend.</summary>
-    public static IReadOnlyList<(Action<Sheet, ScreenPoint> Draw, string Text)> Legend { get; } =
+    public static IReadOnlyList<LegendEntry> Legend { get; } =
     [
-        ((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Limit), "limit by the friction coefficient of the settings"),
-        ((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Outer), "limit by a friction coefficient of 1.00"),
-        (State, "the model"),
-        ((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Range), "the model's Shmin, SHmax unknown"),
-        (Vertical, "both equal Sv"),
-        (Pore, "both equal Pp"),
+        new((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Limit), "limit by the friction coefficient of the settings"),
+        new((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Outer), "limit by a friction coefficient of 1.00"),
+        new(State, "the model"),
+        new((s, p) => s.Line(p.X - 11, p.Y, p.X + 11, p.Y, Range), "the model's Shmin, SHmax unknown"),
+        new(Vertical, "both equal Sv"),
+        new(Pore, "both equal Pp"),
     ];
 
     /// <summary>The model's state.</summary>

@@ -13,7 +13,6 @@ internal static class ResidualRows
     private const double LabelWidth = 128;
     private const double Inner = 1.96;
     private static readonly TextStyle Small = new(8);
-    private static readonly TextStyle Faint = new(7.5, Palette.FaintText);
     private static readonly TextStyle Title = new(9.5, Palette.Text, true);
 
     /// <summary>Draws the rows that find room.</summary>
@@ -30,6 +29,7 @@ internal static class ResidualRows
         double X(double sigmas) => left + ((Math.Clamp(sigmas, -reach, reach) + reach) / (2 * reach) * (right - left));
 
         sheet.Write(new ScreenPoint((left + right) / 2, box.Top + 8), "Model less observation, standard deviations", Title, HorizontalAlignment.Center);
+        DepthScales.DrawHead(sheet, "MD", units.UnitFor(Dimension.Length).Unit.Symbol, PageTexts.Datum(result.After.Setup.Frame), box.Left, LabelWidth - 12, top);
         sheet.Fill(new OxyRect(X(-Inner), top, X(Inner) - X(-Inner), bottom - top), Palette.ZoneTint);
         var step = RoundSteps.Step(2 * reach, 8);
         foreach (var tick in RoundSteps.Between(-reach, reach, step))
@@ -40,7 +40,7 @@ internal static class ResidualRows
 
         for (var k = 0; k < fitting; k++) DrawRow(sheet, rows[k].Before, rows[k].After, units, box.Left, left, top + ((k + 0.5) * height), X);
         sheet.Outline(new OxyRect(left, top, right - left, bottom - top), new CurvePen(Palette.Frame, 0.8));
-        DrawLegend(sheet, box.Left, bottom + 14, rows.Count - fitting);
+        DrawLegend(sheet, box.Left, box.Right, bottom + 14, rows.Count - fitting);
     }
 
     private static double Reach(IEnumerable<double> residuals) =>
@@ -69,23 +69,18 @@ internal static class ResidualRows
         _ => Palette.Gold,
     };
 
-    private static void DrawLegend(Sheet sheet, double left, double y, int unshown)
+    private static void DrawLegend(Sheet sheet, double left, double right, double y, int unshown)
     {
-        var x = left;
-        Entry(at => Marks.Ring(sheet, at, 3, new CurvePen(Palette.Grey, 0.9)), "before");
-        Entry(at => Marks.Disc(sheet, at, 3.2, Palette.Rust), "value of Shmin");
-        Entry(at => Marks.Draw(sheet, at, Meaning.UpperBound, 3.2, Palette.Rust), "upper bound");
-        (x, y) = (left, y + 13);
-        Entry(at => Marks.Disc(sheet, at, 3.2, Palette.Gold), "on SHmax too");
-        Entry(at => Marks.Disc(sheet, at, 3.2, Palette.Sky), "pore pressure");
-        Entry(at => sheet.Line(at.X, at.Y - 5, at.X, at.Y + 5, new CurvePen(Palette.Plum, 1.2)), "fitted without it");
-        if (unshown > 0) sheet.Write(new ScreenPoint(left, y + 13), string.Create(CultureInfo.InvariantCulture, $"{unshown} more observations find no room here"), Faint);
-
-        void Entry(Action<ScreenPoint> mark, string text)
-        {
-            mark(new ScreenPoint(x + 6, y));
-            sheet.Write(new ScreenPoint(x + 14, y), text, Faint);
-            x += 22 + PlainText.Width(text, Faint.Size, false);
-        }
+        LegendEntry[] entries =
+        [
+            new((s, at) => Marks.Ring(s, at, 3, new CurvePen(Palette.Grey, 0.9)), "before"),
+            new((s, at) => Marks.Disc(s, at, 3.2, Palette.Rust), "value of Shmin"),
+            new((s, at) => Marks.Draw(s, at, Meaning.UpperBound, 3.2, Palette.Rust), "upper bound"),
+            new((s, at) => Marks.Disc(s, at, 3.2, Palette.Gold), "on SHmax too"),
+            new((s, at) => Marks.Disc(s, at, 3.2, Palette.Sky), "pore pressure"),
+            new((s, at) => s.Line(at.X, at.Y - 5, at.X, at.Y + 5, new CurvePen(Palette.Plum, 1.2)), "fitted without it"),
+        ];
+        y = Legend.Draw(sheet, entries, left, right, y) + Legend.LineHeight;
+        if (unshown > 0) sheet.Write(new ScreenPoint(left, y), string.Create(CultureInfo.InvariantCulture, $"{unshown} more observations find no room here"), Small);
     }
 }

@@ -36,12 +36,12 @@ internal static class RoundSteps
     /// <summary>A scale end as text, as short as it can be.</summary>
     public static string Show(double value) => value.ToString("0.####", CultureInfo.InvariantCulture);
 
-    /// <summary>A scale with round ends around values from low to high; values that hardly differ get a scale of a thousandth of their size.</summary>
+    /// <summary>A scale with round ends that no value from low to high is beyond, not by rounding either; values that hardly differ get a scale of a thousandth of their size.</summary>
     public static CurveScale Around(double low, double high, int parts)
     {
         var step = Step(Math.Max(high - low, 1e-3 * Math.Max(Math.Abs(low), Math.Abs(high))), parts);
         var (left, right) = (Math.Floor((low / step) + 1e-9), Math.Ceiling((high / step) - 1e-9));
         if (right <= left) right = left + 1;
-        return new CurveScale(left * step, right * step, (int)(right - left));
+        return new CurveScale(Math.Min(left * step, low), Math.Max(right * step, high), (int)(right - left));
     }
 }

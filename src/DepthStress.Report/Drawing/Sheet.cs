@@ -1,6 +1,3 @@
-using System.Globalization;
-using System.Security;
-using System.Text;
 using OxyPlot;
 
 namespace DepthStress.Report.Drawing;
@@ -12,28 +9,23 @@ namespace DepthStress.Report.Drawing;
 internal readonly record struct TextStyle(double Size, int Colour = Palette.Text, bool Bold = false);
 
 /// <summary>Text as it was placed, for checks of the layout.</summary>
-internal readonly record struct PlacedText(string Text, OxyRect Box);
+internal readonly record struct PlacedText(string Text, OxyRect Box, TextStyle Style);
 
-/// <summary>A page in units of 1/96 inch that is written as SVG, with its origin at the upper left.</summary>
-internal sealed class Sheet : IDisposable
+/// <summary>A page in units of 1/96 inch with its origin at the upper left; it keeps what is drawn, for paper of any kind.</summary>
+internal sealed class Sheet(double width, double height, string title)
 {
-    private const string Fonts = "Helvetica, Arial, 'Liberation Sans', sans-serif";
     private const double Ascent = 0.74;
     private const double Descent = 0.22;
 
-    private readonly MemoryStream _svg = new();
-    private readonly SvgRenderContext _context;
+    private readonly List<Action<IPaper>> _drawn = [];
     private readonly List<PlacedText> _texts = [];
 
-    public Sheet(double width, double height)
-    {
-        (Width, Height) = (width, height);
-        _context = new SvgRenderContext(_svg, width, height, false, PlainText.Context, OxyColors.White);
-    }
+    public double Width => width;
 
-    public double Width { get; }
+    public double Height => height;
 
-    public double Height { get; }
+    /// <summary>What the page shows, as clean text.</summary>
+    public string Title { get; } = PlainText.Clean(title);
 
     /// <summary>Every text on the page.</summary>
     public IReadOnlyList<PlacedText> Texts => _texts;
@@ -43,16 +35,13 @@ internal sealed class Sheet : IDisposable
     {
         text = PlainText.Clean(text);
         if (text.Length == 0) return;
-        var (width, drop) = (PlainText.Width(text, style.Size, style.Bold), (Ascent - Descent) / 2 * style.Size);
-        var start = align switch { HorizontalAlignment.Left => 0, HorizontalAlignment.Center => -width / 2, _ => -width };
-        var baseline = rotated ? new ScreenPoint(at.X + drop, at.Y) : new ScreenPoint(at.X, at.Y + drop);
-        var (up, height) = (-(Ascent + Descent) / 2 * style.Size, (Ascent + Descent) * style.Size);
-        _texts.Add(new PlacedText(text, rotated
-            ? new OxyRect(at.X + up, at.Y - start - width, height, width)
-            : new OxyRect(at.X + start, at.Y + up, width, height)));
-        _context.DrawText(
-            Round(baseline), text, Colour(style.Colour), Fonts, style.Size, style.Bold ? 700 : 400, rotated ? -90 : 0, align,
-            VerticalAlignment.Bottom, null);
+        var (length, drop) = (PlainText.Width(text, style.Size, style.Bold), (Ascent - Descent) / 2 * style.Size);
+        var start = align switch { HorizontalAlignment.Left => 0, HorizontalAlignment.Center => -length / 2, _ => -length };
+        var baseline = Round(rotated ? new ScreenPoint(at.X + drop, at.Y) : new ScreenPoint(at.X, at.Y + drop));
+        var (up, line) = (-(Ascent + Descent) / 2 * style.Size, (Ascent + Descent) * style.Size);
+        var box = rotated ? new OxyRect(at.X + up, at.Y - start - length, line, length) : new OxyRect(at.X + start, at.Y + up, length, line);
+        _texts.Add(new PlacedText(text, box, style));
+        _drawn.Add(p => p.Write(baseline, text, style, align, rotated));
     }
 
     /// <summary>Draws a line through points.</summary>
@@ -64,9 +53,7 @@ internal sealed class Sheet : IDisposable
             if (rounded.Count == 0 || !rounded[^1].Equals(point)) rounded.Add(point);
         }
 
-        if (rounded.Count < 2) return;
-        double[]? dash = pen.Dash is null ? null : [.. pen.Dash.Select(d => d * pen.Width)];
-        _context.DrawLine(rounded, Colour(pen.Colour), pen.Width, EdgeRenderingMode.Adaptive, dash, LineJoin.Round);
+        if (rounded.Count >= 2) _drawn.Add(p => p.Line(rounded, pen));
     }
 
     /// <summary>Draws a straight line.</summary>
@@ -76,8 +63,8 @@ internal sealed class Sheet : IDisposable
     public void Fill(OxyRect box, int colour)
     {
         if (box.Width <= 0 || box.Height <= 0) return;
-        var (from, to) = (Round(new ScreenPoint(box.Left, box.Top)), Round(new ScreenPoint(box.Right, box.Bottom)));
-        _context.DrawRectangle(new OxyRect(from, to), Colour(colour), OxyColors.Undefined, 0, EdgeRenderingMode.Adaptive);
+        var rounded = new OxyRect(Round(new ScreenPoint(box.Left, box.Top)), Round(new ScreenPoint(box.Right, box.Bottom)));
+        _drawn.Add(p => p.Fill(rounded, colour));
     }
 
     /// <summary>Draws the outline of a rectangle.</summary>
@@ -85,29 +72,17 @@ internal sealed class Sheet : IDisposable
         [new(box.Left, box.Top), new(box.Right, box.Top), new(box.Right, box.Bottom), new(box.Left, box.Bottom), new(box.Left, box.Top)], pen);
 
     /// <summary>Fills a polygon.</summary>
-    public void Fill(IEnumerable<ScreenPoint> corners, int colour) => _context.DrawPolygon(
-        [.. corners.Select(Round)], Colour(colour), OxyColors.Undefined, 0, EdgeRenderingMode.Adaptive, null, LineJoin.Miter);
-
-    /// <summary>Writes the page as SVG: UTF-8, line feeds, scalable, with its title for readers that cannot see it.</summary>
-    public void WriteTo(Stream destination, string title)
+    public void Fill(IEnumerable<ScreenPoint> corners, int colour)
     {
-        _context.Complete();
-        _context.Flush();
-        var drawn = Encoding.UTF8.GetString(_svg.ToArray()).Replace("\r\n", "\n", StringComparison.Ordinal);
-        var body = drawn[(drawn.IndexOf('>', drawn.IndexOf("<svg", StringComparison.Ordinal)) + 1)..].TrimEnd();
-        var head = string.Create(
-            CultureInfo.InvariantCulture,
-            $"<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n<svg xmlns=\"http://www.w3.org/2000/svg\" width=\"{Width:0.##}\" height=\"{Height:0.##}\" viewBox=\"0 0 {Width:0.##} {Height:0.##}\" role=\"img\">\n  <title>{SecurityElement.Escape(PlainText.Clean(title))}</title>");
-        destination.Write(Encoding.UTF8.GetBytes(head + body + "\n"));
+        ScreenPoint[] rounded = [.. corners.Select(Round)];
+        _drawn.Add(p => p.Fill(rounded, colour));
     }
 
-    public void Dispose()
+    /// <summary>Draws everything on paper, in the order it was drawn here.</summary>
+    public void DrawOn(IPaper paper)
     {
-        _context.Dispose();
-        _svg.Dispose();
+        foreach (var draw in _drawn) draw(paper);
     }
-
-    private static OxyColor Colour(int rgb) => OxyColor.FromUInt32(0xFF000000 | (uint)rgb);
 
     private static ScreenPoint Round(ScreenPoint point) => new(Math.Round(point.X, 1), Math.Round(point.Y, 1));
 }

@@ -12,7 +12,7 @@ internal static class StrainPlane
 {
     private const int Points = 72;
     private static readonly TextStyle Small = new(8);
-    private static readonly TextStyle Faint = new(7.5, Palette.FaintText);
+    private static readonly TextStyle Faint = new(8, Palette.FaintText);
     private static readonly TextStyle Title = new(9.5, Palette.Text, true);
 
     /// <summary>Draws the plane of a group.</summary>
@@ -34,8 +34,8 @@ internal static class StrainPlane
         Marks.Ring(sheet, At(start.Item1, start.Item2), 3.5, new CurvePen(Palette.Grey, 1.1));
         Marks.Disc(sheet, At(center.Item1, center.Item2), 3.4, Palette.Ink);
         sheet.Outline(plot, new CurvePen(Palette.Frame, 0.8));
-        sheet.Write(new ScreenPoint((plot.Left + plot.Right) / 2, plot.Bottom + 24), "strain along Shmin, microstrain", Small, HorizontalAlignment.Center);
-        sheet.Write(new ScreenPoint(box.Left + 7, (plot.Top + plot.Bottom) / 2), "strain along SHmax, microstrain", Small, HorizontalAlignment.Center, true);
+        sheet.Write(new ScreenPoint((plot.Left + plot.Right) / 2, plot.Bottom + 24), "Along Shmin, microstrain", Small with { Bold = true }, HorizontalAlignment.Center);
+        sheet.Write(new ScreenPoint(box.Left + 7, (plot.Top + plot.Bottom) / 2), "Along SHmax, microstrain", Small with { Bold = true }, HorizontalAlignment.Center, true);
     }
 
     private static double Micro(double strain) => Units.Microstrain.FromSi(strain);

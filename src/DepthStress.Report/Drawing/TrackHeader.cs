@@ -11,7 +11,7 @@ internal static class TrackHeader
     private const double NoteHeight = 9;
     private static readonly TextStyle Title = new(9, Palette.Text, true);
     private static readonly TextStyle Label = new(8);
-    private static readonly TextStyle Number = new(7.5, Palette.FaintText);
+    private static readonly TextStyle Number = new(8, Palette.FaintText);
 
     /// <summary>The height a track's head needs in a track of some width.</summary>
     public static double Height(TrackView track, double width) =>

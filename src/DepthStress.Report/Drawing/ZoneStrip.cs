@@ -8,6 +8,7 @@ internal static class ZoneStrip
 {
     private const double BarWidth = 7;
     private const double Room = 5;
+    private static readonly TextStyle Head = new(9, Palette.Text, true);
     private static readonly TextStyle NameStyle = new(8);
     private static readonly CurvePen Edge = new(Palette.ZoneEdge, 0.5);
     private static readonly CurvePen Leader = new(Palette.FaintText, 0.4);
@@ -30,12 +31,13 @@ internal static class ZoneStrip
     }
 
     /// <summary>
-    /// Draws the strip: a bar of the zones at its right edge, names to the left of it with a leader where they had to move;
+    /// Draws the strip with its head: a bar of the zones at its right edge, names to the left of it with a leader where they had to move;
     /// at a given height how many zones found no room for a name.
     /// </summary>
     public static void DrawNames(Sheet sheet, IReadOnlyList<ZoneSpan> zones, DepthAxis depth, double left, double right, double noteAt)
     {
         if (zones.Count == 0) return;
+        sheet.Write(new ScreenPoint(right, depth.ScreenTop - 6), "Zone", Head, HorizontalAlignment.Right);
         var (bar, lineHeight) = (right - BarWidth, NameStyle.Size * 1.2);
         foreach (var zone in zones)
         {

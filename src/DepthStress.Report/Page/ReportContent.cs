@@ -11,7 +11,7 @@ namespace DepthStress.Report.Page;
 public sealed record ReportContent(EarthModel Model, LayerTable Layers, PictureOptions Pictures)
 {
     /// <summary>The static pictures, drawn once for their files and the page.</summary>
-    public DrawnPictures Drawn { get => field ??= new(Model, Pictures); init; }
+    public DrawnPictures Drawn { get => field ??= new(Model, Layers, new LayerSettings(), Pictures); init; }
 
     /// <summary>The observations beside the model.</summary>
     public IReadOnlyList<Comparison> Comparisons { get => field ??= Comparison.Of(Model); init; }

@@ -21,6 +21,7 @@ public sealed class CliSameBytesTests : IDisposable
     {
         string[] wells = ["one/quillback-4.toml", "two/twin.toml", "three/twin.toml"];
         SampleLogs.Write(_cli.Folder.Of("one"));
+        File.AppendAllText(_cli.Folder.Of("one/quillback-4.toml"), "\n[output]\npdf = true\n");
         Twin.Write(_cli.Folder.Of("two"), 2000, 2);
         Twin.WriteOffshore(_cli.Folder.Of("three"), 2000, 3);
         var first = await Results("1");
@@ -45,6 +46,7 @@ public sealed class CliSameBytesTests : IDisposable
         {
             var result = await _cli.RunAsync(["run", .. wells, "--jobs", jobs]);
             Assert.Equal(0, result.Code);
+            Assert.Contains("pictures.pdf", _cli.Files("one/quillback-4-results").Keys);
             string[] folders = ["one/quillback-4-results", "two/twin-results", "three/twin-results"];
             return [result.Output, .. folders.SelectMany(f => _cli.Files(f).Select(p => $"{f}/{p.Key} {p.Value}"))];
         }

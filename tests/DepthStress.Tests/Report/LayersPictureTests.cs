@@ -16,7 +16,7 @@ public class LayersPictureTests
     [Fact]
     public void Titles_name_the_well_the_layers_the_datum_and_the_units()
     {
-        using var sheet = LayersPicture.Draw(Model, PictureModels.Layers(Model, 150), new LayerSettings(), UnitSystem.Field);
+        var sheet = LayersPicture.Draw(Model, PictureModels.Layers(Model, 150), new LayerSettings(), UnitSystem.Field);
         var texts = sheet.Texts.Select(t => t.Text).ToList();
         var count = PictureModels.Layers(Model, 150).Layers.Count;
         Assert.Contains(FormattableString.Invariant($"Example 1 \u00b7 {count} layers over the profile"), texts);
@@ -68,14 +68,14 @@ public class LayersPictureTests
     {
         var table = PictureModels.Layers(Model, 12);
         Assert.True(table.Layers.Count > 150);
-        using var sheet = LayersPicture.Draw(Model, table, new LayerSettings(), UnitSystem.Metric);
+        var sheet = LayersPicture.Draw(Model, table, new LayerSettings(), UnitSystem.Metric);
         Assert.InRange(sheet.Texts.Count(t => t.Box.Right < 120 && t.Box.Left > 92 && int.TryParse(t.Text, out _)), 30, 70);
     }
 
     [Fact]
     public void A_well_without_layers_still_gets_its_page()
     {
-        using var sheet = LayersPicture.Draw(Model, new LayerTable([]), new LayerSettings(), UnitSystem.Metric);
+        var sheet = LayersPicture.Draw(Model, new LayerTable([]), new LayerSettings(), UnitSystem.Metric);
         Assert.Contains(sheet.Texts, t => t.Text == "Example 1 \u00b7 0 layers over the profile");
     }
 }

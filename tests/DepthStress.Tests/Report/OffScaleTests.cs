@@ -58,7 +58,7 @@ public class OffScaleTests
         var values = Enumerable.Range(0, 5000).Select(i => i % 5 == 0 ? 200.0 : 50).ToArray();
         var model = PictureModels.Small(
             PictureModels.Depths(5000, 1000, 2000), "spiky", [], ("density", [.. Enumerable.Repeat(2300.0, 5000)]), ("gamma_ray", values));
-        using var sheet = TracksPicture.Draw(model, UnitSystem.Metric, [TrackTable.Find("gamma_ray")!]);
+        var sheet = TracksPicture.Draw(model, UnitSystem.Metric, [TrackTable.Find("gamma_ray")!]);
         Assert.Contains(sheet.Texts, t => t.Text == "1000 off scale");
         Assert.Contains(sheet.Texts, t => t.Text.StartsWith("A wedge", StringComparison.Ordinal));
     }

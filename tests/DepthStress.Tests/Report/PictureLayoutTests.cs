@@ -6,7 +6,6 @@ using DepthStress.Core.Model;
 using DepthStress.Core.Quantities;
 using DepthStress.Report;
 using DepthStress.Report.Drawing;
-using OxyPlot;
 
 namespace DepthStress.Tests.Report;
 
@@ -31,20 +30,7 @@ public class PictureLayoutTests
     public void No_two_texts_overlap_and_all_lie_on_the_page(string name, UnitSystem units)
     {
         var model = Model(name);
-        foreach (var sheet in Sheets(model, units))
-        {
-            using (sheet)
-            {
-                var page = new OxyRect(0, 0, sheet.Width, sheet.Height);
-                Assert.NotEmpty(sheet.Texts);
-                Assert.All(sheet.Texts, t => Assert.True(Contains(page, t.Box), $"\"{t.Text}\" is cut off"));
-                for (var i = 0; i < sheet.Texts.Count; i++)
-                {
-                    for (var j = i + 1; j < sheet.Texts.Count; j++)
-                        Assert.False(Overlap(sheet.Texts[i].Box, sheet.Texts[j].Box), $"\"{sheet.Texts[i].Text}\" overlaps \"{sheet.Texts[j].Text}\"");
-                }
-            }
-        }
+        foreach (var sheet in Sheets(model, units)) SheetChecks.NoTextOverlapsOrIsCutOff(sheet);
     }
 
     [Theory]
@@ -52,7 +38,7 @@ public class PictureLayoutTests
     [InlineData(UnitSystem.Field)]
     public void All_tracks_fit_on_A4_without_a_shortened_text(UnitSystem units)
     {
-        using var sheet = TracksPicture.Draw(PictureModels.Full(layered: true), units, TrackTable.All);
+        var sheet = TracksPicture.Draw(PictureModels.Full(layered: true), units, TrackTable.All);
         Assert.Equal(PageFrame.LongSide, sheet.Width, 0.1); // placed to a tenth of 1/96 inch
         Assert.Equal(PageFrame.ShortSide, sheet.Height);
         Assert.DoesNotContain(sheet.Texts, t => t.Text.Contains('\u2026', StringComparison.Ordinal));
@@ -84,7 +70,7 @@ public class PictureLayoutTests
     [Fact]
     public void Zones_without_room_for_a_name_are_counted()
     {
-        using var sheet = TracksPicture.Draw(Model("very many zones"), UnitSystem.Metric, TrackTable.All);
+        var sheet = TracksPicture.Draw(Model("very many zones"), UnitSystem.Metric, TrackTable.All);
         var named = sheet.Texts.Count(t => t.Text.EndsWith(" bed", StringComparison.Ordinal));
         Assert.InRange(named, 40, 119);
         Assert.Contains(sheet.Texts, t => t.Text == Numbered(120 - named, " unnamed"));
@@ -93,8 +79,8 @@ public class PictureLayoutTests
     [Fact]
     public void Titles_name_the_well_the_datum_and_the_units()
     {
-        using var tracks = TracksPicture.Draw(PictureModels.Full(), UnitSystem.Field, TrackTable.All);
-        using var stress = StressPicture.Draw(PictureModels.Full(), UnitSystem.Metric);
+        var tracks = TracksPicture.Draw(PictureModels.Full(), UnitSystem.Field, TrackTable.All);
+        var stress = StressPicture.Draw(PictureModels.Full(), UnitSystem.Metric);
         Assert.Contains(tracks.Texts, t => t.Text == "Example 1 \u00b7 depth tracks");
         Assert.Contains(tracks.Texts, t => t.Text == "Rotary table at 1024.9 ft above mean sea level; ground at 1001.3 ft above mean sea level");
         Assert.Contains(tracks.Texts, t => t.Text == "MD, ft");
@@ -114,6 +100,7 @@ public class PictureLayoutTests
         yield return LayersPicture.Draw(model, PictureModels.Layers(model, 1e4), new LayerSettings(), units);
         yield return LayersPicture.Draw(model, PictureModels.Layers(model, 17), new LayerSettings(), units);
         yield return PolygonPicture.Draw(model, new PictureOptions(units));
+        yield return ComparePicture.Draw(PictureModels.Pair(model), units);
         foreach (var count in new[] { 1, 2, 3, 4, 5, 6 })
         {
             var (top, bottom) = (model.Values.Read(Property.MeasuredDepth)[0], model.Values.Read(Property.MeasuredDepth)[^1]);
@@ -135,9 +122,4 @@ public class PictureLayoutTests
     };
 
     private static string Numbered(int number, string text) => number.ToString(CultureInfo.InvariantCulture) + text;
-
-    private static bool Overlap(OxyRect a, OxyRect b) =>
-        Math.Min(a.Right, b.Right) - Math.Max(a.Left, b.Left) > 0.01 && Math.Min(a.Bottom, b.Bottom) - Math.Max(a.Top, b.Top) > 0.01;
-
-    private static bool Contains(OxyRect page, OxyRect box) => box.Left >= 0 && box.Top >= 0 && box.Right <= page.Right && box.Bottom <= page.Bottom;
 }

@@ -7,6 +7,7 @@ using DepthStress.Core.Model;
 using DepthStress.Core.Pressure;
 using DepthStress.Core.Rock;
 using DepthStress.Core.Stress;
+using DepthStress.Report;
 
 namespace DepthStress.Tests.Report;
 
@@ -40,6 +41,17 @@ internal static class PictureModels
         var diagnostics = new DiagnosticBag();
         return LayerBuilder.Build(model, new LayerSettings { MaxThickness = Set(thickness), LargestMissingShare = Set(1.0) }, diagnostics)
             ?? throw new InvalidOperationException(string.Join("\n", diagnostics.Items.Select(d => d.Text)));
+    }
+
+    /// <summary>A model beside itself with a twentieth more stress.</summary>
+    public static ProfilePair Pair(EarthModel model)
+    {
+        double[] tvd = [.. model.Values.Read(Property.TrueVerticalDepth)];
+        (string Id, Property Stress)[] curves = [("pp", Property.PorePressure), ("shmax", Property.MaxHorizontalStress), ("shmin", Property.MinHorizontalStress), ("sv", Property.VerticalStress)];
+        return new ProfilePair(
+            model.Setup.Name, model.Setup.Frame, "before-results", "after-results", tvd, tvd,
+            [.. curves.Select(c => (c.Id, Values: (double[])[.. model.Values.Read(c.Stress)])).Select(c => new ProfilePairCurve(
+                c.Id, c.Values, [.. c.Values.Select(v => v * 1.05)], [.. c.Values.Select(v => v * 0.05)]))]);
     }
 
     /// <summary>Evenly spaced depths, m.</summary>

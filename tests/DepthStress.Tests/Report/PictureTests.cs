@@ -115,7 +115,7 @@ public class PictureTests
         var model = PictureModels.Full(100);
         model = model with { Setup = model.Setup with { Frame = new DepthFrame(DatumKind.SeaLevel, 0, null, 95, null) } };
         var texts = Texts(Stress(model));
-        Assert.Contains("water depth 95.0 m", texts);
+        Assert.Contains("Datum at mean sea level; water depth 95.0 m", texts);
         Assert.Contains("True vertical depth below mean sea level, m", texts);
         Assert.Contains("reference: water of 1.04 g/cm3 below the sea surface", texts);
     }
@@ -123,7 +123,7 @@ public class PictureTests
     [Fact]
     public void True_vertical_depths_stand_where_the_samples_pass_them()
     {
-        using var sheet = TracksPicture.Draw(PictureModels.Full(3000), UnitSystem.Field, [TrackTable.All[1]]);
+        var sheet = TracksPicture.Draw(PictureModels.Full(3000), UnitSystem.Field, [TrackTable.All[1]]);
         var labels = sheet.Texts.Where(t => t.Box.Left > 70 && t.Box.Right < 120 && double.TryParse(t.Text, CultureInfo.InvariantCulture, out _)).Select(t => t.Text);
         Assert.Equal(["3000", "4000", "5000", "6000", "7000", "8000", "9000", "10000"], labels);
     }
@@ -133,7 +133,7 @@ public class PictureTests
     {
         var model = PictureModels.Full(500);
         model.Values.Write(Property.TrueVerticalDepth).Fill(2500.3);
-        using var sheet = TracksPicture.Draw(model, UnitSystem.Metric, [TrackTable.All[1]]);
+        var sheet = TracksPicture.Draw(model, UnitSystem.Metric, [TrackTable.All[1]]);
         Assert.InRange(sheet.Texts.Count(t => t.Text == "2500.3"), 3, 10);
     }
 

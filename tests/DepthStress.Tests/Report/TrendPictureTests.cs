@@ -10,7 +10,7 @@ public class TrendPictureTests
     [Fact]
     public void The_trend_and_its_shale_are_drawn_and_named()
     {
-        using var sheet = TracksPicture.Draw(PressureWell.Computed(PressureWell.Eaton), UnitSystem.Metric, [TrackTable.Find("slowness")!]);
+        var sheet = TracksPicture.Draw(PressureWell.Computed(PressureWell.Eaton), UnitSystem.Metric, [TrackTable.Find("slowness")!]);
         Assert.Contains(sheet.Texts, t => t.Text == "shale of the trend");
         Assert.Contains(sheet.Texts, t => t.Text == "normal trend");
     }
