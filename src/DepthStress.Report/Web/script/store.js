@@ -3,10 +3,13 @@ import { convert, digitsText, digitsValue, fixedText } from "./numbers.js";
 const MISSING = -2147483648;
 
 function decode(text, wide) {
-  const bytes = Uint8Array.from(atob(text), (c) => c.charCodeAt(0));
+  const binary = atob(text);
+  const bytes = new Uint8Array(binary.length);
+  for (let i = 0; i < binary.length; i++) bytes[i] = binary.charCodeAt(i);
   if (wide) return new Float64Array(bytes.buffer);
-  const whole = new Int32Array(bytes.buffer);
-  return Float64Array.from(whole, (v) => (v === MISSING ? NaN : v));
+  const digits = Float64Array.from(new Int32Array(bytes.buffer));
+  for (let i = 0; i < digits.length; i++) if (digits[i] === MISSING) digits[i] = NaN;
+  return digits;
 }
 
 /** The data of the page: columns of printed digits by id, words by id, tracks, zones, layers, observations. */
@@ -19,10 +22,21 @@ export function readStore(text) {
 
 function column(raw, own) {
   const unit = raw[own];
-  const low = decode(raw.low, raw.wide);
-  const high = raw.high ? decode(raw.high, raw.wide) : low;
+  // Decoded when first asked for: a page opens with some of its tracks.
+  let digits = null;
+  const ends = () => {
+    if (!digits) {
+      const low = decode(raw.low, raw.wide);
+      digits = { low, high: raw.high ? decode(raw.high, raw.wide) : low };
+    }
+    return digits;
+  };
   const cache = new Map();
-  const scaled = (digits, to) => Float64Array.from(digits, (d) => convert(digitsValue(d, unit.decimals), unit, to));
+  const scaled = (digits, to) => {
+    const values = new Float64Array(digits.length);
+    for (let i = 0; i < digits.length; i++) values[i] = convert(digitsValue(digits[i], unit.decimals), unit, to);
+    return values;
+  };
   return {
     id: raw.id,
     title: raw.title,
@@ -31,6 +45,7 @@ function column(raw, own) {
     /** Values of all rows in a unit system: the least and the greatest of each. */
     values(units) {
       if (!cache.has(units)) {
+        const { low, high } = ends();
         const first = scaled(low, raw[units]);
         cache.set(units, { low: first, high: high === low ? first : scaled(high, raw[units]) });
       }
@@ -42,6 +57,7 @@ function column(raw, own) {
         units === own
           ? digitsText(digits, unit.decimals)
           : fixedText(convert(digitsValue(digits, unit.decimals), unit, raw[units]), raw[units].decimals);
+      const { low, high } = ends();
       const [a, b] = [one(low[row]), one(high[row])];
       return a === b ? a : `${a} to ${b}`;
     },
