@@ -77,6 +77,7 @@ public static class ReportPage
             : ["No zone is marked as a target, so no stress barriers are looked for (target = true in a zone)."];
         return string.Concat(barriers.Select(b => Html.Paragraph(b, "barrier")))
             + string.Concat(Targets.Uncertainty(content).Select(b => Html.Paragraph(b)))
+            + Html.Paragraph(StressWords.Of(content.Model, content.Pictures.Units))
             + Html.Paragraph(Targets.Basis(content.Model))
             + Html.List(content.Observed, "No observation was given: nothing but the logs and the choices speaks for these stresses.");
     }

@@ -55,7 +55,7 @@ public static class StressPicture
         }
 
         if (views[1] is { } gradient)
-            DrawPanel(sheet, gradient, $"Gradient: value / depth below {(model.Setup.Frame.IsOffshore ? "sea surface" : "ground")}", units, axis, middle + Gap, right - names - 8, []);
+            DrawPanel(sheet, gradient, $"Gradient: {PageTexts.Gradient(model.Setup.Frame)}", units, axis, middle + Gap, right - names - 8, []);
         PageFrame.DrawCaution(sheet);
         return sheet;
     }

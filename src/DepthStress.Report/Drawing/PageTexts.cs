@@ -24,6 +24,9 @@ internal static class PageTexts
         return string.Join("; ", new[] { datum, solid }.Where(t => t.Length > 0));
     }
 
+    /// <summary>What gradients are taken over.</summary>
+    public static string Gradient(DepthFrame frame) => $"value / depth below {(frame.IsOffshore ? "sea surface" : "ground")}";
+
     /// <summary>A number of samples in few words.</summary>
     public static string OffScale(int samples) => string.Create(CultureInfo.InvariantCulture, $"{samples} off scale");
 

@@ -24,11 +24,30 @@ public sealed partial class ReportPageTests
     public void The_page_has_its_parts_in_order_with_the_summary_first()
     {
         var page = Write(Content(PictureModels.Full()) with { Barriers = ["the barrier line"] });
-        string[] parts = ["Content-Security-Policy", "<h1>Example 1</h1>", "the barrier line", "What it rests on, by", "Caution.", "id=\"viewer\"", "id=\"pictures\"",
+        string[] parts = ["Content-Security-Policy", "<h1>Example 1</h1>", "the barrier line", "The stress, as value / depth below ground: Shmin ", "What it rests on, by", "Caution.", "id=\"viewer\"", "id=\"pictures\"",
             "<table id=\"zones\">", "<table id=\"choices\">", "<table id=\"spread\">", "There are no layers.", "none was solved", "There are no observations", "id=\"findings-title\"", "<table id=\"curves\">", "<table id=\"methods\">", "id=\"data\""];
         var places = parts.Select(p => page.IndexOf(p, StringComparison.Ordinal)).ToList();
         Assert.All(places, p => Assert.True(p >= 0));
         Assert.Equal(places.Order(), places);
+    }
+
+    // By hand from the model's own columns, apart from the page's chunks.
+    [Fact]
+    public void The_stress_in_words_has_the_means_and_ends_of_the_gradients_and_the_shares_of_the_regimes()
+    {
+        var model = PictureModels.Full(5000);
+        var column = DepthColumns.Get("shmin_gradient");
+        var values = new double[model.Count];
+        column.Fill(model, 0, UnitSystem.Field, values);
+        var known = values.Where(double.IsFinite).ToList();
+        var words = StressWords.Of(model, UnitSystem.Field);
+        Assert.Contains(string.Create(CultureInfo.InvariantCulture, $"Shmin {known.Average():F3} psi/ft on average ({known.Min():F3} to {known.Max():F3})"), words, StringComparison.Ordinal);
+        var regimes = new string[model.Count];
+        DepthColumns.All.OfType<TextColumn<EarthModel>>().First(c => c.Id == "regime").Read(model, 0, regimes);
+        var named = regimes.Where(r => r.Length > 0).ToList();
+        Assert.NotEmpty(named);
+        foreach (var regime in named.Distinct())
+            Assert.Contains(string.Create(CultureInfo.InvariantCulture, $"{regime} in {100.0 * named.Count(r => r == regime) / named.Count:F1} %"), words, StringComparison.Ordinal);
     }
 
     [Fact]
