@@ -15,6 +15,9 @@ public static class BoundedFit
     private const int MostSteps = 500;
     private const int MostReweightings = 100;
 
+    /// <summary>So many steps in a row that gain no more than rounding end the search: they would go to and fro. From the first damping to the last there are fewer.</summary>
+    private const int MostIdle = 40;
+
     /// <summary>A relative step below this ends the search.</summary>
     private const double SmallStep = 1e-10;
 
@@ -82,9 +85,20 @@ public static class BoundedFit
         var (damping, converged, quiet, steps) = (0.0, false, 0, 0);
         var sum = Sum(residuals, roots);
         var fresh = true;
+        var (best, idle) = (sum, 0);
         while (steps < MostSteps && !converged && sum > 0)
         {
             steps++;
+            if (sum < (best * (1 - Rounding)) - Nothing)
+            {
+                (best, idle) = (sum, 0);
+            }
+            else if (++idle >= MostIdle)
+            {
+                converged = true;
+                break;
+            }
+
             if (fresh) Linearise();
             var linear = new LinearStep(problem, at, residuals, jacobian, roots, lengths);
             if (linear.Solve(damping) is not var (moved, left))
