@@ -13,6 +13,8 @@ public static class PorosityMethods
 
     private static readonly LawInput FluidSlowness = InputOf.Slowness with { Symbol = "dt_f", Property = Property.FluidSlowness };
 
+    private static readonly LawFamily Family = new(Property.Porosity, "", Units.Fraction, new(0, 1));
+
     /// <summary>The entries.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [
@@ -60,21 +62,6 @@ public static class PorosityMethods
     }
 
     private static Law Entry(
-        string id, string title, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Porosity,
-            Unit = Units.Fraction,
-            Rocks = RockKinds.Any,
-            Inputs = inputs,
-            Coefficients = Coefficient.Named(c),
-            Template = template,
-            Formula = formula,
-            ResultDomain = new(0, 1),
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) =>
+        Family.Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, standing, example);
 }

@@ -11,6 +11,8 @@ public static class ShaleMethods
 
     private const string Larionovs = $"Larionov 1969, {Public}; example in Asquith and Gibson 1982, fig. 38; an SPWLA 2021 abstract holds that the source was partly mistranslated";
 
+    private static readonly LawFamily Family = new(Property.ShaleVolume, "", Units.Fraction, new(0, 1));
+
     /// <summary>The entries.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [
@@ -47,21 +49,6 @@ public static class ShaleMethods
     }
 
     private static Law Entry(
-        string id, string title, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.ShaleVolume,
-            Unit = Units.Fraction,
-            Rocks = RockKinds.Any,
-            Inputs = [InputOf.GammaRayIndex],
-            Coefficients = Coefficient.Named(c),
-            Template = template,
-            Formula = formula,
-            ResultDomain = new(0, 1),
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) =>
+        Family.Entry(id, title, [InputOf.GammaRayIndex], template, formula, Coefficient.Named(c), validity, source, standing, example);
 }

@@ -13,47 +13,21 @@ internal static class PredictionEntry
     /// <summary>What a shear velocity can be, km/s: above zero.</summary>
     public static Interval ShearDomain { get; } = new(double.Epsilon, double.PositiveInfinity);
 
+    private static LawFamily Shears { get; } = new(Property.Vs, "Vs", Units.KilometrePerSecond, ShearDomain);
+
+    private static LawFamily Densities { get; } = new(Property.Density, "rho", Units.GramPerCubicCentimetre, CredibleDensity);
+
     /// <summary>A relation for shear velocity.</summary>
     public static Law Shear(
         string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c,
-        string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Vs,
-            Unit = Units.KilometrePerSecond,
-            Rocks = rocks,
-            Inputs = inputs,
-            Coefficients = Coefficient.Named(c),
-            Template = "Vs = " + template,
-            Formula = formula,
-            ResultDomain = ShearDomain,
-            Validity = validity,
-            Source = Said(source, standing),
-            Standing = standing,
-            Example = example,
-        };
+        string validity, string source, Standing standing, WorkedExample example) =>
+        (Shears with { Rocks = rocks }).Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, Said(source, standing), standing, example);
 
     /// <summary>A relation for bulk density.</summary>
     public static Law Density(
         string id, string title, RockKinds rocks, LawInput input, string template, LawFormula formula, double[] c,
-        string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Density,
-            Unit = Units.GramPerCubicCentimetre,
-            Rocks = rocks,
-            Inputs = [input],
-            Coefficients = Coefficient.Named(c),
-            Template = "rho = " + template,
-            Formula = formula,
-            ResultDomain = CredibleDensity,
-            Validity = validity,
-            Source = Said(source, standing),
-            Standing = standing,
-            Example = example,
-        };
+        string validity, string source, Standing standing, WorkedExample example) =>
+        (Densities with { Rocks = rocks }).Entry(id, title, [input], template, formula, Coefficient.Named(c), validity, Said(source, standing), standing, example);
 
     private static string Said(string source, Standing standing) =>
         standing == Standing.FromMemory ? source + "; coefficients recalled, not read" : source;

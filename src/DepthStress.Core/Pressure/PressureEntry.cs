@@ -18,21 +18,6 @@ internal static class PressureEntry
 
     /// <summary>A law in the unit of its stresses.</summary>
     public static Law Of(
-        string id, string title, LawInput[] inputs, Coefficient[] coefficients, string template, LawFormula formula, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.PorePressure,
-            Unit = inputs[0].Unit,
-            Rocks = RockKinds.Shale,
-            Inputs = inputs,
-            Coefficients = coefficients,
-            Template = "Pp = " + template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, LawInput[] inputs, Coefficient[] coefficients, string template, LawFormula formula, string validity, string source, Standing standing, WorkedExample example) =>
+        new LawFamily(Property.PorePressure, "Pp", inputs[0].Unit, Interval.NotNegative) { Rocks = RockKinds.Shale }.Entry(id, title, inputs, template, formula, coefficients, validity, source, standing, example);
 }

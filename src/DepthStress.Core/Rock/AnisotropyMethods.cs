@@ -61,20 +61,7 @@ public static class AnisotropyMethods
     private static LawInput Stiffness(string symbol, Property property) => new(symbol, property, Units.Gigapascal, Positive, Interval.All);
 
     private static Law Of(
-        string id, string title, Property predicts, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, string validity, string source, double result, int digits, params double[] example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = predicts,
-            Unit = Units.Gigapascal,
-            Rocks = rocks,
-            Inputs = inputs,
-            Template = template,
-            Formula = formula,
-            ResultDomain = Interval.Physical(predicts),
-            Validity = validity,
-            Source = source,
-            Standing = Standing.FromMemory,
-            Example = WorkedExample.Computed(result, digits, example),
-        };
+        string id, string title, Property predicts, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, string validity, string source, double result, int digits, params double[] example) =>
+        (new LawFamily(predicts, "", Units.Gigapascal, Interval.Physical(predicts)) { Rocks = rocks })
+            .Entry(id, title, inputs, template, formula, [], validity, source, Standing.FromMemory, WorkedExample.Computed(result, digits, example));
 }

@@ -10,6 +10,8 @@ namespace DepthStress.Core.Rock;
 /// </summary>
 public static class BrittlenessMethods
 {
+    private static readonly LawFamily Family = new(Property.Brittleness, "B", Units.One, Interval.NotNegative);
+
     private static readonly LawInput Strength = new("UCS", Property.Ucs, Units.Megapascal, new(double.Epsilon, double.PositiveInfinity), Interval.All);
 
     private static readonly LawInput Tensile = new("T0", Property.TensileStrength, Units.Megapascal, new(double.Epsilon, double.PositiveInfinity), Interval.All);
@@ -38,21 +40,6 @@ public static class BrittlenessMethods
     ];
 
     private static Law Entry(
-        string id, string title, LawInput[] inputs, Coefficient[] coefficients, string template, LawFormula formula, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Brittleness,
-            Unit = Units.One,
-            Rocks = RockKinds.Any,
-            Inputs = inputs,
-            Coefficients = coefficients,
-            Template = "B = " + template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, LawInput[] inputs, Coefficient[] coefficients, string template, LawFormula formula, string validity, string source, Standing standing, WorkedExample example) =>
+        Family.Entry(id, title, inputs, template, formula, coefficients, validity, source, standing, example);
 }

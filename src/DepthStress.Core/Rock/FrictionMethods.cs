@@ -9,6 +9,8 @@ public static class FrictionMethods
 {
     private const string Zoback = "read in Zoback 2007, Reservoir Geomechanics, p. 116, Table 4.4";
 
+    private static readonly LawFamily Family = new(Property.FrictionAngle, "", Units.Degree, new(0, 90));
+
     private static readonly LawInput GammaRay = new("GR", Property.GammaRay, Units.GammaApi, Interval.NotNegative, new(60, 120));
 
     /// <summary>The entries.</summary>
@@ -40,21 +42,6 @@ public static class FrictionMethods
     }
 
     private static Law Entry(
-        string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, Coefficient[] coefficients, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.FrictionAngle,
-            Unit = Units.Degree,
-            Rocks = rocks,
-            Inputs = inputs,
-            Coefficients = coefficients,
-            Template = template,
-            Formula = formula,
-            ResultDomain = new(0, 90),
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, Coefficient[] coefficients, string validity, string source, Standing standing, WorkedExample example) =>
+        (Family with { Rocks = rocks }).Entry(id, title, inputs, template, formula, coefficients, validity, source, standing, example);
 }

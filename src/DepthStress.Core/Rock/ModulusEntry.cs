@@ -10,25 +10,12 @@ internal static class ModulusEntry
     /// <summary>A law whose coefficients were recalled, not read; moduli in GPa.</summary>
     public static Law Recalled(
         string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, WorkedExample example) =>
-        Of(id, title, rocks, Units.Gigapascal, inputs, template, formula, c, validity, source + "; coefficients recalled, not read", Standing.FromMemory, example);
+        Family(rocks, Units.Gigapascal).Recalled(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, example);
 
     /// <summary>Any law.</summary>
     public static Law Of(
-        string id, string title, RockKinds rocks, Unit unit, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.YoungsStatic,
-            Unit = unit,
-            Rocks = rocks,
-            Inputs = inputs,
-            Coefficients = Coefficient.Named(c),
-            Template = template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        string id, string title, RockKinds rocks, Unit unit, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) =>
+        Family(rocks, unit).Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, standing, example);
+
+    private static LawFamily Family(RockKinds rocks, Unit unit) => new(Property.YoungsStatic, "", unit, Interval.NotNegative) { Rocks = rocks };
 }

@@ -17,32 +17,15 @@ internal static class StrengthEntry
     /// <summary>For laws whose source names a modulus only by its letter.</summary>
     public const string StaticTaken = "the source does not say whether E is static; static is taken, dynamic would give two to three times the strength";
 
+    private static readonly LawFamily Family = new(Property.Ucs, "UCS", Units.Megapascal, Interval.NotNegative);
+
     /// <summary>A law whose coefficients were read in its source.</summary>
     public static Law Read(
         string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, WorkedExample example) =>
-        Of(id, title, rocks, inputs, template, formula, c, validity, source, Standing.Confirmed, example);
+        (Family with { Rocks = rocks }).Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, Standing.Confirmed, example);
 
     /// <summary>A law whose coefficients were recalled, not read.</summary>
     public static Law Recalled(
         string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, WorkedExample example) =>
-        Of(id, title, rocks, inputs, template, formula, c, validity, source + "; coefficients recalled, not read", Standing.FromMemory, example);
-
-    private static Law Of(
-        string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c, string validity, string source, Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Ucs,
-            Unit = Units.Megapascal,
-            Rocks = rocks,
-            Inputs = inputs,
-            Coefficients = Coefficient.Named(c),
-            Template = "UCS = " + template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        (Family with { Rocks = rocks }).Recalled(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, example);
 }

@@ -7,6 +7,10 @@ namespace DepthStress.Core.Rock;
 /// <summary>Catalogue entries that give tensile strength, each a share of unconfined compressive strength.</summary>
 public static class TensileMethods
 {
+    private static readonly LawFamily Family = new(Property.TensileStrength, "T0", Units.Megapascal, Interval.NotNegative);
+
+    private static readonly LawInput[] Inputs = [new("UCS", Property.Ucs, Units.Megapascal, Interval.NotNegative, Interval.All)];
+
     /// <summary>The entries.</summary>
     public static IReadOnlyList<Law> All { get; } =
     [
@@ -20,21 +24,6 @@ public static class TensileMethods
             "rule of the trade, lower end", "common practice; factor recalled, not read", Standing.FromMemory, WorkedExample.Computed(5.0, 3, 60)),
     ];
 
-    private static Law Entry(string id, string title, double factor, string validity, string source, Standing standing, WorkedExample example) => new()
-    {
-        Id = id,
-        Title = title,
-        Predicts = Property.TensileStrength,
-        Unit = Units.Megapascal,
-        Rocks = RockKinds.Any,
-        Inputs = [new("UCS", Property.Ucs, Units.Megapascal, Interval.NotNegative, Interval.All)],
-        Coefficients = Coefficient.Named(factor),
-        Template = "T0 = UCS / {a}",
-        Formula = LawForms.Share,
-        ResultDomain = Interval.NotNegative,
-        Validity = validity,
-        Source = source,
-        Standing = standing,
-        Example = example,
-    };
+    private static Law Entry(string id, string title, double factor, string validity, string source, Standing standing, WorkedExample example) =>
+        Family.Entry(id, title, Inputs, "UCS / {a}", LawForms.Share, Coefficient.Named(factor), validity, source, standing, example);
 }

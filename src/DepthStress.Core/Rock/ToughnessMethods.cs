@@ -9,6 +9,8 @@ public static class ToughnessMethods
 {
     private const string Whittaker = "Whittaker, Singh and Sun 1992, Rock Fracture Mechanics";
 
+    private static readonly LawFamily Family = new(Property.Toughness, "KIC", Units.MegapascalRootMetre, Interval.NotNegative);
+
     private static readonly LawInput Tensile = new("T0", Property.TensileStrength, Units.Megapascal, Interval.NotNegative, Interval.All);
 
     /// <summary>The entries.</summary>
@@ -27,21 +29,6 @@ public static class ToughnessMethods
     ];
 
     private static Law Entry(
-        string id, string title, LawInput input, string template, LawFormula formula, double[] c, string validity, string source, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.Toughness,
-            Unit = Units.MegapascalRootMetre,
-            Rocks = RockKinds.Any,
-            Inputs = [input],
-            Coefficients = Coefficient.Named(c),
-            Template = "KIC = " + template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source + "; coefficients recalled, not read",
-            Standing = Standing.FromMemory,
-            Example = example,
-        };
+        string id, string title, LawInput input, string template, LawFormula formula, double[] c, string validity, string source, WorkedExample example) =>
+        Family.Recalled(id, title, [input], template, formula, Coefficient.Named(c), validity, source, example);
 }

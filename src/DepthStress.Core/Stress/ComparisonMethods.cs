@@ -107,21 +107,6 @@ public static class ComparisonMethods
 
     private static Law Entry(
         string id, string title, Unit unit, LawInput[] inputs, Coefficient[] coefficients, string template, LawFormula formula, string validity, string source,
-        Standing standing, WorkedExample example) => new()
-        {
-            Id = id,
-            Title = title,
-            Predicts = Property.ComparisonShmin,
-            Unit = unit,
-            Rocks = RockKinds.Any,
-            Inputs = inputs,
-            Coefficients = coefficients,
-            Template = "Shmin = " + template,
-            Formula = formula,
-            ResultDomain = Interval.NotNegative,
-            Validity = validity,
-            Source = source,
-            Standing = standing,
-            Example = example,
-        };
+        Standing standing, WorkedExample example) =>
+        new LawFamily(Property.ComparisonShmin, "Shmin", unit, Interval.NotNegative).Entry(id, title, inputs, template, formula, coefficients, validity, source, standing, example);
 }
