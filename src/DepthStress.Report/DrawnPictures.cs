@@ -39,14 +39,20 @@ public sealed class DrawnPictures(EarthModel model, LayerTable layers, LayerSett
         PdfBook.Write([_tracks.Sheet, _stress.Sheet, _layers.Sheet, _polygon.Sheet], $"{model.Setup.Name}: pictures", destination);
     }
 
-    private sealed class Picture(Func<Sheet> draw)
+    private sealed class Picture
     {
-        private readonly Lazy<Sheet> _sheet = new(draw);
-        private byte[]? _svg;
+        private readonly Lazy<Sheet> _sheet;
+        private readonly Lazy<byte[]> _svg;
+
+        public Picture(Func<Sheet> draw)
+        {
+            _sheet = new(draw);
+            _svg = new(Write);
+        }
 
         public Sheet Sheet => _sheet.Value;
 
-        public byte[] Svg => LazyInitializer.EnsureInitialized(ref _svg, Write);
+        public byte[] Svg => _svg.Value;
 
         private byte[] Write()
         {

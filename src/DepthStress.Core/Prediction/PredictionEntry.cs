@@ -21,14 +21,17 @@ internal static class PredictionEntry
     public static Law Shear(
         string id, string title, RockKinds rocks, LawInput[] inputs, string template, LawFormula formula, double[] c,
         string validity, string source, Standing standing, WorkedExample example) =>
-        (Shears with { Rocks = rocks }).Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, Said(source, standing), standing, example);
+        Of(Shears with { Rocks = rocks }, id, title, inputs, template, formula, c, validity, source, standing, example);
 
     /// <summary>A relation for bulk density.</summary>
     public static Law Density(
         string id, string title, RockKinds rocks, LawInput input, string template, LawFormula formula, double[] c,
         string validity, string source, Standing standing, WorkedExample example) =>
-        (Densities with { Rocks = rocks }).Entry(id, title, [input], template, formula, Coefficient.Named(c), validity, Said(source, standing), standing, example);
+        Of(Densities with { Rocks = rocks }, id, title, [input], template, formula, c, validity, source, standing, example);
 
-    private static string Said(string source, Standing standing) =>
-        standing == Standing.FromMemory ? source + "; coefficients recalled, not read" : source;
+    private static Law Of(
+        LawFamily family, string id, string title, LawInput[] inputs, string template, LawFormula formula, double[] c,
+        string validity, string source, Standing standing, WorkedExample example) => standing == Standing.FromMemory
+        ? family.Recalled(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, example)
+        : family.Entry(id, title, inputs, template, formula, Coefficient.Named(c), validity, source, standing, example);
 }

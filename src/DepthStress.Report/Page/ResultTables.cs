@@ -63,44 +63,46 @@ internal static class ResultTables
     {
         if (content.Spreads is not { } spreads) return Html.Paragraph("So many samples that every choice for the rock is tried on request only: depthstress run --spread.");
         var model = content.Model;
-        SpreadEvidence Evidence(ChoiceSpread s) => SpreadEvidence.Of(model, content.Comparisons, content.Core, s.Zone);
-        static NumberCells<ChoiceSpread>[] Range(string title, string id, Func<ChoiceSpread, SpreadRange> range) =>
+        var table = new PageTable<(ChoiceSpread Choice, SpreadEvidence Evidence)>("spread", "Spread: mean Shmin over every admissible choice for the rock",
         [
-            new($"{title}, lowest", $"{id}_lowest", Stress, s => range(s).Low), new($"{title}, highest", $"{id}_highest", Stress, s => range(s).High),
-        ];
-        var table = new PageTable<ChoiceSpread>("spread", "Spread: mean Shmin over every admissible choice for the rock",
-        [
-            new WordCells<ChoiceSpread>("Zone", "zone", s => model.ZoneTitle(s.Zone)),
-            new NumberCells<ChoiceSpread>("Shmin", "shmin", Stress, s => s.Chosen),
+            new WordCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Zone", "zone", s => model.ZoneTitle(s.Choice.Zone)),
+            new NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Shmin", "shmin", Stress, s => s.Choice.Chosen),
             .. Range("Every choice", "every_choice", s => s.All),
             .. Range("E static alone", "youngs_static", s => s.ByYoungs),
             .. Range("nu static alone", "poisson_static", s => s.ByPoisson),
             .. Range("Biot alone", "biot", s => s.ByBiot),
-            new WordCells<ChoiceSpread>("Moves it most", "dominant", s => s.Trials.Count > 1 ? s.Dominant : ""),
-            new NumberCells<ChoiceSpread>("Tests less model", "tests_less_model", Stress, s => Evidence(s).TestMiss),
-            new NumberCells<ChoiceSpread>("Tests", "tests", ColumnUnits.Counts, s => Evidence(s).Tests),
-            new NumberCells<ChoiceSpread>("Plug E over model", "plug_modulus_ratio", (new(Units.One, 2), new(Units.One, 2)), s => Evidence(s).ModulusRatio),
-            new NumberCells<ChoiceSpread>("Plugs", "plugs", ColumnUnits.Counts, s => Evidence(s).Plugs),
-        ]).Write(spreads, units, "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
+            new WordCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Moves it most", "dominant", s => s.Choice.Trials.Count > 1 ? s.Choice.Dominant : ""),
+            new NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Tests less model", "tests_less_model", Stress, s => s.Evidence.TestMiss),
+            new NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Tests", "tests", ColumnUnits.Counts, s => s.Evidence.Tests),
+            new NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Plug E over model", "plug_modulus_ratio", (new(Units.One, 2), new(Units.One, 2)), s => s.Evidence.ModulusRatio),
+            new NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>("Plugs", "plugs", ColumnUnits.Counts, s => s.Evidence.Plugs),
+        ]).Write(
+            [.. spreads.Select(s => (s, SpreadEvidence.Of(model, content.Comparisons, content.Core, s.Zone)))], units,
+            "No zone has a Shmin by elastic rock, so no choice for the rock can spread it.");
         return spreads.Count > 0 ? table + Html.Paragraph(SpreadNote, "small") : table;
+
+        static NumberCells<(ChoiceSpread Choice, SpreadEvidence Evidence)>[] Range(string title, string id, Func<ChoiceSpread, SpreadRange> range) =>
+        [
+            new($"{title}, lowest", $"{id}_lowest", Stress, s => range(s.Choice).Low), new($"{title}, highest", $"{id}_highest", Stress, s => range(s.Choice).High),
+        ];
     }
 
     /// <summary>What the program's own finite elements find in the exported layers, beside the profile at log scale.</summary>
     public static string Solved(ClosedLoop loop, UnitSystem units)
     {
         static (ColumnUnit Metric, ColumnUnit Field) Fine() => (new(Units.Megapascal, 3), new(Units.Psi, 1));
-        static NumberCells<LoopLayer>[] Pair(string symbol, Property property, Func<LoopLayer, double> difference) =>
+        static NumberCells<LoopLayer>[] Pair(string symbol, string id, Property property, Func<LoopLayer, double> difference) =>
         [
-            new($"{symbol}, profile", $"{property.ToString().ToLowerInvariant()}_profile", Stress, l => l.Layer.Profile(property).Mean),
-            new($"{symbol}, solved less profile", $"{property.ToString().ToLowerInvariant()}_difference", Fine(), difference),
+            new($"{symbol}, profile", $"{id}_profile", Stress, l => l.Layer.Profile(property).Mean),
+            new($"{symbol}, solved less profile", $"{id}_difference", Fine(), difference),
         ];
         return new PageTable<LoopLayer>("solved", "Layers solved: means over each layer beside the profile at log scale",
         [
             new NumberCells<LoopLayer>("Layer", "layer", ColumnUnits.Counts, l => l.Layer.Number),
             new WordCells<LoopLayer>("Zone", "zone", l => l.Layer.Zone),
-            .. Pair("Sv", Property.VerticalStress, l => l.Vertical),
-            .. Pair("Shmin", Property.MinHorizontalStress, l => l.Shmin),
-            .. Pair("SHmax", Property.MaxHorizontalStress, l => l.Shmax),
+            .. Pair("Sv", "sv", Property.VerticalStress, l => l.Vertical),
+            .. Pair("Shmin", "shmin", Property.MinHorizontalStress, l => l.Shmin),
+            .. Pair("SHmax", "shmax", Property.MaxHorizontalStress, l => l.Shmax),
             new NumberCells<LoopLayer>("Shmin off a straight line, mean", "shmin_misfit_mean", Stress, l => l.Layer.Misfit(Property.MinHorizontalStress).Mean),
             new NumberCells<LoopLayer>("Shmin off a straight line, greatest", "shmin_misfit_greatest", Stress, l => l.Layer.Misfit(Property.MinHorizontalStress).Greatest),
             new NumberCells<LoopLayer>("Missing", "share_missing", Percent, l => l.Layer.Missing),

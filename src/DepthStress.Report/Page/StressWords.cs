@@ -42,16 +42,12 @@ internal static class StressWords
     private static string Regimes(EarthModel model)
     {
         var column = DepthColumns.All.OfType<TextColumn<EarthModel>>().First(c => c.Id == "regime");
-        var counts = new Dictionary<string, int>(StringComparer.Ordinal);
-        var words = new string[Math.Min(Chunk, model.Count)];
-        for (var start = 0; start < model.Count; start += Chunk)
+        var (start, counts) = (0, new Dictionary<string, int>(StringComparer.Ordinal));
+        var runs = WordRuns.Of(model, column, new Bins(model.Count, 1));
+        foreach (var (end, number) in runs.Runs)
         {
-            var chunk = words.AsSpan(0, Math.Min(Chunk, model.Count - start));
-            column.Read(model, start, chunk);
-            foreach (var word in chunk)
-            {
-                if (word.Length > 0) counts[word] = counts.GetValueOrDefault(word) + 1;
-            }
+            if (runs.Words[number] is { Length: > 0 } word) counts[word] = counts.GetValueOrDefault(word) + end - start;
+            start = end;
         }
 
         var total = counts.Values.Sum();

@@ -119,6 +119,33 @@ public sealed class BoundedFitProperties
         var fit = BoundedFit.Solve(problem);
         var breach = Breach(problem, fit);
         Assert.True(fit.Converged && breach < (oneSided ? 3e-5 : 1e-6), FormattableString.Invariant($"converged {fit.Converged}, breach {breach}, steps {fit.Iterations}, chi-square {fit.ChiSquare}"));
+        Assert.InRange(LowestAlong(problem, fit), fit.ChiSquare - (1e-8 * (1 + fit.ChiSquare)), double.MaxValue);
+    }
+
+    /// <summary>
+    /// The least sum of squares from the estimate along each parameter, all the way to its bounds. The sum is convex, so this holds for
+    /// what the conditions pass over too: a parameter that is hardly felt hides nothing.
+    /// </summary>
+    private static double LowestAlong(FitProblem problem, FitResult fit)
+    {
+        var (at, residuals, least) = (fit.Estimates.ToArray(), new double[problem.Count], double.MaxValue);
+        for (var j = 0; j < at.Length; j++)
+        {
+            var keep = at[j];
+            foreach (var bound in (double[])[problem.Parameters[j].Lower, problem.Parameters[j].Upper])
+            {
+                for (var share = 1.0; share > 1e-9; share /= 4)
+                {
+                    at[j] = keep + (share * (bound - keep));
+                    problem.Residuals(at, residuals);
+                    least = Math.Min(least, residuals.Sum(r => r * r));
+                }
+            }
+
+            at[j] = keep;
+        }
+
+        return least;
     }
 
     [Fact]
